@@ -1,0 +1,81 @@
+/** What a notebook answers: the same from the page, the server and the command line. SI only. */
+import type { CellKind } from "./document";
+
+export type NoteLevel = "remark" | "caution" | "fault";
+export type CellStatus = "fine" | "caution" | "fault";
+
+/** Half-open span of UTF-16 offsets in the text of one cell. */
+export interface TextRange {
+  from: number;
+  to: number;
+}
+
+export interface Note {
+  level: NoteLevel;
+  /** Stable, snake_case. */
+  code: string;
+  /** Names the thing, the reason and the remedy, in plain words. */
+  message: string;
+  /** Key of the entry it speaks of. */
+  entry?: string;
+  /** From 1, in the cell's text. */
+  line?: number;
+  range?: TextRange;
+  /** A change that is sure to be meant. */
+  remedy?: { label: string; range: TextRange; replacement: string };
+}
+
+export interface ResultValue {
+  /** null where the magnitude is below 1e-300 and its `log10_…` twin carries it; a string for a choice. */
+  value: number | string | null;
+  /** SI, such as "m^-2 s^-1"; "1" for a pure number; absent for a choice. */
+  unit?: string;
+}
+
+export type ResultRow = Record<string, number | string | null>;
+
+export interface CellResult {
+  kind: CellKind;
+  name: string;
+  status: CellStatus;
+  values: Record<string, ResultValue>;
+  tables: Record<string, ResultRow[]>;
+  /** Columns of equal length against `altitude`. */
+  profiles?: Record<string, number[]>;
+  notes: Note[];
+}
+
+export interface ResultDocument {
+  engine: string;
+  title: string;
+  cells: CellResult[];
+}
+
+/** What was understood of an entry, said only where it adds something to what is written. */
+export interface Understood {
+  entry: string;
+  /** Line on which the entry ends, from 1. */
+  line: number;
+  /** Where the expression ends, before any remark. */
+  offset: number;
+  text: string;
+}
+
+/** One cell as the page needs it: its result and how its text was read. */
+export interface CellEvaluation {
+  id: string;
+  result: CellResult;
+  understood: Understood[];
+  /** Entries left out that act: `criterion = bulk`. */
+  defaults: { key: string; text: string }[];
+  /** Names of the cells above that this one uses. */
+  uses: string[];
+  /** Gases in the order written, for a column or an escape cell. */
+  gases: string[];
+}
+
+export interface Evaluation {
+  engine: string;
+  title: string;
+  cells: CellEvaluation[];
+}

@@ -1,0 +1,133 @@
+/** Shapes that the physics core takes and gives. A bare number is SI. */
+
+/** A remark, caution or fault that a model attaches to its result. */
+export interface PhysicsNote {
+  level: "remark" | "caution" | "fault";
+  /** Stable, snake_case; one code per cause. */
+  code: string;
+  /** Plain words with the numbers behind them: what, why, what to do. */
+  message: string;
+}
+
+/** T(z); see `temperatureAt`. Altitudes in m above the body's radius, temperatures in K. */
+export type TemperatureProfile =
+  | { kind: "constant"; temperature: number }
+  | { kind: "bates"; base: number; exosphere: number; shape: number; referenceAltitude: number }
+  | { kind: "points"; altitudes: Float64Array; temperatures: Float64Array };
+
+/** K(z), m² s⁻¹. `power` is K₀ (n₀/n)^exponent up to the ceiling, n₀ the total density at the base. */
+export type EddyProfile =
+  | { kind: "none" }
+  | { kind: "constant"; coefficient: number }
+  | { kind: "power"; base: number; exponent: number; ceiling: number | null }
+  | { kind: "points"; altitudes: Float64Array; coefficients: Float64Array };
+
+/** One gas of a column. Mass of one particle in kg; diameter in m (σ = πd²). */
+export interface ColumnGas {
+  formula: string;
+  mass: number;
+  collisionDiameter: number;
+  thermalDiffusionFactor: number;
+  moleFraction: number;
+}
+
+/** b(T) = A (T/1 K)^s, in m⁻¹ s⁻¹. */
+export interface CollisionParameter {
+  coefficient: number;
+  exponent: number;
+  /** A key of `references`, or "given" where the notebook states it. */
+  source: string;
+  isEstimate: boolean;
+}
+
+export interface ColumnInput {
+  /** GM, m³ s⁻². */
+  gravitationalParameter: number;
+  /** Radius that altitudes count from, m. */
+  radius: number;
+  /** Where given, the centrifugal term is taken off gravity in the column. */
+  centrifugal: { angularSpeed: number; latitude: number } | null;
+  baseAltitude: number;
+  /** Total number density at the base, m⁻³. */
+  baseNumberDensity: number;
+  gases: readonly ColumnGas[];
+  /** Symmetric, S × S; the diagonal is not read. */
+  collisionParameters: readonly (readonly CollisionParameter[])[];
+  temperature: TemperatureProfile;
+  eddy: EddyProfile;
+  top: number | "auto";
+}
+
+/** The gas at one altitude. Arrays run over the gases in the order of the input. */
+export interface ColumnLevel {
+  altitude: number;
+  radius: number;
+  temperature: number;
+  pressure: number;
+  numberDensity: number;
+  massDensity: number;
+  /** kg */
+  meanMass: number;
+  /** m s⁻², the centrifugal term included where it was asked for */
+  gravity: number;
+  scaleHeight: number;
+  meanFreePath: number;
+  knudsen: number;
+  eddyCoefficient: number;
+  moleFractions: Float64Array;
+  numberDensities: Float64Array;
+  scaleHeights: Float64Array;
+}
+
+/** The same as columns; `gases[i]` belongs to the i-th gas. */
+export interface ColumnProfiles {
+  altitude: Float64Array;
+  temperature: Float64Array;
+  pressure: Float64Array;
+  numberDensity: Float64Array;
+  massDensity: Float64Array;
+  meanMass: Float64Array;
+  gravity: Float64Array;
+  scaleHeight: Float64Array;
+  meanFreePath: Float64Array;
+  knudsen: Float64Array;
+  gases: { numberDensity: Float64Array; moleFraction: Float64Array; scaleHeight: Float64Array }[];
+}
+
+export type HomopauseOutcome =
+  | { found: true; altitude: number }
+  | { found: false; reason: "no_eddy_mixing" | "mixed_throughout" | "separated_throughout" | "single_gas" };
+
+export type ExobaseOutcome =
+  | {
+      found: true;
+      level: ColumnLevel;
+      /** Altitudes of Kn = 0.1 and Kn = 10 (bulk), null where the column ends before. */
+      lower: number | null;
+      upper: number | null;
+      /** Further upward crossings below the one chosen. */
+      otherAltitudes: number[];
+      notes: PhysicsNote[];
+    }
+  | {
+      found: false;
+      reason: "base_above_exobase" | "base_unbound" | "runaway" | "top_below_exobase";
+      message: string;
+      largestKnudsen: number;
+      altitudeOfLargest: number;
+    };
+
+/** A column that was marched up without flux (F = 0). */
+export interface Column {
+  input: ColumnInput;
+  topAltitude: number;
+  /** By the bulk criterion, l = H. */
+  exobase: ExobaseOutcome;
+  homopauses: HomopauseOutcome[];
+  levelAt(altitude: number): ColumnLevel;
+  /** Altitudes ascending, between base and top. */
+  profilesAt(altitudes: Float64Array): ColumnProfiles;
+  notes: PhysicsNote[];
+  /** Right-hand sides evaluated, for benchmarks. */
+  evaluations: number;
+}
