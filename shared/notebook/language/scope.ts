@@ -1,0 +1,16 @@
+import type { Quantity, Uncertainty } from "./quantity";
+
+/** A name that exists but has no value to give; the reason is a whole sentence. */
+export interface Unavailable {
+  unavailable: string;
+}
+
+/** What an expression may refer to: results of the cells above and `values` entries. Constants need no scope. */
+export interface Scope {
+  /** A string for a choice, such as a regime, or for the name of a cell. */
+  lookup(path: string): Quantity | Unavailable | string | undefined;
+  /** Every name that `lookup` knows, for suggestions. */
+  names(): readonly string[];
+  /** Where present, gives an uncertain entry its value in SI instead of the centre. `path` names it within its cell. */
+  draw?(path: string, uncertainty: Uncertainty): number;
+}
