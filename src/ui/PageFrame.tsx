@@ -1,5 +1,4 @@
 import { Link, NavLink } from "react-router-dom";
-import { CautionFooter } from "./CautionFooter";
 import { Mark } from "./Mark";
 import { Menu, MenuLink, MenuRule } from "./Menu";
 import { TextButton } from "./TextButton";
@@ -20,7 +19,7 @@ interface PageFrameProps {
   children: React.ReactNode;
 }
 
-/** Bar, page and foot. The notebook page has a bar of its own. */
+/** The bar over a `Page`. The notebook page has a bar of its own. */
 export function PageFrame({ places, person, personMenu, children }: PageFrameProps) {
   return (
     <div className="flex min-h-dvh flex-col">
@@ -64,10 +63,7 @@ export function PageFrame({ places, person, personMenu, children }: PageFramePro
           )}
         </div>
       </header>
-      <main id="page" tabIndex={-1} className="flex-1 outline-none">
-        {children}
-      </main>
-      <CautionFooter className="page-width pt-64 pb-64" />
+      {children}
     </div>
   );
 }
