@@ -120,6 +120,12 @@ export function displayScale(unit: string, system: UnitSystem, magnitude: number
 /** Altitudes and radii: km in both systems, whatever their size. */
 export const kilometreScale: DisplayScale = { factor: 1e-3, unit: "km" };
 
+/** The scale of a result by its name: altitudes and radii always in km, everything else by unit and size. */
+export function resultScale(name: string, unit: string, system: UnitSystem, magnitude: number): DisplayScale {
+  const isHeight = /(^|[._])(altitude|radius|lower|upper)$/.test(name);
+  return unit === "m" && isHeight ? kilometreScale : displayScale(unit, system, magnitude);
+}
+
 export interface Quantity {
   /** SI; null where only the logarithm is known. */
   value: number | null;
