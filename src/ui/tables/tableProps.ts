@@ -1,0 +1,44 @@
+import type { ReactNode } from "react";
+import type { CellResult, Note } from "../../../shared/notebook/result";
+import type { UnitSystem } from "../../lib/format";
+
+/** A note with the letter that marks its number, its line under the table and its line in the margin. */
+export interface LetteredNote {
+  note: Note;
+  /** null for remarks, which have none. */
+  letter: string | null;
+}
+
+export interface EscapeTableProps {
+  /** An escape cell. */
+  result: CellResult;
+  /** Its gases, in the order written. */
+  gases: readonly string[];
+  /** Gases of the column it rests on, so that colours and dashes agree with the figures. */
+  columnGases?: readonly string[];
+  unitSystem: UnitSystem;
+  /** Number of the table in the notebook, from 1. */
+  number: number;
+  /** After "Table 1."; the table has its own words where this is left out. */
+  caption?: ReactNode;
+  /** From `letterNotes`; those of this cell. */
+  notes?: readonly LetteredNote[];
+  /** Called with a note whose remedy the reader wants. */
+  onRemedy?: (note: Note) => void;
+}
+
+export interface ValueListProps {
+  result: CellResult;
+  unitSystem: UnitSystem;
+  /** Values to show, in this order; all that are known for the kind where left out. */
+  names?: readonly string[];
+}
+
+export interface LevelsTableProps {
+  /** A column cell whose `levels` table is shown. */
+  result: CellResult;
+  gases: readonly string[];
+  unitSystem: UnitSystem;
+  number: number;
+  caption?: ReactNode;
+}
