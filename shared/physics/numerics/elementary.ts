@@ -279,8 +279,10 @@ function sineOfQuarter(x: number, quarters: number): number {
   const turns = x * 0.6366197723675814 + rounder - rounder;
   const first = x - turns * quarterTurnHigh;
   const second = turns * quarterTurnMiddle;
-  const y = first - second;
-  const tail = first - y - second - turns * quarterTurnLow;
+  const difference = first - second;
+  const left = first - difference - second - turns * quarterTurnLow;
+  const y = difference + left;
+  const tail = difference - y + left;
   const quadrant = (turns + quarters) & 3;
   const value = quadrant % 2 === 0 ? sineKernel(y, tail) : cosineKernel(y, tail);
   return quadrant < 2 ? value : -value;
