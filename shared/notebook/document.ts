@@ -7,27 +7,40 @@ export type CellKind = (typeof cellKinds)[number];
 /** Bounds on a document, the same for the editor, the file, the API and the database. */
 export const documentLimits = {
   titleLength: 300,
+  nameLength: 64,
+  headlineItems: 3,
+  headlineLength: 200,
+  authors: 100,
+  authorLength: 200,
   cells: 500,
   cellLength: 1_000_000,
   documentLength: 4_000_000,
 } as const;
 
+/** Text on one line: no line ends, tabs or other control characters, which a title or a name has no use for. */
+function singleLine(longest: number) {
+  return z
+    .string()
+    .max(longest)
+    .refine((text) => !/\p{Cc}/u.test(text), "This must be one line, without control characters.");
+}
+
 export const cellSchema = z.object({
   /** Stable through edits and moves; never written in the file. */
   id: z.string().min(1).max(64),
   kind: z.enum(cellKinds),
-  name: z.string().max(64),
+  name: singleLine(documentLimits.nameLength),
   /** Entries, or Markdown for prose; kept exactly as typed. */
   text: z.string().max(documentLimits.cellLength),
 });
 
 export const notebookDocumentSchema = z.object({
   format: z.literal(1),
-  title: z.string().max(documentLimits.titleLength),
+  title: singleLine(documentLimits.titleLength),
   unitSystem: z.enum(["SI", "cgs"]),
   /** Up to three names of results, such as `leak.exobase.altitude`. */
-  headline: z.array(z.string().max(200)).max(3),
-  authors: z.array(z.string().max(200)).max(100),
+  headline: z.array(singleLine(documentLimits.headlineLength).min(1)).max(documentLimits.headlineItems),
+  authors: z.array(singleLine(documentLimits.authorLength).min(1)).max(documentLimits.authors),
   cells: z.array(cellSchema).max(documentLimits.cells),
 });
 
