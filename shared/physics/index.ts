@@ -3,9 +3,18 @@
 export * from "./types";
 export { PhysicsDomainError } from "./errors";
 export * from "./guards";
+export { references } from "./references";
+
 export type { PhysicalConstant } from "./constants/physicalConstant";
 export * from "./constants/codata2022";
 export * from "./constants/iau";
+
+export type { Provenance } from "./handbook/provenance";
+export { findBody, handbookBodies, type HandbookBody } from "./handbook/handbookBodies";
+export { findGas, handbookGases, type HandbookGas } from "./handbook/handbookGases";
+export { collisionRows, type CollisionRow } from "./handbook/collisionRows";
+export { collisionParameter } from "./handbook/collisionParameter";
+
 export {
   cosine,
   exponential,
@@ -17,3 +26,8 @@ export {
   powerOfTen,
   sine,
 } from "./numerics/elementary";
+export { cubicSlope, cubicValue, monotoneCubic, type MonotoneCubic } from "./numerics/monotoneCubic";
+
+export { temperatureAt } from "./temperature/temperatureAt";
+export { temperatureCurve, type TemperatureCurve } from "./temperature/temperatureCurve";
+export { logTemperatureSlope } from "./temperature/logTemperatureSlope";

@@ -1,0 +1,84 @@
+/**
+ * Every source by its key: what a row of the handbook, a constant or an `@source` line refers to.
+ */
+export const references: Readonly<Record<string, string>> = {
+  Archinal2018:
+    "B. A. Archinal et al. (2018), Report of the IAU Working Group on Cartographic Coordinates and Rotational Elements: 2015, Celest. Mech. Dyn. Astron. 130, 22.",
+  Atreya1986:
+    "S. K. Atreya (1986), Atmospheres and Ionospheres of the Outer Planets and their Satellites, Springer.",
+  BanksKockarts1973: "P. M. Banks and G. Kockarts (1973), Aeronomy, Part B, Academic Press.",
+  Bates1959:
+    "D. R. Bates (1959), Some problems concerning the terrestrial atmosphere above about the 100 km level, Proc. R. Soc. London A 253, 451–462.",
+  Brinkmann1970:
+    "R. T. Brinkmann (1970), Departures from Jeans' escape rate for H and He in the Earth's atmosphere, Planet. Space Sci. 18, 449–478.",
+  CatlingKasting2017:
+    "D. C. Catling and J. F. Kasting (2017), Atmospheric Evolution on Inhabited and Lifeless Worlds, Cambridge University Press.",
+  ChamberlainCampbell1967:
+    "J. W. Chamberlain and F. J. Campbell (1967), Rate of evaporation of a non-Maxwellian atmosphere, Astrophys. J. 149, 687–705.",
+  ChamberlainHunten1987:
+    "J. W. Chamberlain and D. M. Hunten (1987), Theory of Planetary Atmospheres, 2nd edition, Academic Press.",
+  CODATA2022:
+    "E. Tiesinga, P. J. Mohr, D. B. Newell and B. N. Taylor (2024), The 2022 CODATA Recommended Values of the Fundamental Physical Constants (Web Version 9.0), National Institute of Standards and Technology.",
+  CRCDiffusion:
+    "CRC Handbook of Chemistry and Physics, table Diffusion in Gases, after Marrero and Mason (1972).",
+  Dekker1971:
+    "T. J. Dekker (1971), A floating-point technique for extending the available precision, Numer. Math. 18, 224–242.",
+  Erkaev2007:
+    "N. V. Erkaev, Yu. N. Kulikov, H. Lammer, F. Selsis, D. Langmayr, G. F. Jaritz and H. K. Biernat (2007), Roche lobe effects on the atmospheric loss from “Hot Jupiters”, Astron. Astrophys. 472, 329–334.",
+  FahrShizgal1983:
+    "H. J. Fahr and B. Shizgal (1983), Modern exospheric theories and their observational relevance, Rev. Geophys. Space Phys. 21, 75–124.",
+  FritschCarlson1980:
+    "F. N. Fritsch and R. E. Carlson (1980), Monotone piecewise cubic interpolation, SIAM J. Numer. Anal. 17, 238–246.",
+  GRIMech3:
+    "G. P. Smith et al. (1999), GRI-Mech 3.0, Gas Research Institute; Lennard-Jones parameters of its transport data.",
+  HamiltonBurns1992:
+    "D. P. Hamilton and J. A. Burns (1992), Orbital stability zones about asteroids. II. The destabilizing effects of eccentric orbits and of solar radiation, Icarus 96, 43–64.",
+  Hu2015:
+    "R. Hu, S. Seager and Y. L. Yung (2015), Helium atmospheres on warm Neptune- and sub-Neptune-sized exoplanets and applications to GJ 436b, Astrophys. J. 807, 8.",
+  Hunten1973:
+    "D. M. Hunten (1973), The escape of light gases from planetary atmospheres, J. Atmos. Sci. 30, 1481–1494.",
+  IAU1976:
+    "International Astronomical Union (1976), System of Astronomical Constants: the Julian century of 36,525 days of 86,400 s.",
+  IAU2012B2:
+    "International Astronomical Union (2012), Resolution B2 on the re-definition of the astronomical unit of length.",
+  IAU2015B3:
+    "International Astronomical Union (2015), Resolution B3 on recommended nominal conversion constants for selected solar and planetary properties.",
+  Jeans1925: "J. H. Jeans (1925), The Dynamical Theory of Gases, 4th edition, Cambridge University Press.",
+  JPLElements:
+    "E. M. Standish and J. G. Williams, Keplerian elements for approximate positions of the major planets (J2000), Jet Propulsion Laboratory.",
+  JPLSatellites: "Planetary satellite mean elements, Jet Propulsion Laboratory, Solar System Dynamics.",
+  MarreroMason1972:
+    "T. R. Marrero and E. A. Mason (1972), Gaseous diffusion coefficients, J. Phys. Chem. Ref. Data 1, 3–118.",
+  MasonMarrero1970:
+    "E. A. Mason and T. R. Marrero (1970), The diffusion of atoms and molecules, Adv. At. Mol. Phys. 6, 155–232.",
+  Meija2016:
+    "J. Meija et al. (2016), Atomic weights of the elements 2013 (IUPAC Technical Report), Pure Appl. Chem. 88, 265–291: conventional atomic weights.",
+  Minzner1976:
+    "R. A. Minzner et al. (1976), Defining constants, equations, and abbreviated tables of the 1975 U.S. Standard Atmosphere, NASA TR R-459.",
+  Moses2000:
+    "J. I. Moses, B. Bézard, E. Lellouch, G. R. Gladstone, H. Feuchtgruber and M. Allen (2000), Photochemistry of Saturn's atmosphere. I, Icarus 143, 244–298.",
+  NaifGM:
+    "NASA Navigation and Ancillary Information Facility, text kernel gm_de440: gravitational parameters.",
+  NaifPCK: "NASA Navigation and Ancillary Information Facility, text kernels pck00010 and pck00011: radii.",
+  NSSDC: "D. R. Williams, Planetary Fact Sheets, NASA Space Science Data Coordinated Archive.",
+  Opik1963: "E. J. Öpik (1963), Selective escape of gases, Geophys. J. R. Astron. Soc. 7, 490–509.",
+  Parker1958:
+    "E. N. Parker (1958), Dynamics of the interplanetary gas and magnetic fields, Astrophys. J. 128, 664–676.",
+  Pavlov2019:
+    "A. V. Pavlov (2019), Surv. Geophys.: table of binary diffusion coefficients after Mason and Marrero (1970).",
+  Poling2001:
+    "B. E. Poling, J. M. Prausnitz and J. P. O'Connell (2001), The Properties of Gases and Liquids, 5th edition, McGraw-Hill, Appendix B.",
+  Prohaska2022:
+    "T. Prohaska et al. (2022), Standard atomic weights of the elements 2021 (IUPAC Technical Report), Pure Appl. Chem. 94, 573–600.",
+  Tang1989:
+    "P. T. P. Tang (1989), Table-driven implementation of the exponential function in IEEE floating-point arithmetic, ACM Trans. Math. Softw. 15, 144–157.",
+  Tang1990:
+    "P. T. P. Tang (1990), Table-driven implementation of the logarithm function in IEEE floating-point arithmetic, ACM Trans. Math. Softw. 16, 378–400.",
+  USSA1976: "NOAA, NASA and USAF (1976), U.S. Standard Atmosphere, 1976, NOAA-S/T 76-1562.",
+  Volkov2011:
+    "A. N. Volkov, R. E. Johnson, O. J. Tucker and J. T. Erwin (2011), Thermally driven atmospheric escape: transition from hydrodynamic to Jeans escape, Astrophys. J. Lett. 729, L24.",
+  Wang2012:
+    "M. Wang, G. Audi, A. H. Wapstra, F. G. Kondev, M. MacCormick, X. Xu and B. Pfeiffer (2012), The AME2012 atomic mass evaluation (II), Chin. Phys. C 36, 1603–2014.",
+  ZahnleKasting1986:
+    "K. J. Zahnle and J. F. Kasting (1986), Mass fractionation during transonic escape and implications for loss of water from Mars and Venus, Icarus 68, 462–480.",
+};
