@@ -1,0 +1,79 @@
+import type { Strip } from "../../../shared/notebook/summary";
+import {
+  formatFixed,
+  formatKilometres,
+  formatNumber,
+  formatPercent,
+  formatQuantity,
+  quantityText,
+  thinSpace,
+  type UnitSystem,
+} from "../../lib/format";
+import { plainText } from "../../lib/richText";
+import { leadingGas, sampleStrip } from "./stripSample";
+
+const altitudeText = (metres: number): string => `${formatKilometres(metres)}${thinSpace}km`;
+
+/** The strip in one line, for those who do not see it. */
+export function stripLabel(strip: Strip): string {
+  const exobase = strip.exobase === null ? "no exobase" : `exobase at ${altitudeText(strip.exobase)}`;
+  return `Altitude strip of ${strip.column}: base at ${altitudeText(strip.base)}, ${exobase}`;
+}
+
+/** Every mark of the strip as a sentence, from the base up. */
+export function stripSentences(strip: Strip): string[] {
+  const marks: [altitude: number, sentence: string][] = strip.homopauses.map(({ gas, altitude }) => [
+    altitude,
+    `${gas} parts from the mixture at its homopause, ${altitudeText(altitude)}.`,
+  ]);
+  marks.push([strip.base, `The column begins at its base, ${altitudeText(strip.base)}.`]);
+  if (strip.lower !== null)
+    marks.push([strip.lower, `The Knudsen number is 0.1 at ${altitudeText(strip.lower)}.`]);
+  if (strip.exobase !== null) {
+    const { temperature } = sampleStrip(strip, strip.exobase);
+    const warmth = `${formatFixed(temperature)}${thinSpace}K`;
+    marks.push([strip.exobase, `The exobase is at ${altitudeText(strip.exobase)}, where it is ${warmth}.`]);
+  }
+  if (strip.upper !== null)
+    marks.push([strip.upper, `The Knudsen number is 10 at ${altitudeText(strip.upper)}.`]);
+  const end = strip.exobase === null ? "There is no exobase below" : "The strip ends at";
+  marks.push([strip.top, `${end} ${altitudeText(strip.top)}.`]);
+  return marks.sort(([a], [b]) => a - b).map(([, sentence]) => sentence);
+}
+
+/** What the strip reads at one altitude. */
+export interface StripReading {
+  altitude: string;
+  temperature: string;
+  density: ReturnType<typeof formatQuantity>;
+  gas: string;
+  share: string;
+  knudsen: ReturnType<typeof formatNumber>;
+  /** All of it in one line, to be heard. */
+  spoken: string;
+}
+
+export function readStrip(strip: Strip, altitude: number, unitSystem: UnitSystem): StripReading {
+  const sample = sampleStrip(strip, altitude);
+  const leader = leadingGas(sample);
+  const density = formatQuantity({ value: 10 ** sample.log10NumberDensity, unit: "m^-3" }, unitSystem, {
+    digits: 2,
+  });
+  const knudsen = formatNumber(10 ** sample.log10Knudsen, 2);
+  const reading = {
+    altitude: altitudeText(altitude),
+    temperature: `${formatFixed(sample.temperature)}${thinSpace}K`,
+    density,
+    gas: strip.gases[leader] ?? "",
+    share: plainText(formatPercent(sample.moleFractions[leader] ?? 0)),
+    knudsen,
+  };
+  const spoken = [
+    reading.altitude,
+    reading.temperature,
+    quantityText(density),
+    `mostly ${reading.gas}, ${reading.share}`,
+    `Knudsen number ${plainText(knudsen)}`,
+  ].join(", ");
+  return { ...reading, spoken };
+}
