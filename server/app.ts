@@ -1,0 +1,69 @@
+import express, { type Express } from "express";
+import type { Logger } from "pino";
+import type { Auth } from "./auth/auth";
+import type { Db } from "./db/client";
+import { notFound } from "./errors";
+import type { Evaluator } from "./jobs/evaluator";
+import type { Summaries } from "./jobs/summaries";
+import { clientFiles } from "./middleware/clientFiles";
+import { errorHandler } from "./middleware/errorHandler";
+import { rateLimits, usualTries, type Tries } from "./middleware/rateLimits";
+import { requestLog } from "./middleware/requestLog";
+import { sameOrigin } from "./middleware/sameOrigin";
+import { securityHeaders } from "./middleware/securityHeaders";
+import { session } from "./middleware/session";
+import { accountRoutes } from "./routes/accountRoutes";
+import { groupRoutes } from "./routes/groupRoutes";
+import { healthRoutes } from "./routes/healthRoutes";
+import { notebookRoutes } from "./routes/notebookRoutes";
+import { sessionRoutes } from "./routes/sessionRoutes";
+import { versionRoutes } from "./routes/versionRoutes";
+
+export interface AppParts {
+  db: Db;
+  auth: Auth;
+  evaluator: Evaluator;
+  summaries: Summaries;
+  logger: Logger;
+  demo: boolean;
+  /** Public origin, where it is not the address that requests name. */
+  origin?: string | undefined;
+  proxies?: number;
+  /** Folder of the built page; left out, only the API is served. */
+  clientFolder?: string | undefined;
+  tries?: Tries;
+}
+
+/** The whole server but its listening: what every request passes, the routes, the page, the answer to failures. */
+export function createApp(parts: AppParts): Express {
+  const { db, auth, evaluator, summaries, logger, demo, origin, proxies = 0, clientFolder } = parts;
+  const limits = rateLimits(parts.tries ?? usualTries);
+  const app = express();
+  app.disable("x-powered-by");
+  app.set("trust proxy", proxies);
+  app.use(requestLog(logger), securityHeaders({ isHttps: origin?.startsWith("https:") ?? false }));
+  app.use(healthRoutes({ db }));
+
+  const api = express.Router();
+  api.use((_req, res, next) => {
+    res.set("Cache-Control", "no-store");
+    next();
+  });
+  api.use(sameOrigin(origin), express.json({ limit: "8mb" }), session(auth));
+  api.use(sessionRoutes({ db, auth, demo, signInLimits: limits.signIn }));
+  api.use(accountRoutes({ db, auth, demo, signUpLimits: limits.signUp }));
+  api.use(groupRoutes({ db }));
+  api.use(notebookRoutes({ db, summaries }));
+  api.use(versionRoutes({ db, evaluator, summaries }));
+  api.use(() => {
+    throw notFound("address");
+  });
+  app.use("/api", api);
+
+  if (clientFolder) app.use(clientFiles(clientFolder));
+  app.use(() => {
+    throw notFound("page");
+  });
+  app.use(errorHandler);
+  return app;
+}

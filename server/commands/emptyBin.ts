@@ -1,0 +1,13 @@
+import { lt } from "drizzle-orm";
+import type { Db } from "../db/client";
+import { notebooks } from "../db/tables/notebooks";
+
+/** Days that a deleted notebook can be taken back. */
+export const binDays = 30;
+
+/** Removes for good, with their versions, the notebooks whose days in the bin are over. Answers how many. */
+export async function emptyBin(db: Db, { at }: { at: Date }): Promise<number> {
+  const before = new Date(at.getTime() - binDays * 86_400_000);
+  const gone = await db.delete(notebooks).where(lt(notebooks.deletedAt, before)).returning({ id: notebooks.id });
+  return gone.length;
+}

@@ -1,0 +1,10 @@
+/** Entry of the worker thread: a document in, what the server keeps of its evaluation out. */
+import { parentPort } from "node:worker_threads";
+import type { NotebookDocument } from "../../shared/notebook/document";
+import type { EvaluationAnswer } from "./evaluator";
+import { evaluateDocument } from "./evaluateDocument";
+
+parentPort?.on("message", (document: NotebookDocument) => {
+  const answer: EvaluationAnswer = { ok: true, outcome: evaluateDocument(document) };
+  parentPort?.postMessage(answer);
+});
