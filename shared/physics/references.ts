@@ -25,8 +25,6 @@ export const references: Readonly<Record<string, string>> = {
     "T. J. Dekker (1971), A floating-point technique for extending the available precision, Numer. Math. 18, 224–242.",
   Erkaev2007:
     "N. V. Erkaev, Yu. N. Kulikov, H. Lammer, F. Selsis, D. Langmayr, G. F. Jaritz and H. K. Biernat (2007), Roche lobe effects on the atmospheric loss from “Hot Jupiters”, Astron. Astrophys. 472, 329–334.",
-  FahrShizgal1983:
-    "H. J. Fahr and B. Shizgal (1983), Modern exospheric theories and their observational relevance, Rev. Geophys. Space Phys. 21, 75–124.",
   FritschCarlson1980:
     "F. N. Fritsch and R. E. Carlson (1980), Monotone piecewise cubic interpolation, SIAM J. Numer. Anal. 17, 238–246.",
   GRIMech3:
@@ -70,10 +68,14 @@ export const references: Readonly<Record<string, string>> = {
     "B. E. Poling, J. M. Prausnitz and J. P. O'Connell (2001), The Properties of Gases and Liquids, 5th edition, McGraw-Hill, Appendix B.",
   Prohaska2022:
     "T. Prohaska et al. (2022), Standard atomic weights of the elements 2021 (IUPAC Technical Report), Pure Appl. Chem. 94, 573–600.",
+  ShizgalArkos1996:
+    "B. D. Shizgal and G. G. Arkos (1996), Nonthermal escape of the atmospheres of Venus, Earth, and Mars, Rev. Geophys. 34, 483–505.",
   Tang1989:
     "P. T. P. Tang (1989), Table-driven implementation of the exponential function in IEEE floating-point arithmetic, ACM Trans. Math. Softw. 15, 144–157.",
   Tang1990:
     "P. T. P. Tang (1990), Table-driven implementation of the logarithm function in IEEE floating-point arithmetic, ACM Trans. Math. Softw. 16, 378–400.",
+  Tucker2012:
+    "O. J. Tucker, J. T. Erwin, J. I. Deighan, A. N. Volkov and R. E. Johnson (2012), Thermally driven escape from Pluto's atmosphere: a combined fluid/kinetic model, Icarus 217, 408–415.",
   USSA1976: "NOAA, NASA and USAF (1976), U.S. Standard Atmosphere, 1976, NOAA-S/T 76-1562.",
   Volkov2011:
     "A. N. Volkov, R. E. Johnson, O. J. Tucker and J. T. Erwin (2011), Thermally driven atmospheric escape: transition from hydrodynamic to Jeans escape, Astrophys. J. Lett. 729, L24.",

@@ -76,6 +76,8 @@ export interface ColumnLevel {
   eddyCoefficient: number;
   moleFractions: Float64Array;
   numberDensities: Float64Array;
+  /** ln(nᵢ/1 m⁻³): holds what is too small for a number. */
+  logNumberDensities: Float64Array;
   scaleHeights: Float64Array;
 }
 
