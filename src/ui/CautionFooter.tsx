@@ -10,7 +10,9 @@ interface CautionFooterProps {
 export function CautionFooter({ className = "", maxWidth }: CautionFooterProps) {
   return (
     <footer className={className} style={{ maxWidth }}>
-      <p className="max-w-[646px] border-t border-rule pt-16 font-sans text-[13px]/[19px] text-ink3">{cautionText}</p>
+      <p className="max-w-[646px] border-t border-rule pt-16 font-sans text-[13px]/[19px] text-ink3">
+        {cautionText}
+      </p>
     </footer>
   );
 }

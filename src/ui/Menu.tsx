@@ -53,7 +53,15 @@ export function MenuItem({ children, onSelect, disabled, tone = "ink" }: MenuIte
 }
 
 /** A page to go to, or a file to take, from a menu. */
-export function MenuLink({ to, children, download }: { to: string; children: React.ReactNode; download?: boolean }) {
+export function MenuLink({
+  to,
+  children,
+  download,
+}: {
+  to: string;
+  children: React.ReactNode;
+  download?: boolean;
+}) {
   return (
     <DropdownMenu.Item className={item} asChild>
       {download ? (

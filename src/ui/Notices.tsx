@@ -32,7 +32,10 @@ export function NoticesProvider({ children }: { children: React.ReactNode }) {
   const [notices, setNotices] = useState<ShownNotice[]>([]);
   const nextId = useRef(0);
 
-  const dismiss = useCallback((id: number) => setNotices((shown) => shown.filter((notice) => notice.id !== id)), []);
+  const dismiss = useCallback(
+    (id: number) => setNotices((shown) => shown.filter((notice) => notice.id !== id)),
+    [],
+  );
   const notify = useCallback<Notify>((notice) => {
     const id = nextId.current++;
     setNotices((shown) => [...shown.slice(-3), { ...notice, id }]);
@@ -94,7 +97,11 @@ function NoticeLine({ notice, onDismiss }: { notice: ShownNotice; onDismiss: (id
           {notice.action.label}
         </TextButton>
       )}
-      <TextButton className="text-ink3" onClick={() => onDismiss(notice.id)} aria-label={`Put away: ${notice.text}`}>
+      <TextButton
+        className="text-ink3"
+        onClick={() => onDismiss(notice.id)}
+        aria-label={`Put away: ${notice.text}`}
+      >
         close
       </TextButton>
     </div>

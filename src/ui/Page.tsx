@@ -21,7 +21,10 @@ export function Page({ title, width = 1244, children }: PageProps) {
       >
         {children}
       </main>
-      <CautionFooter className="mx-auto box-border w-full px-18 pt-64 pb-64 wide:px-28" maxWidth={width + 56} />
+      <CautionFooter
+        className="mx-auto box-border w-full px-18 pt-64 pb-64 wide:px-28"
+        maxWidth={width + 56}
+      />
     </>
   );
 }

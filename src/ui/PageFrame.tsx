@@ -33,7 +33,11 @@ export function PageFrame({ places, person, personMenu, children }: PageFramePro
         data-print="never"
         className="sticky top-0 z-20 flex h-(--bar-height) flex-none items-center gap-44 border-b border-rule bg-paper px-16 font-sans wide:pr-28 wide:pl-20"
       >
-        <Link to="/" aria-label="Tenuity, all notebooks" className="flex items-center gap-10 text-ink no-underline">
+        <Link
+          to="/"
+          aria-label="Tenuity, all notebooks"
+          className="flex items-center gap-10 text-ink no-underline"
+        >
           <Mark size={28} />
           <Wordmark size={25} />
         </Link>

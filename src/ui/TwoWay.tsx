@@ -27,7 +27,12 @@ export function TwoWay<Value extends string>({
 }: TwoWayProps<Value>) {
   const name = useId();
   return (
-    <span role="radiogroup" aria-label={label} className={`two-way ${className}`} data-quiet={quiet || undefined}>
+    <span
+      role="radiogroup"
+      aria-label={label}
+      className={`two-way ${className}`}
+      data-quiet={quiet || undefined}
+    >
       {options.map((option) => (
         <label key={option.value} className="two-way-word">
           <input

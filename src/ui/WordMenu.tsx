@@ -11,7 +11,13 @@ interface WordMenuProps<Value extends string> {
 }
 
 /** A word of a sentence that can be exchanged for another: how lists are filtered and roles are set. */
-export function WordMenu<Value extends string>({ label, value, options, onChange, disabled }: WordMenuProps<Value>) {
+export function WordMenu<Value extends string>({
+  label,
+  value,
+  options,
+  onChange,
+  disabled,
+}: WordMenuProps<Value>) {
   const current = options.find((option) => option.value === value)?.label ?? value;
   return (
     <Menu

@@ -1,0 +1,47 @@
+import { useEffect, useState } from "react";
+import { Field } from "../../ui/Field";
+
+interface SearchFieldProps {
+  value: string;
+  onChange: (value: string) => void;
+}
+
+/** How long typing must rest before the list is asked for, ms. */
+const rest = 220;
+
+/** Looks in titles and owners’ names, once typing rests. */
+export function SearchField({ value, onChange }: SearchFieldProps) {
+  const [text, setText] = useState(value);
+  const [shown, setShown] = useState(value);
+  if (value !== shown) {
+    // The address changed by other means, such as the back button.
+    setShown(value);
+    setText(value);
+  }
+
+  useEffect(
+    function askWhenAtRest() {
+      if (text === shown) return;
+      const timer = window.setTimeout(() => {
+        setShown(text);
+        onChange(text);
+      }, rest);
+      return () => window.clearTimeout(timer);
+    },
+    [text, shown, onChange],
+  );
+
+  return (
+    <Field
+      label="Search titles and owners"
+      labelHidden
+      type="search"
+      placeholder="Search titles and owners"
+      autoComplete="off"
+      maxLength={200}
+      value={text}
+      onChange={(event) => setText(event.target.value)}
+      wrapperClassName="min-w-0 flex-1 wide:w-340 wide:flex-none"
+    />
+  );
+}

@@ -1,0 +1,49 @@
+import { keepPreviousData, queryOptions, useMutation, useQueryClient } from "@tanstack/react-query";
+import { z } from "zod";
+import {
+  notebookListResponse,
+  type CreateNotebookBody,
+  type ImportNotebookBody,
+  type NotebookListQuery,
+} from "../../../shared/schemas/notebooks";
+import { api } from "../../lib/api";
+
+const listKey = ["notebooks"] as const;
+
+export const notebooksQuery = ({ q, order, place }: NotebookListQuery) =>
+  queryOptions({
+    queryKey: [...listKey, { q, order, place }],
+    queryFn: ({ signal }) =>
+      api.get(`/notebooks?${new URLSearchParams({ q, order, place }).toString()}`, notebookListResponse, {
+        signal,
+      }),
+    placeholderData: keepPreviousData,
+  });
+
+/** Of a notebook just made only the id is needed: its page asks for the rest. */
+const madeNotebook = z.object({ id: z.string() });
+
+function useListChange<Input, Answer>(change: (input: Input) => Promise<Answer>) {
+  const queryClient = useQueryClient();
+  return useMutation({
+    mutationFn: change,
+    onSettled: () => queryClient.invalidateQueries({ queryKey: listKey }),
+  });
+}
+
+export const useCreateNotebook = () =>
+  useListChange((body: CreateNotebookBody) => api.post("/notebooks", body, madeNotebook));
+
+export const useImportNotebook = () =>
+  useListChange((body: ImportNotebookBody) => api.post("/notebooks/import", body, madeNotebook));
+
+export const useRenameNotebook = () =>
+  useListChange(({ id, title }: { id: string; title: string }) =>
+    api.patch(`/notebooks/${id}`, { title }, z.unknown()),
+  );
+
+/** To the bin, from which it can be put back for 30 days. */
+export const useDeleteNotebook = () => useListChange((id: string) => api.delete(`/notebooks/${id}`));
+
+export const useRestoreNotebook = () =>
+  useListChange((id: string) => api.post(`/notebooks/${id}/restore-from-bin`, {}, z.unknown()));
