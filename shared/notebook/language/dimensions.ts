@@ -31,7 +31,11 @@ export const quantityKinds = {
   pressure: { dimension: [-1, 1, -2, 0, 0, 0], words: "a pressure", unit: "Pa" },
   diffusion: { dimension: [2, 0, -1, 0, 0, 0], words: "a diffusion coefficient", unit: "cm^2/s" },
   collision: { dimension: [-1, 0, -1, 0, 0, 0], words: "a collision parameter", unit: "/(cm s)" },
-  gravitationalParameter: { dimension: [3, 0, -2, 0, 0, 0], words: "a gravitational parameter", unit: "m^3/s^2" },
+  gravitationalParameter: {
+    dimension: [3, 0, -2, 0, 0, 0],
+    words: "a gravitational parameter",
+    unit: "m^3/s^2",
+  },
   particleFlux: { dimension: [-2, 0, -1, 0, 0, 0], words: "a particle flux", unit: "/(cm^2 s)" },
   energyFlux: { dimension: [0, 1, -3, 0, 0, 0], words: "an energy flux", unit: "W/m^2" },
   massRate: { dimension: [0, 1, -1, 0, 0, 0], words: "a mass rate", unit: "kg/s" },

@@ -1,0 +1,17 @@
+import { styleTags, tags } from "@lezer/highlight";
+
+/** What each part of a cell is to a highlighter. */
+export const cellHighlighting = styleTags({
+  "Key/...": tags.definition(tags.propertyName),
+  "ArgumentName/...": tags.attributeName,
+  "FunctionName/...": tags.function(tags.variableName),
+  "Name/...": tags.variableName,
+  "UnitName/...": tags.unit,
+  Number: tags.number,
+  "Between And Within Factor": tags.keyword,
+  "Plus Minus Times Over Per Caret Superscript": tags.arithmeticOperator,
+  "Open Close": tags.paren,
+  Comma: tags.separator,
+  Remark: tags.lineComment,
+  "DecimalComma DoubleStar String": tags.invalid,
+});

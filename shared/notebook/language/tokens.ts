@@ -1,0 +1,96 @@
+/** What the grammar can't say by itself: where an entry ends, and which slash belongs to a unit. */
+import { ContextTracker, ExternalTokenizer, type InputStream } from "@lezer/lr";
+import {
+  Close,
+  Comma,
+  Open,
+  Over,
+  Per,
+  Remark,
+  continuation,
+  newline,
+  space,
+} from "./cells.generated.terms.js";
+import { isReservedUnit } from "./units";
+
+interface EntryContext {
+  depth: number;
+  /** The last token was a comma or an opening bracket, so a named argument may follow. */
+  expectsItem: boolean;
+  lastIsComma: boolean;
+}
+
+const skipped = new Set([Remark, continuation, space]);
+const atStart: EntryContext = { depth: 0, expectsItem: false, lastIsComma: false };
+
+/** Open brackets and a comma at the end of a line: what decides whether the entry goes on. */
+export const entryContext = new ContextTracker<EntryContext>({
+  start: atStart,
+  shift(context, term) {
+    if (skipped.has(term)) return context;
+    if (term === newline) return atStart;
+    if (term === Open) return { depth: context.depth + 1, expectsItem: true, lastIsComma: false };
+    if (term === Comma) return { depth: context.depth, expectsItem: true, lastIsComma: true };
+    const depth = term === Close ? Math.max(0, context.depth - 1) : context.depth;
+    if (depth === context.depth && !context.expectsItem) return context;
+    return { depth, expectsItem: false, lastIsComma: false };
+  },
+  hash: ({ depth, expectsItem, lastIsComma }) => depth * 4 + (expectsItem ? 2 : 0) + (lastIsComma ? 1 : 0),
+});
+
+const isLineEnd = (code: number): boolean => code === 10 || code === 13 || code === 0x2028 || code === 0x2029;
+const isSpace = (code: number): boolean =>
+  code === 32 || code === 9 || code === 0xa0 || code === 0x2009 || code === 0x202f;
+const isNameCharacter = (code: number): boolean =>
+  (code >= 97 && code <= 122) ||
+  (code >= 65 && code <= 90) ||
+  (code >= 48 && code <= 57) ||
+  code === 95 ||
+  code === 0xb5 ||
+  code === 0x3bc ||
+  code === 0xc5;
+
+/** Whether `name =` stands at the offset: the beginning of an entry, or of a named argument. */
+function beginsEntry(input: InputStream, offset: number): boolean {
+  let at = offset;
+  while (isSpace(input.peek(at))) at += 1;
+  const nameStart = at;
+  while (isNameCharacter(input.peek(at))) at += 1;
+  if (at === nameStart) return false;
+  while (isSpace(input.peek(at))) at += 1;
+  return input.peek(at) === 61;
+}
+
+/** A line end closes the entry, unless a bracket is open or the line ends in a comma and no entry begins below. */
+export const lineEnds = new ExternalTokenizer((input, stack) => {
+  if (!isLineEnd(input.next)) return;
+  const length = input.next === 13 && input.peek(1) === 10 ? 2 : 1;
+  const { depth, expectsItem, lastIsComma } = stack.context as EntryContext;
+  const mayGoOn = depth > 0 || lastIsComma;
+  const named = mayGoOn && beginsEntry(input, length);
+  const goesOn = mayGoOn && (!named || (depth > 0 && expectsItem));
+  input.acceptToken(goesOn ? continuation : newline, length);
+});
+
+/** A slash followed by a unit, or by a bracket that begins with one, is the unit's. */
+export const slashes = new ExternalTokenizer((input) => {
+  if (input.next !== 47) return;
+  let at = 1;
+  while (isSpace(input.peek(at))) at += 1;
+  if (input.peek(at) === 40) {
+    at += 1;
+    while (isSpace(input.peek(at))) at += 1;
+  }
+  if (input.peek(at) === 37) {
+    input.acceptToken(Per, 1);
+    return;
+  }
+  let name = "";
+  while (name.length < 32 && isNameCharacter(input.peek(at))) {
+    name += String.fromCharCode(input.peek(at));
+    at += 1;
+  }
+  // `min(` is the function, `/min` the minute.
+  const isCall = input.peek(at) === 40;
+  input.acceptToken(!isCall && isReservedUnit(name) ? Per : Over, 1);
+});
