@@ -10,7 +10,7 @@ import { StripReadOut } from "./StripReadOut";
 import { scaleAboveBase, stripTicks } from "./stripScale";
 import { readStrip, stripLabel } from "./stripSentences";
 import { StripWords } from "./StripWords";
-import { useStripReading } from "./useStripReading";
+import { useAltitudeReading } from "./useAltitudeReading";
 
 const bandBreadth = 104;
 const width = 252;
@@ -43,7 +43,7 @@ export function AltitudeStrip({ strip, unitSystem }: AltitudeStripProps) {
     [strip, scale],
   );
   const y = (altitude: number) => height - scale.along(altitude);
-  const { reading, handlers } = useStripReading({
+  const { reading, handlers } = useAltitudeReading({
     scale,
     from: strip.base,
     to: strip.top,

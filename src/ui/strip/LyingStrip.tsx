@@ -9,7 +9,7 @@ import { StripReadOut } from "./StripReadOut";
 import { stripScale, stripTicks } from "./stripScale";
 import { readStrip, stripLabel } from "./stripSentences";
 import { StripWords } from "./StripWords";
-import { useStripReading } from "./useStripReading";
+import { useAltitudeReading } from "./useAltitudeReading";
 
 const breadth = 44;
 const height = 68;
@@ -22,7 +22,7 @@ export function LyingStrip({ strip, unitSystem }: AltitudeStripProps) {
   const scale = useMemo(() => stripScale(strip.base, strip.top, width), [strip, width]);
   const ticks = useMemo(() => stripTicks(scale, 64), [scale]);
   const x = (altitude: number) => scale.along(altitude);
-  const { reading, handlers } = useStripReading({
+  const { reading, handlers } = useAltitudeReading({
     scale,
     from: strip.base,
     to: strip.top,

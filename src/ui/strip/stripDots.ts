@@ -67,7 +67,7 @@ function throwDarts(length: number, width: number, closest: number): Candidate[]
   };
   const margin = Math.min(1.5, width / 8);
   for (let spacing = widestSpacing; spacing >= closest; spacing *= 0.92) {
-    const throws = Math.ceil((3 * length * width) / (spacing * spacing));
+    const throws = Math.ceil((4 * length * width) / (spacing * spacing));
     for (let i = 0; i < throws; i++) {
       const along = uniform() * length;
       const across = margin + uniform() * (width - 2 * margin);
@@ -107,8 +107,8 @@ function spacingAt(strip: Strip, altitude: number, closest: number, ends: [exoba
     1.15,
     Math.max(0, (sample.log10NumberDensity - ends[1]) / (ends[0] - ends[1] || 1)),
   );
-  const wanted = (0.95 * height ** 1.9 + 0.05) * (1 - fluidShare(sample.log10Knudsen)) ** 0.55;
-  return wanted < 0.01 ? null : { spacing: (closest * 1.12) / Math.sqrt(wanted), sample };
+  const wanted = (0.93 * height ** 1.9 + 0.07) * (1 - fluidShare(sample.log10Knudsen)) ** 0.55;
+  return wanted < 0.01 ? null : { spacing: closest / Math.sqrt(wanted), sample };
 }
 
 /**
@@ -119,7 +119,7 @@ export function stripDots(strip: Strip, scale: StripScale, width: number, closes
   if (strip.exobase === null) return [];
   const ends: [number, number] = [
     sampleStrip(strip, strip.exobase).log10NumberDensity,
-    sampleStrip(strip, Math.min(scale.high, strip.top)).log10NumberDensity,
+    sampleStrip(strip, scale.high).log10NumberDensity,
   ];
   const onset = (strip.lower ?? strip.exobase) * 0.9;
   const groups = new Map<string, GasDots>();
@@ -132,7 +132,7 @@ export function stripDots(strip: Strip, scale: StripScale, width: number, closes
     const drawn = asked.sample.moleFractions.findIndex((share) => (left -= share) <= 0);
     const gas = strip.gases[Math.max(0, drawn)]!;
     // Those barely let in are faint, so that typing makes them fade rather than flash.
-    const opacity = Math.min(1, Math.ceil((0.35 + 8 * (spacing / asked.spacing - 1)) * 4) / 4);
+    const opacity = Math.min(1, Math.ceil((0.5 + 8 * (spacing / asked.spacing - 1)) * 4) / 4);
     const key = `${gas} ${opacity}`;
     const group = groups.get(key) ?? { gas, opacity, dots: [] };
     group.dots.push({ along, across });

@@ -22,11 +22,11 @@ const heights: Record<StripLabelKind, number> = {
   upper: 15,
 };
 const weights: Record<StripLabelKind, number> = {
-  base: 30,
+  base: 400,
   homopause: 1,
   caption: 0.2,
   lower: 3,
-  exobase: 60,
+  exobase: 400,
   upper: 3,
 };
 

@@ -32,12 +32,16 @@ export interface StripTick {
   isMajor: boolean;
 }
 
-/** Ticks at round altitudes: major ones at least so many px apart, four or five minor steps between them. */
-export function stripTicks(scale: StripScale, leastApart: number): StripTick[] {
-  const least = ((scale.high - scale.low) / scale.length) * leastApart;
+/** Steps between ticks at round values: major ones at least so far apart, four or five minor steps in each. */
+export function tickSteps(least: number): { major: number; minor: number } {
   const decade = 10 ** Math.floor(Math.log10(least));
-  const major = [1, 2, 5, 10].map((factor) => factor * decade).find((step) => step >= least)!;
-  const minor = Math.round(major / decade) === 2 ? major / 4 : major / 5;
+  const major = [1, 2, 5, 10].map((factor) => factor * decade).find((step) => step >= least * (1 - 1e-9))!;
+  return { major, minor: Math.round(major / decade) === 2 ? major / 4 : major / 5 };
+}
+
+/** Ticks of a scale, with at least so many px between major ones. */
+export function stripTicks(scale: StripScale, leastApart: number): StripTick[] {
+  const { major, minor } = tickSteps(((scale.high - scale.low) / scale.length) * leastApart);
   const ticks: StripTick[] = [];
   for (let k = Math.ceil(scale.low / minor); k * minor <= scale.high; k++) {
     const altitude = k * minor;

@@ -1,7 +1,7 @@
 import { useState, type KeyboardEvent, type PointerEvent } from "react";
 import type { StripScale } from "./stripScale";
 
-interface StripReadingOptions {
+interface AltitudeReadingOptions {
   scale: StripScale;
   /** m; the read-out stays between these. */
   from: number;
@@ -9,10 +9,12 @@ interface StripReadingOptions {
   direction: "standing" | "lying";
   /** Where the arrow keys begin. */
   start: number;
+  /** px between the low end of the scale and the edge of the element that is pointed at. */
+  inset?: number;
 }
 
 /** The altitude that is read out: under the pointer, or moved by arrow keys; null while nothing is read. */
-export function useStripReading({ scale, from, to, direction, start }: StripReadingOptions) {
+export function useAltitudeReading({ scale, from, to, direction, start, inset = 0 }: AltitudeReadingOptions) {
   const [altitude, setAltitude] = useState<number | null>(null);
   const [isByKey, setIsByKey] = useState(false);
   const within = (z: number) => Math.min(to, Math.max(from, z));
@@ -22,7 +24,7 @@ export function useStripReading({ scale, from, to, direction, start }: StripRead
     const box = event.currentTarget.getBoundingClientRect();
     const along = direction === "lying" ? event.clientX - box.left : box.bottom - event.clientY;
     setIsByKey(false);
-    setAltitude(within(scale.altitudeAt(along)));
+    setAltitude(within(scale.altitudeAt(along - inset)));
   };
 
   const handleKey = (event: KeyboardEvent<HTMLElement>) => {
