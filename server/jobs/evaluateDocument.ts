@@ -1,5 +1,6 @@
 import type { NotebookDocument } from "../../shared/notebook/document";
-import { evaluateNotebook, resultDocument } from "../../shared/notebook/evaluateNotebook";
+import { evaluateNotebook } from "../../shared/notebook/evaluateNotebook";
+import { resultDocument } from "../../shared/notebook/resultDocument";
 import { summariseNotebook } from "../../shared/notebook/summariseNotebook";
 import type { EvaluationOutcome } from "./evaluator";
 

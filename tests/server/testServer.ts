@@ -1,0 +1,45 @@
+import { pino } from "pino";
+import request from "supertest";
+import { createApp, type AppParts } from "../../server/app";
+import { createAuth } from "../../server/auth/auth";
+import { evaluateDocument } from "../../server/jobs/evaluateDocument";
+import type { Evaluator } from "../../server/jobs/evaluator";
+import { createSummaries } from "../../server/jobs/summaries";
+import type { Actor } from "../../server/policies/actor";
+import { openTestDatabase } from "./testDatabase";
+
+/** Evaluates here rather than in a thread: the thread has a test of its own. */
+const evaluator: Evaluator = {
+  evaluate: async (document) => ({ ok: true, outcome: evaluateDocument(document) }),
+  close: async () => undefined,
+};
+
+const manyTries = { signInPerAccount: 1000, signIn: 1000, signUp: 1000 };
+
+/** The whole server on a database in memory, without listening. */
+export async function startTestServer(parts: Partial<AppParts> = {}) {
+  const { db, close } = await openTestDatabase();
+  const logger = pino({ level: "silent" });
+  const auth = await createAuth(db, { hasSecureCookies: false });
+  const summaries = createSummaries({ db, evaluator, logger });
+  const app = createApp({ db, auth, evaluator, summaries, logger, demo: false, tries: manyTries, ...parts });
+
+  const cookieOf = async (user: Actor): Promise<string> => (await auth.openSession(user.id)).split(";")[0]!;
+
+  return {
+    db,
+    app,
+    auth,
+    summaries,
+    cookieOf,
+    signedOut: request(app),
+    /** Requests in the name of this person. */
+    as: async (user: Actor) => request.agent(app).set("Cookie", await cookieOf(user)),
+    close: async () => {
+      await summaries.close();
+      await close();
+    },
+  };
+}
+
+export type TestServer = Awaited<ReturnType<typeof startTestServer>>;
