@@ -9,26 +9,40 @@ export const references: Readonly<Record<string, string>> = {
   BanksKockarts1973: "P. M. Banks and G. Kockarts (1973), Aeronomy, Part B, Academic Press.",
   Bates1959:
     "D. R. Bates (1959), Some problems concerning the terrestrial atmosphere above about the 100 km level, Proc. R. Soc. London A 253, 451–462.",
+  Blanc1908:
+    "A. Blanc (1908), Recherches sur les mobilités des ions dans les gaz, J. Phys. Théor. Appl. 7, 825–839.",
   Brinkmann1970:
     "R. T. Brinkmann (1970), Departures from Jeans' escape rate for H and He in the Earth's atmosphere, Planet. Space Sci. 18, 449–478.",
   CatlingKasting2017:
     "D. C. Catling and J. F. Kasting (2017), Atmospheric Evolution on Inhabited and Lifeless Worlds, Cambridge University Press.",
+  Chamberlain1963:
+    "J. W. Chamberlain (1963), Planetary coronae and atmospheric evaporation, Planet. Space Sci. 11, 901–960.",
   ChamberlainCampbell1967:
     "J. W. Chamberlain and F. J. Campbell (1967), Rate of evaporation of a non-Maxwellian atmosphere, Astrophys. J. 149, 687–705.",
   ChamberlainHunten1987:
     "J. W. Chamberlain and D. M. Hunten (1987), Theory of Planetary Atmospheres, 2nd edition, Academic Press.",
+  ChapmanCowling1970:
+    "S. Chapman and T. G. Cowling (1970), The Mathematical Theory of Non-Uniform Gases, 3rd edition, Cambridge University Press.",
   CODATA2022:
     "E. Tiesinga, P. J. Mohr, D. B. Newell and B. N. Taylor (2024), The 2022 CODATA Recommended Values of the Fundamental Physical Constants (Web Version 9.0), National Institute of Standards and Technology.",
   CRCDiffusion:
     "CRC Handbook of Chemistry and Physics, table Diffusion in Gases, after Marrero and Mason (1972).",
   Dekker1971:
     "T. J. Dekker (1971), A floating-point technique for extending the available precision, Numer. Math. 18, 224–242.",
+  DowellJarratt1971:
+    "M. Dowell and P. Jarratt (1971), A modified regula falsi method for computing the root of an equation, BIT 11, 168–174.",
   Erkaev2007:
     "N. V. Erkaev, Yu. N. Kulikov, H. Lammer, F. Selsis, D. Langmayr, G. F. Jaritz and H. K. Biernat (2007), Roche lobe effects on the atmospheric loss from “Hot Jupiters”, Astron. Astrophys. 472, 329–334.",
   FritschCarlson1980:
     "F. N. Fritsch and R. E. Carlson (1980), Monotone piecewise cubic interpolation, SIAM J. Numer. Anal. 17, 238–246.",
+  GolubVanLoan2013:
+    "G. H. Golub and C. F. Van Loan (2013), Matrix Computations, 4th edition, Johns Hopkins University Press.",
   GRIMech3:
     "G. P. Smith et al. (1999), GRI-Mech 3.0, Gas Research Institute; Lennard-Jones parameters of its transport data.",
+  Gustafsson1994:
+    "K. Gustafsson (1994), Control-theoretic techniques for stepsize selection in implicit Runge-Kutta methods, ACM Trans. Math. Softw. 20, 496–517.",
+  HairerNorsettWanner1993:
+    "E. Hairer, S. P. Nørsett and G. Wanner (1993), Solving Ordinary Differential Equations I: Nonstiff Problems, 2nd edition, Springer.",
   HamiltonBurns1992:
     "D. P. Hamilton and J. A. Burns (1992), Orbital stability zones about asteroids. II. The destabilizing effects of eccentric orbits and of solar radiation, Icarus 96, 43–64.",
   Hu2015:
@@ -60,6 +74,8 @@ export const references: Readonly<Record<string, string>> = {
   NaifPCK: "NASA Navigation and Ancillary Information Facility, text kernels pck00010 and pck00011: radii.",
   NSSDC: "D. R. Williams, Planetary Fact Sheets, NASA Space Science Data Coordinated Archive.",
   Opik1963: "E. J. Öpik (1963), Selective escape of gases, Geophys. J. R. Astron. Soc. 7, 490–509.",
+  OpikSinger1959:
+    "E. J. Öpik and S. F. Singer (1959), Distribution of density in a planetary exosphere, Phys. Fluids 2, 653–655.",
   Parker1958:
     "E. N. Parker (1958), Dynamics of the interplanetary gas and magnetic fields, Astrophys. J. 128, 664–676.",
   Pavlov2019:
@@ -68,14 +84,10 @@ export const references: Readonly<Record<string, string>> = {
     "B. E. Poling, J. M. Prausnitz and J. P. O'Connell (2001), The Properties of Gases and Liquids, 5th edition, McGraw-Hill, Appendix B.",
   Prohaska2022:
     "T. Prohaska et al. (2022), Standard atomic weights of the elements 2021 (IUPAC Technical Report), Pure Appl. Chem. 94, 573–600.",
-  ShizgalArkos1996:
-    "B. D. Shizgal and G. G. Arkos (1996), Nonthermal escape of the atmospheres of Venus, Earth, and Mars, Rev. Geophys. 34, 483–505.",
   Tang1989:
     "P. T. P. Tang (1989), Table-driven implementation of the exponential function in IEEE floating-point arithmetic, ACM Trans. Math. Softw. 15, 144–157.",
   Tang1990:
     "P. T. P. Tang (1990), Table-driven implementation of the logarithm function in IEEE floating-point arithmetic, ACM Trans. Math. Softw. 16, 378–400.",
-  Tucker2012:
-    "O. J. Tucker, J. T. Erwin, J. I. Deighan, A. N. Volkov and R. E. Johnson (2012), Thermally driven escape from Pluto's atmosphere: a combined fluid/kinetic model, Icarus 217, 408–415.",
   USSA1976: "NOAA, NASA and USAF (1976), U.S. Standard Atmosphere, 1976, NOAA-S/T 76-1562.",
   Volkov2011:
     "A. N. Volkov, R. E. Johnson, O. J. Tucker and J. T. Erwin (2011), Thermally driven atmospheric escape: transition from hydrodynamic to Jeans escape, Astrophys. J. Lett. 729, L24.",

@@ -120,6 +120,7 @@ function magnitude(log: number): number | null {
 function correctionNotes(formula: string, lambda: number): PhysicsNote[] {
   if (lambda >= looselyBound) return [];
   const published = jeansCorrections
+    .filter((correction) => correction.formula === null || correction.formula === formula)
     .map(
       ({ gas, low, high, provenance }) =>
         `${low} to ${high} for ${gas} (${shortCitation(provenance.source)})`,

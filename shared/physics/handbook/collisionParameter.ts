@@ -15,7 +15,7 @@ const isDeuterated = (gas: CollidingGas): boolean => gas.formula === "D" || gas.
  * Default binary collision parameter of two gases.
  *
  *   b = n D = A (T/1 K)^s: the first measured row of the pair in `collisionRows`; without one, and for D and HD
- *   with whatever gas, the estimate for rigid spheres of 2.7 Å
+ *   with whatever gas, the estimate for rigid spheres (of 3 Å)
  *   b = 1.52×10¹⁸ cm⁻¹ s⁻¹ (1/Mᵢ + 1/Mⱼ)^½ (T/1 K)^½,   M in u
  *
  * @param gasA  formula, and mass of one particle m [kg] above zero

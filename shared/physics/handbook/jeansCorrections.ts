@@ -4,22 +4,30 @@ import type { Provenance } from "./provenance";
 export interface JeansCorrection {
   /** Of what, as it reads after "for". */
   gas: string;
+  /** The one gas it holds for; null where it is meant in general. */
+  formula: string | null;
   low: number;
   high: number;
   provenance: Provenance;
 }
 
-/** A light trace gas: fast particles leave faster than collisions with the background replace them. */
-export const traceGasCorrection: JeansCorrection = {
+/** A light trace gas: fast particles leave sooner than collisions with the background replace them. */
+const traceGasCorrection: JeansCorrection = {
   gas: "a light gas in a heavier one",
+  formula: null,
   low: 0.7,
   high: 0.8,
-  provenance: { source: "ChamberlainCampbell1967", mark: "from memory" },
+  provenance: {
+    source: "ChamberlainCampbell1967",
+    mark: "from memory",
+    note: "the review of Shizgal and Arkos (1996) gives the same range",
+  },
 };
 
-/** One gas alone, expanding as a whole: it drifts, and so loses more. */
+/** One gas alone: it expands as a whole, drifts, and so loses more. */
 export const singleGasCorrection: JeansCorrection = {
   gas: "a single gas",
+  formula: null,
   low: 1.4,
   high: 1.7,
   provenance: { source: "Volkov2011", mark: "from memory", note: "hard spheres and Maxwell molecules" },
@@ -29,28 +37,18 @@ export const singleGasCorrection: JeansCorrection = {
 export const jeansCorrections: readonly JeansCorrection[] = [
   {
     gas: "H at Earth",
+    formula: "H",
     low: 0.7,
     high: 0.75,
     provenance: { source: "Brinkmann1970", mark: "read", note: "abstract" },
   },
   {
     gas: "He at Earth",
+    formula: "He",
     low: 0.97,
     high: 0.99,
     provenance: { source: "Brinkmann1970", mark: "read", note: "abstract" },
   },
   traceGasCorrection,
-  {
-    gas: "a light gas in a heavier one (review)",
-    low: 0.7,
-    high: 0.8,
-    provenance: { source: "ShizgalArkos1996", mark: "from memory" },
-  },
   singleGasCorrection,
-  {
-    gas: "Pluto as a whole",
-    low: 0.5,
-    high: 2,
-    provenance: { source: "Tucker2012", mark: "read", note: "abstract: within a factor of 2" },
-  },
 ];
