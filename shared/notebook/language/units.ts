@@ -282,17 +282,3 @@ const foreignUnits: ReadonlyMap<string, ForeignUnit> = new Map(
 );
 
 export const findForeignUnit = (symbol: string): ForeignUnit | undefined => foreignUnits.get(symbol);
-
-/** Dimension of a result's unit, such as "m^-2 s^-1" or "W m^-2"; undefined where it is no SI unit. */
-export function dimensionOfUnitText(text: string): Dimension | undefined {
-  const exponents = [...dimensionless];
-  if (text === "" || text === "1") return dimensionless;
-  for (const factor of text.split(" ")) {
-    const [symbol, exponent = "1"] = factor.split("^");
-    const found = units.get(symbol);
-    if (!found || found.factor !== 1 || found.powerOfTen !== 0 || !Number.isFinite(Number(exponent)))
-      return undefined;
-    for (const [index, value] of found.dimension.entries()) exponents[index] += value * Number(exponent);
-  }
-  return exponents as unknown as Dimension;
-}
