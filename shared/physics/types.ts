@@ -63,6 +63,8 @@ export interface ColumnLevel {
   altitude: number;
   radius: number;
   temperature: number;
+  /** dT/dz, K m⁻¹ */
+  temperatureGradient: number;
   pressure: number;
   numberDensity: number;
   massDensity: number;
@@ -73,6 +75,7 @@ export interface ColumnLevel {
   scaleHeight: number;
   meanFreePath: number;
   knudsen: number;
+  /** K, m² s⁻¹ */
   eddyCoefficient: number;
   moleFractions: Float64Array;
   numberDensities: Float64Array;

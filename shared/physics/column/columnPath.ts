@@ -1,0 +1,115 @@
+import {
+  denseCoefficients,
+  denseRows,
+  end,
+  interpolateStep,
+  keptStages,
+  restoreStages,
+  start,
+} from "../numerics/dormandPrince";
+import { altitudeOf, temperatureOf, type ColumnProblem } from "./columnProblem";
+import { bindColumn, columnSlope, type BaseFluxes } from "./columnSlope";
+import type { StepLaw } from "./stepLaw";
+
+/**
+ * A march through a column, kept step by step so that the state between steps can be had at any time later:
+ * positions, states, the stages that the dense output rests on, and the law that held along each step. It owns
+ * its arrays.
+ */
+export interface ColumnPath {
+  readonly problem: ColumnProblem;
+  readonly fluxes: BaseFluxes | null;
+  /** Number of steps; there is one position and one state more. */
+  steps: number;
+  /** Geopotential heights h, m, in the order of the march. */
+  positions: Float64Array;
+  /** ln p of each gas at each position. */
+  states: Float64Array;
+  /** `keptStages` slopes of each gas for each step. */
+  stages: Float64Array;
+  laws: StepLaw[];
+  /** Coefficients of the dense output, made when first asked for. */
+  dense: (Float64Array | undefined)[];
+}
+
+export function emptyPath(problem: ColumnProblem, fluxes: BaseFluxes | null): ColumnPath {
+  const size = problem.masses.length;
+  return {
+    problem,
+    fluxes,
+    steps: 0,
+    positions: new Float64Array(firstCapacity + 1),
+    states: new Float64Array((firstCapacity + 1) * size),
+    stages: new Float64Array(firstCapacity * keptStages * size),
+    laws: [],
+    dense: [],
+  };
+}
+
+const firstCapacity = 48;
+
+/** Makes room for one more step. */
+export function makeRoom(path: ColumnPath): void {
+  if (path.steps + 1 < path.positions.length) return;
+  path.positions = doubled(path.positions);
+  path.states = doubled(path.states);
+  path.stages = doubled(path.stages);
+}
+
+function doubled(array: Float64Array): Float64Array {
+  const larger = new Float64Array(2 * array.length);
+  larger.set(array);
+  return larger;
+}
+
+/** Temperature at a height within a step, K. */
+export function pathTemperature({ problem, laws }: ColumnPath, step: number, height: number): number {
+  const altitude = altitudeOf(problem, height);
+  return temperatureOf(problem.temperature, height, altitude, laws[step].temperaturePiece);
+}
+
+/** Index of the step that contains a height, for a path that was marched upward. */
+export function stepAt({ positions, steps }: ColumnPath, height: number): number {
+  let low = 0;
+  let high = steps;
+  while (high - low > 1) {
+    const middle = (low + high) >> 1;
+    if (positions[middle] <= height) low = middle;
+    else high = middle;
+  }
+  return low;
+}
+
+/** Writes ln p of each gas at a position of the march. */
+export function nodeState({ states, problem }: ColumnPath, node: number, out: Float64Array): void {
+  const size = problem.masses.length;
+  for (let i = 0; i < size; i += 1) out[i] = states[node * size + i];
+}
+
+/** Writes ln p of each gas at a height within a step, to the accuracy of the march. */
+export function stateWithin(path: ColumnPath, step: number, height: number, out: Float64Array): void {
+  const size = path.problem.masses.length;
+  const position = path.positions[step];
+  const length = path.positions[step + 1] - position;
+  const coefficients = path.dense[step] ?? makeDense(path, step, size, position, length);
+  interpolateStep(coefficients, size, path.states, step * size, (height - position) / length, out);
+}
+
+function makeDense(
+  path: ColumnPath,
+  step: number,
+  size: number,
+  position: number,
+  length: number,
+): Float64Array {
+  const coefficients = new Float64Array(denseRows * size);
+  for (let i = 0; i < size; i += 1) {
+    start[i] = path.states[step * size + i];
+    end[i] = path.states[(step + 1) * size + i];
+  }
+  bindColumn(path.problem, path.fluxes, path.laws[step]);
+  restoreStages(size, path.stages, step * keptStages * size);
+  denseCoefficients(columnSlope, size, position, length, coefficients);
+  path.dense[step] = coefficients;
+  return coefficients;
+}

@@ -1,0 +1,159 @@
+import { boltzmann } from "../constants/codata2022";
+import { escapeParameter } from "../escape/escapeParameter";
+import { findKnudsenBand, smallestBoundParameter, type KnudsenBand } from "../exobase/findExobase";
+import { addKnudsen, findLargestKnudsen, type KnudsenAlong } from "../exobase/knudsenAlong";
+import { maximumDimension } from "../numerics/dormandPrince";
+import { logarithm, power } from "../numerics/elementary";
+import { findRoot, rootOf } from "../numerics/findRoot";
+import { advance, beginMarch, heightOfMarch, type ColumnMarch } from "./columnMarch";
+import { nodeState, pathTemperature, stateWithin, type ColumnPath } from "./columnPath";
+import { altitudeOf, heightOf, smallestTemperatureAbove, type ColumnProblem } from "./columnProblem";
+import { fractions, setComposition } from "./composition";
+import { largestCentrifugalShare } from "./requireColumnInput";
+
+/** A march from the base to the top, without flux. */
+export interface UpwardMarch {
+  along: KnudsenAlong;
+  band: KnudsenBand;
+  /** Geopotential height of the top, m. */
+  top: number;
+  /** Whether Kn fell where the escape parameter of the mean mass was below 2. */
+  isRunaway: boolean;
+  /** Whether the gas became too thin before a given top. */
+  isCutShort: boolean;
+}
+
+/** Without a given top, it is so many times as high as the exobase, above the base or the body's radius. */
+const topOverExobase = 2.3;
+/** Without a given top, the march goes on to here first, a little beyond Kn = 10. */
+const farEnough = logarithm(10.5);
+/** A column without a given top has at least so many scale heights, or twice its base's distance from the centre. */
+const smallestExtent = 3;
+/** ln of 1e-260 m⁻³: below it numbers lose their meaning, and a column ends. */
+const smallestLogDensity = logarithm(1e-260);
+
+/** Marches up to the given top, or to where the exobase and its band have been passed. */
+export function marchUp(problem: ColumnProblem, tolerance: number): UpwardMarch {
+  const state = problem.baseLogPressures;
+  const march = beginMarch({ problem, fluxes: null, height: 0, state, direction: 1, tolerance });
+  const along: KnudsenAlong = { path: march.path, values: [], slopes: [] };
+  addKnudsen(along, march.slope);
+  const { top } = problem.input;
+  return top === "auto" ? marchToOwnTop(march, along) : marchToGivenTop(march, along, top);
+}
+
+function marchToGivenTop(march: ColumnMarch, along: KnudsenAlong, topAltitude: number): UpwardMarch {
+  const { problem } = march.path;
+  const { radius } = problem.input;
+  const limit = heightOf(topAltitude, radius, problem.baseRadius);
+  let isRunaway = false;
+  let isThin = false;
+  while (heightOfMarch(march) < limit && !isThin) {
+    isThin = marchOn(march, along, limit);
+    isRunaway ||= runsAway(along);
+  }
+  const top = isThin ? thinHeight(march.path) : limit;
+  return { along, band: findKnudsenBand(along), top, isRunaway, isCutShort: isThin };
+}
+
+function marchToOwnTop(march: ColumnMarch, along: KnudsenAlong): UpwardMarch {
+  const { path } = march;
+  const { problem } = path;
+  const limit = farthestHeight(problem);
+  const extent = Math.min(smallestExtent * march.scaleHeight, problem.baseRadius / 2, limit);
+  let isRunaway = false;
+  let isThin = false;
+  while (heightOfMarch(march) < limit && !isThin) {
+    isThin = marchOn(march, along, limit);
+    isRunaway = runsAway(along);
+    const isFar = along.values[path.steps] >= farEnough;
+    if ((isRunaway || isFar) && heightOfMarch(march) >= extent) break;
+  }
+  const wanted = Math.min(limit, wantedTop(along, extent, isRunaway));
+  while (heightOfMarch(march) < wanted && !isThin) isThin = marchOn(march, along, wanted);
+  const top = isThin ? Math.min(wanted, thinHeight(path)) : wanted;
+  return { along, band: findKnudsenBand(along), top, isRunaway, isCutShort: false };
+}
+
+/** One step; whether the gas is now too thin to go on. */
+function marchOn(march: ColumnMarch, along: KnudsenAlong, limit: number): boolean {
+  advance(march, limit);
+  addKnudsen(along, march.slope);
+  return logDensityAt(march.path, march.path.steps) < smallestLogDensity;
+}
+
+/** The top of a column that sets its own; it depends on the gas alone, not on the steps. */
+function wantedTop(along: KnudsenAlong, extent: number, isRunaway: boolean): number {
+  const { problem } = along.path;
+  const { baseAltitude, radius } = problem.input;
+  const { exobase, upper } = findKnudsenBand(along);
+  if (exobase !== null) {
+    const altitude = altitudeOf(problem, exobase);
+    const reach = Math.max(altitude, altitude - baseAltitude);
+    const top = heightOf(altitude + (topOverExobase - 1) * reach, radius, problem.baseRadius);
+    return Math.max(extent, top, upper ?? 0);
+  }
+  const summit = isRunaway ? findLargestKnudsen(along, heightOfLast(along.path)).height : 0;
+  return Math.max(extent, summit, upper ?? 0);
+}
+
+/** Whether, where the march stands, Kn falls and the gas is unbound. */
+function runsAway({ path, slopes }: KnudsenAlong): boolean {
+  return slopes[path.steps] < 0 && smallestEscapeParameter(path, path.steps) < smallestBoundParameter;
+}
+
+/** GMm̄/(kTr) at a position of a path, T the lowest temperature from there up. */
+export function smallestEscapeParameter(path: ColumnPath, node: number): number {
+  const { problem, laws, positions } = path;
+  const step = Math.min(node, path.steps - 1);
+  const height = positions[node];
+  nodeState(path, node, state);
+  setComposition(state, problem.masses.length);
+  let meanMass = 0;
+  for (let i = 0; i < problem.masses.length; i += 1) meanMass += fractions[i] * problem.masses[i];
+  return escapeParameter({
+    gravitationalParameter: problem.input.gravitationalParameter,
+    particleMass: meanMass,
+    temperature: smallestTemperatureAbove(
+      problem.temperature,
+      pathTemperature(path, step, height),
+      laws[step].temperaturePiece,
+    ),
+    radius: problem.input.radius + altitudeOf(problem, height),
+  });
+}
+
+const state = new Float64Array(maximumDimension);
+
+/** ln n at a position of a path. */
+function logDensityAt(path: ColumnPath, node: number): number {
+  nodeState(path, node, state);
+  const temperature = pathTemperature(path, Math.min(node, path.steps - 1), path.positions[node]);
+  return setComposition(state, path.problem.masses.length) - logarithm(boltzmann.value * temperature);
+}
+
+/** Height within the last step at which the gas becomes too thin. */
+function thinHeight(path: ColumnPath): number {
+  const step = path.steps - 1;
+  const from = path.positions[step];
+  const length = path.positions[path.steps] - from;
+  const excessAt = (part: number) => {
+    const height = from + part * length;
+    stateWithin(path, step, height, state);
+    const thermalEnergy = boltzmann.value * pathTemperature(path, step, height);
+    return setComposition(state, path.problem.masses.length) - logarithm(thermalEnergy) - smallestLogDensity;
+  };
+  const found = findRoot(excessAt, 0, 1, { value: 1e-10, bracket: 1e-15 });
+  return from + rootOf("part of a step up to the end of the gas", found) * length;
+}
+
+function heightOfLast(path: ColumnPath): number {
+  return path.positions[path.steps];
+}
+
+/** How far up a column without a given top may reach: nearly to infinity, or to where gravity is used up. */
+function farthestHeight({ baseRadius, centrifugalFactor }: ColumnProblem): number {
+  if (centrifugalFactor === 0) return baseRadius * (1 - 1e-6);
+  const radius = power(largestCentrifugalShare / centrifugalFactor, 1 / 3);
+  return Math.min(baseRadius * (1 - 1e-6), baseRadius - (baseRadius * baseRadius) / radius);
+}
