@@ -1,0 +1,97 @@
+import { useRef } from "react";
+import type { CellEvaluation } from "../../../../shared/notebook/result";
+import { CrossingFigure } from "../../../ui/plots/CrossingFigure";
+import { DensityFigure } from "../../../ui/plots/DensityFigure";
+import { EscapeTable } from "../../../ui/tables/EscapeTable";
+import { LevelsTable } from "../../../ui/tables/LevelsTable";
+import { ValueList } from "../../../ui/tables/ValueList";
+import type { CellViewProps } from "./CellView";
+import { Computing } from "./Computing";
+
+interface CellResultsProps extends CellViewProps {
+  /** Figures are made when the cell first comes near the screen. */
+  isNear: boolean;
+}
+
+/**
+ * What a cell gives. While an entry is at fault or its answer is late, the old figures keep their place unseen, so
+ * that nothing is drawn anew, and nothing moves, when the next answer comes.
+ */
+export function CellResults(props: CellResultsProps) {
+  const { cell, evaluation, strip, isLate } = props;
+  const hasAnswer = evaluation !== undefined && isAnswered(evaluation);
+  const lastGood = useRef<{ evaluation: CellEvaluation; strip: CellViewProps["strip"] } | null>(null);
+  if (hasAnswer) lastGood.current = { evaluation, strip };
+
+  if (cell.kind === "prose" || cell.kind === "values") return null;
+  const shown = lastGood.current;
+  if (!shown) return isLate || !evaluation ? <Computing isBeginning /> : null;
+  const isVoid = isLate || !hasAnswer;
+  return (
+    <div className="results" data-void={isVoid || undefined} aria-busy={isLate}>
+      {isLate && <Computing />}
+      <div className="results-body" inert={isVoid}>
+        <Answer {...props} evaluation={shown.evaluation} strip={shown.strip} />
+      </div>
+    </div>
+  );
+}
+
+function isAnswered({ result }: CellEvaluation): boolean {
+  if (result.kind === "column") return result.profiles !== undefined;
+  return (
+    Object.keys(result.values).length > 0 || Object.values(result.tables).some((rows) => rows.length > 0)
+  );
+}
+
+function Answer({
+  evaluation,
+  strip,
+  columnGases,
+  notes,
+  unitSystem,
+  figureNumber,
+  tableNumber,
+  isNear,
+}: CellResultsProps & { evaluation: CellEvaluation }) {
+  const { result, gases } = evaluation;
+  switch (result.kind) {
+    case "column":
+      return (
+        <>
+          {result.profiles && strip && isNear && (
+            <>
+              <DensityFigure
+                profiles={result.profiles}
+                strip={strip}
+                unitSystem={unitSystem}
+                number={figureNumber}
+              />
+              <CrossingFigure
+                profiles={result.profiles}
+                strip={strip}
+                unitSystem={unitSystem}
+                number={figureNumber + 1}
+              />
+            </>
+          )}
+          {(result.tables.levels?.length ?? 0) > 0 && (
+            <LevelsTable result={result} gases={gases} unitSystem={unitSystem} number={tableNumber} />
+          )}
+        </>
+      );
+    case "escape":
+      return (
+        <EscapeTable
+          result={result}
+          gases={gases}
+          columnGases={columnGases}
+          unitSystem={unitSystem}
+          number={tableNumber}
+          notes={notes}
+        />
+      );
+    default:
+      return <ValueList result={result} unitSystem={unitSystem} />;
+  }
+}

@@ -1,0 +1,33 @@
+import type { HeadlineItem } from "../../../../shared/notebook/summary";
+import type { UnitSystem } from "../../../lib/format";
+import { HeadlineNumber } from "../page/Headline";
+
+interface ChosenHeadlinesProps {
+  theirs: readonly HeadlineItem[];
+  mine: readonly HeadlineItem[];
+  chosen: readonly HeadlineItem[];
+  other: string;
+  unitSystem: UnitSystem;
+}
+
+/** The first number of the headline as each state gives it, and as chosen. */
+export function ChosenHeadlines({ theirs, mine, chosen, other, unitSystem }: ChosenHeadlinesProps) {
+  const states = [
+    { label: `${other}’s`, item: theirs[0], tone: "text-dusk" },
+    { label: "yours", item: mine[0], tone: "" },
+    { label: "as chosen", item: chosen[0], tone: "font-semibold" },
+  ];
+  if (!theirs[0] && !mine[0]) return null;
+  return (
+    <dl className="conflict-headlines">
+      {states.map(({ label, item, tone }) => (
+        <div key={label}>
+          <dt>
+            {item?.label ?? "Result"}, {label}
+          </dt>
+          <dd className={tone}>{item ? <HeadlineNumber item={item} unitSystem={unitSystem} /> : "–"}</dd>
+        </div>
+      ))}
+    </dl>
+  );
+}

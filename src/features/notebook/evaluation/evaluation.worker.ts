@@ -1,0 +1,4 @@
+import { expose } from "comlink";
+import { createEvaluationService } from "./evaluationService";
+
+expose(createEvaluationService());

@@ -1,0 +1,62 @@
+import type { NotebookDocument } from "../../../../shared/notebook/document";
+import { evaluateNotebook, type EvaluationMemory } from "../../../../shared/notebook/evaluateNotebook";
+import type { CellEvaluation } from "../../../../shared/notebook/result";
+import { stripOf, summariseNotebook } from "../../../../shared/notebook/summariseNotebook";
+import type { HeadlineItem, Strip } from "../../../../shared/notebook/summary";
+
+/** What the page needs of one cell. */
+export interface CellAnswer {
+  evaluation: CellEvaluation;
+  /** Of a column that could be solved. */
+  strip: Strip | null;
+}
+
+export interface EvaluationAnswer {
+  engine: string;
+  /** In the order of the document; an id alone for a cell whose answer is as it was last time. */
+  cells: (CellAnswer | string)[];
+  headline: HeadlineItem[];
+  /** Time it took, ms. */
+  took: number;
+}
+
+/**
+ * Evaluates notebooks and remembers the last one, so that only what a change touches is computed and sent again.
+ * Runs in a worker; `notebookKey` says whether the memory still belongs to what is asked.
+ */
+export function createEvaluationService() {
+  let rememberedKey: string | null = null;
+  let memory: EvaluationMemory | undefined;
+  let sent = new Map<string, CellEvaluation>();
+
+  return {
+    evaluate(notebookKey: string, document: NotebookDocument): EvaluationAnswer {
+      const begun = performance.now();
+      if (notebookKey !== rememberedKey) {
+        memory = undefined;
+        sent = new Map();
+        rememberedKey = notebookKey;
+      }
+      const answer = evaluateNotebook(document, memory);
+      memory = answer.memory;
+      const { evaluation } = answer;
+
+      const before = sent;
+      sent = new Map(evaluation.cells.map((cell) => [cell.id, cell]));
+      const cells = evaluation.cells.map((cell) => {
+        if (before.get(cell.id) === cell) return cell.id;
+        const isColumn = cell.result.kind === "column";
+        return { evaluation: cell, strip: isColumn ? stripOf(evaluation, cell.result.name) : null };
+      });
+      const { headline } = summariseNotebook(document, evaluation);
+      return { engine: evaluation.engine, cells, headline, took: performance.now() - begun };
+    },
+
+    /** The headline of a state that is only being considered. */
+    headlineOf(document: NotebookDocument): HeadlineItem[] {
+      return summariseNotebook(document, evaluateNotebook(document).evaluation).headline;
+    },
+  };
+}
+
+export type EvaluationService = ReturnType<typeof createEvaluationService>;

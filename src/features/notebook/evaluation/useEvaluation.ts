@@ -1,0 +1,113 @@
+import { useEffect, useMemo, useRef, useState } from "react";
+import type { NotebookDocument } from "../../../../shared/notebook/document";
+import type { CellEvaluation } from "../../../../shared/notebook/result";
+import type { HeadlineItem, Strip } from "../../../../shared/notebook/summary";
+import { createLatestRunner } from "./createLatestRunner";
+import type { EvaluationAnswer } from "./evaluationService";
+import { workerEvaluator, type Evaluator } from "./evaluator";
+import { staleCells } from "./staleCells";
+
+/** From here on an answer that is still being computed hides the old one, ms. */
+const lateAfter = 100;
+
+interface Evaluated {
+  engine: string;
+  /** The text that was computed. */
+  document: NotebookDocument;
+  cells: ReadonlyMap<string, CellEvaluation>;
+  strips: ReadonlyMap<string, Strip>;
+  headline: HeadlineItem[];
+}
+
+export interface LiveEvaluation {
+  /** null until the first answer. */
+  evaluated: Evaluated | null;
+  /** Cells whose numbers must not be shown now: the computation of what is written takes a while. */
+  late: ReadonlySet<string>;
+  /** Why nothing could be computed. */
+  failure: string | null;
+}
+
+const none: ReadonlySet<string> = new Set();
+
+/** Computes a document in the worker at each change; cells that stay as they are stay the same objects. */
+export function useEvaluation(
+  notebookKey: string,
+  document: NotebookDocument,
+  evaluator: () => Evaluator = workerEvaluator,
+): LiveEvaluation {
+  const [evaluated, setEvaluated] = useState<Evaluated | null>(null);
+  const [failure, setFailure] = useState<string | null>(null);
+  const runnerRef = useRef<ReturnType<typeof createLatestRunner<NotebookDocument, EvaluationAnswer>> | null>(
+    null,
+  );
+
+  useEffect(
+    function runEvaluations() {
+      const service = evaluator();
+      // A fresh memory in the worker for each mount: it sends every cell once, whatever it sent before.
+      const key = `${notebookKey} ${nextMount++}`;
+      let last: Evaluated | null = null;
+      const runner = createLatestRunner<NotebookDocument, EvaluationAnswer>({
+        run: (input) => service.evaluate(key, input) as Promise<EvaluationAnswer>,
+        onResult: (answer, input) => {
+          last = withAnswer(last, answer, input);
+          setEvaluated(last);
+          setFailure(null);
+        },
+        onFailure: (error) => setFailure(error instanceof Error ? error.message : String(error)),
+      });
+      runnerRef.current = runner;
+      return () => {
+        runner.stop();
+        runnerRef.current = null;
+      };
+    },
+    [notebookKey, evaluator],
+  );
+
+  useEffect(
+    function evaluateText() {
+      runnerRef.current?.offer(document);
+    },
+    [document, notebookKey, evaluator],
+  );
+
+  const isLate = useIsLate(document, evaluated?.document ?? null);
+  const late = useMemo(
+    () => (isLate ? staleCells(document, evaluated?.document ?? null, evaluated?.cells ?? new Map()) : none),
+    [isLate, document, evaluated],
+  );
+  return { evaluated, late, failure };
+}
+
+let nextMount = 0;
+
+function withAnswer(last: Evaluated | null, answer: EvaluationAnswer, document: NotebookDocument): Evaluated {
+  const cells = new Map<string, CellEvaluation>();
+  const strips = new Map<string, Strip>();
+  for (const cell of answer.cells) {
+    const id = typeof cell === "string" ? cell : cell.evaluation.id;
+    const evaluation = typeof cell === "string" ? last?.cells.get(cell) : cell.evaluation;
+    const strip = typeof cell === "string" ? last?.strips.get(cell) : cell.strip;
+    if (evaluation) cells.set(id, evaluation);
+    if (strip) strips.set(id, strip);
+  }
+  return { engine: answer.engine, document, cells, strips, headline: answer.headline };
+}
+
+/** True once what is written has gone without an answer for a while. */
+function useIsLate(written: NotebookDocument, evaluated: NotebookDocument | null): boolean {
+  const [lateSince, setLateSince] = useState<NotebookDocument | null | undefined>(undefined);
+  const isCurrent = written === evaluated;
+
+  useEffect(
+    function callItLate() {
+      if (isCurrent) return;
+      const timer = setTimeout(() => setLateSince(evaluated), lateAfter);
+      return () => clearTimeout(timer);
+    },
+    [isCurrent, evaluated],
+  );
+  return !isCurrent && lateSince === evaluated && lateSince !== undefined;
+}

@@ -1,0 +1,82 @@
+import type { NotebookDocument } from "../../../../shared/notebook/document";
+import type { DocumentEdit } from "../../../../shared/notebook/editDocument";
+import type { UnitSystem } from "../../../lib/format";
+import { CautionFooter } from "../../../ui/CautionFooter";
+import { Message } from "../../../ui/Message";
+import type { CellCommands } from "../cells/useCellCommands";
+import type { LiveEvaluation } from "../evaluation/useEvaluation";
+import type { NotebookNotes } from "../evaluation/useNotebookNotes";
+import { EmptySheet } from "./EmptySheet";
+import { Headline } from "./Headline";
+import { NotesList } from "./NotesList";
+import { Sheet } from "./Sheet";
+import { SheetHead } from "./SheetHead";
+import { StripPane } from "./StripPane";
+import { useColumnInView } from "./useColumnInView";
+
+interface ArticleProps {
+  document: NotebookDocument;
+  live: LiveEvaluation;
+  notes: NotebookNotes;
+  unitSystem: UnitSystem;
+  kicker: readonly string[];
+  /** null where it can only be read. */
+  edit: ((edit: DocumentEdit, words?: string) => void) | null;
+  newCellId: string | null;
+  commands: CellCommands;
+  /** What stands between the head and the cells. */
+  children?: React.ReactNode;
+}
+
+/** The notebook as it is set: the strip at the left edge, the sheet, and the margin. */
+export function Article({
+  document,
+  live,
+  notes,
+  unitSystem,
+  kicker,
+  edit,
+  newCellId,
+  commands,
+  children,
+}: ArticleProps) {
+  const { evaluated, late, failure } = live;
+  const columnId = useColumnInView(document, evaluated?.cells);
+  const strip = columnId === null ? null : (evaluated?.strips.get(columnId) ?? null);
+
+  return (
+    <div className="notebook-grid">
+      <StripPane strip={strip} unitSystem={unitSystem} isVoid={columnId !== null && late.has(columnId)} />
+      <main id="page" className="notebook-sheet" tabIndex={-1}>
+        <SheetHead document={document} kicker={kicker} edit={edit}>
+          {evaluated && (
+            <Headline items={evaluated.headline} unitSystem={unitSystem} isLate={late.size > 0} />
+          )}
+        </SheetHead>
+        <aside className="margin" aria-label="Margin">
+          <NotesList notes={notes.listed} />
+        </aside>
+        <div className="sheet-body">
+          {failure && (
+            <Message state="fault" live="assertive">
+              The notebook could not be computed: {failure} What is written is safe; change it, or load the
+              page again.
+            </Message>
+          )}
+          {children}
+          {document.cells.length === 0 && <EmptySheet commands={edit && commands} />}
+          <Sheet
+            document={document}
+            live={live}
+            notesOf={notes.of}
+            unitSystem={unitSystem}
+            isEditable={edit !== null}
+            newCellId={newCellId}
+            commands={commands}
+          />
+          <CautionFooter className="pt-64 pb-64" />
+        </div>
+      </main>
+    </div>
+  );
+}

@@ -1,0 +1,40 @@
+import type { Cell } from "../../../../shared/notebook/document";
+import type { NoteLevel } from "../../../../shared/notebook/result";
+import { formatCount } from "../../../lib/format";
+import { StateMark } from "../../../ui/StateMark";
+import type { LetteredNote } from "../../../ui/tables/tableProps";
+import { NoteText } from "../cells/NoteText";
+
+export interface ListedNote extends LetteredNote {
+  cell: Pick<Cell, "id" | "name" | "kind">;
+}
+
+const levels: readonly NoteLevel[] = ["fault", "caution", "remark"];
+
+/** In the margin: all that is wrong or doubtful in the notebook, faults first; each leads to its cell. */
+export function NotesList({ notes }: { notes: readonly ListedNote[] }) {
+  const counts = levels
+    .map((level) => ({ level, count: notes.filter(({ note }) => note.level === level).length }))
+    .filter(({ count }) => count > 0);
+  const sorted = levels.flatMap((level) => notes.filter(({ note }) => note.level === level));
+  const summary = counts.map(({ level, count }) => formatCount(count, level)).join(", ");
+
+  return (
+    <section className="notes-list" aria-label="Faults, cautions and remarks">
+      <h2 role="status">{summary === "" ? "" : summary[0]!.toUpperCase() + summary.slice(1)}</h2>
+      <ul>
+        {sorted.map(({ note, letter, cell }, index) => (
+          <li key={`${cell.id} ${note.code} ${index}`}>
+            <StateMark state={note.level} label={note.level} />
+            <i className="note-letter" data-level={note.level}>
+              {letter}
+            </i>
+            <a href={`#cell-${cell.id}`}>
+              <b>{cell.name || cell.kind}</b>: <NoteText message={note.message} />
+            </a>
+          </li>
+        ))}
+      </ul>
+    </section>
+  );
+}

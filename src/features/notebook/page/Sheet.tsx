@@ -1,0 +1,100 @@
+import { Fragment, useCallback, useMemo } from "react";
+import type { Cell, NotebookDocument } from "../../../../shared/notebook/document";
+import type { CellEvaluation } from "../../../../shared/notebook/result";
+import type { UnitSystem } from "../../../lib/format";
+import type { LetteredNote } from "../../../ui/tables/tableProps";
+import { cellTitle } from "../cells/cellTitle";
+import { CellView } from "../cells/CellView";
+import { InsertCell } from "../cells/InsertCell";
+import { useNotebookNames } from "../cells/notebookNames";
+import { useCellDrag } from "../cells/useCellDrag";
+import type { CellCommands } from "../cells/useCellCommands";
+import type { LiveEvaluation } from "../evaluation/useEvaluation";
+import { numberResults } from "./numberResults";
+
+interface SheetProps {
+  document: NotebookDocument;
+  live: LiveEvaluation;
+  notesOf: (cellId: string) => readonly LetteredNote[];
+  unitSystem: UnitSystem;
+  isEditable: boolean;
+  newCellId: string | null;
+  commands: CellCommands;
+}
+
+/** The cells, set like an article, with a caret between each two where another may be put. */
+export function Sheet({ document, live, notesOf, unitSystem, isEditable, newCellId, commands }: SheetProps) {
+  const { evaluated, late } = live;
+  const surroundings = useNotebookNames(document, evaluated?.cells);
+  const cellIds = useMemo(() => document.cells.map((cell) => cell.id), [document.cells]);
+  const { drag, begin } = useCellDrag(cellIds, commands);
+  const numbers = useMemo(() => numberResults(document, evaluated?.cells), [document, evaluated]);
+  const readTexts = useMemo(
+    () => new Map(evaluated?.document.cells.map((cell) => [cell.id, cell.text])),
+    [evaluated],
+  );
+  const handleDragStart = useCallback((id: string, event: React.PointerEvent) => begin(id, event), [begin]);
+  const columnGases = (evaluation: CellEvaluation | undefined) => gasesOfColumn(evaluation, evaluated?.cells);
+
+  return (
+    <div className="sheet-cells">
+      {isEditable && document.cells.length > 0 && (
+        <InsertCell index={0} afterId={null} place="at the top" isLast={false} commands={commands} />
+      )}
+      {document.cells.map((cell, index) => {
+        const evaluation = evaluated?.cells.get(cell.id);
+        return (
+          <Fragment key={cell.id}>
+            {drag?.gap === index && <DropLine />}
+            <CellView
+              cell={cell}
+              evaluation={evaluation}
+              readText={readTexts.get(cell.id)}
+              strip={evaluated?.strips.get(cell.id)}
+              columnGases={columnGases(evaluation)}
+              notes={notesOf(cell.id)}
+              isLate={late.has(cell.id)}
+              unitSystem={unitSystem}
+              figureNumber={numbers.get(cell.id)?.figure ?? 1}
+              tableNumber={numbers.get(cell.id)?.table ?? 1}
+              isEditable={isEditable}
+              isNew={cell.id === newCellId}
+              surroundings={surroundings}
+              commands={commands}
+              onDragStart={handleDragStart}
+            />
+            {isEditable && (
+              <InsertCell
+                index={index + 1}
+                afterId={cell.id}
+                place={`after ${placeWords(cell)}`}
+                isLast={index === document.cells.length - 1}
+                commands={commands}
+              />
+            )}
+          </Fragment>
+        );
+      })}
+      {drag?.gap === document.cells.length && <DropLine />}
+    </div>
+  );
+}
+
+/** Where a dragged cell would land. */
+function DropLine() {
+  return <div className="drop-line" aria-hidden="true" />;
+}
+
+const placeWords = (cell: Cell): string => (cell.kind === "prose" ? "this prose" : cellTitle(cell));
+
+/** Gases of the column that an escape cell names, so that it gives them the same colours. */
+function gasesOfColumn(
+  evaluation: CellEvaluation | undefined,
+  cells: ReadonlyMap<string, CellEvaluation> | undefined,
+): readonly string[] | undefined {
+  if (evaluation?.result.kind !== "escape" || !cells) return undefined;
+  for (const other of cells.values()) {
+    if (other.result.kind === "column" && evaluation.uses.includes(other.result.name)) return other.gases;
+  }
+  return undefined;
+}
