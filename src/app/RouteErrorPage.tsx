@@ -1,6 +1,5 @@
 import { useRouteError } from "react-router-dom";
 import { ApiError } from "../lib/ApiError";
-import { CautionFooter } from "../ui/CautionFooter";
 import { PageFrame } from "../ui/PageFrame";
 import { ProblemPage } from "../ui/ProblemPage";
 import { Button } from "../ui/Button";
@@ -32,12 +31,5 @@ export function RouteErrorPage({ framed = false }: { framed?: boolean }) {
   ) : (
     <ProblemPage error={error instanceof ApiError ? error : undefined} />
   );
-  return framed ? (
-    page
-  ) : (
-    <PageFrame places={[]}>
-      {page}
-      <CautionFooter className="mx-auto w-full max-w-[1180px] px-18 pb-64 wide:px-28" />
-    </PageFrame>
-  );
+  return framed ? page : <PageFrame places={[]}>{page}</PageFrame>;
 }

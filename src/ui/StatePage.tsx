@@ -1,3 +1,4 @@
+import { CautionFooter } from "./CautionFooter";
 import { ThinningAir } from "./ThinningAir";
 
 interface StatePageProps {
@@ -38,6 +39,7 @@ export function StatePage({ number, title, children, ways, isFault = false }: St
         </div>
         <ThinningAir width={520} height={330} />
       </main>
+      <CautionFooter className="mx-auto w-full px-18 pb-64 wide:px-28" maxWidth={1180} />
     </>
   );
 }

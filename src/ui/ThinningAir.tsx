@@ -28,7 +28,7 @@ function seededSequence(seed: number): () => number {
 function thinningDots(width: number, height: number): Point[] {
   const next = seededSequence(11);
   const dots: Point[] = [];
-  for (let dart = 0; dart < 9000 && dots.length < 420; dart += 1) {
+  for (let dart = 0; dart < width * 12; dart += 1) {
     const x = 1 + next() * (width - 2);
     const rise = next();
     const apart = 8.5 * Math.exp(1.05 * rise + 1.9 * rise * rise);

@@ -31,26 +31,25 @@ export function AccountPage({ groups }: { groups: readonly GroupSummary[] }) {
     <Page title="Account" width={955}>
       <AltitudeRule width={955} className="mt-44 wide:mt-52" />
       <h1 className="pt-28 type-display">{account.name}</h1>
-      <p className="pt-8 text-ink2 italic">{account.email}</p>
+      <p className="pt-8 text-ink2 italic">{partsLine(groups)}</p>
 
       <AccountSection name="As a person">
         <Line label="Name">{account.name}</Line>
         <Line label="E-mail">{account.email}</Line>
-        <Line label="Groups">
-          {groups.length === 0 ? (
-            <>
-              none yet; <Link to="/groups">found one</Link>, or be added by a lead to theirs
-            </>
-          ) : (
-            <ul>
-              {groups.map((group) => (
-                <li key={group.id}>
-                  <Link to={`/groups/${group.id}`}>{group.name}</Link>, {group.role}
-                </li>
-              ))}
-            </ul>
-          )}
-        </Line>
+      </AccountSection>
+
+      <AccountSection name="Groups">
+        {groups.length === 0 ? (
+          <p>
+            None yet. <Link to="/groups">Found one</Link>, or be added by the lead of another.
+          </p>
+        ) : (
+          groups.map((group) => (
+            <Line key={group.id} label={group.role}>
+              <Link to={`/groups/${group.id}`}>{group.name}</Link>
+            </Line>
+          ))
+        )}
       </AccountSection>
 
       <AccountSection name="Reading">
@@ -69,6 +68,14 @@ export function AccountPage({ groups }: { groups: readonly GroupSummary[] }) {
       </AccountSection>
     </Page>
   );
+}
+
+function partsLine(groups: readonly GroupSummary[]): string {
+  if (groups.length === 0) return "In no group yet";
+  const parts = groups
+    .map((group) => `${group.role} ${group.role === "lead" ? "of" : "in"} ${group.name}`)
+    .join(", ");
+  return parts.charAt(0).toUpperCase() + parts.slice(1);
 }
 
 function AccountSection({ name, children }: { name: string; children: React.ReactNode }) {

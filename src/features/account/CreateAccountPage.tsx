@@ -44,7 +44,7 @@ export function CreateAccountPage({ onSignedIn }: { onSignedIn: (session: Sessio
 
   return (
     <SignInFrame title="Create an account">
-      <h1 className="py-18 font-serif text-[34px]/[40px]">Create an account</h1>
+      <h1 className="pt-18 pb-24 font-serif text-[34px]/[40px]">Create an account</h1>
       {create.isError && !isAboutFields && (
         <Message state="fault" live="assertive" className="mb-12">
           {failureSentence(create.error)}

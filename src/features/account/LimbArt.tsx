@@ -1,5 +1,6 @@
 import "./limb.css";
-import { useLayoutEffect, useMemo, useRef, useState } from "react";
+import { useMemo } from "react";
+import { useElementSize } from "../../lib/useElementSize";
 import { exobase, limbDots, limbOf, pointAt, type Box, type Limb } from "./limbDrawing";
 import { sky, type SkyStop } from "./limbSky";
 
@@ -20,25 +21,10 @@ const leastForScale = 700;
 
 /** The limb of Ilmara, at dusk on the light page and at night on the dark one, drawn at the size it has. */
 export function LimbArt({ lettering }: LimbArtProps) {
-  const frame = useRef<HTMLDivElement>(null);
-  const [size, setSize] = useState<{ width: number; height: number } | null>(null);
-
-  useLayoutEffect(function followSize() {
-    const element = frame.current;
-    if (!element) return;
-    const measure = (): void => {
-      const { width, height } = element.getBoundingClientRect();
-      if (width > 0 && height > 0) setSize({ width: Math.round(width), height: Math.round(height) });
-    };
-    measure();
-    const observer = new ResizeObserver(measure);
-    observer.observe(element);
-    return () => observer.disconnect();
-  }, []);
-
+  const { ref, size } = useElementSize<HTMLDivElement>({ width: 0, height: 0 });
   return (
-    <div ref={frame} className="absolute inset-0" aria-hidden="true">
-      {size && <LimbDrawing width={size.width} height={size.height} lettering={lettering} />}
+    <div ref={ref} className="absolute inset-0" aria-hidden="true">
+      {size.width > 0 && <LimbDrawing width={size.width} height={size.height} lettering={lettering} />}
     </div>
   );
 }

@@ -29,11 +29,12 @@ export function SignInFrame({ title, children }: SignInFrameProps) {
           </p>
         </div>
         <p className="absolute right-18 bottom-12 left-18 font-sans text-[12px]/[16px] text-[#c9d2e6] wide:right-auto wide:bottom-26 wide:left-64 wide:max-w-[52ch] wide:text-[13px]/[19px]">
-          Limb of Ilmara after dusk. Layers and exobase to scale; particles thin out as its densities do.
+          Limb of Ilmara after dusk. Layers and exobase to scale
+          <span className="hidden wide:inline">; particles thin out as its densities do</span>.
         </p>
       </div>
-      <div className="flex flex-col px-18 pt-28 pb-28 wide:px-56">
-        <main className="my-auto w-full py-12">
+      <div className="flex flex-col px-18 pt-12 pb-28 wide:px-56 wide:pt-28">
+        <main className="my-auto w-full pb-18 wide:pt-12">
           <Mark size={40} className="hidden wide:block" />
           {children}
         </main>

@@ -30,7 +30,7 @@ export function SignInPage({ demo, onSignedIn, ended }: SignInPageProps) {
 
   return (
     <SignInFrame title="Sign in">
-      <h1 className="py-18 font-serif text-[34px]/[40px]">Sign in</h1>
+      <h1 className="pt-18 pb-24 font-serif text-[34px]/[40px]">Sign in</h1>
       {ended && (
         <Message state="waits" live="polite" className="mb-12">
           Your session has ended, {ended.name}. The page you were on waits as you left it; sign in to go on.

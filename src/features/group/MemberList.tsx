@@ -78,7 +78,7 @@ function MemberLine({ group, member, isSelf, isLastLead, onRemove }: MemberLineP
   }
 
   return (
-    <li className="grid grid-cols-[minmax(0,1fr)_auto] items-baseline gap-x-18 py-10 mid:grid-cols-[minmax(0,1.6fr)_130px_minmax(0,1fr)_110px]">
+    <li className="grid grid-cols-[minmax(0,1fr)_auto] items-baseline gap-x-18 py-10 mid:grid-cols-[minmax(0,1.6fr)_130px_minmax(0,1fr)_140px]">
       <span className="font-serif text-[19px]/[26px]">
         {user.name}
         {isSelf && <span className="type-meta text-ink3"> you</span>}
@@ -98,7 +98,7 @@ function MemberLine({ group, member, isSelf, isLastLead, onRemove }: MemberLineP
       </span>
       <span className="type-meta text-ink2">since {formatDay(new Date(joinedAt), new Date())}</span>
       <span className="text-right">
-        {canRemove && (
+        {canRemove && !isLastLead && (
           <TextButton onClick={onRemove} aria-label={isSelf ? "Leave the group" : `Remove ${user.name}`}>
             {isSelf ? "Leave" : "Remove"}
           </TextButton>

@@ -6,7 +6,7 @@ import { Rich } from "../../lib/Rich";
 /** One number of a notebook's headline, small enough for a list. Lists speak SI. */
 export function HeadlineValue({ item }: { item: HeadlineItem }) {
   return (
-    <div className="min-w-0">
+    <div className="min-w-0 only:col-span-2">
       <div className="truncate font-sans text-[12.5px]/[17px] text-ink2" title={item.note || undefined}>
         {item.label}
       </div>

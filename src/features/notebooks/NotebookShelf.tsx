@@ -1,3 +1,4 @@
+import { useMemo } from "react";
 import type { NotebookListItem } from "../../../shared/schemas/notebooks";
 import { formatCount } from "../../lib/format";
 import { StripShelf } from "../../ui/strip/StripShelf";
@@ -22,8 +23,18 @@ export function shelfBodies(notebooks: readonly NotebookListItem[]): ShelfBody[]
   }));
 }
 
+interface NotebookShelfProps {
+  notebooks: readonly NotebookListItem[];
+  className?: string;
+}
+
 /** All bodies of the list on one scale. One alone has nothing to be compared with and is left to its line. */
-export function NotebookShelf({ notebooks }: { notebooks: readonly NotebookListItem[] }) {
-  const bodies = shelfBodies(notebooks);
-  return bodies.length > 1 ? <StripShelf bodies={bodies} /> : null;
+export function NotebookShelf({ notebooks, className }: NotebookShelfProps) {
+  const bodies = useMemo(() => shelfBodies(notebooks), [notebooks]);
+  if (bodies.length < 2) return null;
+  return (
+    <div className={className}>
+      <StripShelf bodies={bodies} />
+    </div>
+  );
 }

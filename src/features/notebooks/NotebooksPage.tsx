@@ -89,7 +89,7 @@ export function NotebooksPage({ groups }: { groups: readonly GroupSummary[] }) {
         </>
       ) : (
         <>
-          {filters.place === "shelf" && <NotebookShelf notebooks={notebooks} />}
+          {filters.place === "shelf" && <NotebookShelf notebooks={notebooks} className="pt-18" />}
           <p className="pt-36 pb-10 font-serif text-[20px]/[32px]">
             Notebooks{" "}
             <WordMenu

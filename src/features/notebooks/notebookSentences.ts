@@ -30,7 +30,7 @@ export function standingLine({
   role,
   group,
 }: Pick<NotebookListItem, "lastVersion" | "role" | "group">): string {
-  const kept = lastVersion === null ? "draft" : `draft, version ${lastVersion} kept`;
+  const kept = lastVersion === null ? "draft" : `version ${lastVersion} kept`;
   const part = role === "owner" ? null : `you are ${role}`;
   return [kept, group ? `in ${group.code}` : null, part].filter((piece) => piece !== null).join("; ");
 }
