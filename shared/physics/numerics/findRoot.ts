@@ -13,13 +13,13 @@ export type RootOutcome =
 export interface RootTolerance {
   /** Done when |f| is no larger. */
   value: number;
-  /** Done when the bracket is no wider. */
+  /** Done when the bracket is no wider, or as narrow as numbers allow. */
   bracket: number;
 }
 
 /**
  * Root of a continuous function between two abscissae at which its signs differ, by the Illinois variant
- * of the false position: superlinear, never leaves the bracket.
+ * of the false position: superlinear, never leaves the bracket; and by halving the bracket where that is slow.
  *
  * @param f          the function
  * @param left       one end of the bracket
@@ -43,10 +43,16 @@ export function findRoot(
   if (Math.abs(fb) <= tolerance.value) return { converged: true, root: b, iterations: 0 };
   if (fa > 0 === fb > 0) return failure("no_sign_change", a, b, 0);
 
+  let widthBefore = Math.abs(b - a);
   for (let iterations = 1; iterations <= iterationLimit; iterations += 1) {
     const slanted = b - (fb * (b - a)) / (fb - fa);
     const isInside = slanted > Math.min(a, b) && slanted < Math.max(a, b);
-    const x = isInside ? slanted : a + (b - a) / 2;
+    let isSlow = false;
+    if (iterations % patience === 0) {
+      isSlow = Math.abs(b - a) > widthBefore / 2;
+      widthBefore = Math.abs(b - a);
+    }
+    const x = isInside && !isSlow ? slanted : a + (b - a) / 2;
     const fx = f(x);
     if (Number.isNaN(fx)) return failure("not_a_number", a, b, iterations);
     const hasChangedSide = fx > 0 !== fb > 0;
@@ -58,7 +64,8 @@ export function findRoot(
     }
     b = x;
     fb = fx;
-    if (Math.abs(fx) <= tolerance.value || Math.abs(b - a) <= tolerance.bracket) {
+    const narrowest = Math.max(tolerance.bracket, roundingWidth * Math.abs(b));
+    if (Math.abs(fx) <= tolerance.value || Math.abs(b - a) <= narrowest) {
       return { converged: true, root: x, iterations };
     }
   }
@@ -78,6 +85,10 @@ export function rootOf(quantity: string, outcome: RootOutcome): number {
 }
 
 const iterationLimit = 100;
+/** After so many steps the bracket should have halved. */
+const patience = 4;
+/** Two units in the last place. */
+const roundingWidth = 4.5e-16;
 
 function failure(
   reason: "no_sign_change" | "not_a_number" | "too_many_iterations",
