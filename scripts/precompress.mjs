@@ -26,7 +26,9 @@ async function compressFile(file) {
 export async function precompress(folder) {
   if (!existsSync(folder)) return;
   const names = await readdir(folder, { recursive: true });
-  const files = names.filter((name) => compressible.has(path.extname(name))).map((name) => path.join(folder, name));
+  const files = names
+    .filter((name) => compressible.has(path.extname(name)))
+    .map((name) => path.join(folder, name));
   const work = files[Symbol.iterator]();
   const run = async () => {
     for (const file of work) await compressFile(file);

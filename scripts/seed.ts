@@ -20,7 +20,9 @@ try {
   await summaries.close();
   await evaluator.close();
   await data.close();
-  process.stdout.write(isNew ? "The demonstration is in place.\n" : "The demonstration was in place already.\n");
+  process.stdout.write(
+    isNew ? "The demonstration is in place.\n" : "The demonstration was in place already.\n",
+  );
 } catch (error) {
   process.stderr.write(`${error instanceof Error ? error.message : String(error)}\n`);
   process.exitCode = 1;

@@ -53,7 +53,10 @@ export function takeFolderLock(folder: string): FolderLock {
   mkdirSync(folder, { recursive: true });
   const file = path.join(folder, "tenuity.lock");
   const own = `${file}.${process.pid}`;
-  writeFileSync(own, JSON.stringify({ pid: process.pid, identity: identityOf(process.pid) } satisfies Holder));
+  writeFileSync(
+    own,
+    JSON.stringify({ pid: process.pid, identity: identityOf(process.pid) } satisfies Holder),
+  );
 
   try {
     for (let attempt = 0; attempt < 5; attempt += 1) {

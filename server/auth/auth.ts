@@ -43,7 +43,10 @@ export interface Auth {
 export async function createAuth(db: Db, { hasSecureCookies }: { hasSecureCookies: boolean }): Promise<Auth> {
   const lucia = new Lucia(hashedSessions(new DrizzlePostgreSQLAdapter(db, sessions, users)), {
     sessionExpiresIn: new TimeSpan(30, "d"),
-    sessionCookie: { name: "tenuity_session", attributes: { secure: hasSecureCookies, sameSite: "lax", path: "/" } },
+    sessionCookie: {
+      name: "tenuity_session",
+      attributes: { secure: hasSecureCookies, sameSite: "lax", path: "/" },
+    },
     getUserAttributes: ({ name, email }) => ({ name, email }),
   });
   const argon2 = new Argon2id();

@@ -16,7 +16,8 @@ export function hashedSessions(adapter: Adapter): Adapter {
     },
     getUserSessions: (userId) => adapter.getUserSessions(userId),
     setSession: (session) => adapter.setSession({ ...session, id: hashOf(session.id) }),
-    updateSessionExpiration: (sessionId, expiresAt) => adapter.updateSessionExpiration(hashOf(sessionId), expiresAt),
+    updateSessionExpiration: (sessionId, expiresAt) =>
+      adapter.updateSessionExpiration(hashOf(sessionId), expiresAt),
     deleteSession: (sessionId) => adapter.deleteSession(hashOf(sessionId)),
     deleteUserSessions: (userId) => adapter.deleteUserSessions(userId),
     deleteExpiredSessions: () => adapter.deleteExpiredSessions(),

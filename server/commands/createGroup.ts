@@ -18,7 +18,9 @@ export async function createGroup(
       const message = `Another group has the code ${code}. Choose another; it stands in each reference and stays.`;
       throw conflict("code_taken", message, [{ path: "code", message, code: "code_taken" }]);
     }
-    await tx.insert(groupMembers).values({ groupId: group.id, userId: founderId, role: "lead", joinedAt: at });
+    await tx
+      .insert(groupMembers)
+      .values({ groupId: group.id, userId: founderId, role: "lead", joinedAt: at });
     return group;
   });
 }

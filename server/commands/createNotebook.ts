@@ -10,7 +10,15 @@ export async function createNotebook(
   const { ownerId, groupId, document, at } = notebook;
   const [created] = await db
     .insert(notebooks)
-    .values({ ownerId, groupId, title: document.title, document, savedBy: ownerId, savedAt: at, createdAt: at })
+    .values({
+      ownerId,
+      groupId,
+      title: document.title,
+      document,
+      savedBy: ownerId,
+      savedAt: at,
+      createdAt: at,
+    })
     .returning({ id: notebooks.id });
   return created!;
 }

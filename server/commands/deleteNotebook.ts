@@ -4,7 +4,10 @@ import { notebooks } from "../db/tables/notebooks";
 import { notFound } from "../errors";
 
 /** Puts a notebook in the bin. */
-export async function deleteNotebook(db: Db, { notebookId, at }: { notebookId: string; at: Date }): Promise<void> {
+export async function deleteNotebook(
+  db: Db,
+  { notebookId, at }: { notebookId: string; at: Date },
+): Promise<void> {
   const deleted = await db
     .update(notebooks)
     .set({ deletedAt: at })

@@ -8,6 +8,9 @@ export const binDays = 30;
 /** Removes for good, with their versions, the notebooks whose days in the bin are over. Answers how many. */
 export async function emptyBin(db: Db, { at }: { at: Date }): Promise<number> {
   const before = new Date(at.getTime() - binDays * 86_400_000);
-  const gone = await db.delete(notebooks).where(lt(notebooks.deletedAt, before)).returning({ id: notebooks.id });
+  const gone = await db
+    .delete(notebooks)
+    .where(lt(notebooks.deletedAt, before))
+    .returning({ id: notebooks.id });
   return gone.length;
 }

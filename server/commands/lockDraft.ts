@@ -10,7 +10,10 @@ import { notFound } from "../errors";
  *
  * @throws AppError if the notebook is gone or in the bin
  */
-export async function lockDraft(tx: Db, notebookId: string): Promise<{ current: DraftState; lastVersion: number }> {
+export async function lockDraft(
+  tx: Db,
+  notebookId: string,
+): Promise<{ current: DraftState; lastVersion: number }> {
   const [draft] = await tx
     .select({
       revision: notebooks.revision,

@@ -31,7 +31,9 @@ export function openPostgres(url: string): OpenDatabase {
  * PGlite in a folder of its own, or in memory where there is none; `dump` is a state to begin with.
  * The caller makes sure that no other process has the folder open: PGlite would not notice and would lose rows.
  */
-export async function openPglite(options: { folder?: string; dump?: Blob } = {}): Promise<OpenDatabase & { client: PGlite }> {
+export async function openPglite(
+  options: { folder?: string; dump?: Blob } = {},
+): Promise<OpenDatabase & { client: PGlite }> {
   const client = await PGlite.create(options.folder, options.dump ? { loadDataDir: options.dump } : {});
   const db = drizzlePglite(client);
   return {

@@ -8,6 +8,13 @@ import type { EvaluationOutcome } from "./evaluator";
 export function evaluateDocument(document: NotebookDocument): EvaluationOutcome {
   const { evaluation } = evaluateNotebook(document);
   const { engine, title, cells } = resultDocument(evaluation);
-  const kept = cells.map(({ kind, name, status, values, tables, notes }) => ({ kind, name, status, values, tables, notes }));
+  const kept = cells.map(({ kind, name, status, values, tables, notes }) => ({
+    kind,
+    name,
+    status,
+    values,
+    tables,
+    notes,
+  }));
   return { result: { engine, title, cells: kept }, summary: summariseNotebook(document, evaluation) };
 }

@@ -22,7 +22,7 @@ export function clientFiles(folder: string): Router {
   router.use(serve);
   router.get("/{*page}", (req, res, next) => {
     // A file that is not there is not a page.
-    if (path.extname(req.path) !== "" || !req.accepts("html")) throw notFound("page");
+    if (path.posix.basename(req.path).includes(".") || !req.accepts("html")) throw notFound("page");
     req.url = "/index.html";
     serve(req, res, next);
   });

@@ -16,9 +16,15 @@ const isHttpError = (error: unknown): error is HttpError =>
 
 /** What a parser of requests complains of, in words, by its own name for it. */
 const parserComplaints: Record<string, { code: string; detail: string }> = {
-  "entity.parse.failed": { code: "malformed_json", detail: "What was sent is not JSON. Check its brackets and quotes." },
+  "entity.parse.failed": {
+    code: "malformed_json",
+    detail: "What was sent is not JSON. Check its brackets and quotes.",
+  },
   "entity.too.large": { code: "too_large", detail: "What was sent is over 8 MB. Send less, or in parts." },
-  "encoding.unsupported": { code: "unsupported_encoding", detail: "Send the body plain or with gzip, deflate or br." },
+  "encoding.unsupported": {
+    code: "unsupported_encoding",
+    detail: "Send the body plain or with gzip, deflate or br.",
+  },
   "charset.unsupported": { code: "unsupported_charset", detail: "Send the body in UTF-8." },
 };
 
@@ -27,7 +33,10 @@ function appErrorOf(error: unknown): AppError | null {
   if (error instanceof ZodError) {
     const issues = error.issues.map(({ path, message, code }) => ({ path: path.join("."), message, code }));
     const first = issues[0]?.message ?? "";
-    return invalid(issues.length === 1 ? first : `${issues.length} entries need correcting. ${first}`, issues);
+    return invalid(
+      issues.length === 1 ? first : `${issues.length} entries need correcting. ${first}`,
+      issues,
+    );
   }
   if (error instanceof PhysicsDomainError) {
     return invalid(error.message, [{ path: error.quantity, message: error.message, code: "out_of_domain" }]);

@@ -18,7 +18,10 @@ const quarterHour = 15 * 60_000;
 
 const addressOf = (req: Request): string => ipKeyGenerator(req.ip ?? "unknown");
 
-function limit(tries: number, options: { countsOnlyFailures: boolean; key: (req: Request) => string }): RequestHandler {
+function limit(
+  tries: number,
+  options: { countsOnlyFailures: boolean; key: (req: Request) => string },
+): RequestHandler {
   return rateLimit({
     windowMs: quarterHour,
     limit: tries,

@@ -4,10 +4,7 @@ import type { NotebookListRow } from "../db/reads/listNotebooks";
 import type { Actor } from "../policies/actor";
 import { notebookAbilitiesOf, notebookRoleOf, type NotebookFacts } from "../policies/notebookPolicy";
 
-type Head = Pick<
-  NotebookRow,
-  keyof NotebookListRow & keyof NotebookRow
->;
+type Head = Pick<NotebookRow, keyof NotebookListRow & keyof NotebookRow>;
 
 /** What decides about a notebook, out of its row. */
 export function notebookFacts(row: Head): NotebookFacts {

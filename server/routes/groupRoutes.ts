@@ -5,7 +5,13 @@ import { createGroup } from "../commands/createGroup";
 import { removeMember } from "../commands/removeMember";
 import { setMemberRole } from "../commands/setMemberRole";
 import type { Db } from "../db/client";
-import { findGroup, findMembership, listGroupMembers, listGroups, type GroupRow } from "../db/reads/findGroup";
+import {
+  findGroup,
+  findMembership,
+  listGroupMembers,
+  listGroups,
+  type GroupRow,
+} from "../db/reads/findGroup";
 import { conflict, forbidden, notFound } from "../errors";
 import { requireActor } from "../middleware/session";
 import type { Actor } from "../policies/actor";

@@ -19,7 +19,8 @@ export async function loadNotebook(
   const notebook = await findNotebook(db, id, actor.id);
   if (!notebook) throw notFound("notebook");
   const facts = notebookFacts(notebook);
-  const isSeen = notebookPolicy.read(actor, facts) || (orInBin && notebookPolicy.restoreFromBin(actor, facts));
+  const isSeen =
+    notebookPolicy.read(actor, facts) || (orInBin && notebookPolicy.restoreFromBin(actor, facts));
   if (!isSeen) throw notFound("notebook");
   return notebook;
 }

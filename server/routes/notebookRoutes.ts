@@ -46,7 +46,8 @@ export function notebookRoutes({ db, summaries }: { db: Db; summaries: Summaries
     return presentFresh(id, actor);
   };
 
-  const presentFresh = async (id: string, actor: Actor) => presentNotebook(await loadNotebook(db, id, actor), actor);
+  const presentFresh = async (id: string, actor: Actor) =>
+    presentNotebook(await loadNotebook(db, id, actor), actor);
 
   router.get("/notebooks", async (req, res) => {
     const actor = requireActor(req);
@@ -61,7 +62,9 @@ export function notebookRoutes({ db, summaries }: { db: Db; summaries: Summaries
     const actor = requireActor(req);
     const { title, groupId, document } = createNotebookBody.parse(req.body);
     await authoriseIn(groupId, actor);
-    res.status(201).json(await create(actor, groupId, document ? { ...document, title } : emptyDocument(title)));
+    res
+      .status(201)
+      .json(await create(actor, groupId, document ? { ...document, title } : emptyDocument(title)));
   });
 
   router.post("/notebooks/import", async (req, res) => {
@@ -157,5 +160,8 @@ function readImport(text: string) {
     .filter(({ level }) => level === "fault")
     .map(({ line, message, code }) => ({ path: `line ${line ?? 1}`, message, code }));
   const [first] = issues;
-  throw invalid(`The file cannot be imported. ${first ? `${first.path}: ${first.message}` : ""}`.trim(), issues);
+  throw invalid(
+    `The file cannot be imported. ${first ? `${first.path}: ${first.message}` : ""}`.trim(),
+    issues,
+  );
 }

@@ -40,7 +40,8 @@ export function sessionRoutes({ db, auth, demo, signInLimits }: Parts): Router {
     const { email } = demoSignInBody.parse(req.body);
     const isDemo = demo && demoAccounts.some((account) => account.email === email);
     const user = isDemo ? await findUserByEmail(db, email) : undefined;
-    if (!user) throw notFound("demonstration account");
+    // Whoever had the address before the demonstration came has a password, and keeps it.
+    if (!user || user.passwordHash !== null) throw notFound("demonstration account");
 
     const earlier = sessionOf(req);
     if (earlier) await auth.closeSession(earlier.sessionId);

@@ -30,7 +30,8 @@ export function versionRoutes(parts: { db: Db; evaluator: Evaluator; summaries: 
     const actor = requireActor(req);
     const { message, revision } = keepVersionBody.parse(req.body);
     const notebook = await loadNotebook(db, notebookId(req), actor);
-    if (!notebookPolicy.keepVersion(actor, notebookFacts(notebook))) throw forbidden("keep a version of this notebook");
+    if (!notebookPolicy.keepVersion(actor, notebookFacts(notebook)))
+      throw forbidden("keep a version of this notebook");
     if (notebook.revision !== revision) throw staleRevision(draftStateOf(notebook));
 
     const answer = await evaluator.evaluate(notebook.document, { isUrgent: true });

@@ -31,7 +31,8 @@ export async function buildNotebook(
   const { owner, document = buildDocument(), groupId = null, groupRole, shares = [], versions = [] } = parts;
   const { id } = await createNotebook(db, { ownerId: owner.id, groupId, document, at });
   if (groupRole) await shareWithGroup(db, { notebookId: id, role: groupRole });
-  for (const [{ id: userId }, role] of shares) await shareWithPerson(db, { notebookId: id, userId, role, at });
+  for (const [{ id: userId }, role] of shares)
+    await shareWithPerson(db, { notebookId: id, userId, role, at });
   for (const message of versions) {
     const { result } = evaluateDocument(document);
     await keepVersion(db, { notebookId: id, revision: 1, message, result, actorId: owner.id, at });

@@ -20,12 +20,16 @@ describe("the settings", () => {
   });
 
   it("keep only the origin of a public address", () => {
-    expect(readEnv({ TENUITY_ORIGIN: "https://tenuity.example/some/page" }).origin).toBe("https://tenuity.example");
+    expect(readEnv({ TENUITY_ORIGIN: "https://tenuity.example/some/page" }).origin).toBe(
+      "https://tenuity.example",
+    );
   });
 
   it("name every variable that is wrong", () => {
     const variables = { PORT: "many", TENUITY_DEMO: "yes", TENUITY_ORIGIN: "tenuity", TENUITY_PROXIES: "-1" };
-    expect(() => readEnv(variables)).toThrow(/PORT[\s\S]*TENUITY_DEMO[\s\S]*TENUITY_ORIGIN[\s\S]*TENUITY_PROXIES/);
+    expect(() => readEnv(variables)).toThrow(
+      /PORT[\s\S]*TENUITY_DEMO[\s\S]*TENUITY_ORIGIN[\s\S]*TENUITY_PROXIES/,
+    );
   });
 
   it("refuse the demonstration in production", () => {

@@ -29,7 +29,9 @@ describe("the lock on a data folder", () => {
 
   it("refuses a second holder, naming the first and what to do", () => {
     const lock = takeFolderLock(folder);
-    expect(() => takeFolderLock(folder)).toThrow(new RegExp(`in use by process ${process.pid}.*TENUITY_DATA`));
+    expect(() => takeFolderLock(folder)).toThrow(
+      new RegExp(`in use by process ${process.pid}.*TENUITY_DATA`),
+    );
     lock.release();
     takeFolderLock(folder).release();
   });

@@ -15,7 +15,9 @@ export async function openTestDatabase() {
 
 function migrationsHash(): string {
   const hash = createHash("sha256");
-  for (const name of readdirSync(places.migrations).filter((name) => name.endsWith(".sql")).sort()) {
+  for (const name of readdirSync(places.migrations)
+    .filter((name) => name.endsWith(".sql"))
+    .sort()) {
     hash.update(name).update(readFileSync(path.join(places.migrations, name)));
   }
   return hash.digest("hex").slice(0, 16);

@@ -67,10 +67,17 @@ export async function listGroupMembers(db: Db, groupId: string): Promise<GroupMe
     .from(groupMembers)
     .innerJoin(users, eq(users.id, groupMembers.userId))
     .where(eq(groupMembers.groupId, groupId))
-    .orderBy(sql`array_position(array['lead', 'researcher', 'guest'], ${groupMembers.role})`, asc(users.name));
+    .orderBy(
+      sql`array_position(array['lead', 'researcher', 'guest'], ${groupMembers.role})`,
+      asc(users.name),
+    );
 }
 
-export async function findMembership(db: Db, groupId: string, userId: string): Promise<GroupRole | undefined> {
+export async function findMembership(
+  db: Db,
+  groupId: string,
+  userId: string,
+): Promise<GroupRole | undefined> {
   const [membership] = await db
     .select({ role: groupMembers.role })
     .from(groupMembers)

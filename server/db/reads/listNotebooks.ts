@@ -36,7 +36,9 @@ export async function listNotebooks(db: Db, actorId: string, { q, order, place }
     .leftJoin(groupMembers, membershipOf(actorId))
     .where(
       and(
-        place === "bin" ? and(isMine, isNotNull(notebooks.deletedAt)) : and(isTied, isNull(notebooks.deletedAt)),
+        place === "bin"
+          ? and(isMine, isNotNull(notebooks.deletedAt))
+          : and(isTied, isNull(notebooks.deletedAt)),
         q.trim() === "" ? undefined : sought,
       ),
     )

@@ -53,7 +53,10 @@ describe("sessions", () => {
     const { id } = await buildUser(db);
     const header = `tenuity_session=${idIn(await auth.openSession(id))}`;
     expect((await auth.readSession(header))?.cookie).toBeNull();
-    await db.update(sessions).set({ expiresAt: new Date(Date.now() + 14 * day) }).where(eq(sessions.userId, id));
+    await db
+      .update(sessions)
+      .set({ expiresAt: new Date(Date.now() + 14 * day) })
+      .where(eq(sessions.userId, id));
     expect((await auth.readSession(header))?.cookie).toMatch(/tenuity_session=/);
     const [row] = await db.select().from(sessions).where(eq(sessions.userId, id));
     expect(row!.expiresAt.getTime()).toBeGreaterThan(Date.now() + 29 * day);

@@ -1,6 +1,11 @@
 import { describe, expect, it } from "vitest";
 import type { Actor } from "../../../server/policies/actor";
-import { notebookAbilitiesOf, notebookPolicy, notebookRoleOf, type NotebookFacts } from "../../../server/policies/notebookPolicy";
+import {
+  notebookAbilitiesOf,
+  notebookPolicy,
+  notebookRoleOf,
+  type NotebookFacts,
+} from "../../../server/policies/notebookPolicy";
 import { notebookActions, type NotebookAction } from "../../../shared/schemas/roles";
 
 const tamsin: Actor = { id: "tamsin", name: "Tamsin Orevale", email: "t.orevale@carrow.example" };
@@ -35,8 +40,18 @@ const table: Row[] = [
   ["lead, group comments", other, { actorGroupRole: "lead", groupRole: "commenter" }, "y y - - - - - -"],
   ["lead, group writes", other, { actorGroupRole: "lead", groupRole: "co-author" }, "y y y y y y - -"],
   ["researcher, private draft", other, { actorGroupRole: "researcher" }, "- - - - - - - -"],
-  ["researcher, group reads", other, { actorGroupRole: "researcher", groupRole: "reader" }, "y y - - - - - -"],
-  ["researcher, group writes", other, { actorGroupRole: "researcher", groupRole: "co-author" }, "y y y y y y - -"],
+  [
+    "researcher, group reads",
+    other,
+    { actorGroupRole: "researcher", groupRole: "reader" },
+    "y y - - - - - -",
+  ],
+  [
+    "researcher, group writes",
+    other,
+    { actorGroupRole: "researcher", groupRole: "co-author" },
+    "y y y y y y - -",
+  ],
   ["guest, private draft", other, { actorGroupRole: "guest" }, "- - - - - - - -"],
   ["guest, group reads", other, { actorGroupRole: "guest", groupRole: "reader" }, "y y - - - - - -"],
   ["guest, group writes", other, { actorGroupRole: "guest", groupRole: "co-author" }, "y y - - - - - -"],
@@ -58,7 +73,12 @@ const table: Row[] = [
   ["co-author, in the bin", other, { isDeleted: true, shareRole: "co-author" }, "- - - - - - - -"],
   ["commenter, in the bin", other, { isDeleted: true, shareRole: "commenter" }, "- - - - - - - -"],
   ["reader, in the bin", other, { isDeleted: true, shareRole: "reader" }, "- - - - - - - -"],
-  ["lead, in the bin", other, { isDeleted: true, actorGroupRole: "lead", groupRole: "co-author" }, "- - - - - - - -"],
+  [
+    "lead, in the bin",
+    other,
+    { isDeleted: true, actorGroupRole: "lead", groupRole: "co-author" },
+    "- - - - - - - -",
+  ],
 ];
 
 describe("who may do what with a notebook", () => {
@@ -72,7 +92,8 @@ describe("who may do what with a notebook", () => {
       const notebook = { ...private_, ...facts };
       const abilities = notebookAbilitiesOf(actor, notebook);
       expect(Object.keys(abilities).sort()).toEqual([...notebookActions].sort());
-      for (const action of notebookActions) expect(abilities[action]).toBe(notebookPolicy[action](actor, notebook));
+      for (const action of notebookActions)
+        expect(abilities[action]).toBe(notebookPolicy[action](actor, notebook));
     }
   });
 
