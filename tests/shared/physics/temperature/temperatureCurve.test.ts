@@ -88,7 +88,10 @@ describe("temperatureCurve", () => {
         const curve = temperatureCurve({ ...standard, base, exosphere } as TemperatureProfile, radius);
         const [cool, warm] = [curve.at(low), curve.at(high)];
         return (
-          cool >= base * (1 - 1e-15) && warm <= exosphere && cool <= warm + 1e-12 && curve.slopeAt(low) >= 0
+          cool >= base - 2.3e-16 * exosphere &&
+          warm <= exosphere &&
+          cool <= warm + 1e-12 &&
+          curve.slopeAt(low) >= 0
         );
       }),
       { seed },
