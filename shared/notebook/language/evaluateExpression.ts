@@ -21,7 +21,7 @@ import { languageLimits } from "./readValue";
 import { functionNames, type FunctionName } from "./reservedWord";
 import type { Scope } from "./scope";
 import type { CallNode, MeasuredNode, NameNode, PowerNode, ProductNode, SumNode, ValueNode } from "./syntax";
-import { findUnit, unitsForCompletion } from "./units";
+import { findUnit, isCelsius, unitsForCompletion } from "./units";
 
 export type Evaluated = { ok: true; quantity: Quantity; notes: Note[] } | { ok: false; notes: Note[] };
 
@@ -61,7 +61,24 @@ function failUnknown(path: string, range: TextRange, scope: Scope): never {
   );
 }
 
+/** `20 °C`, with the kelvin that is meant. */
+function refuseCelsius({ operand, unit }: MeasuredNode, range: TextRange, sign: 1 | -1): void {
+  const [factor, second] = unit.factors;
+  if (second !== undefined || !isCelsius(factor.symbol) || operand.type !== "number") return;
+  const isWhole = unit.range.to === range.to && operand.powerOfTen === 0;
+  const decimals = Math.max(2, operand.digits.split(".")[1]?.length ?? 0);
+  const kelvin = (sign * Number(operand.digits) + 273.15).toFixed(Math.min(decimals, 20));
+  const message = `*${factor.symbol}* counts from a zero of its own, so it is no unit here. Temperatures are in kelvin.`;
+  fail(
+    "celsius",
+    unit.range,
+    message,
+    isWhole ? changeTo(range, `${kelvin.replace(/\.?0+$/, "")} K`) : undefined,
+  );
+}
+
 function evaluateMeasured(node: MeasuredNode, scope: Scope): Quantity {
+  refuseCelsius(node, node.range, 1);
   const measure = measureOf(node.unit);
   if ("level" in measure) throw new ExpressionFault([unitOrName(measure, node, scope)]);
   if (node.operand.type === "number") {
@@ -82,11 +99,16 @@ function unitOrName(unknown: Note, node: MeasuredNode, scope: Scope): Note {
   const isName = scope.lookup(symbol) !== undefined || findConstant(symbol) !== undefined;
   if (!isName || unknown.range === undefined) return unknown;
   const at = node.operand.range.to;
-  return fault("side_by_side", unknown.range, `Write * between a number and the name *${symbol}*.`, {
-    label: "Write *",
-    range: { from: at, to: at },
-    replacement: " *",
-  });
+  return fault(
+    "side_by_side",
+    unknown.range,
+    `A multiplication sign is missing before the name *${symbol}*.`,
+    {
+      label: "Multiply",
+      range: { from: at, to: at },
+      replacement: " *",
+    },
+  );
 }
 
 function evaluateSum(node: SumNode, scope: Scope): Quantity {
@@ -248,6 +270,7 @@ function evaluate(node: ValueNode, scope: Scope): Quantity {
     case "measured":
       return evaluateMeasured(node, scope);
     case "negative": {
+      if (node.operand.type === "measured") refuseCelsius(node.operand, node.range, -1);
       const { value, dimension } = evaluate(node.operand, scope);
       return { value: 0 - value, dimension };
     }

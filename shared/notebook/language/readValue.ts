@@ -1,8 +1,8 @@
 /** From the parsed tree of one value to the plain nodes that are evaluated. */
-import type { SyntaxNode, Tree } from "@lezer/common";
+import type { SyntaxNode } from "@lezer/common";
 import type { Note, TextRange } from "../result";
 import { changeTo, fault, quoted } from "./notes";
-import { valueParser } from "./parser";
+import { parseValue } from "./parser";
 import { decimalCommaFault, fromSuperscript, readNumber } from "./readNumber";
 import { syntaxFault } from "./syntaxFault";
 import type { CallNode, ItemNode, NameNode, UnitFactor, UnitNode, ValueNode } from "./syntax";
@@ -76,17 +76,6 @@ function uniquePath(conversion: Conversion, path: string): string {
   return count === 1 ? path : `${path}[${count}]`;
 }
 
-function firstError(tree: Tree): number | null {
-  let at: number | null = null;
-  tree.iterate({
-    enter(node) {
-      if (at === null && node.type.isError) at = node.from;
-      return at === null;
-    },
-  });
-  return at;
-}
-
 function convertName(conversion: Conversion, node: SyntaxNode): NameNode {
   return { type: "name", path: plainDigits(textOf(conversion, node)), range: rangeOf(conversion, node) };
 }
@@ -103,9 +92,7 @@ function collectUnit(
   node: SyntaxNode,
   sign: 1 | -1,
   factors: UnitFactor[],
-  depth: number,
 ): void {
-  if (depth > languageLimits.depth) return;
   if (node.name === "UnitFactor") {
     const [name, exponentNode] = partsOf(node);
     if (exponentNode && conversion.text.slice(name.to, exponentNode.from).includes("**"))
@@ -131,12 +118,12 @@ function collectUnit(
   }
   const inner = node.name === "Quotient" ? (-sign as 1 | -1) : sign;
   for (const part of partsOf(node))
-    if (part.name !== "Per") collectUnit(conversion, part, inner, factors, depth + 1);
+    if (part.name !== "Per") collectUnit(conversion, part, inner, factors);
 }
 
 function convertUnit(conversion: Conversion, node: SyntaxNode): UnitNode {
   const factors: UnitFactor[] = [];
-  collectUnit(conversion, node, 1, factors, 0);
+  collectUnit(conversion, node, 1, factors);
   return { factors, text: textOf(conversion, node), range: rangeOf(conversion, node) };
 }
 
@@ -187,7 +174,8 @@ function convert(conversion: Conversion, node: SyntaxNode, path: string, depth: 
     conversion.notes.push(tooDeep(range));
     return { type: "broken", range };
   }
-  const inside = (part: SyntaxNode): ValueNode => convert(conversion, part, path, depth + 1);
+  const inside = (part: SyntaxNode): ValueNode => convert(conversion, part, path, depth);
+  const deeper = (part: SyntaxNode): ValueNode => convert(conversion, part, path, depth + 1);
   const parts = partsOf(node);
   switch (node.name) {
     case "Number": {
@@ -211,19 +199,17 @@ function convert(conversion: Conversion, node: SyntaxNode, path: string, depth: 
     case "Call":
       return convertCall(conversion, node, path, depth + 1);
     case "Group":
-    case "Positive": {
-      const inner = inside(parts[parts.length - 1]);
-      return inner;
-    }
+    case "Positive":
+      return deeper(parts[parts.length - 1]);
     case "Negative":
-      return { type: "negative", operand: inside(parts[1]), range };
+      return { type: "negative", operand: deeper(parts[1]), range };
     case "Measured":
       return { type: "measured", operand: inside(parts[0]), unit: convertUnit(conversion, parts[1]), range };
     case "Power": {
       const between = conversion.text.slice(parts[0].to, parts[1].from);
       if (between.includes("**"))
         conversion.notes.push(doubleStarFault(conversion, parts[0].to, parts[1].from));
-      return { type: "power", base: inside(parts[0]), exponent: inside(parts[1]), range };
+      return { type: "power", base: inside(parts[0]), exponent: deeper(parts[1]), range };
     }
     case "Raised": {
       const exponent = readNumber(
@@ -287,13 +273,12 @@ function convert(conversion: Conversion, node: SyntaxNode, path: string, depth: 
  */
 export function readValue(text: string, shift: number, key: string): { node: ValueNode; notes: Note[] } {
   const range = { from: shift, to: shift + text.length };
-  const tree = valueParser.parse(text);
-  const errorAt = firstError(tree);
-  if (errorAt !== null)
-    return { node: { type: "broken", range }, notes: [syntaxFault(text, errorAt, shift)] };
+  const parsed = parseValue(text);
+  if ("stoppedAt" in parsed)
+    return { node: { type: "broken", range }, notes: [syntaxFault(text, parsed.stoppedAt, shift)] };
 
   const conversion: Conversion = { text, shift, notes: [], paths: new Map() };
-  const items = partsOf(tree.topNode).map((item) => convertItem(conversion, item, key, 0));
+  const items = partsOf(parsed.tree.topNode).map((item) => convertItem(conversion, item, key, 0));
   const [first] = items;
   const isList = items.length > 1 || first?.label !== null || first.name !== null;
   const node: ValueNode = isList ? { type: "list", items, range } : first.value;

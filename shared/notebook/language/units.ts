@@ -191,8 +191,7 @@ const sameAs = (replacement: string): ForeignUnit => ({
   replacement,
 });
 const offset: ForeignUnit = {
-  message:
-    "Temperatures are in kelvin; a scale with its own zero can't be multiplied. Add 273.15 and write K.",
+  message: "It counts from a zero of its own; temperatures are in kelvin.",
 };
 
 /** Units that people write, and what to write instead. */
@@ -282,3 +281,6 @@ const foreignUnits: ReadonlyMap<string, ForeignUnit> = new Map(
 );
 
 export const findForeignUnit = (symbol: string): ForeignUnit | undefined => foreignUnits.get(symbol);
+
+/** A temperature scale with a zero of its own. */
+export const isCelsius = (symbol: string): boolean => foreignUnits.get(symbol) === offset;
