@@ -65,3 +65,5 @@ export {
   type ThermalEscapeInput,
 } from "./escape/thermalEscape";
 export { thermalSpeed } from "./escape/thermalSpeed";
+
+export { solveColumn } from "./column/solveColumn";
