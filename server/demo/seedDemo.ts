@@ -1,0 +1,121 @@
+import { readFile } from "node:fs/promises";
+import path from "node:path";
+import { inArray } from "drizzle-orm";
+import type { NotebookDocument } from "../../shared/notebook/document";
+import { readNotebookFile } from "../../shared/notebook/notebookFile";
+import type { KeptResult } from "../../shared/schemas/results";
+import { demoAccounts } from "../auth/demoAccounts";
+import { addMember } from "../commands/addMember";
+import { createAccount } from "../commands/createAccount";
+import { createGroup } from "../commands/createGroup";
+import { createNotebook } from "../commands/createNotebook";
+import { keepVersion } from "../commands/keepVersion";
+import { saveDraft } from "../commands/saveDraft";
+import { shareWithGroup } from "../commands/shareWithGroup";
+import { shareWithPerson } from "../commands/shareWithPerson";
+import type { Db } from "../db/client";
+import { users } from "../db/tables/users";
+import type { Evaluator } from "../jobs/evaluator";
+import { places } from "../places";
+import { demoGroup, demoNotebooks, type DemoNotebook, type DemoPerson } from "./demoNotebooks";
+
+const day = 86_400_000;
+
+interface PreparedState {
+  document: NotebookDocument;
+  kept: { message: string; result: KeptResult } | null;
+  by: DemoPerson;
+  at: Date;
+}
+
+/**
+ * Puts the demonstration in place, all or nothing: an invented group, its people, their notebooks with kept
+ * versions. Acts for the people it invents. Answers false, and changes nothing, where any of them is there already.
+ */
+export async function seedDemo(db: Db, { evaluator, now }: { evaluator: Evaluator; now: Date }): Promise<boolean> {
+  const addresses = demoAccounts.map(({ email }) => email);
+  const present = await db.select({ id: users.id }).from(users).where(inArray(users.email, addresses));
+  if (present.length > 0) return false;
+
+  const histories = await Promise.all(
+    demoNotebooks.map(async (notebook) => ({ notebook, states: await prepare(notebook, evaluator, now) })),
+  );
+  await db.transaction(async (tx) => {
+    const { groupId, idOf } = await seedPeople(tx, now);
+    for (const { notebook, states } of histories) await seedNotebook(tx, { notebook, states, groupId, idOf });
+  });
+  return true;
+}
+
+/** The states that a notebook went through, oldest first, with the results of those that were kept. */
+async function prepare(notebook: DemoNotebook, evaluator: Evaluator, now: Date): Promise<PreparedState[]> {
+  const text = await readFile(path.join(places.demoNotebooks, notebook.file), "utf8");
+  const final = readDocument(notebook.file, text);
+  const states: PreparedState[] = [];
+  for (const { message, by, daysAgo, differences } of notebook.versions) {
+    const document = asItWas(final, notebook.file, differences);
+    const answer = await evaluator.evaluate(document);
+    if (!answer.ok) throw new Error(`${notebook.file} could not be evaluated: ${answer.reason}`);
+    const { result } = answer.outcome;
+    states.push({ document, kept: { message, result }, by, at: new Date(now.getTime() - daysAgo * day) });
+  }
+  const savedAt = new Date(now.getTime() - (notebook.hoursAgo * day) / 24);
+  return [...states, { document: final, kept: null, by: notebook.owner, at: savedAt }];
+}
+
+function readDocument(file: string, text: string): NotebookDocument {
+  const reading = readNotebookFile(text, () => crypto.randomUUID());
+  if (reading.ok) return reading.document;
+  throw new Error(`${file}: ${reading.notes.map(({ line, message }) => `line ${line}: ${message}`).join(" ")}`);
+}
+
+/** A document before its later changes; its cells keep their ids. */
+function asItWas(final: NotebookDocument, file: string, differences: [string, string][]): NotebookDocument {
+  const cells = final.cells.map((cell) => ({ ...cell }));
+  for (const [now, then] of differences) {
+    const cell = cells.find(({ text }) => text.includes(now));
+    if (!cell) throw new Error(`${file}: no cell says ${JSON.stringify(now)}`);
+    cell.text = cell.text.replace(now, () => then);
+  }
+  return { ...final, cells };
+}
+
+async function seedPeople(tx: Db, now: Date) {
+  const at = new Date(now.getTime() - demoGroup.daysAgo * day);
+  const ids = new Map<string, string>();
+  for (const { name, email } of demoAccounts) {
+    const { id } = await createAccount(tx, { name, email, passwordHash: null, at });
+    ids.set(email, id);
+  }
+  const addressOf = (person: DemoPerson): string => `${person}@carrow.example`;
+  const idOf = (person: DemoPerson): string => ids.get(addressOf(person))!;
+  const { name, code, lead, members } = demoGroup;
+  const { id: groupId } = await createGroup(tx, { name, code, founderId: idOf(lead), at });
+  for (const [person, role] of members) await addMember(tx, { groupId, email: addressOf(person), role, at });
+  return { groupId, idOf };
+}
+
+async function seedNotebook(
+  tx: Db,
+  parts: {
+    notebook: DemoNotebook;
+    states: PreparedState[];
+    groupId: string;
+    idOf: (person: DemoPerson) => string;
+  },
+): Promise<void> {
+  const { notebook, states, groupId, idOf } = parts;
+  const [first] = states;
+  const { document, at } = first!;
+  const { id: notebookId } = await createNotebook(tx, { ownerId: idOf(notebook.owner), groupId, document, at });
+  let revision = 1;
+  for (const state of states) {
+    const actorId = idOf(state.by);
+    ({ revision } = await saveDraft(tx, { notebookId, revision, document: state.document, actorId, at: state.at }));
+    if (state.kept) await keepVersion(tx, { notebookId, revision, ...state.kept, actorId, at: state.at });
+  }
+  await shareWithGroup(tx, { notebookId, role: notebook.groupRole });
+  for (const [person, role] of notebook.shares) {
+    await shareWithPerson(tx, { notebookId, userId: idOf(person), role, at });
+  }
+}
