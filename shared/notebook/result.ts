@@ -1,5 +1,6 @@
 /** What a notebook answers: the same from the page, the server and the command line. SI only. */
 import type { CellKind } from "./document";
+import type { Strip } from "./summary";
 
 export type NoteLevel = "remark" | "caution" | "fault";
 export type CellStatus = "fine" | "caution" | "fault";
@@ -66,12 +67,14 @@ export interface CellEvaluation {
   id: string;
   result: CellResult;
   understood: Understood[];
-  /** Entries left out that act: `criterion = bulk`. */
-  defaults: { key: string; text: string }[];
+  /** Entries left out that act: `criterion = bulk`, and in `note` what that means here. */
+  defaults: { key: string; text: string; note?: string }[];
   /** Names of the cells above that this one uses. */
   uses: string[];
   /** Gases in the order written, for a column or an escape cell. */
   gases: string[];
+  /** Of a column. */
+  strip?: Strip;
 }
 
 export interface Evaluation {

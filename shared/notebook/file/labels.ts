@@ -28,14 +28,9 @@ export function decodeTitle(markdown: string): string {
   return plainText(fromMarkdown(markdown)).replace(/\p{Cc}+/gu, " ");
 }
 
-interface TextualNode {
-  value?: unknown;
-  alt?: unknown;
-  children?: readonly TextualNode[];
-}
-
-function plainText(node: TextualNode): string {
-  if (typeof node.value === "string") return node.value;
-  if (typeof node.alt === "string") return node.alt;
-  return (node.children ?? []).map(plainText).join("");
+/** The text in a piece of a Markdown tree, marks left out. */
+function plainText(node: object): string {
+  if ("value" in node && typeof node.value === "string") return node.value;
+  if ("alt" in node && typeof node.alt === "string") return node.alt;
+  return "children" in node && Array.isArray(node.children) ? node.children.map(plainText).join("") : "";
 }

@@ -1,0 +1,18 @@
+/** What each kind of cell takes: one schema for evaluation, completion, hover, forms and help. */
+import type { CellKind } from "./document";
+import { bodySchema } from "./kinds/body";
+import type { CellSchema } from "./kinds/cellSchema";
+import { columnSchema } from "./kinds/column";
+import { escapeSchema } from "./kinds/escape";
+import { gasSchema } from "./kinds/gas";
+import { proseSchema } from "./kinds/prose";
+import { valuesSchema } from "./kinds/values";
+
+export const cellSchemas: Readonly<Record<CellKind, CellSchema>> = {
+  prose: proseSchema,
+  values: valuesSchema,
+  body: bodySchema,
+  gas: gasSchema,
+  column: columnSchema,
+  escape: escapeSchema,
+};

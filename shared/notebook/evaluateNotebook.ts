@@ -1,0 +1,87 @@
+import { cellSchemas } from "./cellSchemas";
+import type { Cell, NotebookDocument } from "./document";
+import { engineVersion } from "./engine";
+import { evaluateCell, type EvaluatedCell } from "./evaluation/evaluateCell";
+import {
+  addCell,
+  answersTheSame,
+  nothingAbove,
+  recordQuestions,
+  surroundingsOf,
+  usedNames,
+  type NamePlaces,
+  type RecordedSurroundings,
+} from "./evaluation/surroundings";
+import { parseEntries } from "./language/parseEntries";
+import type { CellEvaluation, Evaluation } from "./result";
+
+interface RememberedCell {
+  cell: Cell;
+  unitSystem: NotebookDocument["unitSystem"];
+  questions: RecordedSurroundings["questions"];
+  evaluated: EvaluatedCell;
+  evaluation: CellEvaluation;
+}
+
+/** What one evaluation leaves for the next: by cell id, the answer and all that it rested on. */
+export type EvaluationMemory = ReadonlyMap<string, RememberedCell>;
+
+/**
+ * Answers a notebook, from top to bottom. A pure function of the document: `previous` makes it faster, never
+ * different. A cell whose text and whose view of the cells above have not changed keeps its answer, the same object.
+ *
+ * Never throws: whatever cannot be answered is said in the notes of a cell.
+ */
+export function evaluateNotebook(
+  document: NotebookDocument,
+  previous?: EvaluationMemory,
+): { evaluation: Evaluation; memory: EvaluationMemory } {
+  const memory = new Map<string, RememberedCell>();
+  const places = namePlaces(document);
+  let above = nothingAbove;
+
+  const cells = document.cells.map((cell, place) => {
+    const surroundings = surroundingsOf(above, places, place);
+    const last = previous?.get(cell.id);
+    const remembered =
+      last && isSameCell(last, cell, document) && answersTheSame(last.questions, surroundings)
+        ? last
+        : answer(cell, recordQuestions(surroundings), document, last?.evaluated);
+    memory.set(cell.id, remembered);
+    above = addCell(above, remembered.evaluated.above);
+    return remembered.evaluation;
+  });
+  return { evaluation: { engine: engineVersion, title: document.title, cells }, memory };
+}
+
+function answer(
+  cell: Cell,
+  surroundings: RecordedSurroundings,
+  { unitSystem }: NotebookDocument,
+  last: EvaluatedCell | undefined,
+): RememberedCell {
+  const evaluated = evaluateCell(cell, surroundings, unitSystem, last);
+  const { result, understood, defaults, gases, strip } = evaluated;
+  const uses = usedNames(surroundings.questions);
+  const evaluation = { id: cell.id, result, understood, defaults, uses, gases, ...(strip ? { strip } : {}) };
+  return { cell, unitSystem, questions: surroundings.questions, evaluated, evaluation };
+}
+
+function isSameCell(last: RememberedCell, cell: Cell, { unitSystem }: NotebookDocument): boolean {
+  const { kind, name, text } = last.cell;
+  return kind === cell.kind && name === cell.name && text === cell.text && last.unitSystem === unitSystem;
+}
+
+/** Where each name is first defined: cells, and entries of `values` cells. */
+function namePlaces({ cells }: NotebookDocument): NamePlaces {
+  const places = new Map<string, number>();
+  const define = (name: string, place: number) => {
+    if (name !== "" && !places.has(name)) places.set(name, place);
+  };
+  cells.forEach((cell, place) => {
+    if (cell.kind !== "prose") define(cell.name, place);
+    if (!cellSchemas[cell.kind].takesAnyKey) return;
+    for (const { key } of parseEntries(cell.text).entries) define(key, place);
+  });
+  return places;
+}

@@ -1,0 +1,110 @@
+import { cellSchemas } from "../cellSchemas";
+import type { Cell } from "../document";
+import { evaluateBody } from "../kinds/body";
+import type { CellAnswer } from "../kinds/cellAnswer";
+import { evaluateColumn } from "../kinds/column";
+import { evaluateEscape } from "../kinds/escape";
+import { evaluateGas } from "../kinds/gas";
+import { evaluateValues } from "../kinds/values";
+import { locateNotes } from "../language/locateNotes";
+import type { CellEvaluation, CellResult, CellStatus, Note } from "../result";
+import { openCell, type OpenCell } from "./openCell";
+import type { CellAbove, RecordedSurroundings } from "./surroundings";
+
+export interface EvaluatedCell extends Pick<
+  CellEvaluation,
+  "result" | "understood" | "defaults" | "gases" | "strip"
+> {
+  /** What the cells below see of it. */
+  above: CellAbove;
+}
+
+const evaluators: Readonly<Record<Cell["kind"], (cell: OpenCell) => CellAnswer>> = {
+  prose: () => ({}),
+  values: evaluateValues,
+  body: evaluateBody,
+  gas: evaluateGas,
+  column: evaluateColumn,
+  escape: evaluateEscape,
+};
+
+/** One cell in its surroundings. Never throws: what cannot be answered becomes a fault of the cell. */
+export function evaluateCell(
+  cell: Cell,
+  surroundings: RecordedSurroundings,
+  unitSystem: "SI" | "cgs",
+  last: EvaluatedCell | undefined,
+): EvaluatedCell {
+  const text = cell.kind === "prose" ? "" : cell.text;
+  const lastModel = last?.above.model ?? null;
+  const open = openCell({ ...cell, text }, cellSchemas[cell.kind], surroundings, unitSystem, lastModel);
+  const answer = evaluateSafely(open, cell.kind);
+  const values = finiteValues(open, answer.values ?? {});
+  const notes = orderNotes(locateNotes(open.notes, open.text, open.entries));
+  const result: CellResult = {
+    kind: cell.kind,
+    name: cell.name,
+    status: worst(notes),
+    values,
+    tables: answer.tables ?? {},
+    ...(answer.profiles ? { profiles: answer.profiles } : {}),
+    notes,
+  };
+  return {
+    result,
+    understood: open.understood,
+    defaults: open.defaults,
+    gases: answer.gases ?? [],
+    ...(answer.strip ? { strip: answer.strip } : {}),
+    above: {
+      kind: cell.kind,
+      name: cell.name,
+      values,
+      globals: answer.globals ?? {},
+      model: answer.model ?? null,
+      isFaulty: result.status === "fault",
+    },
+  };
+}
+
+function evaluateSafely(cell: OpenCell, kind: Cell["kind"]): CellAnswer {
+  try {
+    return evaluators[kind](cell);
+  } catch (error) {
+    const reason = error instanceof Error ? error.message : String(error);
+    cell.say("fault", "not_computed", `This cell cannot be computed. ${reason}`);
+    return {};
+  }
+}
+
+/** Leaves out what overflowed, and says so. */
+function finiteValues(cell: OpenCell, values: CellResult["values"]): CellResult["values"] {
+  const broken = Object.keys(values).filter((name) => {
+    const { value } = values[name];
+    return typeof value === "number" && !Number.isFinite(value);
+  });
+  if (broken.length === 0) return values;
+  cell.say(
+    "fault",
+    "beyond_numbers",
+    `Beyond what can be computed: ${broken.map((name) => `*${name}*`).join(", ")}.`,
+  );
+  return Object.fromEntries(Object.entries(values).filter(([name]) => !broken.includes(name)));
+}
+
+const severity: Readonly<Record<Note["level"], number>> = { fault: 0, caution: 1, remark: 2 };
+
+/** Faults first, then by place; notes on the cell as a whole before those on a line. */
+function orderNotes(notes: Note[]): Note[] {
+  return notes.toSorted(
+    (a, b) =>
+      severity[a.level] - severity[b.level] ||
+      (a.line ?? 0) - (b.line ?? 0) ||
+      (a.range?.from ?? 0) - (b.range?.from ?? 0),
+  );
+}
+
+function worst(notes: readonly Note[]): CellStatus {
+  if (notes.some(({ level }) => level === "fault")) return "fault";
+  return notes.some(({ level }) => level === "caution") ? "caution" : "fine";
+}

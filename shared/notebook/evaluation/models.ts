@@ -1,0 +1,29 @@
+/** What a cell hands to the cells below it, besides its values. Bare numbers are SI. */
+import type { Column, CollisionParameter, ColumnInput } from "../../physics";
+
+export interface BodyModel {
+  kind: "body";
+  gravitationalParameter: number;
+  radius: number;
+  centrifugal: ColumnInput["centrifugal"];
+  hillRadius: number | null;
+}
+
+/** What a gas cell states; null where the handbook goes on to hold. */
+export interface GasModel {
+  kind: "gas";
+  formula: string;
+  mass: number | null;
+  collisionDiameter: number | null;
+  thermalDiffusionFactor: number | null;
+  /** By the formula of the other gas. */
+  collisions: Readonly<Record<string, CollisionParameter>>;
+}
+
+export interface ColumnModel {
+  kind: "column";
+  column: Column;
+  body: BodyModel;
+}
+
+export type CellModel = BodyModel | GasModel | ColumnModel;

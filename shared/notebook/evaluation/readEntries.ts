@@ -1,0 +1,85 @@
+/** Entries of a cell, read as its schema says; whatever is wrong goes to the notes of the cell. */
+import { handbookGases } from "../../physics";
+import type { CellKind } from "../document";
+import { inWords } from "../language/notes";
+import { readQuantity } from "../language/readQuantity";
+import { readReference } from "../language/readReference";
+import type { Reading } from "../language/reading";
+import type { Entry, ValueNode } from "../language/syntax";
+import { understoodText } from "../language/understoodText";
+import type { CellModel } from "./models";
+import type { OpenCell } from "./openCell";
+
+/** undefined where the entry is missing or has a fault. */
+export function readEntry<Value>(
+  cell: OpenCell,
+  key: string,
+  read: (node: ValueNode) => Reading<Value>,
+): Value | undefined {
+  const entry = cell.entry(key);
+  if (!entry) return undefined;
+  const reading = read(entry.node);
+  cell.notes.push(...reading.notes);
+  return reading.ok ? reading.value : undefined;
+}
+
+/** A number in SI, within the bounds of the schema, and shown as understood. */
+export function readQuantityEntry(cell: OpenCell, key: string): number | undefined {
+  const schema = cell.schema.entries.find((entry) => entry.key === key);
+  if (!schema?.dimension) return undefined;
+  const expected = { kind: schema.dimension, name: `*${key}*`, ...schema.bounds };
+  const quantity = readEntry(cell, key, (node) => readQuantity(node, expected, cell.surroundings));
+  if (quantity === undefined) return undefined;
+  const entry = cell.entry(key)!;
+  cell.understand(entry, understoodText(entry.node, quantity, cell));
+  return quantity.value;
+}
+
+/** The model of a cell of one kind above, named by an entry. */
+export function readCellEntry<Kind extends CellModel["kind"]>(
+  cell: OpenCell,
+  key: Kind,
+): Extract<CellModel, { kind: Kind }> | undefined {
+  const { surroundings } = cell;
+  const entry = cell.entry(key);
+  if (!entry) return undefined;
+  const path = entry.node.type === "name" ? entry.node.path : "";
+  const target = path === "" ? undefined : surroundings.cell(path);
+  if (target?.found === "below") {
+    const message = `*${path}* stands further down. A cell sees only what stands above it; move one of the two.`;
+    cell.say("fault", "reference_below", message, entry);
+    return undefined;
+  }
+  const others =
+    target?.found === "above" && target.kind !== key ? [{ name: path, what: `a ${target.kind} cell` }] : [];
+  const targets = { what: withArticle(key), names: surroundings.cellsOfKind(key), others };
+  const name = readEntry(cell, key, (node) => readReference(node, targets));
+  if (name === undefined || target?.found !== "above") return undefined;
+  if (target.model?.kind === key) return target.model as Extract<CellModel, { kind: Kind }>;
+  cell.say("fault", "reference_without_answer", withoutAnswer(name, key), entry);
+  return undefined;
+}
+
+function withArticle(kind: CellKind): string {
+  return /^[aeiou]/.test(kind) ? `an ${kind}` : `a ${kind}`;
+}
+
+function withoutAnswer(name: string, kind: CellKind): string {
+  return `The ${kind} *${name}* has a fault and gives nothing to build on; put that right first.`;
+}
+
+/** Formulas that a list of gases may use: those of the handbook and of gas cells above. */
+export function knownGases(cell: OpenCell): string[] {
+  const handbook = handbookGases.map(({ formula }) => formula);
+  const own = cell.surroundings.cellsOfKind("gas").filter((formula) => !handbook.includes(formula));
+  return [...handbook, ...own];
+}
+
+/** Says that of several entries only one may stand, on the later one. */
+export function sayIfBothStand(cell: OpenCell, keys: readonly [string, string], reason: string): void {
+  const both = keys.map((key) => cell.entry(key)).filter((entry): entry is Entry => entry !== undefined);
+  if (both.length < 2) return;
+  const [first, second] = both.sort((a, b) => a.range.from - b.range.from);
+  const words = inWords([`*${first.key}*`, `*${second.key}*`], "and");
+  cell.say("fault", "both_given", `${words} both stand here. ${reason}`, second.keyRange);
+}

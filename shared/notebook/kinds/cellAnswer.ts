@@ -1,0 +1,17 @@
+import type { CellModel } from "../evaluation/models";
+import type { Quantity } from "../language/quantity";
+import type { CellResult } from "../result";
+import type { Strip } from "../summary";
+
+/** What a kind finds out about one of its cells, besides its notes. */
+export interface CellAnswer {
+  values?: CellResult["values"];
+  tables?: CellResult["tables"];
+  profiles?: CellResult["profiles"];
+  gases?: string[];
+  strip?: Strip;
+  /** What the cells below may build on. */
+  model?: CellModel;
+  /** Entries that are names of the whole notebook; null where one has a fault. */
+  globals?: Record<string, Quantity | null>;
+}

@@ -1,0 +1,148 @@
+import {
+  crossSectionFromDiameter,
+  diameterFromCrossSection,
+  findGas,
+  type CollisionParameter,
+  type HandbookGas,
+} from "../../physics";
+import type { GasModel } from "../evaluation/models";
+import { sayWhichCentresAct, type OpenCell } from "../evaluation/openCell";
+import { knownGases, readEntry, readQuantityEntry } from "../evaluation/readEntries";
+import { inWords } from "../language/notes";
+import { readCollision } from "../language/readCollision";
+import type { CellAnswer } from "./cellAnswer";
+import type { CellSchema } from "./cellSchema";
+
+/** A gas by its formula; what it states holds instead of the handbook in the cells below. */
+export const gasSchema: CellSchema = {
+  kind: "gas",
+  group: "set up",
+  description: "a gas of your own, or a better cross section",
+  naming: "formula",
+  takesAnyKey: false,
+  entries: [
+    {
+      key: "mass",
+      needed: false,
+      form: "quantity",
+      dimension: "mass",
+      bounds: { above: 0 },
+      description: "Mass of one particle. Needed where the handbook does not know the gas.",
+      default: { text: "mass of the handbook", meaning: "conventional atomic weights, isotopes for H and D" },
+      example: "mass = 44.0095 u",
+    },
+    {
+      key: "cross_section",
+      needed: false,
+      form: "quantity",
+      dimension: "area",
+      bounds: { above: 0 },
+      description:
+        "Cross section σ = πd² for the mean free path. Needed where the handbook does not know the gas.",
+      default: { text: "cross_section of the handbook", meaning: "from Lennard-Jones diameters" },
+      example: "cross_section = 4.1e-15 cm^2",
+    },
+    {
+      key: "thermal_diffusion",
+      needed: false,
+      form: "quantity",
+      dimension: "number",
+      description: "Thermal diffusion factor α.",
+      default: { text: "thermal_diffusion of the handbook", meaning: "0 where it does not know the gas" },
+      example: "thermal_diffusion = -0.25",
+    },
+    {
+      key: "collision",
+      needed: false,
+      form: "pairs",
+      dimension: null,
+      description: "Binary collision parameter b = A (T/1 K)^s with each gas named.",
+      default: {
+        text: "collision of the handbook",
+        meaning: "measured pairs, else estimated from the masses",
+      },
+      example: "collision = CO2: binary(A = 8.4e17 /(cm s), s = 0.597)",
+    },
+  ],
+};
+
+/** Element symbols with counts: "CO2", "C2H6". */
+const formulaPattern = /^(?:[A-Z][a-z]?[0-9]*)+$/;
+
+export function evaluateGas(cell: OpenCell): CellAnswer {
+  const formula = cell.name;
+  const isNamed = checkFormula(cell);
+  const handbook = findGas(formula);
+  if (isNamed && !handbook) requireOwnData(cell);
+
+  const mass = readQuantityEntry(cell, "mass");
+  const crossSection = readQuantityEntry(cell, "cross_section");
+  const thermalDiffusion = readQuantityEntry(cell, "thermal_diffusion");
+  const collisions = readCollisions(cell);
+  sayWhichCentresAct(cell);
+  if (!isNamed) return {};
+
+  const model: GasModel = {
+    kind: "gas",
+    formula,
+    mass: mass ?? null,
+    collisionDiameter: crossSection === undefined ? null : diameterFromCrossSection(crossSection),
+    thermalDiffusionFactor: thermalDiffusion ?? null,
+    collisions,
+  };
+  sayWhatHandbookGives(cell, handbook);
+  return { model, gases: [formula] };
+}
+
+function sayWhatHandbookGives(cell: OpenCell, handbook: HandbookGas | undefined): void {
+  const inHandbook = (key: string, text: string) => {
+    if (!cell.entry(key)) cell.actByDefault(key, { text: `${key} = ${text}`, note: "handbook" });
+  };
+  if (!handbook) {
+    if (!cell.entry("thermal_diffusion"))
+      cell.actByDefault("thermal_diffusion", { text: "thermal_diffusion = 0" });
+    return;
+  }
+  const crossSection = crossSectionFromDiameter(handbook.collisionDiameter) * 1e4;
+  inHandbook("mass", `${handbook.molarMassU} u`);
+  inHandbook("cross_section", `${crossSection.toExponential(3)} cm^2`);
+  inHandbook("thermal_diffusion", String(handbook.thermalDiffusionFactor));
+}
+
+function checkFormula(cell: OpenCell): boolean {
+  if (!formulaPattern.test(cell.name)) {
+    const named = cell.name === "" ? "has no name" : `can't be called *${cell.name}*`;
+    cell.say("fault", "bad_name", `A gas cell is named by its formula, such as CO2; this one ${named}.`);
+    return false;
+  }
+  const earlier = cell.surroundings.definedAbove(cell.name);
+  if (earlier === null) return true;
+  cell.say(
+    "fault",
+    "name_twice",
+    `*${cell.name}* is already the name of ${earlier} above; keep one of the two.`,
+  );
+  return false;
+}
+
+function requireOwnData(cell: OpenCell): void {
+  const missing = ["mass", "cross_section"].filter((key) => !cell.entry(key)).map((key) => `*${key}*`);
+  if (missing.length === 0) return;
+  const message = `The handbook does not know *${cell.name}*, so ${inWords(missing, "and")} must be given.`;
+  cell.say("fault", "missing_key", message);
+}
+
+function readCollisions(cell: OpenCell): Record<string, CollisionParameter> {
+  const pairs = readEntry(cell, "collision", (node) =>
+    readCollision(node, knownGases(cell), cell.surroundings),
+  );
+  const collisions: Record<string, CollisionParameter> = {};
+  for (const { formula, value, range } of pairs ?? []) {
+    if (formula === cell.name) {
+      cell.say("fault", "collision_with_itself", "A collision parameter is of two different gases.", range);
+      continue;
+    }
+    collisions[formula] = { ...value, source: "given", isEstimate: false };
+  }
+  return collisions;
+}
