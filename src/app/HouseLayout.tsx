@@ -1,19 +1,17 @@
 import { useQuery } from "@tanstack/react-query";
 import { Suspense } from "react";
-import { Outlet, useLocation } from "react-router-dom";
+import { Outlet } from "react-router-dom";
 import { AccountMenu, AccountMenuLines } from "../features/account/AccountMenu";
 import { groupsQuery } from "../features/group/groupQueries";
 import { useAccount } from "../lib/session";
 import { Opening } from "../ui/Opening";
 import { PageFrame, type PagePlace } from "../ui/PageFrame";
-import { useFocusOnNewPage } from "./useFocusOnNewPage";
+import { PageErrorBoundary } from "./PageErrorBoundary";
 
 /** The bar that stands over every page but the notebook's. */
 export function HouseLayout() {
   const account = useAccount();
   const groups = useQuery(groupsQuery).data ?? [];
-  const { pathname } = useLocation();
-  useFocusOnNewPage(pathname);
 
   const onlyGroup = groups.length === 1 ? groups[0] : undefined;
   const places: PagePlace[] = [
@@ -27,9 +25,11 @@ export function HouseLayout() {
       person={account && <AccountMenu account={account} groups={groups} />}
       personMenu={account && <AccountMenuLines account={account} />}
     >
-      <Suspense fallback={<Opening what="the page" />}>
-        <Outlet />
-      </Suspense>
+      <PageErrorBoundary framed>
+        <Suspense fallback={<Opening what="the page" />}>
+          <Outlet />
+        </Suspense>
+      </PageErrorBoundary>
     </PageFrame>
   );
 }

@@ -35,5 +35,5 @@ export function Dialog({ open, onOpenChange, title, description, children, width
 
 /** The row of verbs that ends a dialog, the main one first. */
 export function DialogActions({ children }: { children: React.ReactNode }) {
-  return <div className="flex flex-wrap items-center gap-x-18 gap-y-12 pt-28">{children}</div>;
+  return <div className="flex flex-wrap items-center gap-x-18 gap-y-12 pt-18">{children}</div>;
 }

@@ -1,108 +1,76 @@
-import { DropdownMenu } from "radix-ui";
-import { Link } from "react-router-dom";
+/** Menus of verbs. Their parts are fetched when a menu is first pointed at, so that no page waits for them. */
+import { cloneElement, lazy, Suspense, useState } from "react";
 
-const item =
-  "block cursor-pointer px-18 py-4 type-control font-normal text-ink no-underline outline-none select-none data-[highlighted]:bg-airglow-wash data-[disabled]:cursor-not-allowed data-[disabled]:text-ink3";
-
-interface MenuProps {
+export interface MenuProps {
   /** The button or word that opens it. */
-  trigger: React.ReactNode;
+  trigger: React.ReactElement<React.ComponentProps<"button">>;
   children: React.ReactNode;
   align?: "start" | "end";
   /** False lets the page behind be scrolled and pressed while the menu is open. */
   modal?: boolean;
 }
 
-/** A menu of verbs, hanging from its word. */
-export function Menu({ trigger, children, align = "start", modal = false }: MenuProps) {
-  return (
-    <DropdownMenu.Root modal={modal}>
-      <DropdownMenu.Trigger asChild>{trigger}</DropdownMenu.Trigger>
-      <DropdownMenu.Portal>
-        <DropdownMenu.Content
-          align={align}
-          sideOffset={6}
-          collisionPadding={12}
-          className="z-40 min-w-180 rounded border border-rule2 bg-raised py-8 shadow-float"
-        >
-          {children}
-        </DropdownMenu.Content>
-      </DropdownMenu.Portal>
-    </DropdownMenu.Root>
-  );
-}
-
-interface MenuItemProps {
+export interface MenuItemProps {
   children: React.ReactNode;
   onSelect: () => void;
   disabled?: boolean;
   tone?: "ink" | "fault";
 }
 
-/** One verb of a menu. */
-export function MenuItem({ children, onSelect, disabled, tone = "ink" }: MenuItemProps) {
-  return (
-    <DropdownMenu.Item
-      className={`${item} ${tone === "fault" && !disabled ? "text-redline" : ""}`}
-      onSelect={onSelect}
-      disabled={disabled}
-    >
-      {children}
-    </DropdownMenu.Item>
-  );
-}
-
-/** A page to go to, or a file to take, from a menu. */
-export function MenuLink({
-  to,
-  children,
-  download,
-}: {
+export interface MenuLinkProps {
   to: string;
   children: React.ReactNode;
+  /** The address is a file to take, not a page. */
   download?: boolean;
-}) {
-  return (
-    <DropdownMenu.Item className={item} asChild>
-      {download ? (
-        <a href={to} download>
-          {children}
-        </a>
-      ) : (
-        <Link to={to}>{children}</Link>
-      )}
-    </DropdownMenu.Item>
-  );
 }
 
-/** Words over a group of a menu. */
-export function MenuLabel({ children }: { children: React.ReactNode }) {
-  return <DropdownMenu.Label className="px-18 pt-4 pb-2 type-label text-ink3">{children}</DropdownMenu.Label>;
-}
-
-/** A hairline between groups of a menu. */
-export function MenuRule() {
-  return <DropdownMenu.Separator className="my-8 h-1 bg-rule" />;
-}
-
-interface MenuChoiceProps<Value extends string> {
+export interface MenuChoiceProps<Value extends string> {
   value: Value;
   options: readonly { value: Value; label: string; hint?: string }[];
   onChange: (value: Value) => void;
 }
 
-/** One of several within a menu: the current one is in bold on a glow line. */
+const fetchParts = () => import("./menuParts");
+const OpenedMenu = lazy(() => fetchParts().then((parts) => ({ default: parts.OpenedMenu })));
+
+/** One verb of a menu. */
+export const MenuItem = lazy(() => fetchParts().then((parts) => ({ default: parts.Item })));
+/** A page to go to, or a file to take, from a menu. */
+export const MenuLink = lazy(() => fetchParts().then((parts) => ({ default: parts.LinkItem })));
+/** Words over a group of a menu. */
+export const MenuLabel = lazy(() => fetchParts().then((parts) => ({ default: parts.Label })));
+/** A hairline between groups of a menu. */
+export const MenuRule = lazy(() => fetchParts().then((parts) => ({ default: parts.Rule })));
+
+const AnyChoice = lazy(() => fetchParts().then((parts) => ({ default: parts.Choice })));
+
+/** One of several within a menu: the current one stands on a glow line. */
 export function MenuChoice<Value extends string>({ value, options, onChange }: MenuChoiceProps<Value>) {
-  return (
-    <DropdownMenu.RadioGroup value={value} onValueChange={(next) => onChange(next as Value)}>
-      {options.map((option) => (
-        <DropdownMenu.RadioItem key={option.value} value={option.value} className={`${item} group`}>
-          <span className="border-b-2 border-transparent group-data-[state=checked]:border-airglow group-data-[state=checked]:font-semibold">
-            {option.label}
-          </span>
-          {option.hint && <span className="block max-w-[36ch] type-label text-ink3">{option.hint}</span>}
-        </DropdownMenu.RadioItem>
-      ))}
-    </DropdownMenu.RadioGroup>
-  );
+  return <AnyChoice value={value} options={options} onChange={(next) => onChange(next as Value)} />;
+}
+
+/** A menu, hanging from its word. */
+export function Menu(props: MenuProps) {
+  const [isWanted, setWanted] = useState(false);
+  const { trigger } = props;
+  if (isWanted) {
+    return (
+      <Suspense fallback={trigger}>
+        <OpenedMenu {...props} />
+      </Suspense>
+    );
+  }
+  const prefetch = (): void => void fetchParts();
+  return cloneElement(trigger, {
+    "aria-haspopup": "menu",
+    "aria-expanded": false,
+    onPointerEnter: prefetch,
+    onFocus: prefetch,
+    onClick: () => setWanted(true),
+    onKeyDown: (event: React.KeyboardEvent) => {
+      if (event.key !== "ArrowDown") return;
+      event.preventDefault();
+      setWanted(true);
+    },
+  });
 }

@@ -47,7 +47,7 @@ export function SignInPage({ demo, onSignedIn, ended }: SignInPageProps) {
           type="email"
           name="email"
           autoComplete="username"
-          autoFocus
+          autoFocus={!ended}
           required
           value={email}
           onChange={(event) => setEmail(event.target.value)}
@@ -56,6 +56,7 @@ export function SignInPage({ demo, onSignedIn, ended }: SignInPageProps) {
           label="Password"
           name="password"
           autoComplete="current-password"
+          autoFocus={ended !== undefined}
           required
           value={password}
           onChange={(event) => setPassword(event.target.value)}

@@ -2,8 +2,10 @@ import { useState } from "react";
 import { useNavigate } from "react-router-dom";
 import type { GroupSummary } from "../../../shared/schemas/groups";
 import { ApiError, failureSentence } from "../../lib/ApiError";
+import { formatCount } from "../../lib/format";
 import { Button } from "../../ui/Button";
 import { Dialog, DialogActions } from "../../ui/Dialog";
+import { useNotify } from "../../ui/Notices";
 import { StateMark } from "../../ui/StateMark";
 import { FileDrop } from "./FileDrop";
 import { useImportNotebook } from "./notebooksQueries";
@@ -24,6 +26,7 @@ export function ImportDialog({ groups, file: dropped, onClose }: ImportDialogPro
   const [unreadable, setUnreadable] = useState<string>();
   const importNotebook = useImportNotebook();
   const navigate = useNavigate();
+  const notify = useNotify();
 
   function handleFile(next: File) {
     setFile(next);
@@ -44,7 +47,12 @@ export function ImportDialog({ groups, file: dropped, onClose }: ImportDialogPro
     }
     importNotebook.mutate(
       { text: reading.text, groupId: where === ownShelf ? null : where },
-      { onSuccess: ({ id }) => void navigate(`/notebooks/${id}`) },
+      {
+        onSuccess: ({ id, notes }) => {
+          if (notes.length > 0) notify({ state: "remark", text: noticed(notes) });
+          void navigate(`/notebooks/${id}`);
+        },
+      },
     );
   }
 
@@ -77,6 +85,14 @@ export function ImportDialog({ groups, file: dropped, onClose }: ImportDialogPro
   );
 }
 
+/** The first thing noticed while a file was read, and how many more there are. */
+function noticed(notes: readonly { message: string; line?: number }[]): string {
+  const [first] = notes;
+  const where = first?.line === undefined ? "" : `Line ${first.line}: `;
+  const more = notes.length > 1 ? ` And ${formatCount(notes.length - 1, "more remark")}.` : "";
+  return `${where}${first?.message ?? ""}${more}`;
+}
+
 interface ImportComplaintsProps {
   fileName: string;
   message: string;
@@ -89,7 +105,7 @@ function ImportComplaints({ fileName, message, error }: ImportComplaintsProps) {
     <div role="alert" className="border-y border-t-ink border-b-rule py-10">
       <p className="flex items-baseline gap-12 font-sans text-[14.5px]/[22px]">
         <StateMark state="fault" className="translate-y-1" />
-        <span>{issues.length > 0 ? `${fileName} was not imported. ${message}` : message}</span>
+        <span>{issues.length > 0 ? `${fileName} was not imported, nor any part of it:` : message}</span>
       </p>
       {issues.length > 0 && (
         <ul className="max-h-[34vh] overflow-y-auto pt-6">

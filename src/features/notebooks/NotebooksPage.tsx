@@ -1,5 +1,5 @@
 import { useQuery } from "@tanstack/react-query";
-import { useCallback, useState } from "react";
+import { lazy, Suspense, useCallback, useState } from "react";
 import type { GroupSummary } from "../../../shared/schemas/groups";
 import type { NotebookListItem } from "../../../shared/schemas/notebooks";
 import { failureSentence } from "../../lib/ApiError";
@@ -11,17 +11,21 @@ import { Page } from "../../ui/Page";
 import { ProblemPage } from "../../ui/ProblemPage";
 import { TextButton } from "../../ui/TextButton";
 import { WordMenu } from "../../ui/WordMenu";
-import { ImportDialog } from "./ImportDialog";
-import { NewNotebookDialog, type Beginning } from "./NewNotebookDialog";
+import type { Beginning } from "./NewNotebookDialog";
 import { NoNotebooks } from "./NoNotebooks";
 import { NotebookLine } from "./NotebookLine";
 import { NotebookShelf } from "./NotebookShelf";
 import { notebooksQuery } from "./notebooksQueries";
-import { RenameDialog } from "./RenameDialog";
 import { SearchField } from "./SearchField";
 import { useFileDrop } from "./useFileDrop";
 import { useListFilters, type ListOrder, type ListPlace } from "./useListFilters";
 import "./notebooks.css";
+
+const ImportDialog = lazy(() => import("./ImportDialog").then((file) => ({ default: file.ImportDialog })));
+const NewNotebookDialog = lazy(() =>
+  import("./NewNotebookDialog").then((file) => ({ default: file.NewNotebookDialog })),
+);
+const RenameDialog = lazy(() => import("./RenameDialog").then((file) => ({ default: file.RenameDialog })));
 
 const places: readonly { value: ListPlace; label: string }[] = [
   { value: "shelf", label: "on the shelf" },
@@ -137,11 +141,13 @@ export function NotebooksPage({ groups }: { groups: readonly GroupSummary[] }) {
           </p>
         </>
       )}
-      {open?.kind === "new" && (
-        <NewNotebookDialog groups={groups} beginning={open.beginning} onClose={close} />
-      )}
-      {open?.kind === "import" && <ImportDialog groups={groups} file={open.file} onClose={close} />}
-      {open?.kind === "rename" && <RenameDialog notebook={open.notebook} onClose={close} />}
+      <Suspense>
+        {open?.kind === "new" && (
+          <NewNotebookDialog groups={groups} beginning={open.beginning} onClose={close} />
+        )}
+        {open?.kind === "import" && <ImportDialog groups={groups} file={open.file} onClose={close} />}
+        {open?.kind === "rename" && <RenameDialog notebook={open.notebook} onClose={close} />}
+      </Suspense>
       {isDraggedOver && (
         <div className="pointer-events-none fixed inset-12 z-30 grid place-items-end border border-dashed border-dusk p-28">
           <p className="bg-raised px-18 py-10 type-control shadow-float">Let go to import the file</p>

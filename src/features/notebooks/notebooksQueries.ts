@@ -8,6 +8,9 @@ import {
 } from "../../../shared/schemas/notebooks";
 import { api } from "../../lib/api";
 
+/** How often a list asks for summaries that are still to come, ms. */
+const summaryInterval = 2500;
+
 const listKey = ["notebooks"] as const;
 
 export const notebooksQuery = ({ q, order, place }: NotebookListQuery) =>
@@ -18,6 +21,9 @@ export const notebooksQuery = ({ q, order, place }: NotebookListQuery) =>
         signal,
       }),
     placeholderData: keepPreviousData,
+    // The server computes a summary shortly after each save; a list that waits for one asks again.
+    refetchInterval: ({ state }) =>
+      state.data?.notebooks.some((notebook) => notebook.summary === null) ? summaryInterval : false,
   });
 
 /** Of a notebook just made only the id is needed: its page asks for the rest. */
@@ -31,11 +37,16 @@ function useListChange<Input, Answer>(change: (input: Input) => Promise<Answer>)
   });
 }
 
+/** An imported one comes with what was noticed on the way. */
+const importedNotebook = madeNotebook.extend({
+  notes: z.array(z.object({ message: z.string(), line: z.number().optional() })).default([]),
+});
+
 export const useCreateNotebook = () =>
   useListChange((body: CreateNotebookBody) => api.post("/notebooks", body, madeNotebook));
 
 export const useImportNotebook = () =>
-  useListChange((body: ImportNotebookBody) => api.post("/notebooks/import", body, madeNotebook));
+  useListChange((body: ImportNotebookBody) => api.post("/notebooks/import", body, importedNotebook));
 
 export const useRenameNotebook = () =>
   useListChange(({ id, title }: { id: string; title: string }) =>
