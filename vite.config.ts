@@ -7,6 +7,8 @@ const testEnvironment = { TZ: "UTC" };
 
 export default defineConfig({
   plugins: [react(), tailwindcss()],
+  // Formulas must be set by the KaTeX whose style sheet is loaded, not by the older one that its plugin brings along.
+  resolve: { dedupe: ["katex"] },
   build: {
     outDir: "dist/client",
     emptyOutDir: true,
@@ -24,7 +26,12 @@ export default defineConfig({
       { extends: true, test: { name: "shared", include: ["tests/shared/**/*.test.ts"] } },
       {
         extends: true,
-        test: { name: "server", include: ["tests/server/**/*.test.ts"], testTimeout: 30_000, hookTimeout: 60_000 },
+        test: {
+          name: "server",
+          include: ["tests/server/**/*.test.ts"],
+          testTimeout: 30_000,
+          hookTimeout: 60_000,
+        },
       },
       {
         extends: true,

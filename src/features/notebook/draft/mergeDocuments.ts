@@ -74,11 +74,13 @@ export function mergeDocuments(
   }
 
   function field<T>(cellId: string | null, label: string, states: { base: T; mine: T; theirs: T }): T {
+    // The colon keeps a cell's name apart from an entry `name`.
+    const key = `:${label}`;
     const [member] = mergeKeyed(
       {
-        base: new Map([[label, states.base]]),
-        mine: new Map([[label, states.mine]]),
-        theirs: new Map([[label, states.theirs]]),
+        base: new Map([[key, states.base]]),
+        mine: new Map([[key, states.mine]]),
+        theirs: new Map([[key, states.theirs]]),
       },
       isEqual,
     );

@@ -50,8 +50,9 @@ function element(name: string, className: string): HTMLElement {
 }
 
 function withWords(node: HTMLElement, message: string): HTMLElement {
-  for (const { text, isCode } of noteParts(message)) {
-    const part = isCode ? element("code", "") : document.createTextNode("");
+  for (const { text, setting } of noteParts(message)) {
+    const part =
+      setting === "plain" ? document.createTextNode("") : element(setting === "code" ? "code" : "sub", "");
     part.textContent = text;
     node.append(part);
   }

@@ -1,4 +1,7 @@
 import { WidgetType } from "@codemirror/view";
+import { understoodParts } from "./understoodParts";
+
+const elements = { raised: "sup", low: "sub", symbol: "i" } as const;
 
 /** The value as understood, quiet, after the expression it belongs to. */
 export class UnderstoodWidget extends WidgetType {
@@ -13,21 +16,16 @@ export class UnderstoodWidget extends WidgetType {
   override toDOM(): HTMLElement {
     const output = document.createElement("span");
     output.className = "entry-understood";
-    output.append(...raisedPowers(this.text));
+    for (const { text, setting } of understoodParts(this.text)) {
+      const part =
+        setting === "plain" ? document.createTextNode("") : document.createElement(elements[setting]);
+      part.textContent = text;
+      output.append(part);
+    }
     return output;
   }
 
   override ignoreEvent(): boolean {
     return false;
   }
-}
-
-/** "m^-2" as m with a raised −2. */
-function raisedPowers(text: string): (string | HTMLElement)[] {
-  return text.split(/\^(\(?[-−+]?[\d.]+\)?)/).map((part, index) => {
-    if (index % 2 === 0) return part;
-    const raised = document.createElement("sup");
-    raised.textContent = part.replace(/[()]/g, "").replace("-", "−");
-    return raised;
-  });
 }

@@ -1,5 +1,5 @@
 import { syntaxTree } from "@codemirror/language";
-import { RangeSetBuilder, type EditorState, type Extension } from "@codemirror/state";
+import { Prec, RangeSetBuilder, type EditorState, type Extension } from "@codemirror/state";
 import { Decoration, EditorView, ViewPlugin, type DecorationSet, type ViewUpdate } from "@codemirror/view";
 
 interface EntryStart {
@@ -13,11 +13,13 @@ const longest = 60_000;
 /** Names longer than this don't push the whole cell to the right. */
 const widestName = 32;
 
+const equalsSign = Decoration.mark({ class: "entry-equals" });
+
 /**
  * Names padded to the longest in the cell, so that the signs stand in line, and a hanging indent for what runs over
  * the line. Only looks change; the text stays as it was typed.
  */
-export const entryLayout: Extension = ViewPlugin.fromClass(
+const plugin = ViewPlugin.fromClass(
   class {
     decorations: DecorationSet;
 
@@ -31,8 +33,11 @@ export const entryLayout: Extension = ViewPlugin.fromClass(
       }
     }
   },
-  { decorations: (plugin) => plugin.decorations },
+  { decorations: ({ decorations }) => decorations },
 );
+
+/** Lowest, so that a name stays one piece with the marks inside it. */
+export const entryLayout: Extension = Prec.lowest(plugin);
 
 function layOut(state: EditorState): DecorationSet {
   const starts = state.doc.length > longest ? [] : entryStarts(state);
@@ -49,6 +54,7 @@ function layOut(state: EditorState): DecorationSet {
   for (const { lineFrom, equals } of starts) {
     builder.add(lineFrom, lineFrom, line);
     if (equals > lineFrom) builder.add(lineFrom, equals, name);
+    builder.add(equals, equals + 1, equalsSign);
   }
   return builder.finish();
 }

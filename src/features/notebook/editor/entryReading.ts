@@ -7,7 +7,7 @@ import {
   type Transaction,
 } from "@codemirror/state";
 import { Decoration, EditorView, type DecorationSet } from "@codemirror/view";
-import type { Note, Understood } from "../../../../shared/notebook/result";
+import type { Note, TextRange, Understood } from "../../../../shared/notebook/result";
 import { NoteWidget } from "./NoteWidget";
 import { UnderstoodWidget } from "./UnderstoodWidget";
 
@@ -60,7 +60,7 @@ function marksOf(state: EditorState, { text, understood, notes }: EntryReading):
   for (const note of notes) {
     const end = noteEnd(state, note);
     if (end === null) continue;
-    if (note.level !== "remark" && note.range && note.range.to > note.range.from && note.range.to <= length) {
+    if (note.level !== "remark" && note.range && note.range.to <= length && isPointed(state, note.range)) {
       const underline = Decoration.mark({
         class: `entry-${note.level}`,
         attributes: { title: note.message },
@@ -71,6 +71,12 @@ function marksOf(state: EditorState, { text, understood, notes }: EntryReading):
     marks.push(Decoration.widget({ widget: new NoteWidget(note, text), block: true, side: 2 }).range(end));
   }
   return Decoration.set(marks, true);
+}
+
+/** Whether a range points at something: a line under the whole of a long value would say nothing. */
+function isPointed(state: EditorState, { from, to }: TextRange): boolean {
+  const before = state.sliceDoc(state.doc.lineAt(from).from, from);
+  return to > from && (to - from < 24 || !/=\s*$/.test(before));
 }
 
 /** End of the line that a note speaks of; null where it speaks of the whole cell. */

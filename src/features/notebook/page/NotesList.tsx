@@ -1,8 +1,9 @@
 import type { Cell } from "../../../../shared/notebook/document";
-import type { NoteLevel } from "../../../../shared/notebook/result";
+import type { Note, NoteLevel } from "../../../../shared/notebook/result";
 import { formatCount } from "../../../lib/format";
 import { StateMark } from "../../../ui/StateMark";
 import type { LetteredNote } from "../../../ui/tables/tableProps";
+import { complaintAndRest } from "../cells/noteParts";
 import { NoteText } from "../cells/NoteText";
 
 export interface ListedNote extends LetteredNote {
@@ -30,7 +31,7 @@ export function NotesList({ notes }: { notes: readonly ListedNote[] }) {
               {letter}
             </i>
             <a href={`#cell-${cell.id}`}>
-              <b>{cell.name || cell.kind}</b>: <NoteText message={note.message} />
+              <b>{cell.name || cell.kind}</b>: <NoteText message={complaintOf(note)} />
             </a>
           </li>
         ))}
@@ -38,3 +39,6 @@ export function NotesList({ notes }: { notes: readonly ListedNote[] }) {
     </section>
   );
 }
+
+/** The margin has room for what is wrong; why, and what to do, stands in the cell. */
+const complaintOf = (note: Note): string => complaintAndRest(note.message)[0].replace(/;$/, ".");
