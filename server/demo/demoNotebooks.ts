@@ -43,3 +43,77 @@ export const demoGroup = {
   lead: DemoPerson;
   members: [DemoPerson, GroupRole][];
 };
+
+export const demoNotebooks: readonly DemoNotebook[] = [
+  {
+    file: "ilmara-dayside.md",
+    owner: "t.orevale",
+    hoursAgo: 2,
+    groupRole: "reader",
+    shares: [
+      ["w.castellane", "co-author"],
+      ["p.marrash", "reader"],
+    ],
+    versions: [
+      {
+        message: "First column, with the temperature of the first occultation alone",
+        by: "t.orevale",
+        daysAgo: 41,
+        differences: [
+          ["T_quiet = 428 ± 45 K", "T_quiet = 460 ± 70 K"],
+          ["K_base  = 1e6 cm^2/s within factor 2", "K_base  = 3e6 cm^2/s within factor 4"],
+        ],
+      },
+      {
+        message: "Mixing from the methane of two years",
+        by: "w.castellane",
+        daysAgo: 26,
+        differences: [["T_quiet = 428 ± 45 K", "T_quiet = 460 ± 70 K"]],
+      },
+      { message: "Both occultations; cooler by 32 K", by: "t.orevale", daysAgo: 3, differences: [] },
+    ],
+  },
+  {
+    file: "nirel-half-atmosphere.md",
+    owner: "i.brandvold",
+    hoursAgo: 29,
+    groupRole: "commenter",
+    shares: [["t.orevale", "co-author"]],
+    versions: [
+      { message: "As shown to the group in November", by: "i.brandvold", daysAgo: 12, differences: [] },
+    ],
+  },
+  {
+    file: "saranth-hydrostatic-limit.md",
+    owner: "i.brandvold",
+    hoursAgo: 75,
+    groupRole: "reader",
+    shares: [],
+    versions: [],
+  },
+  {
+    file: "tessal-quiet-star.md",
+    owner: "i.brandvold",
+    hoursAgo: 290,
+    groupRole: "reader",
+    shares: [],
+    versions: [
+      {
+        message: "Before the new run of the thermosphere model",
+        by: "i.brandvold",
+        daysAgo: 150,
+        differences: [["T_exo = 760 ± 60 K", "T_exo = 820 ± 90 K"]],
+      },
+      { message: "Quiet star, as in group note 7", by: "i.brandvold", daysAgo: 13, differences: [] },
+    ],
+  },
+  {
+    // Alone on its owner's shelf: nobody else sees it.
+    file: "oda-perihelion.md",
+    owner: "t.orevale",
+    hoursAgo: 700,
+    groupRole: null,
+    shares: [],
+    versions: [],
+  },
+];

@@ -99,7 +99,7 @@ describe("the API", () => {
   });
 
   it("compares with the public origin where one is set", async () => {
-    const secure = await startTestServer({ origin: "https://tenuity.example" });
+    const secure = await startTestServer({ db: server.db, origin: "https://tenuity.example" });
     const from = async (origin: string) =>
       (await secure.signedOut.delete("/api/session").set("Origin", origin)).status;
     expect(await from("https://tenuity.example")).toBe(204);

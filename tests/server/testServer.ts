@@ -16,9 +16,10 @@ const evaluator: Evaluator = {
 
 const manyTries = { signInPerAccount: 1000, signIn: 1000, signUp: 1000 };
 
-/** The whole server on a database in memory, without listening. */
+/** The whole server on a database in memory, or on the one given, without listening. */
 export async function startTestServer(parts: Partial<AppParts> = {}) {
-  const { db, close } = await openTestDatabase();
+  const opened = parts.db ? null : await openTestDatabase();
+  const db = parts.db ?? opened!.db;
   const logger = pino({ level: "silent" });
   const auth = await createAuth(db, { hasSecureCookies: false });
   const summaries = createSummaries({ db, evaluator, logger });
@@ -37,7 +38,7 @@ export async function startTestServer(parts: Partial<AppParts> = {}) {
     as: async (user: Actor) => request.agent(app).set("Cookie", await cookieOf(user)),
     close: async () => {
       await summaries.close();
-      await close();
+      await opened?.close();
     },
   };
 }

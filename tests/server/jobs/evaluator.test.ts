@@ -31,7 +31,9 @@ describe("evaluation in a thread", () => {
     const broken = { ...buildDocument(), cells: null } as unknown as ReturnType<typeof buildDocument>;
     const answer = await evaluator.evaluate(broken);
     expect(answer).toMatchObject({ ok: false });
-    const next = await evaluator.evaluate(buildDocument({ cells: [buildCell({ id: "a", text: "x = 1 km" })] }));
+    const next = await evaluator.evaluate(
+      buildDocument({ cells: [buildCell({ id: "a", text: "x = 1 km" })] }),
+    );
     expect(next).toMatchObject({ ok: true });
   });
 

@@ -46,7 +46,10 @@ function heldEvaluator(answerFor: (document: NotebookDocument) => EvaluationAnsw
   return { evaluator, asked, release: () => release() };
 }
 
-const truly = (document: NotebookDocument): EvaluationAnswer => ({ ok: true, outcome: evaluateDocument(document) });
+const truly = (document: NotebookDocument): EvaluationAnswer => ({
+  ok: true,
+  outcome: evaluateDocument(document),
+});
 
 describe("summaries", () => {
   it("asked for many times while one is computed are computed once more", async () => {
@@ -71,7 +74,10 @@ describe("summaries", () => {
     const missing = await buildNotebook(db, { owner, document: buildDocument({ title: "Missing" }) });
     const older = await buildNotebook(db, { owner, document: buildDocument({ title: "Older engine" }) });
     const current = await buildNotebook(db, { owner, document: buildDocument({ title: "Current" }) });
-    await db.update(notebooks).set({ summaryRevision: 1, summaryEngine: "0.1.0" }).where(eq(notebooks.id, older.id));
+    await db
+      .update(notebooks)
+      .set({ summaryRevision: 1, summaryEngine: "0.1.0" })
+      .where(eq(notebooks.id, older.id));
     const fresh = { summaryRevision: 1, summaryEngine: engineVersion };
     await db.update(notebooks).set(fresh).where(eq(notebooks.id, current.id));
     const { evaluator, asked, release } = heldEvaluator(truly);

@@ -134,6 +134,7 @@ describe("keeping a version", () => {
 
   it("is refused, with the reason, where the results take too long", async () => {
     const slow = await startTestServer({
+      db: server.db,
       evaluator: {
         evaluate: async () => ({ ok: false, reason: "It takes over 10 s. Make its cells smaller." }),
         close: async () => undefined,
