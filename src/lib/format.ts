@@ -27,13 +27,13 @@ function formatScientific(value: number, digits: number): RichText {
 }
 
 /**
- * A number with so many significant digits. From a thousandth up to a million it is written out, with all
- * digits before the point; beyond, as a power of ten.
+ * A number with so many significant digits. From a thousandth up to a hundred thousand it is written out,
+ * with all digits before the point; beyond, as a power of ten.
  */
 export function formatNumber(value: number, digits = 3): RichText {
   if (value === 0) return ["0"];
   const size = Math.abs(value);
-  if (size >= 999_999.5 || size < 1e-3) return formatScientific(value, digits);
+  if (size >= 99_999.5 || size < 1e-3) return formatScientific(value, digits);
   const exponent = Number(size.toExponential(digits - 1).split("e")[1]);
   return [formatFixed(value, Math.max(0, digits - 1 - exponent))];
 }

@@ -1,0 +1,47 @@
+import { displayScale, formatNumber, kilometreScale, type UnitSystem } from "../../lib/format";
+import { plainText } from "../../lib/richText";
+import type { CsvColumn } from "./figureCsv";
+
+interface FigureTableProps {
+  label: string;
+  columns: readonly CsvColumn[];
+  unitSystem: UnitSystem;
+}
+
+/** Rows read aloud; a figure has hundreds, of which a dozen tell the course of every curve. */
+const rowsTold = 12;
+
+const unitOf = (head: string): string => /\(([^)]*)\)/.exec(head)?.[1] ?? "1";
+
+/** The curves as a short table, for those who do not see the figure. */
+export function FigureTable({ label, columns, unitSystem }: FigureTableProps) {
+  const count = columns[0]?.values.length ?? 0;
+  const told = Math.min(rowsTold, count);
+  const rows = Array.from({ length: told }, (_, i) => Math.round((i * (count - 1)) / Math.max(1, told - 1)));
+  const scales = columns.map(({ head }) =>
+    head.startsWith("altitude") ? kilometreScale : displayScale(unitOf(head), unitSystem, 1),
+  );
+  return (
+    <table className="visually-hidden">
+      <caption>{label}</caption>
+      <thead>
+        <tr>
+          {columns.map(({ head }, i) => (
+            <th key={head} scope="col">
+              {head.replace(/\(.*\)/, `(${scales[i]!.unit})`)}
+            </th>
+          ))}
+        </tr>
+      </thead>
+      <tbody>
+        {rows.map((row) => (
+          <tr key={row}>
+            {columns.map(({ head, values }, i) => (
+              <td key={head}>{plainText(formatNumber(values[row]! * scales[i]!.factor))}</td>
+            ))}
+          </tr>
+        ))}
+      </tbody>
+    </table>
+  );
+}

@@ -1,0 +1,77 @@
+import type { Data, Layout } from "plotly.js";
+import { lazy, Suspense, useEffect, useState } from "react";
+import type { FigureZoom } from "./figureLayout";
+
+/** The figure library is large: it is fetched once, after the page has been painted. */
+const Plot = lazy(async () => {
+  const { createPlot } = await import("./loadPlotly");
+  return { default: createPlot };
+});
+
+interface PlotlyFigureProps {
+  data: Data[];
+  layout: Partial<Layout>;
+  /** Called with what a drag drew closer, or null to show all again. */
+  onZoom: (zoom: FigureZoom | null) => void;
+  /** Called with the place in `layout.annotations` of a name that was pressed. */
+  onNamePress?: (index: number) => void;
+}
+
+const config = {
+  displayModeBar: false,
+  responsive: false,
+  doubleClick: false,
+  showTips: false,
+  scrollZoom: false,
+};
+
+function useAfterFirstPaint(): boolean {
+  const [isPainted, setIsPainted] = useState(false);
+  useEffect(() => {
+    let timer: ReturnType<typeof setTimeout> | undefined;
+    const frame = requestAnimationFrame(() => {
+      timer = setTimeout(() => setIsPainted(true), 0);
+    });
+    return () => {
+      cancelAnimationFrame(frame);
+      clearTimeout(timer);
+    };
+  }, []);
+  return isPainted;
+}
+
+type RelayoutEvent = Record<string, number | undefined>;
+
+function zoomOf(event: RelayoutEvent, layout: Partial<Layout>): FigureZoom | null {
+  const range = (name: "xaxis" | "yaxis"): [number, number] => {
+    const [from, to] = [event[`${name}.range[0]`], event[`${name}.range[1]`]];
+    if (from !== undefined && to !== undefined) return [from, to];
+    return layout[name]?.range as [number, number];
+  };
+  const isZoom = Object.keys(event).some((key) => key.includes(".range["));
+  return isZoom ? { x: range("xaxis"), y: range("yaxis") } : null;
+}
+
+/** Drag to draw closer, double press to go back; touch scrolls the page instead. */
+export function PlotlyFigure({ data, layout, onZoom, onNamePress }: PlotlyFigureProps) {
+  const isPainted = useAfterFirstPaint();
+  const place = <div style={{ width: layout.width, height: layout.height }} />;
+  if (!isPainted) return place;
+  return (
+    <Suspense fallback={place}>
+      <Plot
+        className="figure-plot"
+        data={data}
+        layout={layout}
+        config={config}
+        style={{ width: layout.width, height: layout.height }}
+        onRelayout={(event: RelayoutEvent) => {
+          const zoom = zoomOf(event, layout);
+          if (zoom) onZoom(zoom);
+        }}
+        onDoubleClick={() => onZoom(null)}
+        onClickAnnotation={({ index }: { index: number }) => onNamePress?.(index)}
+      />
+    </Suspense>
+  );
+}

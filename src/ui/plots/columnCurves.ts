@@ -1,0 +1,90 @@
+import type { Strip } from "../../../shared/notebook/summary";
+import { displayScale, type UnitSystem } from "../../lib/format";
+
+/** One gas against altitude: x in the unit shown, y in km, split where the gas stops being a fluid. */
+export interface GasCurve {
+  gas: string;
+  below: { x: number[]; y: number[] };
+  above: { x: number[]; y: number[] };
+}
+
+export type Profiles = Readonly<Record<string, readonly number[]>>;
+
+/** Few points keep typing quick; a curve of a page's width needs no more. */
+const pointsDrawn = 120;
+
+/** Row numbers to draw: about evenly spread, first and last included. */
+export function drawnRows(count: number): number[] {
+  const every = Math.max(1, Math.ceil(count / pointsDrawn));
+  const rows: number[] = [];
+  for (let row = 0; row < count - 1; row += every) rows.push(row);
+  if (count > 0) rows.push(count - 1);
+  return rows;
+}
+
+/** Value of a column between rows, at an altitude in m: straight in the logarithm where `log`. */
+export function interpolateProfile(
+  altitude: readonly number[],
+  column: readonly number[],
+  at: number,
+  log: boolean,
+): number {
+  const high = altitude.findIndex((z) => z >= at);
+  if (high < 0) return column.at(-1) ?? 0;
+  if (high === 0) return column[0] ?? 0;
+  const [z0, z1] = [altitude[high - 1]!, altitude[high]!];
+  const [v0, v1] = [column[high - 1]!, column[high]!];
+  const share = (at - z0) / (z1 - z0);
+  return log && v0 > 0 && v1 > 0 ? v0 * (v1 / v0) ** share : v0 + share * (v1 - v0);
+}
+
+/** Altitude in m at which the Knudsen number first has the given decimal logarithm; null where it never does. */
+export function altitudeOfKnudsen(profiles: Profiles, log10Knudsen: number): number | null {
+  const altitude = profiles.altitude ?? [];
+  const knudsen = profiles.knudsen ?? [];
+  const high = knudsen.findIndex((value) => Math.log10(value) >= log10Knudsen);
+  if (high <= 0) return null;
+  const [k0, k1] = [Math.log10(knudsen[high - 1]!), Math.log10(knudsen[high]!)];
+  const [z0, z1] = [altitude[high - 1]!, altitude[high]!];
+  return z0 + ((log10Knudsen - k0) / (k1 - k0)) * (z1 - z0);
+}
+
+export const densityUnit = (unitSystem: UnitSystem) => displayScale("m^-3", unitSystem, 1);
+
+/** Curves of number density, one a gas. */
+export function densityCurves(profiles: Profiles, strip: Strip, unitSystem: UnitSystem): GasCurve[] {
+  const altitude = profiles.altitude ?? [];
+  const rows = drawnRows(altitude.length);
+  const { factor } = densityUnit(unitSystem);
+  const part = strip.exobase ?? Infinity;
+  return strip.gases.flatMap((gas) => {
+    const column = profiles[`${gas}.number_density`];
+    if (!column) return [];
+    const curve: GasCurve = { gas, below: { x: [], y: [] }, above: { x: [], y: [] } };
+    for (const row of rows) {
+      const side = altitude[row]! < part ? curve.below : curve.above;
+      side.x.push(column[row]! * factor);
+      side.y.push(altitude[row]! / 1000);
+    }
+    if (strip.exobase !== null) {
+      const meeting = interpolateProfile(altitude, column, strip.exobase, true) * factor;
+      curve.below.x.push(meeting);
+      curve.below.y.push(strip.exobase / 1000);
+      curve.above.x.unshift(meeting);
+      curve.above.y.unshift(strip.exobase / 1000);
+    }
+    return [curve];
+  });
+}
+
+/**
+ * Decades worth drawing: up to the densest gas at the base, down to a few decades under what is left at the
+ * top, where gases that have gone run off the left.
+ */
+export function densityDecades(curves: readonly GasCurve[]): [from: number, to: number] {
+  const largest = Math.max(...curves.map(({ below, above }) => Math.max(...below.x, ...above.x)));
+  const left = curves.reduce((sum, { below, above }) => sum + (above.x.at(-1) ?? below.x.at(-1) ?? 0), 0);
+  const to = Math.log10(largest) + 0.15;
+  const from = Math.floor(Math.log10(left) - 4);
+  return [Math.min(from, Math.floor(to) - 4), to];
+}

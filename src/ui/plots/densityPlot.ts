@@ -1,0 +1,254 @@
+import type { Annotation, Data, Layout, Shape } from "plotly.js";
+import type { Strip } from "../../../shared/notebook/summary";
+import { formatKilometres, formatUnit, thinSpace, type UnitSystem } from "../../lib/format";
+import type { GasStyle } from "../../lib/gasStyle";
+import { figureText, plainText } from "../../lib/richText";
+import { densityDecades, densityUnit, drawnRows, type GasCurve, type Profiles } from "./columnCurves";
+import type { FigureRoom } from "./figureRoom";
+import {
+  acrossLine,
+  altitudeAxis,
+  axis,
+  baseLayout,
+  decadeAxis,
+  figureFonts,
+  note,
+  plainAxis,
+  type FigureZoom,
+} from "./figureLayout";
+import { knudsenBand } from "./knudsenBand";
+import { placeNames, type Box, type PlacedName } from "./placeNames";
+import type { FigureInks } from "./useFigureInks";
+
+export interface DensityPlotInput {
+  profiles: Profiles;
+  strip: Strip;
+  unitSystem: UnitSystem;
+  curves: readonly GasCurve[];
+  styles: ReadonlyMap<string, GasStyle>;
+  room: FigureRoom;
+  inks: FigureInks;
+  hidden: ReadonlySet<string>;
+  zoom: FigureZoom | null;
+}
+
+export interface DensityPlot {
+  data: Data[];
+  layout: Partial<Layout>;
+  /** Gases in the order of the name annotations, which are the first ones of the layout. */
+  named: string[];
+  /** Gases whose names found no place. */
+  unnamed: string[];
+}
+
+type FigureDash = NonNullable<NonNullable<Shape["line"]>["dash"]>;
+
+/** A list of lengths, which the library takes though its types name only a few patterns. */
+const dashList = (dash: string): FigureDash =>
+  (dash === "" ? "solid" : dash.replace(/ /g, "px,").concat("px")) as FigureDash;
+
+function gasTraces({ curves, styles, inks, hidden }: DensityPlotInput): Data[] {
+  return curves.flatMap(({ gas, below, above }) => {
+    const { dash, width } = styles.get(gas)!;
+    const trace = (part: typeof below, isAbove: boolean): Data => ({
+      type: "scatter",
+      mode: "lines",
+      name: gas,
+      x: part.x,
+      y: part.y,
+      visible: !hidden.has(gas),
+      opacity: isAbove ? 0.75 : 1,
+      line: { color: inks[gas]!, width: isAbove ? width * 0.72 : width, dash: dashList(dash) },
+      hoverinfo: "skip",
+    });
+    return above.x.length > 1 ? [trace(below, false), trace(above, true)] : [trace(below, false)];
+  });
+}
+
+function temperatureTrace({ profiles, inks }: DensityPlotInput): Data {
+  const rows = drawnRows(profiles.altitude?.length ?? 0);
+  return {
+    type: "scatter",
+    mode: "lines",
+    name: "temperature",
+    x: rows.map((row) => profiles.temperature![row]!),
+    y: rows.map((row) => profiles.altitude![row]! / 1000),
+    xaxis: "x2",
+    yaxis: "y",
+    line: { color: inks.ink!, width: 1.5 },
+    hoverinfo: "skip",
+  };
+}
+
+/** From altitudes and decades to px of the main panel. */
+function panelScale(room: FigureRoom, decades: [number, number], altitudes: [number, number]) {
+  return {
+    x: (log10: number) => ((log10 - decades[0]) / (decades[1] - decades[0])) * room.panel,
+    y: (km: number) => room.tall - ((km - altitudes[0]) / (altitudes[1] - altitudes[0])) * room.tall,
+    decade: (x: number) => decades[0] + (x / room.panel) * (decades[1] - decades[0]),
+    km: (y: number) => altitudes[0] + ((room.tall - y) / room.tall) * (altitudes[1] - altitudes[0]),
+  };
+}
+
+/** Sans at 14.5 px: a capital is about 9 px wide, a subscript 6. */
+const nameWidth = (gas: string): number =>
+  [...gas].reduce(
+    (sum, character) => sum + (/\d/.test(character) ? 6 : /[a-z]/.test(character) ? 7.5 : 9.6),
+    4,
+  );
+
+function namePlaces(
+  input: DensityPlotInput,
+  scale: ReturnType<typeof panelScale>,
+  obstacles: readonly Box[],
+): Map<string, PlacedName> {
+  const { room, curves } = input;
+  const frame: Box = { left: 4, right: room.panel - 2, top: 4, bottom: room.tall - 6 };
+  const placed = curves.map(({ gas, below, above }) => ({
+    key: gas,
+    nameWidth: nameWidth(gas),
+    points: [...below.x, ...above.x]
+      .map((value, i) => [scale.x(Math.log10(value)), scale.y([...below.y, ...above.y][i]!)] as const)
+      .filter(([x, y], i) => i % 2 === 0 && x > -60 && x < room.panel + 60 && y > -60 && y < room.tall + 60),
+  }));
+  return placeNames(placed, frame, obstacles);
+}
+
+/** Lettering of exobase and Knudsen band at the right end of the panel, with the room it takes. */
+function exobaseNotes({ strip, room, inks }: DensityPlotInput, scale: ReturnType<typeof panelScale>) {
+  const { sans, serif } = figureFonts();
+  const notes: Partial<Annotation>[] = [];
+  const boxes: Box[] = [];
+  const add = (km: number | null, text: string, width: number, lift: number, size: number, color: string) => {
+    if (km === null) return;
+    const y = scale.y(km) - lift;
+    if (y < 6 || y > room.tall - 6) return;
+    const place = {
+      x: 1,
+      y: km,
+      xref: "x domain" as const,
+      xanchor: "right" as const,
+      yanchor: "middle" as const,
+    };
+    notes.push(note(text, { ...place, xshift: -2, yshift: lift }, { family: sans, size, color }));
+    boxes.push({ left: room.panel - width, right: room.panel, top: y - 9, bottom: y + 9 });
+  };
+  const inKm = (metres: number | null) => (metres === null ? null : metres / 1000);
+  if (strip.exobase !== null) {
+    const symbol = `<span style="font-family:${serif.replace(/"/g, "'")};font-style:italic;font-size:13.5px">l = H</span>`;
+    const text = `<span style="font-weight:600">exobase</span> ${formatKilometres(strip.exobase)}${thinSpace}km, ${symbol}`;
+    add(inKm(strip.exobase), text, 136, 10, 12.5, inks.ink!);
+  }
+  const isClear = (metres: number | null) =>
+    metres !== null && Math.abs(scale.y(metres / 1000) - (scale.y((strip.exobase ?? 0) / 1000) - 10)) > 17;
+  if (isClear(strip.upper)) add(inKm(strip.upper), "Kn 10", 44, 0, 12, inks.ink2!);
+  if (isClear(strip.lower)) add(inKm(strip.lower), "Kn 0.1", 44, 0, 12, inks.ink2!);
+  return { notes, boxes };
+}
+
+/** Short bars in the gases' colours at the altitude axis: where each gas parts from the mixture. */
+function homopauseTicks({ strip, inks }: DensityPlotInput): Partial<Shape>[] {
+  return strip.homopauses
+    .filter(({ gas, altitude }) => inks[gas] !== undefined && altitude > strip.base)
+    .map(({ gas, altitude }) => ({
+      type: "line",
+      xref: "x domain" as Shape["xref"],
+      yref: "y",
+      xsizemode: "pixel",
+      xanchor: 0,
+      x0: 1,
+      x1: 12,
+      y0: altitude / 1000,
+      y1: altitude / 1000,
+      line: { color: inks[gas]!, width: 2 },
+    }));
+}
+
+function temperatureRange(profiles: Profiles): [number, number] {
+  const values = profiles.temperature ?? [0, 1];
+  const [low, high] = [Math.min(...values), Math.max(...values)];
+  const margin = Math.max(0.12 * (high - low), 0.04 * high);
+  return [Math.max(0, low - margin), high + margin];
+}
+
+/** Number density of each gas against altitude, and the temperature it rests on. */
+export function densityPlot(input: DensityPlotInput): DensityPlot {
+  const { profiles, strip, room, inks, curves, styles, hidden, zoom, unitSystem } = input;
+  const altitudes: [number, number] = zoom?.y ?? [strip.base / 1000, strip.top / 1000];
+  const decades = zoom?.x ?? densityDecades(curves);
+  const scale = panelScale(room, decades, altitudes);
+  const { sans } = figureFonts();
+  const panels: ("x" | "x2")[] = room.second > 0 ? ["x", "x2"] : ["x"];
+  const lettering = exobaseNotes(input, scale);
+  const homopauseBoxes = strip.homopauses.map(({ altitude }): Box => {
+    const y = scale.y(altitude / 1000);
+    return { left: 0, right: 16, top: y - 2, bottom: y + 2 };
+  });
+  const places = namePlaces(input, scale, [...lettering.boxes, ...homopauseBoxes]);
+  const named = curves.map(({ gas }) => gas).filter((gas) => places.has(gas));
+  const names = named.map((gas) => {
+    const { x, y, anchor } = places.get(gas)!;
+    const place = {
+      x: scale.decade(x),
+      y: scale.km(y),
+      xanchor: anchor === "start" ? "left" : "right",
+    } as const;
+    return {
+      ...note(
+        `<span style="font-weight:650">${figureText(styles.get(gas)!.name)}</span>`,
+        { ...place, yanchor: "middle" },
+        { family: sans, size: 14.5, color: inks[gas]! },
+      ),
+      captureevents: true,
+      opacity: hidden.has(gas) ? 0.4 : 1,
+    };
+  });
+  const exobaseLines =
+    strip.exobase === null
+      ? []
+      : panels.map((panel) => acrossLine(panel, strip.exobase! / 1000, inks.ink!, 1.4));
+  const total = room.panel + room.gap + room.second;
+  const second: Partial<Layout> =
+    room.second > 0
+      ? {
+          xaxis2: {
+            ...plainAxis(inks, "temperature, K", room.second, temperatureRange(profiles)),
+            domain: [(room.panel + room.gap) / total, 1],
+            anchor: "y2",
+            fixedrange: true,
+          },
+          yaxis2: {
+            ...altitudeAxis(inks, room, altitudes),
+            title: { text: "" },
+            anchor: "x2",
+            matches: "y",
+            showticklabels: false,
+          },
+        }
+      : {};
+  const temperature = { ...temperatureTrace(input), yaxis: "y2" } as Data;
+  const unit = figureText(formatUnit(densityUnit(unitSystem).unit));
+  return {
+    data: [...gasTraces(input), ...(room.second > 0 ? [temperature] : [])],
+    layout: {
+      ...baseLayout(room),
+      xaxis: {
+        ...decadeAxis(inks, `number density, ${unit}`, room.panel, decades),
+        domain: [0, room.panel / total],
+        anchor: "y",
+      },
+      yaxis: { ...axis(inks, "altitude, km"), ...altitudeAxis(inks, room, altitudes), anchor: "x" },
+      ...second,
+      shapes: [...knudsenBand(profiles, panels, inks.ink!, 0.3), ...exobaseLines, ...homopauseTicks(input)],
+      annotations: [...names, ...lettering.notes],
+    },
+    named,
+    unnamed: curves.map(({ gas }) => gas).filter((gas) => !places.has(gas)),
+  };
+}
+
+/** What the figure shows, for those who do not see it. */
+export function densityLabel(strip: Strip, styles: ReadonlyMap<string, GasStyle>): string {
+  const gases = strip.gases.map((gas) => plainText(styles.get(gas)!.name)).join(", ");
+  return `Number density of ${gases} against altitude in ${strip.column}, from ${formatKilometres(strip.base)} to ${formatKilometres(strip.top)} km`;
+}

@@ -1,0 +1,52 @@
+import { useSyncExternalStore } from "react";
+
+/** Colours as a figure needs them, resolved: it cannot read custom properties. */
+export type FigureInks = Record<string, string>;
+
+/** Counts changes of the theme, so that figures resolve their colours anew. */
+let themeRevision = 0;
+
+function subscribeToTheme(onChange: () => void): () => void {
+  const handle = () => {
+    themeRevision += 1;
+    onChange();
+  };
+  const observer = new MutationObserver(handle);
+  observer.observe(document.documentElement, { attributes: true, attributeFilter: ["data-theme", "class"] });
+  const preference = window.matchMedia("(prefers-color-scheme: dark)");
+  preference.addEventListener("change", handle);
+  return () => {
+    observer.disconnect();
+    preference.removeEventListener("change", handle);
+  };
+}
+
+/**
+ * Resolves CSS colours as they are at the page, or as they are by day for figures that leave it.
+ *
+ * @param values  CSS colours by key, such as { ink: "var(--ink)", H: "var(--g-H)" }
+ */
+export function resolveInks(values: Readonly<Record<string, string>>, light: "page" | "day"): FigureInks {
+  const probe = document.createElement("span");
+  probe.hidden = true;
+  if (light === "day") probe.style.colorScheme = "light";
+  document.body.append(probe);
+  const style = getComputedStyle(probe);
+  const inks = Object.fromEntries(
+    Object.entries(values).map(([key, value]) => {
+      probe.style.color = value;
+      return [key, style.color];
+    }),
+  );
+  probe.remove();
+  return inks;
+}
+
+/** A number that changes with the theme; what is resolved from CSS is memoised by it. */
+export function useThemeRevision(): number {
+  return useSyncExternalStore(
+    subscribeToTheme,
+    () => themeRevision,
+    () => 0,
+  );
+}
