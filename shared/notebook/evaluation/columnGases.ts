@@ -159,7 +159,7 @@ function sayIfThermalDiffusionIsBorrowed(cell: OpenCell, entry: Entry, known: re
   const [main] = [...known].sort((a, b) => b.gas.moleFraction - a.gas.moleFraction);
   const borrowed = known.filter(
     ({ own, handbook, gas }) =>
-      own?.thermalDiffusionFactor == null && handbook && gas.thermalDiffusionFactor !== 0,
+      (own?.thermalDiffusionFactor ?? null) === null && handbook && gas.thermalDiffusionFactor !== 0,
   );
   const nitrogen = findGas("N2")!.mass;
   if (borrowed.length === 0 || known.length === 1 || main.gas.mass >= 0.99 * nitrogen) return;

@@ -1,11 +1,11 @@
 import { cellSchemas } from "../cellSchemas";
 import type { Cell } from "../document";
-import { evaluateBody } from "../kinds/body";
-import type { CellAnswer } from "../kinds/cellAnswer";
-import { evaluateColumn } from "../kinds/column";
-import { evaluateEscape } from "../kinds/escape";
-import { evaluateGas } from "../kinds/gas";
-import { evaluateValues } from "../kinds/values";
+import { evaluateBody } from "./evaluateBody";
+import type { CellAnswer } from "./cellAnswer";
+import { evaluateColumn } from "./evaluateColumn";
+import { evaluateEscape } from "./evaluateEscape";
+import { evaluateGas } from "./evaluateGas";
+import { evaluateValues } from "./evaluateValues";
 import { locateNotes } from "../language/locateNotes";
 import type { CellEvaluation, CellResult, CellStatus, Note } from "../result";
 import { openCell, type OpenCell } from "./openCell";

@@ -1,4 +1,4 @@
-import type { CellModel } from "../evaluation/models";
+import type { CellModel } from "./models";
 import type { Quantity } from "../language/quantity";
 import type { CellResult } from "../result";
 import type { Strip } from "../summary";

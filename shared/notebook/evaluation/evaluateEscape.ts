@@ -1,0 +1,122 @@
+import { thermalEscape, type ColumnLevel, type GasEscape, type PhysicsNote } from "../../physics";
+import { checkName } from "./checkName";
+import { exobaseValues } from "./columnResults";
+import type { ColumnModel } from "./models";
+import { requireEntries, type OpenCell } from "./openCell";
+import { readCellEntry, readEntry } from "./readEntries";
+import { measured } from "./resultValue";
+import { readChoice } from "../language/readChoice";
+import { readGasNames } from "../language/readGasName";
+import type { CellResult } from "../result";
+import type { CellAnswer } from "./cellAnswer";
+
+export function evaluateEscape(cell: OpenCell): CellAnswer {
+  checkName(cell, cell.name);
+  requireEntries(cell, ["coupling"]);
+  const source = readCellEntry(cell, "column");
+  const isCouplingSaid = readCoupling(cell);
+  const isCriterionKnown = readCriterion(cell);
+  const gases = source ? readGases(cell, source) : undefined;
+  if (!source || !isCouplingSaid || !isCriterionKnown) return { gases: gases ?? [] };
+
+  const { exobase } = source.column;
+  if (!exobase.found) {
+    cell.say("fault", `no_exobase_${exobase.reason}`, `No exobase. ${exobase.message}`, cell.entry("column"));
+    return { gases: gases ?? [] };
+  }
+  for (const note of exobase.notes) sayOf(cell, note);
+  const { values, notes } = escapeValues(source, exobase.level, gases ?? []);
+  for (const note of notes) sayOf(cell, note);
+  return {
+    gases: gases ?? [],
+    values: { ...exobaseValues(exobase.level, exobase.lower, exobase.upper), ...values },
+  };
+}
+
+/** The convention changes every rate, so it is written out; what is not computed is not silently taken for what is. */
+function readCoupling(cell: OpenCell): boolean {
+  if (cell.entry("coupling")) {
+    return readEntry(cell, "coupling", (node) => readChoice(node, ["open"], "coupling")) !== undefined;
+  }
+  const { length } = cell.text;
+  const isFreshLine = length === 0 || cell.text.endsWith("\n");
+  cell.say(
+    "fault",
+    "missing_coupling",
+    "The entry *coupling* is missing. Write coupling = open: the column is solved without a flux and the Jeans flux evaluated after, so that what diffusion can supply does not limit it.",
+    undefined,
+    {
+      label: "Write coupling = open",
+      range: { from: length, to: length },
+      replacement: `${isFreshLine ? "" : "\n"}coupling = open`,
+    },
+  );
+  return false;
+}
+
+function readCriterion(cell: OpenCell): boolean {
+  if (cell.entry("criterion")) {
+    return readEntry(cell, "criterion", (node) => readChoice(node, ["bulk"], "criterion")) !== undefined;
+  }
+  cell.actByDefault("criterion");
+  return true;
+}
+
+/** Gases to answer for, in the order written; undefined if the list has a fault. */
+function readGases(cell: OpenCell, { column }: ColumnModel): string[] | undefined {
+  const all = column.input.gases.map(({ formula }) => formula);
+  if (cell.entry("gases")) {
+    return readEntry(cell, "gases", (node) => readGasNames(node, all))?.map(({ formula }) => formula);
+  }
+  cell.actByDefault("gases", { text: `gases = ${all.join(", ")}` });
+  return all;
+}
+
+function sayOf(cell: OpenCell, { level, code, message }: PhysicsNote): void {
+  cell.say(level, code, message, cell.entry("column"));
+}
+
+function escapeValues(
+  { column, body }: ColumnModel,
+  level: ColumnLevel,
+  gases: readonly string[],
+): { values: CellResult["values"]; notes: PhysicsNote[] } {
+  const all = column.input.gases;
+  const escape = thermalEscape({
+    gravitationalParameter: body.gravitationalParameter,
+    radius: level.radius,
+    temperature: level.temperature,
+    meanMass: level.meanMass,
+    hillRadius: body.hillRadius,
+    gases: gases.map((formula) => {
+      const index = all.findIndex((gas) => gas.formula === formula);
+      return { formula, mass: all[index].mass, logNumberDensity: level.logNumberDensities[index] };
+    }),
+  });
+  const values: CellResult["values"] = {
+    "exobase.escape_speed": measured(escape.escapeSpeed, "m s^-1"),
+    bulk_escape_parameter: measured(escape.bulkEscapeParameter, "1"),
+    regime: { value: escape.regime },
+  };
+  for (const gas of escape.gases) {
+    const index = all.findIndex(({ formula }) => formula === gas.formula);
+    Object.assign(values, gasValues(gas, level.numberDensities[index]));
+  }
+  return { values, notes: [...escape.notes, ...escape.gases.flatMap(({ notes }) => notes)] };
+}
+
+function gasValues(gas: GasEscape, numberDensity: number): CellResult["values"] {
+  const { formula } = gas;
+  return {
+    [`${formula}.number_density`]: measured(numberDensity === 0 ? null : numberDensity, "m^-3"),
+    [`${formula}.escape_parameter`]: measured(gas.escapeParameter, "1"),
+    [`${formula}.thermal_speed`]: measured(gas.thermalSpeed, "m s^-1"),
+    [`${formula}.effusion_velocity`]: measured(gas.effusionVelocity, "m s^-1"),
+    [`${formula}.log10_effusion_velocity`]: measured(gas.log10EffusionVelocity, "1"),
+    [`${formula}.jeans_flux`]: measured(gas.jeansFlux, "m^-2 s^-1"),
+    [`${formula}.log10_jeans_flux`]: measured(gas.log10JeansFlux, "1"),
+    [`${formula}.rate`]: measured(gas.rate, "s^-1"),
+    [`${formula}.log10_rate`]: measured(gas.log10Rate, "1"),
+    [`${formula}.mass_rate`]: measured(gas.massRate, "kg s^-1"),
+  };
+}

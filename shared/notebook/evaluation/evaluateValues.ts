@@ -1,0 +1,50 @@
+import { checkName } from "./checkName";
+import type { OpenCell } from "./openCell";
+import { measured } from "./resultValue";
+import { evaluateExpression } from "../language/evaluateExpression";
+import { siUnitText } from "../language/formatQuantity";
+import type { Quantity } from "../language/quantity";
+import type { Scope } from "../language/scope";
+import { understoodText } from "../language/understoodText";
+import type { CellResult } from "../result";
+import type { CellAnswer } from "./cellAnswer";
+
+export function evaluateValues(cell: OpenCell): CellAnswer {
+  const globals: Record<string, Quantity | null> = {};
+  const values: CellResult["values"] = {};
+  const scope = withEntriesAbove(cell, globals);
+
+  for (const entry of cell.entries) {
+    const isFree = checkName(cell, entry.key, entry.keyRange);
+    const evaluated = evaluateExpression(entry.node, scope);
+    cell.notes.push(...evaluated.notes);
+    if (!isFree) continue;
+    globals[entry.key] = evaluated.ok ? evaluated.quantity : null;
+    if (!evaluated.ok) continue;
+    const { quantity } = evaluated;
+    values[entry.key] = measured(quantity.value, siUnitText(quantity.dimension));
+    cell.understand(entry, understoodText(entry.node, quantity, cell));
+  }
+  return { values, globals };
+}
+
+/** The cells above, and the entries of this cell that stand above the one being read. */
+function withEntriesAbove(cell: OpenCell, globals: Readonly<Record<string, Quantity | null>>): Scope {
+  const { surroundings } = cell;
+  const own = new Set(cell.entries.map(({ key }) => key));
+  return {
+    lookup(path) {
+      const earlier = Object.hasOwn(globals, path) ? globals[path] : undefined;
+      if (earlier) return earlier;
+      if (earlier === null) return { unavailable: `*${path}* has a fault itself; put that right first.` };
+      const above = surroundings.lookup(path);
+      if (above === undefined && own.has(path)) {
+        return {
+          unavailable: `*${path}* is not defined above this line; an entry sees only what stands above it.`,
+        };
+      }
+      return above;
+    },
+    names: () => [...Object.keys(globals), ...surroundings.names()],
+  };
+}
