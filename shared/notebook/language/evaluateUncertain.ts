@@ -31,11 +31,17 @@ function isBareNumber(node: ValueNode): boolean {
 const isPercentage = (unit: UnitNode): boolean =>
   unit.factors.length === 1 && unit.factors[0].symbol === "%" && unit.factors[0].exponent === 1;
 
+/** The unit at the end of an expression, a sign before it aside. */
+function unitAtEnd(node: ValueNode): UnitNode | null {
+  if (node.type === "negative") return unitAtEnd(node.operand);
+  return node.type === "measured" ? node.unit : null;
+}
+
 /** The first part, in the unit at the end where it has none of its own. */
 function evaluateFirst({ first, second }: UncertainNode, scope: Scope, evaluate: Evaluate): Quantity {
-  const takesUnit = second.type === "measured" && isBareNumber(first);
-  if (!takesUnit) return evaluate(first, scope);
-  return evaluate({ type: "measured", operand: first, unit: second.unit, range: first.range }, scope);
+  const unit = unitAtEnd(second);
+  if (unit === null || !isBareNumber(first)) return evaluate(first, scope);
+  return evaluate({ type: "measured", operand: first, unit, range: first.range }, scope);
 }
 
 function failUnlike(node: UncertainNode, first: Quantity, second: Quantity): never {
@@ -54,7 +60,8 @@ function plusMinus(node: UncertainNode, scope: Scope, evaluate: Evaluate): [Quan
   const deviation = evaluate(node.second, scope);
   const isOwnPercentage =
     isBareNumber(node.first) || (node.first.type === "measured" && isDimensionless(mean.dimension));
-  const isRelative = node.second.type === "measured" && isPercentage(node.second.unit) && !isOwnPercentage;
+  const unit = unitAtEnd(node.second);
+  const isRelative = unit !== null && isPercentage(unit) && !isOwnPercentage;
   if (!isRelative && !sameDimension(mean.dimension, deviation.dimension)) failUnlike(node, mean, deviation);
   if (deviation.value < 0)
     fail("uncertainty", node.second.range, "What follows ± is a deviation; it can't be below zero.");

@@ -52,8 +52,10 @@ export function readArguments(
     }
     found.set(name.text, value);
   }
+  // A misspelt argument is told by itself; that it is missing too would say the same twice.
+  const isAllKnown = notes.length === 0;
   for (const { name, isNeeded, example } of forms)
-    if (isNeeded && !found.has(name) && notes.length === 0)
+    if (isNeeded && !found.has(name) && isAllKnown)
       notes.push(fault("argument", call.nameRange, `*${call.name}* needs *${name}*: ${name} = ${example}.`));
   return notes.length > 0 ? { ok: false, notes } : { ok: true, value: found, notes };
 }

@@ -87,12 +87,7 @@ function unitExponent(conversion: Conversion, node: SyntaxNode): number {
   return Number(plain.replace("−", "-"));
 }
 
-function collectUnit(
-  conversion: Conversion,
-  node: SyntaxNode,
-  sign: 1 | -1,
-  factors: UnitFactor[],
-): void {
+function collectUnit(conversion: Conversion, node: SyntaxNode, sign: 1 | -1, factors: UnitFactor[]): void {
   if (node.name === "UnitFactor") {
     const [name, exponentNode] = partsOf(node);
     if (exponentNode && conversion.text.slice(name.to, exponentNode.from).includes("**"))
@@ -117,8 +112,7 @@ function collectUnit(
     return;
   }
   const inner = node.name === "Quotient" ? (-sign as 1 | -1) : sign;
-  for (const part of partsOf(node))
-    if (part.name !== "Per") collectUnit(conversion, part, inner, factors);
+  for (const part of partsOf(node)) if (part.name !== "Per") collectUnit(conversion, part, inner, factors);
 }
 
 function convertUnit(conversion: Conversion, node: SyntaxNode): UnitNode {

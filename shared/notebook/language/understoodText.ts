@@ -20,10 +20,16 @@ function sizeOf(unit: UnitNode): number | null {
 const alike = (a: number, b: number): boolean => Math.abs(a - b) <= 1e-12 * Math.abs(b);
 
 const isLiteral = (node: ValueNode): boolean =>
-  node.type === "number" || (node.type === "negative" && node.operand.type === "number");
+  node.type === "number" || (node.type === "negative" && isLiteral(node.operand));
+
+const isMeasuredLiteral = (node: ValueNode): boolean =>
+  node.type === "negative"
+    ? isMeasuredLiteral(node.operand)
+    : node.type === "measured" && isLiteral(node.operand);
 
 /** The unit that stands at the end of an uncertain value. */
 function lastUnit(node: ValueNode): UnitNode | null {
+  if (node.type === "negative") return lastUnit(node.operand);
   if (node.type === "measured") return node.unit;
   if (node.type !== "uncertain") return null;
   if (node.form === "factor") return lastUnit(node.first);
@@ -81,8 +87,7 @@ export function understoodText(
   const shown = (): string => formatQuantity(quantity.value, quantity.dimension, { unitSystem });
   if (node.type === "number" || node.type === "list" || node.type === "broken") return null;
   if (isLiteral(node)) return null;
-  if (node.type === "measured" && isLiteral(node.operand))
-    return isShownAsWritten(node, quantity, unitSystem) ? null : shown();
+  if (isMeasuredLiteral(node)) return isShownAsWritten(node, quantity, unitSystem) ? null : shown();
 
   const { uncertainty } = quantity;
   if (node.type !== "uncertain" || !uncertainty) return shown();
