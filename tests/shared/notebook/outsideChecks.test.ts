@@ -1,0 +1,140 @@
+/** Numbers from outside, reached as a user reaches them: by what is written in a notebook. */
+import { readFileSync } from "node:fs";
+import path from "node:path";
+import { describe, expect, it } from "vitest";
+import { evaluateNotebook } from "../../../shared/notebook/evaluateNotebook";
+import { readNotebookFile } from "../../../shared/notebook/notebookFile";
+import type { ResultRow } from "../../../shared/notebook/result";
+import jeansCases from "../../fixtures/jeansCases.json";
+import standard from "../../fixtures/standardAtmosphere1976.json";
+import "../../toBeCloseToRelative";
+import { numberIn, resultOf, type WrittenCell } from "./evaluateCells";
+
+function evaluateFile(name: string) {
+  const file = path.join(import.meta.dirname, "../../fixtures/notebooks", name);
+  let count = 0;
+  const reading = readNotebookFile(readFileSync(file, "utf8"), () => String((count += 1)));
+  if (!reading.ok) throw new Error(reading.notes.map(({ message }) => message).join("\n"));
+  return evaluateNotebook(reading.document).evaluation.cells.map(({ result }) => result);
+}
+
+describe("the U.S. Standard Atmosphere 1976 through a notebook, from its row at 150 km", () => {
+  const cells = evaluateFile("standard-atmosphere.md");
+  const column = cells.find(({ kind }) => kind === "column")!;
+  const levelAt = (altitudeKm: number): ResultRow => {
+    const row = column.tables.levels.find(({ altitude }) => altitude === altitudeKm * 1000);
+    if (!row) throw new Error(`No level at ${altitudeKm} km`);
+    return row;
+  };
+  const rows = standard.rows.filter(({ altitudeKm }) => altitudeKm >= 150);
+  const gases = ["N2", "O", "O2", "Ar", "He"] as const;
+
+  // 0.2 %: printed rounding, and thermal diffusion shared within the mixture.
+  it.each(rows.flatMap(({ altitudeKm, numberDensity }) => gases.map((gas) => ({ altitudeKm, gas, n: numberDensity[gas] }))))(
+    "has $gas at $altitudeKm km within 0.2 %",
+    ({ altitudeKm, gas, n }) => {
+      if (n === null) return;
+      expect(levelAt(altitudeKm)[`${gas}.number_density`]).toBeCloseToRelative(n, 2e-3);
+    },
+  );
+
+  it.each(rows)("has the temperature at $altitudeKm km within 0.01 K", ({ altitudeKm, temperature }) => {
+    expect(Math.abs((levelAt(altitudeKm).temperature as number) - temperature)).toBeLessThan(0.01);
+  });
+
+  it.each(rows.filter(({ gravity }) => gravity !== null))(
+    "has gravity at $altitudeKm km within 1e-4",
+    ({ altitudeKm, gravity }) => {
+      expect(levelAt(altitudeKm).gravity).toBeCloseToRelative(gravity as number, 1e-4);
+    },
+  );
+
+  // Above 300 km the printed scale height feels the hydrogen, which this column does without.
+  it.each(rows.filter(({ pressureScaleHeightKm, altitudeKm }) => pressureScaleHeightKm !== null && altitudeKm <= 300))(
+    "has the scale height at $altitudeKm km within 5e-4",
+    ({ altitudeKm, pressureScaleHeightKm }) => {
+      expect(levelAt(altitudeKm).scale_height).toBeCloseToRelative(pressureScaleHeightKm! * 1000, 5e-4);
+    },
+  );
+});
+
+/** Constants of the program that computed the cases. */
+const { boltzmann, atomicMass, massesU, gravitationalParametersKm3S2 } = jeansCases.inputs;
+
+/** Radii that the altitudes of the cases count from, km. */
+const radiiKm = { Earth: 6371.0084, Mars: 3389.5 } as const;
+
+/**
+ * A notebook whose exobase lies where a case wants it: isothermal CO2 (d = 3.763 Å, stated) with traces, without
+ * mixing. Then n = n_b exp(Λ_b − Λ), Λ = GMm/kTr, and l = H gives n = mg/(√2 σ kT) at the exobase.
+ */
+function notebookWithExobaseAt(place: {
+  body: keyof typeof radiiKm;
+  radiusKm: number;
+  temperature: number;
+  hydrogenAtExobase?: number;
+}): WrittenCell[] {
+  const { body, radiusKm, temperature } = place;
+  const gm = gravitationalParametersKm3S2[body] * 1e9;
+  const kT = boltzmann * temperature;
+  const base = radiusKm * 1e3 - 60e3;
+  const rise = (massU: number) => ((gm * massU * atomicMass) / kT) * (1 / base - 1 / (radiusKm * 1e3));
+  const crossSection = Math.PI * 3.763e-10 ** 2;
+  const mass = massesU.CO2 * atomicMass;
+  const atExobase = (mass * gm) / (radiusKm * 1e3) ** 2 / (Math.SQRT2 * crossSection * kT);
+  const co2 = atExobase * Math.exp(rise(massesU.CO2));
+  const trace = (formula: keyof typeof massesU) =>
+    formula === "H" && place.hydrogenAtExobase
+      ? place.hydrogenAtExobase * Math.exp(rise(massesU.H))
+      : atExobase * 1e-9 * Math.exp(rise(massesU[formula]));
+  const traces = (["H", "D", "He", "O", "H2", "HD"] as const).map((gas) => `${gas}: ${trace(gas)} /m^3`);
+  const masses = Object.entries(massesU).map(
+    ([formula, massU]): WrittenCell => [
+      "gas",
+      formula,
+      `mass = ${massU} u\nthermal_diffusion = 0${formula === "CO2" ? `\ncross_section = ${crossSection} m^2` : ""}`,
+    ],
+  );
+  return [
+    ["body", "planet", `gm = ${gm} m^3/s^2\nradius = ${radiiKm[body]} km`],
+    ...masses,
+    [
+      "column",
+      "air",
+      `body = planet\nbase = ${base / 1e3 - radiiKm[body]} km\ngases = CO2: ${co2} /m^3, ${traces.join(", ")}\ntemperature = ${temperature} K`,
+    ],
+    ["escape", "leak", "column = air\ncoupling = open"],
+  ];
+}
+
+describe("escape parameters and effusion velocities of Earth and Mars through a notebook", () => {
+  const cases = jeansCases.rows.filter(({ body }) => body === "Earth" || body === "Mars");
+
+  it.each(cases)("agree for $gas of $body at $temperature K, $radiusKm km", (row) => {
+    const body = row.body as keyof typeof radiiKm;
+    const result = resultOf(...notebookWithExobaseAt({ ...row, body }));
+    expect(numberIn(result, "exobase.radius")).toBeCloseToRelative(row.radiusKm * 1e3, 1e-7);
+    expect(numberIn(result, "exobase.escape_speed")).toBeCloseToRelative(row.escapeSpeed, 1e-4);
+    expect(numberIn(result, `${row.gas}.escape_parameter`)).toBeCloseToRelative(row.escapeParameter, 1e-4);
+    expect(numberIn(result, `${row.gas}.thermal_speed`)).toBeCloseToRelative(row.thermalSpeed, 1e-4);
+    expect(numberIn(result, `${row.gas}.effusion_velocity`)).toBeCloseToRelative(row.effusionVelocity, 1e-4);
+  });
+
+  // Anderson and Hord (1971): 350 K, 3e4 cm⁻³ at 250 km, 1.8e8 cm⁻² s⁻¹; the published number from memory.
+  it("give the Martian flux of 1969 within 5 %", () => {
+    const place = { body: "Mars", radiusKm: 3639.5, temperature: 350, hydrogenAtExobase: 3e10 } as const;
+    const result = resultOf(...notebookWithExobaseAt(place));
+    expect(numberIn(result, "H.number_density")).toBeCloseToRelative(3e10, 1e-4);
+    expect(numberIn(result, "H.jeans_flux")).toBeCloseToRelative(1.8e12, 0.05);
+  });
+
+  // Levine et al. (1978): 170 K and 1.8e6 cm⁻³ give the same flux.
+  it("give the same flux for a cool and rich Mars within 4 %", () => {
+    const flux = (temperature: number, hydrogenAtExobase: number) =>
+      numberIn(
+        resultOf(...notebookWithExobaseAt({ body: "Mars", radiusKm: 3639.5, temperature, hydrogenAtExobase })),
+        "H.jeans_flux",
+      );
+    expect(flux(170, 1.8e12)).toBeCloseToRelative(flux(350, 3e10), 0.04);
+  });
+});
