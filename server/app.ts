@@ -41,7 +41,7 @@ export function createApp(parts: AppParts): Express {
   const app = express();
   app.disable("x-powered-by");
   app.set("trust proxy", proxies);
-  app.use(requestLog(logger), securityHeaders({ isHttps: origin?.startsWith("https:") ?? false }));
+  app.use(requestLog(logger), ...securityHeaders({ isHttps: origin?.startsWith("https:") ?? false }));
   app.use(healthRoutes({ db }));
 
   const api = express.Router();

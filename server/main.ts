@@ -2,6 +2,7 @@
 import { existsSync } from "node:fs";
 import { createServer, type Server } from "node:http";
 import type { AddressInfo } from "node:net";
+import path from "node:path";
 import { pino, type Logger } from "pino";
 import { createApp } from "./app";
 import { createAuth } from "./auth/auth";
@@ -45,7 +46,7 @@ async function start(env: Env, logger: Logger): Promise<() => Promise<void>> {
   const auth = await createAuth(db, { hasSecureCookies: env.origin?.startsWith("https:") ?? false });
   if (env.demo) await seedDemo(db, { evaluator, now: new Date() });
 
-  const hasClient = existsSync(places.client);
+  const hasClient = existsSync(path.join(places.client, "index.html"));
   if (!hasClient) logger.warn({ folder: places.client }, "no built page here; only the API is served");
   const app = createApp({
     db,

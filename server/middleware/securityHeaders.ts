@@ -1,18 +1,29 @@
-import type { RequestHandler } from "express";
+import { randomBytes } from "node:crypto";
+import type { RequestHandler, Response } from "express";
 import helmet from "helmet";
 
+/** Hash of an empty style element, which figures open and then fill through the style sheet's own interface. */
+const emptyStyle = "'sha256-47DEQpj8HBSa+/TImW+5JCeuQeRkm5NMpJWZG3hSuFU='";
+
+/** The token of this answer by which the page's own style elements, such as the editor's, pass the policy. */
+export const nonceOf = (res: Response): string => (res.locals as { nonce: string }).nonce;
+
 /**
- * What a page may load: its own files and nothing else. Scripts never inline. Style attributes are allowed, since
- * formulas and figures set them. Style elements are allowed, since the editor and the figures write theirs at run time.
+ * What a page may load: its own files and nothing else; scripts never inline. Style attributes are allowed, since
+ * formulas and figures set them; style elements only with the token of the page.
  */
-export function securityHeaders({ isHttps }: { isHttps: boolean }): RequestHandler {
-  return helmet({
+export function securityHeaders({ isHttps }: { isHttps: boolean }): RequestHandler[] {
+  const giveNonce: RequestHandler = (_req, res, next) => {
+    res.locals.nonce = randomBytes(16).toString("base64");
+    next();
+  };
+  const setHeaders = helmet({
     contentSecurityPolicy: {
       useDefaults: false,
       directives: {
         "default-src": ["'self'"],
         "script-src": ["'self'"],
-        "style-src": ["'self'"],
+        "style-src": ["'self'", emptyStyle, (_req, res) => `'nonce-${nonceOf(res as Response)}'`],
         "style-src-attr": ["'unsafe-inline'"],
         "img-src": ["'self'", "data:", "blob:"],
         "font-src": ["'self'"],
@@ -32,4 +43,5 @@ export function securityHeaders({ isHttps }: { isHttps: boolean }): RequestHandl
     referrerPolicy: { policy: "same-origin" },
     xFrameOptions: { action: "deny" },
   });
+  return [giveNonce, setHeaders];
 }

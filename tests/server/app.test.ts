@@ -13,7 +13,10 @@ beforeAll(async () => {
   folder = mkdtempSync(path.join(tmpdir(), "tenuity-client-"));
   mkdirSync(path.join(folder, "assets"));
   const script = "console.log('a page');\n".repeat(100);
-  writeFileSync(path.join(folder, "index.html"), "<!doctype html><title>Tenuity</title>");
+  writeFileSync(
+    path.join(folder, "index.html"),
+    "<!doctype html><html><head><title>Tenuity</title></head></html>",
+  );
   writeFileSync(path.join(folder, "assets/page-abc123.js"), script);
   writeFileSync(path.join(folder, "assets/page-abc123.js.br"), brotliCompressSync(script));
   writeFileSync(path.join(folder, "assets/page-abc123.js.gz"), gzipSync(script));
@@ -31,7 +34,7 @@ describe("the page", () => {
       const response = await server.signedOut.get(url).set("Accept", "text/html");
       expect(response.status).toBe(200);
       expect(response.type).toBe("text/html");
-      expect(response.headers["cache-control"]).toBe("no-cache");
+      expect(response.headers["cache-control"]).toBe("no-store");
     },
   );
 
@@ -55,6 +58,14 @@ describe("the page", () => {
       expect(response.text).not.toContain("dependencies");
     },
   );
+
+  it("is told the token of its style elements, another each time", async () => {
+    const [first, second] = [await server.signedOut.get("/"), await server.signedOut.get("/")];
+    const nonce = /<meta property="csp-nonce" nonce="([^"]+)"/.exec(first.text)![1]!;
+    expect(first.headers["content-security-policy"]).toContain(`'nonce-${nonce}'`);
+    expect(second.text).not.toContain(nonce);
+    expect((await server.signedOut.get("/index.html")).headers.location).toBe("/");
+  });
 
   it("allows no inline script and no frame", async () => {
     const { headers } = await server.signedOut.get("/");

@@ -5,13 +5,15 @@ import path from "node:path";
 import { afterEach, beforeEach, describe, expect, it } from "vitest";
 import { notebookResponse } from "../../shared/schemas/notebooks";
 import { buildDocument } from "../factories/buildDocument";
+import { makeDatabaseFolder } from "./testDatabase";
 
 const root = path.resolve(import.meta.dirname, "../..");
 
 let folder: string;
 let running: ChildProcess[];
-beforeEach(() => {
+beforeEach(async () => {
   folder = mkdtempSync(path.join(tmpdir(), "tenuity-process-"));
+  await makeDatabaseFolder(path.join(folder, "postgres"));
   running = [];
 });
 afterEach(async () => {

@@ -8,9 +8,19 @@ const cache = path.resolve(import.meta.dirname, "../../node_modules/.cache/tenui
 
 /** A database in memory at the latest migration. The first run migrates and keeps the state; later ones load it. */
 export async function openTestDatabase() {
+  return openPglite({ dump: await migratedState() });
+}
+
+/** The same in a folder, closed again, so that a server need not make one from nothing. */
+export async function makeDatabaseFolder(folder: string): Promise<void> {
+  const database = await openPglite({ folder, dump: await migratedState() });
+  await database.close();
+}
+
+async function migratedState(): Promise<Blob> {
   const file = path.join(cache, `migrated-${migrationsHash()}.tar`);
   if (!existsSync(file)) await writeDump(file);
-  return openPglite({ dump: new Blob([readFileSync(file)]) });
+  return new Blob([readFileSync(file)]);
 }
 
 function migrationsHash(): string {

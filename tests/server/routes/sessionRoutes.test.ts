@@ -156,7 +156,10 @@ describe("looking round as a demonstration account", () => {
 
 describe("too many tries", () => {
   it("close sign-in to one account and sign-up, and say how long to wait", async () => {
-    const strict = await startTestServer({ db: server.db, tries: { ...usualTries, signInPerAccount: 2, signUp: 1 } });
+    const strict = await startTestServer({
+      db: server.db,
+      tries: { ...usualTries, signInPerAccount: 2, signUp: 1 },
+    });
     const user = await buildUser(strict.db, { passwordHash: await strict.auth.hashPassword(password) });
     const signIn = (secret: string, email = user.email) =>
       strict.signedOut.post("/api/session").send({ email, password: secret });
