@@ -36,13 +36,19 @@ export function StripBand({ strip, scale, breadth, direction, closest, dot }: St
     <g>
       <defs>
         {tones.map(({ gas, stops }) => (
-          <linearGradient key={gas} id={`${id}${gas}`} gradientUnits="userSpaceOnUse" {...ends}>
+          <linearGradient
+            key={gas}
+            id={`${id}${gas}`}
+            gradientUnits="userSpaceOnUse"
+            style={{ color: styles.get(gas)!.tint }}
+            {...ends}
+          >
             {stops.map(({ offset, opacity }) => (
               <stop
                 key={offset}
                 offset={round(offset)}
                 stopOpacity={round(opacity)}
-                style={{ stopColor: styles.get(gas)!.tint }}
+                stopColor="currentColor"
               />
             ))}
           </linearGradient>
