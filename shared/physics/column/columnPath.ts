@@ -46,20 +46,23 @@ export function emptyPath(problem: ColumnProblem, fluxes: BaseFluxes | null): Co
   };
 }
 
+/** Steps that a path has room for at first. */
 const firstCapacity = 48;
 
 /** Makes room for one more step. */
 export function makeRoom(path: ColumnPath): void {
   if (path.steps + 1 < path.positions.length) return;
-  path.positions = doubled(path.positions);
-  path.states = doubled(path.states);
-  path.stages = doubled(path.stages);
+  const size = path.problem.masses.length;
+  const capacity = 2 * path.steps;
+  path.positions = extended(path.positions, capacity + 1);
+  path.states = extended(path.states, (capacity + 1) * size);
+  path.stages = extended(path.stages, capacity * keptStages * size);
 }
 
-function doubled(array: Float64Array): Float64Array {
-  const larger = new Float64Array(2 * array.length);
-  larger.set(array);
-  return larger;
+function extended(array: Float64Array, length: number): Float64Array {
+  const longer = new Float64Array(length);
+  longer.set(array);
+  return longer;
 }
 
 /** Temperature at a height within a step, K. */

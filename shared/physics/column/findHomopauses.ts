@@ -3,7 +3,7 @@ import { maximumDimension } from "../numerics/dormandPrince";
 import { exponential, logarithm } from "../numerics/elementary";
 import { findRoot, rootOf } from "../numerics/findRoot";
 import type { HomopauseOutcome } from "../types";
-import { nodeState, pathTemperature, stateWithin, type ColumnPath } from "./columnPath";
+import { nodeState, pathTemperature, stateWithin, stepAt, type ColumnPath } from "./columnPath";
 import { altitudeOf, eddyOf } from "./columnProblem";
 
 export interface Homopause {
@@ -60,22 +60,22 @@ function lastHomopause({ found, isSeparatedAtTop }: Crossings): Homopause {
 
 function findCrossings(balance: BlancBalance, gases: number[], top: number): Crossings[] {
   const { path } = balance;
-  const { problem, positions, steps } = path;
+  const heights = heightsToLookAt(path, top);
   const crossings: Crossings[] = [];
-  setBalance(balance, 0, positions[0]);
+  setBalance(balance, heights[0]);
   for (const gas of gases) crossings[gas] = { found: [], isSeparatedAtTop: logRatio(balance, gas) >= 0 };
-  for (let step = 0; step < steps && positions[step] < top; step += 1) {
-    const lower = positions[step];
-    const upper = Math.min(top, positions[step + 1]);
-    setBalance(balance, step, upper);
+  for (let k = 1; k < heights.length; k += 1) {
+    const lower = heights[k - 1];
+    const length = heights[k] - lower;
+    setBalance(balance, heights[k]);
     const passed = gases.filter((gas) => logRatio(balance, gas) >= 0 !== crossings[gas].isSeparatedAtTop);
     for (const gas of passed) {
       const ratioAt = (part: number) => {
-        setBalance(balance, step, lower + part * (upper - lower));
+        setBalance(balance, part === 1 ? heights[k] : lower + part * length);
         return logRatio(balance, gas);
       };
       const part = rootOf("part of a step up to a homopause", findRoot(ratioAt, 0, 1, rootTolerance));
-      const altitude = altitudeOf(problem, lower + part * (upper - lower));
+      const altitude = altitudeOf(path.problem, lower + part * length);
       const isUpward = !crossings[gas].isSeparatedAtTop;
       crossings[gas].found.push({ altitude, isUpward });
       crossings[gas].isSeparatedAtTop = isUpward;
@@ -84,6 +84,32 @@ function findCrossings(balance: BlancBalance, gases: number[], top: number): Cro
   return crossings;
 }
 
+/**
+ * Heights between which D − K changes its sign at most once: the ends of the steps. Where T or K are points it
+ * may go to and fro within a step, so there the heights are those of the knots and of a fixed number between
+ * them, which does not depend on the steps.
+ */
+function heightsToLookAt({ problem, positions, steps }: ColumnPath, top: number): number[] {
+  const { temperature, eddy } = problem;
+  const isWithin = (height: number) => height > 0 && height < top;
+  const knots = [temperature, eddy]
+    .flatMap((along) => (along.kind === "points" ? [...along.heights] : []))
+    .filter(isWithin)
+    .sort((a, b) => a - b);
+  const [first, last] = [knots[0] ?? Infinity, knots[knots.length - 1] ?? -Infinity];
+  const ends = [...positions.subarray(0, steps)].filter((height) => height <= first || height >= last);
+  const parts = Math.max(1, Math.ceil(samplesAmongKnots / knots.length));
+  const between: number[] = [];
+  for (let k = 1; k < knots.length; k += 1) {
+    for (let part = 1; part < parts; part += 1) {
+      between.push(knots[k - 1] + (part * (knots[k] - knots[k - 1])) / parts);
+    }
+  }
+  const heights = [0, ...ends, ...knots, ...between, top].filter((height) => height >= 0 && height <= top);
+  return [...new Set(heights)].sort((a, b) => a - b);
+}
+
+const samplesAmongKnots = 48;
 const rootTolerance = { value: 1e-12, bracket: 4e-16 };
 
 /** What D and K are made of, at the height that was set. */
@@ -132,9 +158,10 @@ function blancBalance(path: ColumnPath): BlancBalance {
   };
 }
 
-function setBalance(balance: BlancBalance, step: number, height: number): void {
+function setBalance(balance: BlancBalance, height: number): void {
   const { path, state, exponents, powers, weights, weightsWithoutFirst } = balance;
   const { problem, positions } = path;
+  const step = stepAt(path, height);
   const size = weights.length;
   if (height === positions[step]) nodeState(path, step, state);
   else if (height === positions[step + 1]) nodeState(path, step + 1, state);

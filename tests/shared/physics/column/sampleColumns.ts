@@ -60,18 +60,18 @@ export function collisionParametersOf(gases: readonly ColumnGas[], spread = 0): 
   );
 }
 
-export const batesOfSample: TemperatureProfile = {
+export const batesOfSample = {
   kind: "bates",
-  base: 150,
-  exosphere: 280,
+  base: 140,
+  exosphere: 220,
   shape: 3.5e-5,
   referenceAltitude: 100e3,
-};
+} as const satisfies TemperatureProfile;
 
 export const risingEddy: EddyProfile = { kind: "power", base: 50, exponent: 0.5, ceiling: 3000 };
 
 /** The fractions of the usual sample: a heavy main gas, some of its fragments, light traces. */
-export const eightGases = { CO2: 0.93, N2: 0.03, Ar: 0.02, CO: 0.01, O2: 0.002, O: 0.008, H2: 2e-5, H: 1e-6 };
+export const eightGases = { CO2: 0.93, N2: 0.03, Ar: 0.02, CO: 0.01, O2: 0.002, O: 0.008, H2: 1e-6, H: 1e-8 };
 
 /** A column of the invented planet from 100 km up; what is given replaces the usual. */
 export function sampleColumn({
@@ -85,7 +85,7 @@ export function sampleColumn({
     radius: 3.4e6,
     centrifugal: null,
     baseAltitude: 100e3,
-    baseNumberDensity: 1e19,
+    baseNumberDensity: 1e20,
     gases,
     collisionParameters: collisionParametersOf(gases, spread),
     temperature: batesOfSample,
