@@ -13,10 +13,12 @@ import {
   type RecordedSurroundings,
 } from "./evaluation/surroundings";
 import { parseEntries } from "./language/parseEntries";
+import type { ParsedEntries } from "./language/syntax";
 import type { CellEvaluation, Evaluation } from "./result";
 
 interface RememberedCell {
   cell: Cell;
+  parsed: ParsedEntries;
   unitSystem: NotebookDocument["unitSystem"];
   questions: RecordedSurroundings["questions"];
   evaluated: EvaluatedCell;
@@ -37,7 +39,8 @@ export function evaluateNotebook(
   previous?: EvaluationMemory,
 ): { evaluation: Evaluation; memory: EvaluationMemory } {
   const memory = new Map<string, RememberedCell>();
-  const places = namePlaces(document);
+  const parsed = document.cells.map((cell) => parse(cell, previous?.get(cell.id)));
+  const places = namePlaces(document, parsed);
   let above = nothingAbove;
 
   const cells = document.cells.map((cell, place) => {
@@ -46,7 +49,7 @@ export function evaluateNotebook(
     const remembered =
       last && isSameCell(last, cell, document) && answersTheSame(last.questions, surroundings)
         ? last
-        : answer(cell, recordQuestions(surroundings), document, last?.evaluated);
+        : answer(cell, parsed[place], recordQuestions(surroundings), document, last?.evaluated);
     memory.set(cell.id, remembered);
     above = addCell(above, remembered.evaluated.above);
     return remembered.evaluation;
@@ -54,17 +57,25 @@ export function evaluateNotebook(
   return { evaluation: { engine: engineVersion, title: document.title, cells }, memory };
 }
 
+const noEntries: ParsedEntries = { entries: [], notes: [] };
+
+function parse({ kind, text }: Cell, last: RememberedCell | undefined): ParsedEntries {
+  if (kind === "prose") return noEntries;
+  return last && last.cell.kind !== "prose" && last.cell.text === text ? last.parsed : parseEntries(text);
+}
+
 function answer(
   cell: Cell,
+  parsed: ParsedEntries,
   surroundings: RecordedSurroundings,
   { unitSystem }: NotebookDocument,
   last: EvaluatedCell | undefined,
 ): RememberedCell {
-  const evaluated = evaluateCell(cell, surroundings, unitSystem, last);
+  const evaluated = evaluateCell(cell, parsed, surroundings, unitSystem, last);
   const { result, understood, defaults, gases, strip } = evaluated;
   const uses = usedNames(surroundings.questions);
   const evaluation = { id: cell.id, result, understood, defaults, uses, gases, ...(strip ? { strip } : {}) };
-  return { cell, unitSystem, questions: surroundings.questions, evaluated, evaluation };
+  return { cell, parsed, unitSystem, questions: surroundings.questions, evaluated, evaluation };
 }
 
 function isSameCell(last: RememberedCell, cell: Cell, { unitSystem }: NotebookDocument): boolean {
@@ -73,7 +84,7 @@ function isSameCell(last: RememberedCell, cell: Cell, { unitSystem }: NotebookDo
 }
 
 /** Where each name is first defined: cells, and entries of `values` cells. */
-function namePlaces({ cells }: NotebookDocument): NamePlaces {
+function namePlaces({ cells }: NotebookDocument, parsed: readonly ParsedEntries[]): NamePlaces {
   const places = new Map<string, number>();
   const define = (name: string, place: number) => {
     if (name !== "" && !places.has(name)) places.set(name, place);
@@ -81,7 +92,7 @@ function namePlaces({ cells }: NotebookDocument): NamePlaces {
   cells.forEach((cell, place) => {
     if (cell.kind !== "prose") define(cell.name, place);
     if (!cellSchemas[cell.kind].takesAnyKey) return;
-    for (const { key } of parseEntries(cell.text).entries) define(key, place);
+    for (const { key } of parsed[place].entries) define(key, place);
   });
   return places;
 }

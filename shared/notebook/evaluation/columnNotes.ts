@@ -4,6 +4,7 @@ import { quantityKinds } from "../language/dimensions";
 import { formatPlainNumber, formatQuantity, thinSpace } from "../language/formatQuantity";
 import { inWords } from "../language/notes";
 import type { OpenCell } from "./openCell";
+import { understandConstant } from "./readEntries";
 
 /** What the entries come to: the gas that makes up the rest, the span of temperatures, where mixing is capped. */
 export function sayWhatColumnMeans(cell: OpenCell, column: Column, rest: string | null): void {
@@ -16,7 +17,9 @@ export function sayWhatColumnMeans(cell: OpenCell, column: Column, rest: string 
     const percent = formatPlainNumber(restGas.moleFraction * 100, 3);
     cell.understand(cell.entry("gases")!, `${restGas.formula} ${percent}${thinSpace}%`);
   }
-  if (input.temperature.kind !== "constant") {
+  if (input.temperature.kind === "constant") {
+    understandConstant(cell, "temperature");
+  } else {
     const temperatures = column.profilesAt(
       Float64Array.from({ length: 65 }, altitudeOf(column, 64)),
     ).temperature;
@@ -43,13 +46,8 @@ function sayWhereEddyIsCapped(
 ): void {
   const { eddy, baseAltitude } = column.input;
   const entry = cell.entry("eddy");
-  if (!entry || eddy.kind === "none") return;
-  if (eddy.kind === "constant") {
-    const { dimension } = quantityKinds.diffusion;
-    cell.understand(entry, formatQuantity(eddy.coefficient, dimension, { unitSystem: cell.unitSystem }));
-    return;
-  }
-  if (eddy.kind !== "power" || eddy.ceiling === null) return;
+  if (eddy.kind === "constant") understandConstant(cell, "eddy");
+  if (!entry || eddy.kind !== "power" || eddy.ceiling === null) return;
   const isCapped = (altitude: number) =>
     column.levelAt(altitude).eddyCoefficient >= eddy.ceiling! * (1 - 1e-9);
   if (!isCapped(column.topAltitude)) {

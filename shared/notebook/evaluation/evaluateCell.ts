@@ -7,6 +7,7 @@ import { evaluateEscape } from "./evaluateEscape";
 import { evaluateGas } from "./evaluateGas";
 import { evaluateValues } from "./evaluateValues";
 import { locateNotes } from "../language/locateNotes";
+import type { ParsedEntries } from "../language/syntax";
 import type { CellEvaluation, CellResult, CellStatus, Note } from "../result";
 import { openCell, type OpenCell } from "./openCell";
 import type { CellAbove, RecordedSurroundings } from "./surroundings";
@@ -31,13 +32,13 @@ const evaluators: Readonly<Record<Cell["kind"], (cell: OpenCell) => CellAnswer>>
 /** One cell in its surroundings. Never throws: what cannot be answered becomes a fault of the cell. */
 export function evaluateCell(
   cell: Cell,
+  parsed: ParsedEntries,
   surroundings: RecordedSurroundings,
   unitSystem: "SI" | "cgs",
   last: EvaluatedCell | undefined,
 ): EvaluatedCell {
-  const text = cell.kind === "prose" ? "" : cell.text;
   const lastModel = last?.above.model ?? null;
-  const open = openCell({ ...cell, text }, cellSchemas[cell.kind], surroundings, unitSystem, lastModel);
+  const open = openCell(cell, parsed, cellSchemas[cell.kind], surroundings, unitSystem, lastModel);
   const answer = evaluateSafely(open, cell.kind);
   const values = finiteValues(open, answer.values ?? {});
   const notes = orderNotes(locateNotes(open.notes, open.text, open.entries));
@@ -52,7 +53,7 @@ export function evaluateCell(
   };
   return {
     result,
-    understood: open.understood,
+    understood: [...open.understood.values()],
     defaults: open.defaults,
     gases: answer.gases ?? [],
     ...(answer.strip ? { strip: answer.strip } : {}),

@@ -1,8 +1,7 @@
 /** One cell being evaluated: its entries by key, and everything that is found out about them. */
 import { changeTo, fault, inWords } from "../language/notes";
 import { nearestName } from "../language/nearestName";
-import { parseEntries } from "../language/parseEntries";
-import type { Entry, ValueNode } from "../language/syntax";
+import type { Entry, ParsedEntries, ValueNode } from "../language/syntax";
 import type { Cell } from "../document";
 import type { CellSchema } from "../kinds/cellSchema";
 import type { CellEvaluation, Note, TextRange, Understood } from "../result";
@@ -22,7 +21,8 @@ export interface OpenCell {
   /** In the order written; of a key that stands twice, the first. */
   readonly entries: readonly Entry[];
   readonly notes: Note[];
-  readonly understood: Understood[];
+  /** By entry. */
+  readonly understood: ReadonlyMap<string, Understood>;
   readonly defaults: CellEvaluation["defaults"];
   entry(key: string): Entry | undefined;
   /** Adds a note; at an entry's value, a range, or with no place on the cell as a whole. */
@@ -32,17 +32,17 @@ export interface OpenCell {
   actByDefault(key: string, better?: { text?: string; note?: string }): void;
 }
 
-/** Parses a cell and checks its keys against the schema: unknown, twice, missing. */
+/** Makes a cell ready to be read: its entries by key, those that its schema does not know told. */
 export function openCell(
   cell: Cell,
+  { entries: written, notes: syntaxNotes }: ParsedEntries,
   schema: CellSchema,
   surroundings: RecordedSurroundings,
   unitSystem: "SI" | "cgs",
   lastModel: CellModel | null,
 ): OpenCell {
-  const { entries: written, notes: syntaxNotes } = parseEntries(cell.text);
   const notes: Note[] = [...syntaxNotes];
-  const understood: Understood[] = [];
+  const understood = new Map<string, Understood>();
   const defaults: CellEvaluation["defaults"] = [];
   const byKey = new Map<string, Entry>();
   for (const entry of written) byKey.set(entry.key, entry);
@@ -66,9 +66,15 @@ export function openCell(
     },
     understand(entry, text) {
       if (text === null) return;
-      const said = understood.find((before) => before.entry === entry.key);
+      const said = understood.get(entry.key);
       if (said) said.text = `${said.text}, ${text}`;
-      else understood.push({ entry: entry.key, line: entry.endLine, offset: entry.valueRange.to, text });
+      else
+        understood.set(entry.key, {
+          entry: entry.key,
+          line: entry.endLine,
+          offset: entry.valueRange.to,
+          text,
+        });
     },
     actByDefault(key, better = {}) {
       const standard = schema.entries.find((entry) => entry.key === key)?.default;

@@ -1,6 +1,7 @@
 /** Entries of a cell, read as its schema says; whatever is wrong goes to the notes of the cell. */
 import { handbookGases } from "../../physics";
 import type { CellKind } from "../document";
+import { evaluateExpression } from "../language/evaluateExpression";
 import { inWords } from "../language/notes";
 import { readQuantity } from "../language/readQuantity";
 import { readReference } from "../language/readReference";
@@ -33,6 +34,14 @@ export function readQuantityEntry(cell: OpenCell, key: string): number | undefin
   const entry = cell.entry(key)!;
   cell.understand(entry, understoodText(entry.node, quantity, cell));
   return quantity.value;
+}
+
+/** Shows the number of an entry that takes a profile, where it is one number for all altitudes. */
+export function understandConstant(cell: OpenCell, key: string): void {
+  const entry = cell.entry(key);
+  if (!entry) return;
+  const evaluated = evaluateExpression(entry.node, cell.surroundings);
+  if (evaluated.ok) cell.understand(entry, understoodText(entry.node, evaluated.quantity, cell));
 }
 
 /** The model of a cell of one kind above, named by an entry. */
