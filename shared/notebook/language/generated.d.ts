@@ -7,6 +7,7 @@ declare module "*/cells.generated.js" {
 declare module "*/cells.generated.terms.js" {
   export const Close: number;
   export const Comma: number;
+  export const Join: number;
   export const Open: number;
   export const Over: number;
   export const Per: number;

@@ -9,7 +9,7 @@ export const cellHighlighting = styleTags({
   "UnitName/...": tags.unit,
   Number: tags.number,
   "Between And Within Factor": tags.keyword,
-  "Plus Minus Times Over Per Caret Superscript": tags.arithmeticOperator,
+  "Plus Minus Times Over Per Join Caret Superscript": tags.arithmeticOperator,
   "Open Close": tags.paren,
   Comma: tags.separator,
   Remark: tags.lineComment,

@@ -7,7 +7,6 @@ import type { Entry, ParsedEntries, ValueNode } from "./syntax";
 
 /** Control characters, bidirectional marks, joiners and other characters that do not show. */
 const hiddenCharacters =
-  // eslint-disable-next-line no-control-regex -- finding control characters is the purpose
   /[\u0000-\u0008\u000e-\u001f\u007f-\u0084\u0086-\u009f\u00ad\u061c\u180e\u200b-\u200f\u202a-\u202e\u2060-\u206f\ufeff\ufff9-\ufffb]+/g;
 const bidirectional = /[\u061c\u200e\u200f\u202a-\u202e\u2066-\u2069]/;
 

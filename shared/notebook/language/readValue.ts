@@ -112,7 +112,8 @@ function collectUnit(conversion: Conversion, node: SyntaxNode, sign: 1 | -1, fac
     return;
   }
   const inner = node.name === "Quotient" ? (-sign as 1 | -1) : sign;
-  for (const part of partsOf(node)) if (part.name !== "Per") collectUnit(conversion, part, inner, factors);
+  for (const part of partsOf(node))
+    if (part.name !== "Per" && part.name !== "Join") collectUnit(conversion, part, inner, factors);
 }
 
 function convertUnit(conversion: Conversion, node: SyntaxNode): UnitNode {

@@ -1,8 +1,9 @@
-/** What the grammar can't say by itself: where an entry ends, and which slash belongs to a unit. */
+/** What the grammar can't say by itself: where an entry ends, and which signs belong to a unit. */
 import { ContextTracker, ExternalTokenizer, type InputStream } from "@lezer/lr";
 import {
   Close,
   Comma,
+  Join,
   Open,
   Over,
   Per,
@@ -38,6 +39,12 @@ export const entryContext = new ContextTracker<EntryContext>({
   hash: ({ depth, expectsItem, lastIsComma }) => depth * 4 + (expectsItem ? 2 : 0) + (lastIsComma ? 1 : 0),
 });
 
+const slash = 47;
+const percent = 37;
+const openBracket = 40;
+/** `*`, `×`, `·` and the dot operator. */
+const timesSigns = new Set([42, 0xd7, 0xb7, 0x22c5]);
+
 const isLineEnd = (code: number): boolean => code === 10 || code === 13 || code === 0x2028 || code === 0x2029;
 const isSpace = (code: number): boolean =>
   code === 32 || code === 9 || code === 0xa0 || code === 0x2009 || code === 0x202f;
@@ -72,25 +79,32 @@ export const lineEnds = new ExternalTokenizer((input, stack) => {
   input.acceptToken(goesOn ? continuation : newline, length);
 });
 
-/** A slash followed by a unit, or by a bracket that begins with one, is the unit's. */
-export const slashes = new ExternalTokenizer((input) => {
-  if (input.next !== 47) return;
-  let at = 1;
-  while (isSpace(input.peek(at))) at += 1;
-  if (input.peek(at) === 40) {
-    at += 1;
-    while (isSpace(input.peek(at))) at += 1;
-  }
-  if (input.peek(at) === 37) {
-    input.acceptToken(Per, 1);
-    return;
-  }
+/** The word at an offset; empty where it is called, since `min(` is the function and `/min` the minute. */
+function unitWordAt(input: InputStream, offset: number): string {
+  if (input.peek(offset) === percent) return "%";
+  let at = offset;
   let name = "";
   while (name.length < 32 && isNameCharacter(input.peek(at))) {
     name += String.fromCharCode(input.peek(at));
     at += 1;
   }
-  // `min(` is the function, `/min` the minute.
-  const isCall = input.peek(at) === 40;
-  input.acceptToken(!isCall && isReservedUnit(name) ? Per : Over, 1);
+  return input.peek(at) === openBracket ? "" : name;
+}
+
+/**
+ * A slash followed by a unit, or by a bracket that begins with one, is the unit's; so is a multiplication sign.
+ * Units are no names, so nothing else can be meant.
+ */
+export const unitSigns = new ExternalTokenizer((input) => {
+  const isSlash = input.next === slash;
+  if (!isSlash && !timesSigns.has(input.next)) return;
+  let at = 1;
+  while (isSpace(input.peek(at))) at += 1;
+  if (isSlash && input.peek(at) === openBracket) {
+    at += 1;
+    while (isSpace(input.peek(at))) at += 1;
+  }
+  const isUnit = isReservedUnit(unitWordAt(input, at));
+  if (isSlash) input.acceptToken(isUnit ? Per : Over, 1);
+  else if (isUnit) input.acceptToken(Join, 1);
 });

@@ -131,6 +131,11 @@ describe("units", () => {
     expect(quantityOf("1 cm² s⁻¹")).toEqual({ value: 1e-4, dimension: [2, 0, -1, 0, 0, 0] });
     expect(quantityOf("5 /min").value).toBe(5 / 60);
     expect(quantityOf("6 / min(2, 3)").value).toBe(3);
+    expect(quantityOf("2 * min(2, 3)").value).toBe(4);
+    expect(quantityOf("5 kg*m/s^2")).toEqual({ value: 5, dimension: [1, 1, -2, 0, 0, 0] });
+    expect(quantityOf("5 N·m")).toEqual({ value: 5, dimension: [2, 1, -2, 0, 0, 0] });
+    expect(quantityOf("2 * K * 3")).toEqual({ value: 6, dimension: [0, 0, 0, 1, 0, 0] });
+    expect(quantityOf("1.5 × 10^3 * cm").value).toBe(15);
   });
 
   it("reserves the words that are units, and leaves T for temperatures", () => {
