@@ -66,4 +66,5 @@ export {
 } from "./escape/thermalEscape";
 export { thermalSpeed } from "./escape/thermalSpeed";
 
-export { solveColumn } from "./column/solveColumn";
+export { diffusionCoefficient } from "./column/diffusionCoefficient";
+export { defaultTolerance, solveColumn } from "./column/solveColumn";

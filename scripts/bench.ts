@@ -1,0 +1,7 @@
+// `npm run bench`: how fast the engine is, each figure also as a ratio to a plain loop of floating-point work that
+// is timed in the same run, so that figures of different machines and hours can be compared. Add a file to
+// scripts/bench/ that exports a function from a `Timer` to a `BenchTable`, and name it here.
+import { columnBench } from "./bench/columnBench";
+import { printTable, timer } from "./bench/timing";
+
+for (const bench of [columnBench]) printTable(bench(timer));
