@@ -76,7 +76,7 @@ export function measureOf(unit: UnitNode): Measure | Note {
     numerator *= raised;
     wholeNumerator =
       wholeNumerator !== null && isWhole && Number.isInteger(found.factor) && wholeNumerator < largestWhole
-        ? wholeNumerator * BigInt(found.factor) ** BigInt(size)
+        ? wholeNumerator * repeatedWhole(BigInt(found.factor), size)
         : null;
   }
   return { dimension, numerator, wholeNumerator, denominator, powerOfTen: tens };
@@ -84,6 +84,12 @@ export function measureOf(unit: UnitNode): Measure | Note {
 
 function repeated(factor: number, times: number): number {
   let product = 1;
+  for (let count = 0; count < times; count += 1) product *= factor;
+  return product;
+}
+
+function repeatedWhole(factor: bigint, times: number): bigint {
+  let product = 1n;
   for (let count = 0; count < times; count += 1) product *= factor;
   return product;
 }
