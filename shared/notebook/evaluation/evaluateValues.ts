@@ -1,5 +1,5 @@
 import { checkName } from "./checkName";
-import type { OpenCell } from "./openCell";
+import { sayWhichCentresAct, type OpenCell } from "./openCell";
 import { measured } from "./resultValue";
 import { evaluateExpression } from "../language/evaluateExpression";
 import { siUnitText } from "../language/formatQuantity";
@@ -25,6 +25,7 @@ export function evaluateValues(cell: OpenCell): CellAnswer {
     values[entry.key] = measured(quantity.value, siUnitText(quantity.dimension));
     cell.understand(entry, understoodText(entry.node, quantity, cell));
   }
+  sayWhichCentresAct(cell);
   return { values, globals };
 }
 
