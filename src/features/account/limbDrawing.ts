@@ -24,8 +24,8 @@ export interface Limb {
 }
 
 /** Exobase of Ilmara's dayside, and the altitude of Kn = 0.1 below it, in km. */
-export const exobase = 239;
-const firstFree = 176;
+export const exobase = 246;
+const firstFree = 188;
 const dotsTop = 640;
 
 export function limbOf(width: number, height: number): Limb {

@@ -24,12 +24,12 @@ const outline: readonly OutlineCell[] = [
       "body           = planet",
       "base           = 80 km",
       "number_density = 3e20 /m^3",
-      "gases          = CO2: rest, N2: 2.7 %, O: 0.5 %, H: 2 ppm",
+      "gases          = N2: rest, O: 2 %, H: 0.2 ppm",
       "temperature    = bates(base = 150 K, exosphere = 400 K, shape = 0.03 /km)",
       "eddy           = 1e6 cm^2/s",
     ].join("\n"),
   },
-  { kind: "escape", name: "leak", text: "column = air" },
+  { kind: "escape", name: "leak", text: "column   = air\ncoupling = open" },
 ];
 
 /** A document to begin from, every cell with an id of its own. */
