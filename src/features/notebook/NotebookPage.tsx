@@ -1,39 +1,62 @@
 import { useQuery } from "@tanstack/react-query";
 import { useMemo } from "react";
-import { Link, useParams } from "react-router-dom";
+import { Route, Routes, useParams } from "react-router-dom";
+import type { NotebookResponse } from "../../../shared/schemas/notebooks";
 import { useAccount } from "../../lib/session";
+import { ApiError } from "../../lib/ApiError";
 import { CautionFooter } from "../../ui/CautionFooter";
-import { Mark } from "../../ui/Mark";
 import { ProblemPage } from "../../ui/ProblemPage";
 import { NotebookDesk } from "./NotebookDesk";
 import { notebookQuery } from "./notebookQueries";
 import { NotebookSkeleton } from "./page/NotebookSkeleton";
+import { PlainBar } from "./page/PlainBar";
 import { KeptVersion } from "./versions/KeptVersion";
+import { VersionList } from "./versions/VersionList";
 import "./notebook.css";
 
-/** A notebook, or one of its kept versions where the address names one. */
+/** A notebook, the list of its versions, or one of them, as the rest of the address says. */
 export function NotebookPage() {
-  const { notebookId = "", number } = useParams();
+  const { notebookId = "" } = useParams();
   const account = useAccount();
   const notebook = useQuery(notebookQuery(notebookId));
-  const person = useMemo(() => ({ id: account?.id ?? "", name: account?.name ?? "" }), [account]);
+  const person = useMemo(
+    () => ({ id: account?.id ?? "", name: account?.name ?? "" }),
+    [account?.id, account?.name],
+  );
 
   if (notebook.isPending) return <NotebookSkeleton />;
   if (!notebook.data) {
-    return (
-      <div className="notebook">
-        <header className="notebook-bar">
-          <Link to="/notebooks" aria-label="All notebooks">
-            <Mark size={28} />
-          </Link>
-        </header>
-        <ProblemPage error={notebook.error} onRetry={() => void notebook.refetch()} email={account?.email} />
-        <CautionFooter className="mx-auto w-full max-w-[1180px] px-18 pb-64 wide:px-28" />
-      </div>
-    );
+    return <NotebookProblem error={notebook.error} onRetry={() => void notebook.refetch()} />;
   }
-  if (number !== undefined) {
-    return <KeptVersion key={`${notebookId} ${number}`} notebook={notebook.data} number={Number(number)} />;
-  }
-  return <NotebookDesk key={notebookId} notebook={notebook.data} person={person} />;
+  return (
+    <Routes>
+      <Route index element={<NotebookDesk key={notebookId} notebook={notebook.data} person={person} />} />
+      <Route path="versions" element={<VersionList notebook={notebook.data} />} />
+      <Route path="versions/:number" element={<VersionAt notebook={notebook.data} />} />
+      <Route path="*" element={<NotebookProblem error={noSuchPage} />} />
+    </Routes>
+  );
+}
+
+const noSuchPage = new ApiError({
+  status: 404,
+  code: "not_found",
+  message: "There is no page at this address.",
+});
+
+function VersionAt({ notebook }: { notebook: NotebookResponse }) {
+  const { number = "" } = useParams();
+  if (!/^[1-9]\d{0,8}$/.test(number)) return <NotebookProblem error={noSuchPage} />;
+  return <KeptVersion key={number} notebook={notebook} number={Number(number)} />;
+}
+
+function NotebookProblem({ error, onRetry }: { error: unknown; onRetry?: () => void }) {
+  const account = useAccount();
+  return (
+    <div className="notebook">
+      <PlainBar />
+      <ProblemPage error={error} onRetry={onRetry} email={account?.email} />
+      <CautionFooter className="mx-auto w-full max-w-[1180px] px-18 pb-64 wide:px-28" />
+    </div>
+  );
 }

@@ -18,10 +18,10 @@ interface CellResultsProps extends CellViewProps {
  * that nothing is drawn anew, and nothing moves, when the next answer comes.
  */
 export function CellResults(props: CellResultsProps) {
-  const { cell, evaluation, strip, isLate } = props;
+  const { cell, evaluation, isLate } = props;
   const hasAnswer = evaluation !== undefined && isAnswered(evaluation);
-  const lastGood = useRef<{ evaluation: CellEvaluation; strip: CellViewProps["strip"] } | null>(null);
-  if (hasAnswer) lastGood.current = { evaluation, strip };
+  const lastGood = useRef<CellEvaluation | null>(null);
+  if (hasAnswer) lastGood.current = evaluation;
 
   if (cell.kind === "prose" || cell.kind === "values") return null;
   const shown = lastGood.current;
@@ -31,7 +31,7 @@ export function CellResults(props: CellResultsProps) {
     <div className="results" data-void={isVoid || undefined} aria-busy={isLate}>
       {isLate && <Computing />}
       <div className="results-body" inert={isVoid}>
-        <Answer {...props} evaluation={shown.evaluation} strip={shown.strip} />
+        <Answer {...props} evaluation={shown} />
       </div>
     </div>
   );
@@ -46,7 +46,6 @@ function isAnswered({ result }: CellEvaluation): boolean {
 
 function Answer({
   evaluation,
-  strip,
   columnGases,
   notes,
   unitSystem,
@@ -54,7 +53,7 @@ function Answer({
   tableNumber,
   isNear,
 }: CellResultsProps & { evaluation: CellEvaluation }) {
-  const { result, gases } = evaluation;
+  const { result, gases, strip } = evaluation;
   switch (result.kind) {
     case "column":
       return (

@@ -1,7 +1,6 @@
 import { memo, useId, useMemo, useRef } from "react";
 import type { Cell } from "../../../../shared/notebook/document";
 import type { CellEvaluation, Note } from "../../../../shared/notebook/result";
-import type { Strip } from "../../../../shared/notebook/summary";
 import type { UnitSystem } from "../../../lib/format";
 import type { LetteredNote } from "../../../ui/tables/tableProps";
 import type { NotebookNames } from "./notebookNames";
@@ -22,7 +21,6 @@ export interface CellViewProps {
   evaluation: CellEvaluation | undefined;
   /** The text it speaks of. */
   readText: string | undefined;
-  strip: Strip | undefined;
   /** Gases of the column that an escape cell rests on. */
   columnGases: readonly string[] | undefined;
   notes: readonly LetteredNote[];

@@ -17,13 +17,14 @@ export function ChosenHeadlines({ theirs, mine, chosen, other, unitSystem }: Cho
     { label: "yours", item: mine[0], tone: "" },
     { label: "as chosen", item: chosen[0], tone: "font-semibold" },
   ];
-  if (!theirs[0] && !mine[0]) return null;
+  const what = (mine[0] ?? theirs[0])?.label;
+  if (what === undefined) return null;
   return (
     <dl className="conflict-headlines">
       {states.map(({ label, item, tone }) => (
         <div key={label}>
           <dt>
-            {item?.label ?? "Result"}, {label}
+            {what}, {label}
           </dt>
           <dd className={tone}>{item ? <HeadlineNumber item={item} unitSystem={unitSystem} /> : "–"}</dd>
         </div>

@@ -35,6 +35,7 @@ export function ConflictPanel(props: ConflictPanelProps) {
   const headlines = useHeadlines(mine, theirs.document);
   const byCell = useMemo(() => groupByCell(merge.conflicts), [merge.conflicts]);
   const other = theirs.savedBy.name;
+  const foreign = merge.settled.filter(({ side }) => side === "theirs");
   const first = other.split(" ", 1)[0] || other;
 
   useEffect(function comeIntoView() {
@@ -57,8 +58,8 @@ export function ConflictPanel(props: ConflictPanelProps) {
       <p className="pt-8" role="status">
         You and {other} both changed what stands below since revision {agreedRevision}. Nothing is lost:
         choose entry by entry, and what stands is saved as revision {theirs.revision + 1}.
-        {merge.settled.length > 0 &&
-          ` Other changes went together by themselves: ${changeWords(merge.settled, merge.document)}.`}
+        {foreign.length > 0 &&
+          ` Other changes of ${other}’s went in by themselves: ${changeWords(foreign, merge.document)}.`}
       </p>
       <div className="conflict-sides" aria-hidden="true">
         <div>

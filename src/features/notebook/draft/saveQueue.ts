@@ -54,6 +54,7 @@ export function createSaveQueue({
   let since: number | null = null;
   let state: SaveState = { kind: "saved" };
   let isStopped = false;
+  let hasOffered = false;
 
   function show(next: SaveState): void {
     state = next;
@@ -125,6 +126,7 @@ export function createSaveQueue({
     /** Puts the newest text in line. */
     offer(document: NotebookDocument): void {
       waiting = document;
+      hasOffered = true;
       if (state.kind === "stale") return;
       if (state.kind === "refused") show({ kind: "saving" });
       if (state.kind === "kept") {
@@ -147,6 +149,13 @@ export function createSaveQueue({
     isSending: (): boolean => sending !== null,
     /** Sends what waits at once; resolves when it has been answered. */
     flush: sendNow,
+    /** Nothing more will come: sends what waits, then is silent. True if all that was offered has been saved. */
+    async close(): Promise<boolean> {
+      await sendNow();
+      const isDone = hasOffered && state.kind === "saved" && waiting === null;
+      this.stop();
+      return isDone;
+    },
     /** Tries again now: the network is back, or the person signed in. */
     retry(): void {
       if (state.kind === "kept" && waiting !== null) void sendNow();

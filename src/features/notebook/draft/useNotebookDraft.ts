@@ -1,8 +1,9 @@
+import { useQueryClient } from "@tanstack/react-query";
 import { useCallback, useEffect, useMemo, useReducer, useRef, useState } from "react";
 import type { DocumentEdit } from "../../../../shared/notebook/editDocument";
 import type { NotebookResponse } from "../../../../shared/schemas/notebooks";
 import type { Person } from "../../../../shared/schemas/people";
-import { saveDraft } from "../notebookQueries";
+import { notebookQuery, saveDraft } from "../notebookQueries";
 import { beginDraft, draftReducer, isUnsaved, openMerge, type Draft } from "./draftReducer";
 import { dropDraft, keepDraft, readKeptDrafts } from "./keptDrafts";
 import type { Side } from "./mergeDocuments";
@@ -28,6 +29,7 @@ export function useNotebookDraft({ notebook, person, canEdit }: NotebookDraftOpt
   const [saveState, setSaveState] = useState<SaveState>({ kind: "saved" });
   const queueRef = useRef<SaveQueue | null>(null);
   const draftRef = useRef(draft);
+  const queryClient = useQueryClient();
   const notebookId = notebook.id;
 
   useEffect(function rememberDraft() {
@@ -41,17 +43,21 @@ export function useNotebookDraft({ notebook, person, canEdit }: NotebookDraftOpt
         revision: draftRef.current.agreed.revision,
         send: (body) => saveDraft(notebookId, body),
         onState: setSaveState,
-        onSaved: (saved) => dispatch({ type: "saved", ...saved, savedBy: person }),
+        onSaved: (saved) => {
+          dispatch({ type: "saved", ...saved, savedBy: person });
+          queryClient.setQueryData(notebookQuery(notebookId).queryKey, (known) =>
+            known ? { ...known, ...saved, title: saved.document.title, savedBy: person } : known,
+          );
+        },
         onStale: (theirs) => dispatch({ type: "arrived", theirs }),
       });
       queueRef.current = queue;
       return () => {
-        void queue.flush();
-        queue.stop();
         queueRef.current = null;
+        void closeQueue(queue, notebookId);
       };
     },
-    [canEdit, notebookId, person],
+    [canEdit, notebookId, person, queryClient],
   );
 
   useEffect(
@@ -105,6 +111,11 @@ export function useNotebookDraft({ notebook, person, canEdit }: NotebookDraftOpt
   );
 
   return { draft, merge, saveState, isKept, edit, undo, redo, flush, settling };
+}
+
+/** Left for another page: the last text is still sent, and its copy here put away once the server has it. */
+async function closeQueue(queue: SaveQueue, notebookId: string): Promise<void> {
+  if (await queue.close()) dropDraft(notebookId, await claimTab());
 }
 
 interface KeptCopyOptions {

@@ -14,16 +14,14 @@ export function understoodParts(text: string): UnderstoodPart[] {
     .split(/([⁰¹²³⁴⁵⁶⁷⁸⁹⁻⁺]+|\^[-−+]?[\d.]+)/)
     .flatMap((piece, index): UnderstoodPart[] => {
       if (index % 2 === 1) return [{ text: plainExponent(piece), setting: "raised" }];
-      return piece
-        .split(/^([A-Za-z])(?=\s=)/)
-        .flatMap((part, at): UnderstoodPart[] =>
-          at % 2 === 1
-            ? [{ text: part, setting: "symbol" }]
-            : gasParts(part).map(({ text: word, setting }) => ({
-                text: word,
-                setting: setting === "low" ? "low" : "plain",
-              })),
-        );
+      return piece.split(/^([A-Za-z])(?=\s=)/).flatMap((part, at): UnderstoodPart[] =>
+        at % 2 === 1
+          ? [{ text: part, setting: "symbol" }]
+          : gasParts(part).map(({ text: word, setting }) => ({
+              text: word,
+              setting: setting === "low" ? "low" : "plain",
+            })),
+      );
     })
     .filter((part) => part.text !== "");
 }

@@ -1,20 +1,13 @@
 import type { NotebookDocument } from "../../../../shared/notebook/document";
 import { evaluateNotebook, type EvaluationMemory } from "../../../../shared/notebook/evaluateNotebook";
 import type { CellEvaluation } from "../../../../shared/notebook/result";
-import { stripOf, summariseNotebook } from "../../../../shared/notebook/summariseNotebook";
-import type { HeadlineItem, Strip } from "../../../../shared/notebook/summary";
-
-/** What the page needs of one cell. */
-export interface CellAnswer {
-  evaluation: CellEvaluation;
-  /** Of a column that could be solved. */
-  strip: Strip | null;
-}
+import { summariseNotebook } from "../../../../shared/notebook/summariseNotebook";
+import type { HeadlineItem } from "../../../../shared/notebook/summary";
 
 export interface EvaluationAnswer {
   engine: string;
   /** In the order of the document; an id alone for a cell whose answer is as it was last time. */
-  cells: (CellAnswer | string)[];
+  cells: (CellEvaluation | string)[];
   headline: HeadlineItem[];
   /** Time it took, ms. */
   took: number;
@@ -43,11 +36,7 @@ export function createEvaluationService() {
 
       const before = sent;
       sent = new Map(evaluation.cells.map((cell) => [cell.id, cell]));
-      const cells = evaluation.cells.map((cell) => {
-        if (before.get(cell.id) === cell) return cell.id;
-        const isColumn = cell.result.kind === "column";
-        return { evaluation: cell, strip: isColumn ? stripOf(evaluation, cell.result.name) : null };
-      });
+      const cells = evaluation.cells.map((cell) => (before.get(cell.id) === cell ? cell.id : cell));
       const { headline } = summariseNotebook(document, evaluation);
       return { engine: evaluation.engine, cells, headline, took: performance.now() - begun };
     },

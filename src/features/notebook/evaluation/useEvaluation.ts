@@ -1,7 +1,7 @@
 import { useEffect, useMemo, useRef, useState } from "react";
 import type { NotebookDocument } from "../../../../shared/notebook/document";
 import type { CellEvaluation } from "../../../../shared/notebook/result";
-import type { HeadlineItem, Strip } from "../../../../shared/notebook/summary";
+import type { HeadlineItem } from "../../../../shared/notebook/summary";
 import { createLatestRunner } from "./createLatestRunner";
 import type { EvaluationAnswer } from "./evaluationService";
 import { workerEvaluator, type Evaluator } from "./evaluator";
@@ -15,7 +15,6 @@ interface Evaluated {
   /** The text that was computed. */
   document: NotebookDocument;
   cells: ReadonlyMap<string, CellEvaluation>;
-  strips: ReadonlyMap<string, Strip>;
   headline: HeadlineItem[];
 }
 
@@ -85,15 +84,11 @@ let nextMount = 0;
 
 function withAnswer(last: Evaluated | null, answer: EvaluationAnswer, document: NotebookDocument): Evaluated {
   const cells = new Map<string, CellEvaluation>();
-  const strips = new Map<string, Strip>();
   for (const cell of answer.cells) {
-    const id = typeof cell === "string" ? cell : cell.evaluation.id;
-    const evaluation = typeof cell === "string" ? last?.cells.get(cell) : cell.evaluation;
-    const strip = typeof cell === "string" ? last?.strips.get(cell) : cell.strip;
-    if (evaluation) cells.set(id, evaluation);
-    if (strip) strips.set(id, strip);
+    const evaluation = typeof cell === "string" ? last?.cells.get(cell) : cell;
+    if (evaluation) cells.set(evaluation.id, evaluation);
   }
-  return { engine: answer.engine, document, cells, strips, headline: answer.headline };
+  return { engine: answer.engine, document, cells, headline: answer.headline };
 }
 
 /** True once what is written has gone without an answer for a while. */

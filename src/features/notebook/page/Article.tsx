@@ -42,7 +42,7 @@ export function Article({
 }: ArticleProps) {
   const { evaluated, late, failure } = live;
   const columnId = useColumnInView(document, evaluated?.cells);
-  const strip = columnId === null ? null : (evaluated?.strips.get(columnId) ?? null);
+  const strip = columnId === null ? null : (evaluated?.cells.get(columnId)?.strip ?? null);
 
   return (
     <div className="notebook-grid">

@@ -50,7 +50,6 @@ export function Sheet({ document, live, notesOf, unitSystem, isEditable, newCell
               cell={cell}
               evaluation={evaluation}
               readText={readTexts.get(cell.id)}
-              strip={evaluated?.strips.get(cell.id)}
               columnGases={columnGases(evaluation)}
               notes={notesOf(cell.id)}
               isLate={late.has(cell.id)}

@@ -12,6 +12,7 @@ import { useNotebookNotes } from "../evaluation/useNotebookNotes";
 import { versionQuery } from "../notebookQueries";
 import { Article } from "../page/Article";
 import { NotebookBar } from "../page/NotebookBar";
+import { PlainBar } from "../page/PlainBar";
 import { NotebookSkeleton } from "../page/NotebookSkeleton";
 import { RestoreVersion } from "./RestoreVersion";
 import { withKeptResults } from "./withKeptResults";
@@ -25,7 +26,14 @@ interface KeptVersionProps {
 export function KeptVersion({ notebook, number }: KeptVersionProps) {
   const version = useQuery(versionQuery(notebook.id, number));
   if (version.isPending) return <NotebookSkeleton />;
-  if (!version.data) return <ProblemPage error={version.error} onRetry={() => void version.refetch()} />;
+  if (!version.data) {
+    return (
+      <div className="notebook">
+        <PlainBar title={notebook.title} />
+        <ProblemPage error={version.error} onRetry={() => void version.refetch()} />
+      </div>
+    );
+  }
   return <VersionDesk notebook={notebook} version={version.data} />;
 }
 
