@@ -1,4 +1,4 @@
-import { cleanup } from "@testing-library/react";
+import { cleanup, configure } from "@testing-library/react";
 import { afterEach, vi } from "vitest";
 
 /** Anything written to the console by a component fails the test that caused it. */
@@ -9,5 +9,9 @@ const refuse =
   };
 vi.spyOn(console, "error").mockImplementation(refuse("error"));
 vi.spyOn(console, "warn").mockImplementation(refuse("warn"));
+
+// Pages fetch parts of themselves; on a busy machine that may take seconds.
+configure({ asyncUtilTimeout: 10_000 });
+vi.setConfig({ testTimeout: 30_000 });
 
 afterEach(cleanup);
