@@ -17,7 +17,7 @@ const rooms: Room[] = [
     name: "notebook",
     holds: /^shared\/notebook\//,
     mayImport: ["physics"],
-    npm: /^(zod|mathjs|@lezer\/.+|mdast-util-from-markdown|mdast)$/,
+    npm: /^(zod|@lezer\/.+|mdast-util-from-markdown|mdast)$/,
   },
   { name: "schemas", holds: /^shared\/schemas\//, mayImport: ["physics", "notebook"], npm: /^zod$/ },
   {
@@ -97,7 +97,7 @@ function trespasses(file: string, source: string): string[] {
       continue;
     }
     const resolved = path.posix.normalize(path.posix.join(path.posix.dirname(file), target)).replace(/\?.*$/, "");
-    const there = roomOf(resolved) ?? roomOf(`${resolved}.ts`) ?? roomOf(`${resolved}/`) ?? roomOf(`${resolved}.tsx`);
+    const there = roomOf(/\.\w+$/.test(resolved) ? resolved : `${resolved}.ts`) ?? roomOf(`${resolved}/`);
     if (!there) found.push(`${file}: ${target} leads out of the house`);
     else if (there !== room && !room.mayImport.includes(there.name))
       found.push(`${file}: ${room.name} may not import ${there.name} (${target})`);

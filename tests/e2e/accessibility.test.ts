@@ -1,0 +1,114 @@
+import { readFile } from "node:fs/promises";
+import { createRequire } from "node:module";
+import type { AxeResults } from "axe-core";
+import type { Browser, Page } from "playwright-core";
+import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { launchBrowser, openPage, signInAs, startServer, type RunningServer } from "./harness";
+import { openNotebook } from "./notebookParts";
+
+let server: RunningServer;
+let browser: Browser;
+let axeSource: string;
+beforeAll(async () => {
+  server = await startServer();
+  browser = await launchBrowser();
+  axeSource = await readFile(createRequire(import.meta.url).resolve("axe-core/axe.min.js"), "utf8");
+});
+afterAll(async () => {
+  await browser?.close();
+  await server?.remove();
+});
+
+/** What axe finds against WCAG 2.2 A and AA, as "rule: selector". */
+async function violations(page: Page): Promise<string[]> {
+  await page.evaluate(axeSource);
+  const results = await page.evaluate(
+    () =>
+      (window as unknown as { axe: { run(options: object): Promise<AxeResults> } }).axe.run({
+        runOnly: ["wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22aa"],
+      }),
+  );
+  return results.violations.flatMap((violation) =>
+    violation.nodes.map((node) => `${violation.id}: ${node.target.join(" ")}`),
+  );
+}
+
+describe.each(["light", "dark"] as const)("by %s", (colorScheme) => {
+  describe.each([1440, 390])("%i pixels wide", (width) => {
+    const viewport = { width, height: 900 };
+
+    it("the sign-in page meets WCAG 2.2 AA", async () => {
+      const { page, context } = await openPage(browser, { colorScheme, viewport });
+      await page.goto(server.origin);
+      await page.getByRole("heading", { name: "Sign in" }).waitFor();
+      expect(await violations(page)).toEqual([]);
+      await context.close();
+    });
+
+    it("the pages behind it do too, and none is wider than the window", async () => {
+      const { page, context } = await openPage(browser, { colorScheme, viewport });
+      await signInAs(page, server.origin, "Jorun Aldaker");
+      const found: Record<string, string[]> = {};
+      const look = async (name: string): Promise<void> => {
+        found[name] = await violations(page);
+        const overflow = await page.evaluate(
+          () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
+        );
+        if (overflow > 0) found[name].push(`wider than the window by ${overflow} px`);
+      };
+      await look("notebooks");
+      await page.goto(`${server.origin}/groups`);
+      await page.getByRole("link", { name: /Carrow Aeronomy/ }).first().click();
+      await page.getByRole("heading", { name: /Carrow Aeronomy/ }).waitFor();
+      await look("group");
+      await page.goto(`${server.origin}/account`);
+      await page.getByRole("heading", { level: 1 }).waitFor();
+      await look("account");
+      await page.goto(`${server.origin}/nowhere`);
+      await page.getByRole("heading", { level: 1 }).waitFor();
+      await look("not found");
+      await page.goto(server.origin);
+      await openNotebook(page, /Escape of hydrogen from Ilmara/);
+      await page.locator(".js-plotly-plot").first().waitFor({ timeout: 20_000 });
+      await look("notebook");
+      for (const [name, list] of Object.entries(found)) expect(list, name).toEqual([]);
+      await context.close();
+    });
+  });
+});
+
+it("The main job can be done by keyboard alone", async () => {
+  const { page, context } = await openPage(browser);
+  await page.goto(server.origin);
+  await page.getByRole("heading", { name: "Sign in" }).waitFor();
+  const tabTo = async (reached: () => Promise<boolean>): Promise<void> => {
+    for (let presses = 0; presses < 80; presses += 1) {
+      if (await reached()) return;
+      await page.keyboard.press("Tab");
+    }
+    throw new Error("Not reached by Tab.");
+  };
+  const focusedText = (): Promise<string> => page.evaluate(() => document.activeElement?.textContent ?? "");
+  await tabTo(async () => /^Tamsin Orevale$/.test(await focusedText()));
+  await page.keyboard.press("Enter");
+  await page.getByRole("heading", { name: "Notebooks", level: 1 }).waitFor();
+  await tabTo(async () => /^Escape of hydrogen from Ilmara/.test(await focusedText()));
+  await page.keyboard.press("Enter");
+  await page.locator(".headline-number").first().waitFor();
+  const before = await page.locator(".headline-number").first().innerText();
+
+  await tabTo(async () =>
+    page.evaluate(() => (document.activeElement?.getAttribute("aria-label") ?? "").includes("Entries of values given")),
+  );
+  await page.keyboard.press("Control+Home");
+  await page.keyboard.press("Shift+End");
+  await page.keyboard.insertText("T_quiet = 540 ± 45 K");
+  await page.waitForFunction(
+    (old) => document.querySelector<HTMLElement>(".headline-number")?.innerText !== old,
+    before,
+  );
+  await page.keyboard.press("Escape");
+  await page.keyboard.press("Tab");
+  expect(await page.evaluate(() => document.activeElement?.closest(".cm-editor") === null)).toBe(true);
+  await context.close();
+});
