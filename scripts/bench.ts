@@ -2,6 +2,7 @@
 // is timed in the same run, so that figures of different machines and hours can be compared. Add a file to
 // scripts/bench/ that exports a function from a `Timer` to a `BenchTable`, and name it here.
 import { columnBench } from "./bench/columnBench";
+import { evaluationBench } from "./bench/evaluationBench";
 import { printTable, timer } from "./bench/timing";
 
-for (const bench of [columnBench]) printTable(bench(timer));
+for (const bench of [columnBench, evaluationBench]) printTable(bench(timer));
