@@ -9,7 +9,5 @@ export const places = {
   migrations: path.join(here, isBundled ? "drizzle" : "../drizzle"),
   demoNotebooks: path.join(here, "demo/notebooks"),
   client: path.join(here, isBundled ? "../client" : "../dist/client"),
-  evaluationWorker: isBundled
-    ? { file: path.join(here, "evaluationWorker.js"), execArgv: [] }
-    : { file: path.join(here, "jobs/evaluationWorker.ts"), execArgv: ["--import", "tsx"] },
+  evaluationWorker: path.join(here, isBundled ? "evaluationWorker.js" : "jobs/evaluationWorker.sources.mjs"),
 };

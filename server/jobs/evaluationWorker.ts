@@ -1,4 +1,4 @@
-/** Entry of the worker thread: a document in, what the server keeps of its evaluation out. */
+/** Entry of the worker thread: says that it is ready; then a document in, what the server keeps of its evaluation out. */
 import { parentPort } from "node:worker_threads";
 import type { NotebookDocument } from "../../shared/notebook/document";
 import type { EvaluationAnswer } from "./evaluator";
@@ -8,3 +8,5 @@ parentPort?.on("message", (document: NotebookDocument) => {
   const answer: EvaluationAnswer = { ok: true, outcome: evaluateDocument(document) };
   parentPort?.postMessage(answer);
 });
+
+parentPort?.postMessage("ready");

@@ -1,3 +1,4 @@
+import { once } from "node:events";
 import { Worker } from "node:worker_threads";
 import type { NotebookDocument } from "../../shared/notebook/document";
 import type { NotebookSummary } from "../../shared/notebook/summary";
@@ -35,20 +36,15 @@ export function createEvaluator({ timeLimit = 10_000 }: { timeLimit?: number } =
   let running: Promise<void> | null = null;
   let isClosed = false;
 
-  const startWorker = (): Worker => {
-    const started = new Worker(places.evaluationWorker.file, {
-      execArgv: places.evaluationWorker.execArgv,
-      resourceLimits: { maxOldGenerationSizeMb: memoryLimitMb },
-    });
-    started.unref();
-    return started;
-  };
-
   const run = async ({ document, answer }: Task): Promise<void> => {
-    worker ??= startWorker();
+    try {
+      worker ??= await startWorker(() => (worker = null));
+    } catch (error) {
+      return answer({ ok: false, reason: `The evaluation could not begin: ${String(error)}` });
+    }
     const reply = await askWorker(worker, document, timeLimit);
     if (!reply.isAlive) {
-      await worker.terminate();
+      await worker?.terminate();
       worker = null;
     }
     answer(reply.answer);
@@ -78,6 +74,18 @@ export function createEvaluator({ timeLimit = 10_000 }: { timeLimit?: number } =
   };
 }
 
+/** A worker that has loaded what it needs, so that the time limit is the document's alone. */
+async function startWorker(onExit: () => void): Promise<Worker> {
+  const worker = new Worker(places.evaluationWorker, {
+    resourceLimits: { maxOldGenerationSizeMb: memoryLimitMb },
+  });
+  await once(worker, "message");
+  // Whoever asked is told by `askWorker`; a thread that breaks while nobody asks must not take the server down.
+  worker.on("error", () => undefined).once("exit", onExit);
+  worker.unref();
+  return worker;
+}
+
 /** One question to a worker, with a limit in ms; says also whether the worker can be asked again. */
 function askWorker(
   worker: Worker,
@@ -88,7 +96,6 @@ function askWorker(
     const end = (answer: EvaluationAnswer, isAlive: boolean): void => {
       clearTimeout(timer);
       worker.off("message", onMessage).off("error", onError).off("exit", onExit);
-      if (!isAlive) worker.on("error", () => undefined);
       resolve({ answer, isAlive });
     };
     const onMessage = (answer: EvaluationAnswer): void => end(answer, true);

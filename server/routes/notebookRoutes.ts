@@ -3,6 +3,7 @@ import type { NotebookDocument } from "../../shared/notebook/document";
 import { readNotebookFile, writeNotebookFile } from "../../shared/notebook/notebookFile";
 import {
   createNotebookBody,
+  type ImportNotebookResponse,
   importNotebookBody,
   notebookListQuery,
   renameNotebookBody,
@@ -72,7 +73,8 @@ export function notebookRoutes({ db, summaries }: { db: Db; summaries: Summaries
     const { text, groupId } = importNotebookBody.parse(req.body);
     await authoriseIn(groupId, actor);
     const { document, notes } = readImport(text);
-    res.status(201).json({ ...(await create(actor, groupId, document)), notes });
+    const imported: ImportNotebookResponse = { ...(await create(actor, groupId, document)), notes };
+    res.status(201).json(imported);
   });
 
   router.get("/notebooks/:notebookId", async (req, res) => {

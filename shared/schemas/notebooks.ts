@@ -3,6 +3,7 @@ import { documentLimits, notebookDocumentSchema } from "../notebook/document";
 import { notebookSummarySchema } from "../notebook/summary";
 import { person } from "./people";
 import { problem } from "./problem";
+import { note } from "./results";
 import { notebookAbilities, notebookRole } from "./roles";
 import { isStorable, line, unstorableText } from "./text";
 
@@ -118,3 +119,7 @@ export const notebookResponse = z.object({
   abilities: notebookAbilities,
 });
 export type NotebookResponse = z.infer<typeof notebookResponse>;
+
+/** An imported notebook, with what there is to say of its file. */
+export const importNotebookResponse = notebookResponse.extend({ notes: z.array(note) });
+export type ImportNotebookResponse = z.infer<typeof importNotebookResponse>;

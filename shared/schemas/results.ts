@@ -4,7 +4,8 @@ import { cellKinds } from "../notebook/document";
 
 const textRange = z.object({ from: z.number().int(), to: z.number().int() });
 
-const note = z.object({
+/** A remark, caution or fault. */
+export const note = z.object({
   level: z.enum(["remark", "caution", "fault"]),
   code: z.string(),
   message: z.string(),

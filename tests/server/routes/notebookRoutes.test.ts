@@ -3,7 +3,11 @@ import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { notebooks } from "../../../server/db/tables/notebooks";
 import type { Actor } from "../../../server/policies/actor";
 import { writeNotebookFile } from "../../../shared/notebook/notebookFile";
-import { notebookListResponse, notebookResponse } from "../../../shared/schemas/notebooks";
+import {
+  importNotebookResponse,
+  notebookListResponse,
+  notebookResponse,
+} from "../../../shared/schemas/notebooks";
 import { buildCell, buildDocument } from "../../factories/buildDocument";
 import { buildGroup } from "../../factories/buildGroup";
 import { buildNotebook } from "../../factories/buildNotebook";
@@ -122,7 +126,7 @@ describe("POST /api/notebooks/import", () => {
     const text = writeNotebookFile(buildDocument());
     const imported = await agent.post("/api/notebooks/import").send({ text, groupId: null });
     expect(imported.status).toBe(201);
-    expect(notebookResponse.parse(imported.body).title).toBe("Nirel, a first look");
+    expect(importNotebookResponse.parse(imported.body).title).toBe("Nirel, a first look");
     expect(imported.body.notes).toEqual([]);
     const exported = await agent.get(`/api/notebooks/${imported.body.id}/file`);
     expect(exported.text).toBe(text);

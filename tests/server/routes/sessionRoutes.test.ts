@@ -1,5 +1,5 @@
 import { eq } from "drizzle-orm";
-import request from "supertest";
+import type { Response } from "supertest";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { demoAccounts } from "../../../server/auth/demoAccounts";
 import { users } from "../../../server/db/tables/users";
@@ -17,7 +17,7 @@ beforeAll(async () => {
 });
 afterAll(() => server.close());
 
-const cookieIn = (response: request.Response) =>
+const cookieIn = (response: Response) =>
   (response.headers["set-cookie"] as unknown as string[] | undefined)?.[0];
 
 describe("POST /api/accounts", () => {
