@@ -3,6 +3,7 @@ import { useNavigate } from "react-router-dom";
 import type { NotebookResponse } from "../../../shared/schemas/notebooks";
 import type { Person } from "../../../shared/schemas/people";
 import type { UnitSystem } from "../../lib/format";
+import { Button } from "../../ui/Button";
 import { useCellCommands } from "./cells/useCellCommands";
 import { ConflictPanel } from "./conflict/ConflictPanel";
 import { JoinedMessage } from "./conflict/JoinedMessage";
@@ -31,6 +32,7 @@ export function NotebookDesk({ notebook, person }: NotebookDeskProps) {
     person,
     canEdit,
   });
+  const [isKeeping, setKeeping] = useState(false);
   const [readersUnits, setReadersUnits] = useState<UnitSystem | null>(null);
   const written = merge?.document ?? draft.document;
   const unitSystem = readersUnits ?? written.unitSystem;
@@ -84,16 +86,33 @@ export function NotebookDesk({ notebook, person }: NotebookDeskProps) {
         acts={
           <>
             {notebook.abilities.keepVersion && (
-              <KeepVersion
-                notebookId={notebook.id}
-                flush={flush}
-                faults={notes.count("fault")}
-                isOff={!isEditable}
-              />
+              <Button
+                tone="main"
+                size="small"
+                className="notebook-bar-keep"
+                disabled={!isEditable}
+                onClick={() => setKeeping(true)}
+              >
+                Keep a version
+              </Button>
             )}
-            <MoreMenu notebook={notebook} document={document} onDeleted={() => void navigate("/notebooks")} />
+            <MoreMenu
+              notebook={notebook}
+              document={document}
+              onDeleted={() => void navigate("/notebooks")}
+              unitSystem={unitSystem}
+              onUnitSystem={handleUnitSystem}
+              onKeep={notebook.abilities.keepVersion && isEditable ? () => setKeeping(true) : null}
+            />
           </>
         }
+      />
+      <KeepVersion
+        notebookId={notebook.id}
+        flush={flush}
+        faults={notes.count("fault")}
+        isOpen={isKeeping}
+        onOpenChange={setKeeping}
       />
       <Article
         document={document}

@@ -2,24 +2,37 @@ import { useState } from "react";
 import type { NotebookDocument } from "../../../../shared/notebook/document";
 import type { NotebookResponse } from "../../../../shared/schemas/notebooks";
 import { failureSentence } from "../../../lib/ApiError";
+import type { UnitSystem } from "../../../lib/format";
 import { Button } from "../../../ui/Button";
 import { Chevron } from "../../../ui/Chevron";
 import { Dialog, DialogActions } from "../../../ui/Dialog";
-import { Menu, MenuItem, MenuLink, MenuRule } from "../../../ui/Menu";
+import { Menu, MenuChoice, MenuItem, MenuLink, MenuRule } from "../../../ui/Menu";
 import { Message } from "../../../ui/Message";
 import { TextButton } from "../../../ui/TextButton";
 import { useDeleteNotebook } from "../notebookQueries";
 import { downloadNotebook } from "./downloadNotebook";
+import { useMediaQuery } from "./useMediaQuery";
 
 interface MoreMenuProps {
   notebook: NotebookResponse;
   /** As it is on the page, unsaved text and all. */
   document: NotebookDocument;
   onDeleted: () => void;
+  /** On narrow pages the menu also has what the bar has no room for. */
+  unitSystem: UnitSystem;
+  onUnitSystem: (system: UnitSystem) => void;
+  /** null where no version can be kept now. */
+  onKeep: (() => void) | null;
 }
 
+const unitOptions: readonly { value: UnitSystem; label: string }[] = [
+  { value: "SI", label: "SI units" },
+  { value: "cgs", label: "cgs units" },
+];
+
 /** What else can be done with a notebook. */
-export function MoreMenu({ notebook, document, onDeleted }: MoreMenuProps) {
+export function MoreMenu({ notebook, document, onDeleted, unitSystem, onUnitSystem, onKeep }: MoreMenuProps) {
+  const isNarrow = useMediaQuery("(max-width: 639.98px)");
   const [isAsking, setAsking] = useState(false);
   const deletion = useDeleteNotebook(notebook.id);
 
@@ -33,6 +46,13 @@ export function MoreMenu({ notebook, document, onDeleted }: MoreMenuProps) {
           </TextButton>
         }
       >
+        {isNarrow && (
+          <>
+            {onKeep && <MenuItem onSelect={onKeep}>Keep a version</MenuItem>}
+            <MenuChoice value={unitSystem} options={unitOptions} onChange={onUnitSystem} />
+            <MenuRule />
+          </>
+        )}
         <MenuLink to={`/notebooks/${notebook.id}/versions`}>Versions</MenuLink>
         <MenuItem onSelect={() => void downloadNotebook(document)}>Export as Markdown</MenuItem>
         <MenuItem onSelect={() => setTimeout(() => window.print(), 50)}>Print</MenuItem>

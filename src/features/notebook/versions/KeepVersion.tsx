@@ -15,16 +15,15 @@ interface KeepVersionProps {
   flush: () => Promise<number | null>;
   /** How many faults the draft has now. */
   faults: number;
-  /** Nothing can be kept now: two states wait to be settled. */
-  isOff: boolean;
+  isOpen: boolean;
+  onOpenChange: (isOpen: boolean) => void;
 }
 
 const unsaved =
   "The draft could not be saved, so no version can be kept of it yet. It is kept in this browser meanwhile.";
 
 /** Keeps the draft as it is as a numbered version, with a message that says what it is. */
-export function KeepVersion({ notebookId, flush, faults, isOff }: KeepVersionProps) {
-  const [isOpen, setOpen] = useState(false);
+export function KeepVersion({ notebookId, flush, faults, isOpen, onOpenChange }: KeepVersionProps) {
   const [message, setMessage] = useState("");
   const [fault, setFault] = useState<string | null>(null);
   const [isBusy, setBusy] = useState(false);
@@ -46,7 +45,7 @@ export function KeepVersion({ notebookId, flush, faults, isOff }: KeepVersionPro
         return;
       }
       const version = await keep.mutateAsync({ message: message.trim(), revision });
-      setOpen(false);
+      onOpenChange(false);
       setMessage("");
       notify({ state: "holds", text: `Kept as version ${version.number}.` });
     } catch (error) {
@@ -57,38 +56,33 @@ export function KeepVersion({ notebookId, flush, faults, isOff }: KeepVersionPro
   }
 
   return (
-    <>
-      <Button tone="main" size="small" className="flex-none" disabled={isOff} onClick={() => setOpen(true)}>
-        Keep a version
-      </Button>
-      <Dialog
-        open={isOpen}
-        onOpenChange={setOpen}
-        title="Keep a version"
-        description="A version never changes: it keeps the text, its results and the engine that computed them."
-      >
-        <form onSubmit={(event) => void handleKeep(event)} className="pt-18">
-          <Field
-            label="What this version is"
-            value={message}
-            maxLength={1000}
-            autoFocus
-            fault={fault ?? undefined}
-            onChange={(event) => setMessage(event.target.value)}
-          />
-          {faults > 0 && (
-            <Message state="caution" className="mt-18">
-              The draft has {formatCount(faults, "fault")}. It is kept as it is.
-            </Message>
-          )}
-          <DialogActions>
-            <Button type="submit" tone="main" busy={isBusy}>
-              Keep a version
-            </Button>
-            <TextButton onClick={() => setOpen(false)}>Not now</TextButton>
-          </DialogActions>
-        </form>
-      </Dialog>
-    </>
+    <Dialog
+      open={isOpen}
+      onOpenChange={onOpenChange}
+      title="Keep a version"
+      description="A version never changes: it keeps the text, its results and the engine that computed them."
+    >
+      <form onSubmit={(event) => void handleKeep(event)} className="pt-18">
+        <Field
+          label="What this version is"
+          value={message}
+          maxLength={1000}
+          autoFocus
+          fault={fault ?? undefined}
+          onChange={(event) => setMessage(event.target.value)}
+        />
+        {faults > 0 && (
+          <Message state="caution" className="mt-18">
+            The draft has {formatCount(faults, "fault")}. It is kept as it is.
+          </Message>
+        )}
+        <DialogActions>
+          <Button type="submit" tone="main" busy={isBusy}>
+            Keep a version
+          </Button>
+          <TextButton onClick={() => onOpenChange(false)}>Not now</TextButton>
+        </DialogActions>
+      </form>
+    </Dialog>
   );
 }
