@@ -128,10 +128,12 @@ function conventionOf({ kind, name: cell, values }: CellResult, name: string): s
     return typeof value === "number" ? value : null;
   };
   if (name.startsWith("exobase.")) {
-    const [lower, upper] = [numberOf("exobase.lower"), numberOf("exobase.upper")];
-    if (lower === null || upper === null) return "bulk, l = H";
     const kilometres = (altitude: number) => formatPlainNumber(Math.round(altitude / 1000), 6);
-    return `bulk, l = H; Kn 0.1–10 at ${kilometres(lower)}–${kilometres(upper)}${thinSpace}km`;
+    const [lower, upper] = [numberOf("exobase.lower"), numberOf("exobase.upper")];
+    if (lower === null) return "bulk, l = H";
+    return upper === null
+      ? `bulk, l = H; Kn 0.1 at ${kilometres(lower)}${thinSpace}km`
+      : `bulk, l = H; Kn 0.1–10 at ${kilometres(lower)}–${kilometres(upper)}${thinSpace}km`;
   }
   const bulk = numberOf("bulk_escape_parameter");
   if (name.endsWith("escape_parameter") && bulk !== null) {

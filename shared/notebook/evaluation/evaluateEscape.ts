@@ -25,6 +25,7 @@ export function evaluateEscape(cell: OpenCell): CellAnswer {
     return { gases: gases ?? [] };
   }
   for (const note of exobase.notes) sayOf(cell, note);
+  sayWhatBandLacks(cell, exobase);
   const { values, notes } = escapeValues(source, exobase.level, gases ?? []);
   for (const note of notes) sayOf(cell, note);
   return {
@@ -74,6 +75,23 @@ function readGases(cell: OpenCell, { column }: ColumnModel): string[] | undefine
 
 function sayOf(cell: OpenCell, { level, code, message }: PhysicsNote): void {
   cell.say(level, code, message, cell.entry("column"));
+}
+
+/** The ends of the fuzzy band that the column does not reach. */
+function sayWhatBandLacks(
+  cell: OpenCell,
+  { lower, upper }: { lower: number | null; upper: number | null },
+): void {
+  if (lower === null) {
+    const message =
+      "The Knudsen number is above 0.1 at the base already, so the band round the exobase has no lower end.";
+    cell.say("remark", "no_lower_end", message, cell.entry("column"));
+  }
+  if (upper === null) {
+    const message =
+      "The Knudsen number stays below 10 up to the top, so the band round the exobase has no upper end.";
+    cell.say("remark", "no_upper_end", message, cell.entry("column"));
+  }
 }
 
 function escapeValues(

@@ -5,7 +5,10 @@ import type { CellEvaluation, CellResult } from "../../../shared/notebook/result
 export type WrittenCell = readonly [kind: CellKind, name: string, text: string];
 
 /** A notebook of cells, whose ids are their places. */
-export function notebookOf(cells: readonly WrittenCell[], parts: Partial<NotebookDocument> = {}): NotebookDocument {
+export function notebookOf(
+  cells: readonly WrittenCell[],
+  parts: Partial<NotebookDocument> = {},
+): NotebookDocument {
   return {
     format: 1,
     title: "A test",

@@ -30,13 +30,14 @@ describe("the U.S. Standard Atmosphere 1976 through a notebook, from its row at 
   const gases = ["N2", "O", "O2", "Ar", "He"] as const;
 
   // 0.2 %: printed rounding, and thermal diffusion shared within the mixture.
-  it.each(rows.flatMap(({ altitudeKm, numberDensity }) => gases.map((gas) => ({ altitudeKm, gas, n: numberDensity[gas] }))))(
-    "has $gas at $altitudeKm km within 0.2 %",
-    ({ altitudeKm, gas, n }) => {
-      if (n === null) return;
-      expect(levelAt(altitudeKm)[`${gas}.number_density`]).toBeCloseToRelative(n, 2e-3);
-    },
-  );
+  it.each(
+    rows.flatMap(({ altitudeKm, numberDensity }) =>
+      gases.map((gas) => ({ altitudeKm, gas, n: numberDensity[gas] })),
+    ),
+  )("has $gas at $altitudeKm km within 0.2 %", ({ altitudeKm, gas, n }) => {
+    if (n === null) return;
+    expect(levelAt(altitudeKm)[`${gas}.number_density`]).toBeCloseToRelative(n, 2e-3);
+  });
 
   it.each(rows)("has the temperature at $altitudeKm km within 0.01 K", ({ altitudeKm, temperature }) => {
     expect(Math.abs((levelAt(altitudeKm).temperature as number) - temperature)).toBeLessThan(0.01);
@@ -50,12 +51,13 @@ describe("the U.S. Standard Atmosphere 1976 through a notebook, from its row at 
   );
 
   // Above 300 km the printed scale height feels the hydrogen, which this column does without.
-  it.each(rows.filter(({ pressureScaleHeightKm, altitudeKm }) => pressureScaleHeightKm !== null && altitudeKm <= 300))(
-    "has the scale height at $altitudeKm km within 5e-4",
-    ({ altitudeKm, pressureScaleHeightKm }) => {
-      expect(levelAt(altitudeKm).scale_height).toBeCloseToRelative(pressureScaleHeightKm! * 1000, 5e-4);
-    },
-  );
+  it.each(
+    rows.filter(
+      ({ pressureScaleHeightKm, altitudeKm }) => pressureScaleHeightKm !== null && altitudeKm <= 300,
+    ),
+  )("has the scale height at $altitudeKm km within 5e-4", ({ altitudeKm, pressureScaleHeightKm }) => {
+    expect(levelAt(altitudeKm).scale_height).toBeCloseToRelative(pressureScaleHeightKm! * 1000, 5e-4);
+  });
 });
 
 /** Constants of the program that computed the cases. */
@@ -88,13 +90,11 @@ function notebookWithExobaseAt(place: {
       ? place.hydrogenAtExobase * Math.exp(rise(massesU.H))
       : atExobase * 1e-9 * Math.exp(rise(massesU[formula]));
   const traces = (["H", "D", "He", "O", "H2", "HD"] as const).map((gas) => `${gas}: ${trace(gas)} /m^3`);
-  const masses = Object.entries(massesU).map(
-    ([formula, massU]): WrittenCell => [
-      "gas",
-      formula,
-      `mass = ${massU} u\nthermal_diffusion = 0${formula === "CO2" ? `\ncross_section = ${crossSection} m^2` : ""}`,
-    ],
-  );
+  const masses = Object.entries(massesU).map(([formula, massU]): WrittenCell => [
+    "gas",
+    formula,
+    `mass = ${massU} u\nthermal_diffusion = 0${formula === "CO2" ? `\ncross_section = ${crossSection} m^2` : ""}`,
+  ]);
   return [
     ["body", "planet", `gm = ${gm} m^3/s^2\nradius = ${radiiKm[body]} km`],
     ...masses,
@@ -132,7 +132,9 @@ describe("escape parameters and effusion velocities of Earth and Mars through a 
   it("give the same flux for a cool and rich Mars within 4 %", () => {
     const flux = (temperature: number, hydrogenAtExobase: number) =>
       numberIn(
-        resultOf(...notebookWithExobaseAt({ body: "Mars", radiusKm: 3639.5, temperature, hydrogenAtExobase })),
+        resultOf(
+          ...notebookWithExobaseAt({ body: "Mars", radiusKm: 3639.5, temperature, hydrogenAtExobase }),
+        ),
         "H.jeans_flux",
       );
     expect(flux(170, 1.8e12)).toBeCloseToRelative(flux(350, 3e10), 0.04);

@@ -1,0 +1,121 @@
+import { describe, expect, it } from "vitest";
+import { evaluateNotebook } from "../../../shared/notebook/evaluateNotebook";
+import { stripOf, summariseNotebook } from "../../../shared/notebook/summariseNotebook";
+import { notebookSummarySchema } from "../../../shared/notebook/summary";
+import { notebookOf, numberIn, type WrittenCell } from "./evaluateCells";
+
+const cells: WrittenCell[] = [
+  ["body", "ilmara", "mass = 0.41 earth_mass\nradius = 4943 km"],
+  ["values", "given", "T_top = 428 K"],
+  [
+    "column",
+    "dayside",
+    "body = ilmara\nbase = 80 km\npressure = 0.42 Pa\ngases = CO2: rest, O: 0.9 %, H: 1.2 ppm\ntemperature = bates(base = 165 K, exosphere = T_top, shape = 0.022 /km)",
+  ],
+  ["escape", "leak", "column = dayside\ncoupling = open"],
+];
+
+function summarise(written: WrittenCell[], headline: string[] = []) {
+  const document = notebookOf(written, { headline });
+  const { evaluation } = evaluateNotebook(document);
+  const summary = summariseNotebook(document, evaluation);
+  expect(notebookSummarySchema.parse(JSON.parse(JSON.stringify(summary)))).toEqual(summary);
+  return { summary, evaluation };
+}
+
+const plain = (text: string) => text.replace(/[\u2009\u202f]/g, " ");
+
+describe("the headline", () => {
+  it("is by default the exobase, the gas that leaves fastest, and its escape parameter", () => {
+    const { summary, evaluation } = summarise(cells);
+    const leak = evaluation.cells[3].result;
+    const [exobase, rate, parameter] = summary.headline;
+    expect(exobase).toMatchObject({
+      name: "leak.exobase.altitude",
+      label: "Exobase",
+      value: numberIn(leak, "exobase.altitude"),
+      log10: null,
+      unit: "m",
+      gas: null,
+    });
+    expect(plain(exobase.note)).toMatch(/^bulk, l = H; Kn 0.1 at \d+ km$/);
+    expect(rate).toMatchObject({
+      name: "leak.H.rate",
+      label: "Atomic hydrogen leaves",
+      unit: "s^-1",
+      gas: "H",
+    });
+    expect(rate.log10).toBe(numberIn(leak, "H.log10_rate"));
+    expect(parameter).toMatchObject({
+      name: "leak.H.escape_parameter",
+      label: "Escape parameter of H",
+      unit: "1",
+    });
+    expect(parameter.note).toMatch(/^regime jeans, bulk λ \d+/);
+  });
+
+  it("gives both ends of the band where there are two", () => {
+    const heavy = cells.map(([kind, name, text]): WrittenCell => [
+      kind,
+      name,
+      text.replace(", H: 1.2 ppm", ""),
+    ]);
+    expect(plain(summarise(heavy).summary.headline[0].note)).toMatch(
+      /^bulk, l = H; Kn 0.1–10 at \d+–\d+ km$/,
+    );
+  });
+
+  it("is what the notebook names, in its order, also what is not there", () => {
+    const { summary } = summarise(cells, ["ilmara.surface_gravity", "T_top", "leak.H.speed"]);
+    expect(summary.headline.map(({ name, label, value }) => [name, label, value])).toEqual([
+      ["ilmara.surface_gravity", "Surface gravity", expect.closeTo(6.69, 2)],
+      ["T_top", "T top", 428],
+      ["leak.H.speed", "leak.H.speed", "no such result"],
+    ]);
+  });
+
+  it("says where there is no exobase, and whether a wind blows instead", () => {
+    const hot = cells.map(([kind, name, text]): WrittenCell => [
+      kind,
+      name,
+      text.replace("428 K", "40000 K"),
+    ]);
+    expect(summarise(hot).summary.headline).toEqual([
+      {
+        name: "leak.exobase.altitude",
+        label: "Exobase",
+        value: "none: a wind instead",
+        log10: null,
+        unit: "m",
+        gas: null,
+        note: "bulk, l = H",
+      },
+    ]);
+    const low = cells.map(([kind, name, text]): WrittenCell => [
+      kind,
+      name,
+      kind === "column" ? `${text}\ntop = 120 km` : text,
+    ]);
+    expect(summarise(low).summary.headline.map(({ value }) => value)).toEqual(["none"]);
+  });
+
+  it("is empty without an escape cell", () => {
+    expect(summarise(cells.slice(0, 3)).summary.headline).toEqual([]);
+  });
+});
+
+describe("the summary", () => {
+  it("counts notes by level and names the bodies", () => {
+    const { summary } = summarise([...cells, ["values", "more", "x = 1 kg + 1 m"]]);
+    expect(summary).toMatchObject({ faults: 1, bodies: ["ilmara"], engine: "1.0.0" });
+    expect(summary.cautions + summary.remarks).toBeGreaterThan(0);
+  });
+
+  it("carries the strip of the first column, which can also be asked for by name", () => {
+    const { summary, evaluation } = summarise(cells);
+    expect(summary.strip?.column).toBe("dayside");
+    expect(stripOf(evaluation, "dayside")).toBe(summary.strip);
+    expect(stripOf(evaluation, "ilmara")).toBeNull();
+    expect(summarise(cells.slice(0, 2)).summary.strip).toBeNull();
+  });
+});
