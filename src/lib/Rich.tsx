@@ -5,7 +5,8 @@ export function Rich({ text }: { text: RichText }) {
   return text.map((piece, index) => {
     if (typeof piece === "string") return piece;
     if ("sup" in piece) return <sup key={index}>{piece.sup}</sup>;
-    return "sub" in piece ? <sub key={index}>{piece.sub}</sub> : <i key={index}>{piece.italic}</i>;
+    if ("sub" in piece) return <sub key={index}>{piece.sub}</sub>;
+    return "code" in piece ? <code key={index}>{piece.code}</code> : <i key={index}>{piece.italic}</i>;
   });
 }
 
@@ -14,12 +15,13 @@ export function RichTspans({ text }: { text: RichText }) {
   let shift = 0;
   return text.map((piece, index) => {
     const back = -shift;
-    if (typeof piece === "string" || "italic" in piece) {
+    if (typeof piece === "string" || "italic" in piece || "code" in piece) {
       shift = 0;
-      const italic = typeof piece !== "string";
+      const words = typeof piece === "string" ? piece : "italic" in piece ? piece.italic : piece.code;
+      const isItalic = typeof piece !== "string" && "italic" in piece;
       return (
-        <tspan key={index} dy={back} className={italic ? "strip-italic" : undefined}>
-          {italic ? piece.italic : piece}
+        <tspan key={index} dy={back} fontStyle={isItalic ? "italic" : undefined}>
+          {words}
         </tspan>
       );
     }

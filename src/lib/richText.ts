@@ -1,5 +1,5 @@
 /** Text with the few marks that numbers, units and formulas need, written once and rendered as HTML, SVG, plain text or for a figure. */
-export type RichPiece = string | { sup: string } | { sub: string } | { italic: string };
+export type RichPiece = string | { sup: string } | { sub: string } | { italic: string } | { code: string };
 export type RichText = readonly RichPiece[];
 
 const superscripts: Record<string, string> = {
@@ -28,7 +28,8 @@ export function plainText(rich: RichText): string {
     .map((piece) => {
       if (typeof piece === "string") return piece;
       if ("sup" in piece) return plainExponent(piece.sup);
-      return "sub" in piece ? piece.sub : piece.italic;
+      if ("sub" in piece) return piece.sub;
+      return "code" in piece ? piece.code : piece.italic;
     })
     .join("");
 }
@@ -40,7 +41,8 @@ export function figureText(rich: RichText): string {
     .map((piece) => {
       if (typeof piece === "string") return escape(piece);
       if ("sup" in piece) return `<sup>${escape(piece.sup)}</sup>`;
-      return "sub" in piece ? `<sub>${escape(piece.sub)}</sub>` : `<i>${escape(piece.italic)}</i>`;
+      if ("sub" in piece) return `<sub>${escape(piece.sub)}</sub>`;
+      return "code" in piece ? escape(piece.code) : `<i>${escape(piece.italic)}</i>`;
     })
     .join("");
 }

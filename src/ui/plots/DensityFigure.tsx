@@ -3,20 +3,17 @@ import type { Strip } from "../../../shared/notebook/summary";
 import { formatFixed, formatKilometres, formatQuantity, quantityText, thinSpace } from "../../lib/format";
 import { gasStyles } from "../../lib/gasStyle";
 import { Rich } from "../../lib/Rich";
-import { useElementSize } from "../../lib/useElementSize";
 import { densityCurves, interpolateProfile } from "./columnCurves";
 import { densityLabel, densityPlot } from "./densityPlot";
 import type { CsvColumn } from "./figureCsv";
 import { FigureFrame } from "./FigureFrame";
-import { figureRoom } from "./figureRoom";
 import { inkValues } from "./figureLayout";
 import { FigureNames } from "./FigureNames";
 import type { ColumnFigureProps } from "./figureProps";
 import { FigureReader } from "./FigureReader";
 import { FigureTable } from "./FigureTable";
 import { PlotlyFigure } from "./PlotlyFigure";
-import { resolveInks, useThemeRevision } from "./useFigureInks";
-import { useFigureState } from "./useFigureState";
+import { useColumnFigure } from "./useColumnFigure";
 
 function OwnCaption({ strip }: { strip: Strip }) {
   return (
@@ -31,24 +28,19 @@ function OwnCaption({ strip }: { strip: Strip }) {
 
 /** Number density of each gas against altitude, with the temperature beside it where there is room. */
 export function DensityFigure({ profiles, strip, unitSystem, number, caption }: ColumnFigureProps) {
-  const { ref, size } = useElementSize<HTMLDivElement>({ width: 736, height: 486 });
-  const { zoom, setZoom, hidden, toggle } = useFigureState();
-  const theme = useThemeRevision();
   const styles = gasStyles(strip.gases);
-  const curves = useMemo(() => densityCurves(profiles, strip, unitSystem), [profiles, strip, unitSystem]);
   const inkSources = useMemo(
     () => ({ ...inkValues, ...Object.fromEntries([...styles].map(([gas, style]) => [gas, style.colour])) }),
     [styles],
   );
-  // eslint-disable-next-line react-hooks/exhaustive-deps -- the theme changes what the same values resolve to
-  const inks = useMemo(() => resolveInks(inkSources, "page"), [inkSources, theme]);
-  const room = useMemo(() => figureRoom(size.width, strip.top / 1000, true), [size.width, strip.top]);
+  const figure = useColumnFigure(strip, "two panels", inkSources);
+  const { ref, inks, room, altitudes, away, zoom, setZoom, hidden, toggle } = figure;
+  const curves = useMemo(() => densityCurves(profiles, strip, unitSystem), [profiles, strip, unitSystem]);
   const input = useMemo(
     () => ({ profiles, strip, unitSystem, curves, styles, room, inks, hidden, zoom }),
     [profiles, strip, unitSystem, curves, styles, room, inks, hidden, zoom],
   );
   const plot = useMemo(() => densityPlot(input), [input]);
-  const altitudes: readonly [number, number] = zoom?.y ?? [strip.base / 1000, strip.top / 1000];
 
   const densityAt = (gas: string, altitude: number) => {
     const column = profiles[`${gas}.number_density`];
@@ -89,20 +81,12 @@ export function DensityFigure({ profiles, strip, unitSystem, number, caption }: 
       return values ? [{ head: `${gas}.number_density (m^-3)`, values }] : [];
     }),
   ];
-  const drawing = () =>
-    densityPlot({
-      ...input,
-      room: figureRoom(736, strip.top / 1000, true),
-      inks: resolveInks(inkSources, "day"),
-      zoom: null,
-    });
-
   return (
     <FigureFrame
       number={number}
       caption={caption ?? <OwnCaption strip={strip} />}
       fileName={`${strip.column}-number-density`}
-      drawing={drawing}
+      drawing={() => densityPlot({ ...input, ...away() })}
       columns={columns}
     >
       <div ref={ref}>

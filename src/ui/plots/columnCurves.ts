@@ -13,8 +13,11 @@ export type Profiles = Readonly<Record<string, readonly number[]>>;
 /** Few points keep typing quick; a curve of a page's width needs no more. */
 const pointsDrawn = 120;
 
-/** Row numbers to draw: about evenly spread, first and last included. */
-export function drawnRows(count: number): number[] {
+/** Rows of a column that a figure up to the strip's top needs: about evenly spread, first and last included. */
+export function drawnRows(profiles: Profiles, strip: Strip): number[] {
+  const altitude = profiles.altitude ?? [];
+  const past = altitude.findIndex((z) => z > strip.top);
+  const count = past < 0 ? altitude.length : past + 1;
   const every = Math.max(1, Math.ceil(count / pointsDrawn));
   const rows: number[] = [];
   for (let row = 0; row < count - 1; row += every) rows.push(row);
@@ -54,7 +57,7 @@ export const densityUnit = (unitSystem: UnitSystem) => displayScale("m^-3", unit
 /** Curves of number density, one a gas. */
 export function densityCurves(profiles: Profiles, strip: Strip, unitSystem: UnitSystem): GasCurve[] {
   const altitude = profiles.altitude ?? [];
-  const rows = drawnRows(altitude.length);
+  const rows = drawnRows(profiles, strip);
   const { factor } = densityUnit(unitSystem);
   const part = strip.exobase ?? Infinity;
   return strip.gases.flatMap((gas) => {

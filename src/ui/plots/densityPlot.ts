@@ -1,6 +1,6 @@
-import type { Annotation, Data, Layout, Shape } from "plotly.js";
+import type { Data, Layout, Shape } from "plotly.js";
 import type { Strip } from "../../../shared/notebook/summary";
-import { formatKilometres, formatUnit, thinSpace, type UnitSystem } from "../../lib/format";
+import { formatKilometres, formatUnit, type UnitSystem } from "../../lib/format";
 import type { GasStyle } from "../../lib/gasStyle";
 import { figureText, plainText } from "../../lib/richText";
 import { densityDecades, densityUnit, drawnRows, type GasCurve, type Profiles } from "./columnCurves";
@@ -17,6 +17,7 @@ import {
   type FigureZoom,
 } from "./figureLayout";
 import { knudsenBand } from "./knudsenBand";
+import { exobaseNotes, panelScale, type PanelScale } from "./panelLettering";
 import { placeNames, type Box, type PlacedName } from "./placeNames";
 import type { FigureInks } from "./useFigureInks";
 
@@ -65,8 +66,8 @@ function gasTraces({ curves, styles, inks, hidden }: DensityPlotInput): Data[] {
   });
 }
 
-function temperatureTrace({ profiles, inks }: DensityPlotInput): Data {
-  const rows = drawnRows(profiles.altitude?.length ?? 0);
+function temperatureTrace({ profiles, strip, inks }: DensityPlotInput): Data {
+  const rows = drawnRows(profiles, strip);
   return {
     type: "scatter",
     mode: "lines",
@@ -80,16 +81,6 @@ function temperatureTrace({ profiles, inks }: DensityPlotInput): Data {
   };
 }
 
-/** From altitudes and decades to px of the main panel. */
-function panelScale(room: FigureRoom, decades: [number, number], altitudes: [number, number]) {
-  return {
-    x: (log10: number) => ((log10 - decades[0]) / (decades[1] - decades[0])) * room.panel,
-    y: (km: number) => room.tall - ((km - altitudes[0]) / (altitudes[1] - altitudes[0])) * room.tall,
-    decade: (x: number) => decades[0] + (x / room.panel) * (decades[1] - decades[0]),
-    km: (y: number) => altitudes[0] + ((room.tall - y) / room.tall) * (altitudes[1] - altitudes[0]),
-  };
-}
-
 /** Sans at 14.5 px: a capital is about 9 px wide, a subscript 6. */
 const nameWidth = (gas: string): number =>
   [...gas].reduce(
@@ -99,7 +90,7 @@ const nameWidth = (gas: string): number =>
 
 function namePlaces(
   input: DensityPlotInput,
-  scale: ReturnType<typeof panelScale>,
+  scale: PanelScale,
   obstacles: readonly Box[],
 ): Map<string, PlacedName> {
   const { room, curves } = input;
@@ -112,38 +103,6 @@ function namePlaces(
       .filter(([x, y], i) => i % 2 === 0 && x > -60 && x < room.panel + 60 && y > -60 && y < room.tall + 60),
   }));
   return placeNames(placed, frame, obstacles);
-}
-
-/** Lettering of exobase and Knudsen band at the right end of the panel, with the room it takes. */
-function exobaseNotes({ strip, room, inks }: DensityPlotInput, scale: ReturnType<typeof panelScale>) {
-  const { sans, serif } = figureFonts();
-  const notes: Partial<Annotation>[] = [];
-  const boxes: Box[] = [];
-  const add = (km: number | null, text: string, width: number, lift: number, size: number, color: string) => {
-    if (km === null) return;
-    const y = scale.y(km) - lift;
-    if (y < 6 || y > room.tall - 6) return;
-    const place = {
-      x: 1,
-      y: km,
-      xref: "x domain" as const,
-      xanchor: "right" as const,
-      yanchor: "middle" as const,
-    };
-    notes.push(note(text, { ...place, xshift: -2, yshift: lift }, { family: sans, size, color }));
-    boxes.push({ left: room.panel - width, right: room.panel, top: y - 9, bottom: y + 9 });
-  };
-  const inKm = (metres: number | null) => (metres === null ? null : metres / 1000);
-  if (strip.exobase !== null) {
-    const symbol = `<span style="font-family:${serif.replace(/"/g, "'")};font-style:italic;font-size:13.5px">l = H</span>`;
-    const text = `<span style="font-weight:600">exobase</span> ${formatKilometres(strip.exobase)}${thinSpace}km, ${symbol}`;
-    add(inKm(strip.exobase), text, 136, 10, 12.5, inks.ink!);
-  }
-  const isClear = (metres: number | null) =>
-    metres !== null && Math.abs(scale.y(metres / 1000) - (scale.y((strip.exobase ?? 0) / 1000) - 10)) > 17;
-  if (isClear(strip.upper)) add(inKm(strip.upper), "Kn 10", 44, 0, 12, inks.ink2!);
-  if (isClear(strip.lower)) add(inKm(strip.lower), "Kn 0.1", 44, 0, 12, inks.ink2!);
-  return { notes, boxes };
 }
 
 /** Short bars in the gases' colours at the altitude axis: where each gas parts from the mixture. */
@@ -164,8 +123,8 @@ function homopauseTicks({ strip, inks }: DensityPlotInput): Partial<Shape>[] {
     }));
 }
 
-function temperatureRange(profiles: Profiles): [number, number] {
-  const values = profiles.temperature ?? [0, 1];
+function temperatureRange({ profiles, strip }: DensityPlotInput): [number, number] {
+  const values = drawnRows(profiles, strip).map((row) => profiles.temperature![row]!);
   const [low, high] = [Math.min(...values), Math.max(...values)];
   const margin = Math.max(0.12 * (high - low), 0.04 * high);
   return [Math.max(0, low - margin), high + margin];
@@ -179,7 +138,7 @@ export function densityPlot(input: DensityPlotInput): DensityPlot {
   const scale = panelScale(room, decades, altitudes);
   const { sans } = figureFonts();
   const panels: ("x" | "x2")[] = room.second > 0 ? ["x", "x2"] : ["x"];
-  const lettering = exobaseNotes(input, scale);
+  const lettering = exobaseNotes(strip, room, inks, scale);
   const homopauseBoxes = strip.homopauses.map(({ altitude }): Box => {
     const y = scale.y(altitude / 1000);
     return { left: 0, right: 16, top: y - 2, bottom: y + 2 };
@@ -212,7 +171,7 @@ export function densityPlot(input: DensityPlotInput): DensityPlot {
     room.second > 0
       ? {
           xaxis2: {
-            ...plainAxis(inks, "temperature, K", room.second, temperatureRange(profiles)),
+            ...plainAxis(inks, "temperature, K", room.second, temperatureRange(input)),
             domain: [(room.panel + room.gap) / total, 1],
             anchor: "y2",
             fixedrange: true,

@@ -17,10 +17,12 @@ export interface FigureRoom {
 /** Under this a figure gives up its second panel. */
 const narrow = 560;
 
-export function figureRoom(width: number, highestKm: number, wantsSecond: boolean): FigureRoom {
+export type FigureShape = "two panels" | "one panel";
+
+export function figureRoom(width: number, highestKm: number, shape: FigureShape): FigureRoom {
   const isNarrow = width < narrow;
-  const height = isNarrow ? 430 : 486;
-  const hasSecond = wantsSecond && !isNarrow;
+  const height = isNarrow ? 430 : shape === "two panels" ? 486 : 396;
+  const hasSecond = shape === "two panels" && !isNarrow;
   const [second, gap] = hasSecond ? [132, 26] : [0, 0];
   const [left, right, top, bottom] = [highestKm >= 1000 ? 56 : 48, hasSecond ? 6 : 4, 12, 46];
   return {

@@ -13,11 +13,12 @@ function subscribeToTheme(onChange: () => void): () => void {
   };
   const observer = new MutationObserver(handle);
   observer.observe(document.documentElement, { attributes: true, attributeFilter: ["data-theme", "class"] });
-  const preference = window.matchMedia("(prefers-color-scheme: dark)");
-  preference.addEventListener("change", handle);
+  // A document that is not shown, as in tests, has no media to ask.
+  const preference = "matchMedia" in window ? window.matchMedia("(prefers-color-scheme: dark)") : null;
+  preference?.addEventListener("change", handle);
   return () => {
     observer.disconnect();
-    preference.removeEventListener("change", handle);
+    preference?.removeEventListener("change", handle);
   };
 }
 

@@ -21,7 +21,7 @@ export interface EscapeTableProps {
   number: number;
   /** After "Table 1."; the table has its own words where this is left out. */
   caption?: ReactNode;
-  /** From `letterNotes`; those of this cell. */
+  /** Notes of this cell; those that stand under an entry in the editor are left out here. */
   notes?: readonly LetteredNote[];
   /** Called with a note whose remedy the reader wants. */
   onRemedy?: (note: Note) => void;

@@ -1,0 +1,55 @@
+import type { CellResult } from "../../../shared/notebook/result";
+import {
+  formatNumber,
+  formatQuantity,
+  quantityRich,
+  resultScale,
+  thinSpace,
+  type UnitSystem,
+} from "../../lib/format";
+import { Rich } from "../../lib/Rich";
+import type { RichText } from "../../lib/richText";
+import "./tables.css";
+import type { ValueListProps } from "./tableProps";
+import { valueLabel, valueLabels } from "./valueLabels";
+
+/** A value with its unit; a Hill radius in radii of its body, which say more than kilometres. */
+function shownValue(result: CellResult, name: string, unitSystem: UnitSystem): RichText {
+  const { value, unit = "1" } = result.values[name]!;
+  if (typeof value === "string") return [value.replace(/_/g, " ")];
+  const radius = result.values.radius?.value;
+  if (name === "hill_radius" && typeof radius === "number" && value !== null)
+    return [...formatNumber(value / radius), `${thinSpace}radii`];
+  const twin = result.values[name.replace(/([^.]+)$/, "log10_$1")]?.value;
+  const log10 = typeof twin === "number" ? twin : null;
+  const scale = resultScale(name, unit, unitSystem, value ?? 0);
+  return quantityRich(formatQuantity({ value, log10, unit }, unitSystem, { scale }));
+}
+
+/** What a cell gives, as labels over their values. */
+export function ValueList({ result, unitSystem, names }: ValueListProps) {
+  const shown = (names ?? Object.keys(valueLabels)).filter((name) => name in result.values);
+  if (shown.length === 0) return null;
+  return (
+    <dl className="value-list" aria-label={`What ${result.name} gives`}>
+      {shown.map((name) => {
+        const { value, unit } = result.values[name]!;
+        const isNumber = typeof value === "number";
+        return (
+          <div key={name}>
+            <dt>{valueLabel(name)}</dt>
+            <dd
+              title={
+                isNumber
+                  ? `${result.name}.${name} = ${value}${unit && unit !== "1" ? ` ${unit}` : ""}`
+                  : undefined
+              }
+            >
+              <Rich text={shownValue(result, name, unitSystem)} />
+            </dd>
+          </div>
+        );
+      })}
+    </dl>
+  );
+}
