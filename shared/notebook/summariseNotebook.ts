@@ -79,8 +79,8 @@ function namedItem(evaluation: Evaluation, path: string): HeadlineItem {
   const results = evaluation.cells.map(({ result }) => result);
   const result =
     name === ""
-      ? results.find(({ kind, values }) => kind === "values" && cellName in values)
-      : results.find((candidate) => candidate.name === cellName && name in candidate.values);
+      ? results.find(({ kind, values }) => kind === "values" && Object.hasOwn(values, cellName))
+      : results.find((candidate) => candidate.name === cellName && Object.hasOwn(candidate.values, name));
   if (result) return itemOf(result, name === "" ? cellName : name);
   return { name: path, label: path, value: "no such result", log10: null, unit: "", gas: null, note: "" };
 }

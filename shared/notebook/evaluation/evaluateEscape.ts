@@ -5,7 +5,7 @@ import type { ColumnModel } from "./models";
 import { requireEntries, type OpenCell } from "./openCell";
 import { readCellEntry, readEntry } from "./readEntries";
 import { measured } from "./resultValue";
-import { readChoice } from "../language/readChoice";
+import { changeTo } from "../language/notes";
 import { readGasNames } from "../language/readGasName";
 import type { CellResult } from "../result";
 import type { CellAnswer } from "./cellAnswer";
@@ -36,31 +36,48 @@ export function evaluateEscape(cell: OpenCell): CellAnswer {
 
 /** The convention changes every rate, so it is written out; what is not computed is not silently taken for what is. */
 function readCoupling(cell: OpenCell): boolean {
-  if (cell.entry("coupling")) {
-    return readEntry(cell, "coupling", (node) => readChoice(node, ["open"], "coupling")) !== undefined;
-  }
+  if (cell.entry("coupling")) return readOnlyChoice(cell, "coupling", "open", openMeans);
   const { length } = cell.text;
   const isFreshLine = length === 0 || cell.text.endsWith("\n");
+  const remedy = {
+    label: "Write coupling = open",
+    range: { from: length, to: length },
+    replacement: `${isFreshLine ? "" : "\n"}coupling = open`,
+  };
   cell.say(
     "fault",
     "missing_coupling",
-    "The entry *coupling* is missing. Write coupling = open: the column is solved without a flux and the Jeans flux evaluated after, so that what diffusion can supply does not limit it.",
+    `The entry *coupling* is missing. Write coupling = open: ${openMeans}.`,
     undefined,
-    {
-      label: "Write coupling = open",
-      range: { from: length, to: length },
-      replacement: `${isFreshLine ? "" : "\n"}coupling = open`,
-    },
+    remedy,
   );
   return false;
 }
 
+const openMeans =
+  "the column is solved without a flux and the Jeans flux evaluated after, so that what diffusion can supply does not limit it";
+
 function readCriterion(cell: OpenCell): boolean {
   if (cell.entry("criterion")) {
-    return readEntry(cell, "criterion", (node) => readChoice(node, ["bulk"], "criterion")) !== undefined;
+    return readOnlyChoice(
+      cell,
+      "criterion",
+      "bulk",
+      "the mean free path of the mixture equals its scale height",
+    );
   }
   cell.actByDefault("criterion");
   return true;
+}
+
+/** An entry that has one choice so far; anything else is told what that choice means. */
+function readOnlyChoice(cell: OpenCell, key: string, choice: string, meaning: string): boolean {
+  const { node, valueRange } = cell.entry(key)!;
+  if (node.type === "broken") return false;
+  if (node.type === "name" && node.path === choice) return true;
+  const message = `The ${key} computed here is *${choice}*: ${meaning}. Write ${key} = ${choice}.`;
+  cell.say("fault", "choice", message, valueRange, changeTo(valueRange, choice));
+  return false;
 }
 
 /** Gases to answer for, in the order written; undefined if the list has a fault. */

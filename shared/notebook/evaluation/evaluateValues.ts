@@ -10,6 +10,7 @@ import type { CellResult } from "../result";
 import type { CellAnswer } from "./cellAnswer";
 
 export function evaluateValues(cell: OpenCell): CellAnswer {
+  if (cell.name !== "") checkName(cell, cell.name);
   const globals: Record<string, Quantity | null> = {};
   const values: CellResult["values"] = {};
   const scope = withEntriesAbove(cell, globals);

@@ -117,7 +117,7 @@ export function surroundingsOf(above: NotebookAbove, places: NamePlaces, place: 
 }
 
 function resultOf(cell: CellAbove, name: string, path: string): Quantity | Unavailable | string | undefined {
-  const result = cell.values[name];
+  const result = Object.hasOwn(cell.values, name) ? cell.values[name] : undefined;
   if (!result) {
     const hasNone = Object.keys(cell.values).length === 0;
     if (hasNone && cell.isFaulty)
@@ -137,7 +137,7 @@ function resultOf(cell: CellAbove, name: string, path: string): Quantity | Unava
 function twinOf(cell: CellAbove, name: string): string {
   const cut = name.lastIndexOf(".") + 1;
   const twin = `${name.slice(0, cut)}log10_${name.slice(cut)}`;
-  if (twin in cell.values) return `${cell.name}.${twin}`;
+  if (Object.hasOwn(cell.values, twin)) return `${cell.name}.${twin}`;
   return `${cell.name}.${name.slice(0, cut)}log10_rate`;
 }
 

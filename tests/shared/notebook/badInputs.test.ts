@@ -450,6 +450,16 @@ describe("whatever is written", { timeout: 60_000 }, () => {
     );
   });
 
+  it("words of the programming language are names like any other", () => {
+    const { values, notes } = resultOf(ilmara, [
+      "values",
+      "v",
+      "constructor = 1 m\ntoString = 2 * constructor\nx = ilmara.constructor",
+    ]);
+    expect(values).toEqual({ constructor: { value: 1, unit: "m" }, toString: { value: 2, unit: "m" } });
+    expect(notes.map(({ code }) => code)).toEqual(["unknown_name"]);
+  });
+
   it("any text at all gets notes inside it", () => {
     fc.assert(
       fc.property(

@@ -300,6 +300,33 @@ describe("a body", () => {
   });
 });
 
+describe("an escape cell", () => {
+  const hot = (temperature: string, body = "") =>
+    resultOf(
+      ["body", "b", `mass = 0.41 earth_mass\nradius = 4943 km\n${body}`],
+      [
+        "column",
+        "c",
+        `body = b\nbase = 80 km\npressure = 0.4 Pa\ngases = CO2: rest, H: 0.001 ppm\ntemperature = ${temperature}`,
+      ],
+      ["escape", "e", "column = c\ncoupling = open"],
+    );
+  const codes = (result: ReturnType<typeof hot>) => result.notes.map(({ level, code }) => `${level} ${code}`);
+
+  it("cautions where a gas drifts fast, and stays an answer", () => {
+    const result = hot("bates(base = 165 K, exosphere = 1500 K, shape = 0.02 /km)");
+    expect(numberIn(result, "H.escape_parameter")).toBeLessThan(2.69);
+    expect(codes(result)).toContain("caution fast_drift");
+    expect(result.status).toBe("caution");
+  });
+
+  it("cautions where the exobase lies beyond half the Hill radius", () => {
+    const beside = "star_distance = 0.006 au\nstar_mass = 0.9 solar_mass";
+    expect(codes(hot("250 K", beside))).toContain("caution exobase_near_hill_radius");
+    expect(codes(hot("250 K"))).not.toContain("caution exobase_near_hill_radius");
+  });
+});
+
 describe("a gas cell", () => {
   const thin: WrittenCell = [
     "column",
