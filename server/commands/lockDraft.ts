@@ -14,27 +14,24 @@ export async function lockDraft(
   tx: Db,
   notebookId: string,
 ): Promise<{ current: DraftState; lastVersion: number }> {
+  // Without a join: after waiting for the lock, a joined row would be the one from before the wait.
   const [draft] = await tx
     .select({
       revision: notebooks.revision,
       document: notebooks.document,
       savedAt: notebooks.savedAt,
-      savedById: notebooks.savedBy,
-      savedByName: users.name,
+      savedBy: notebooks.savedBy,
       lastVersion: notebooks.lastVersion,
     })
     .from(notebooks)
-    .innerJoin(users, eq(users.id, notebooks.savedBy))
     .where(and(eq(notebooks.id, notebookId), isNull(notebooks.deletedAt)))
-    .for("update", { of: notebooks });
+    .for("update");
   if (!draft) throw notFound("notebook");
-  return {
-    current: {
-      revision: draft.revision,
-      document: draft.document,
-      savedAt: draft.savedAt.toISOString(),
-      savedBy: { id: draft.savedById, name: draft.savedByName },
-    },
-    lastVersion: draft.lastVersion,
-  };
+
+  const [saver] = await tx
+    .select({ id: users.id, name: users.name })
+    .from(users)
+    .where(eq(users.id, draft.savedBy));
+  const { revision, document, savedAt, lastVersion } = draft;
+  return { current: { revision, document, savedAt: savedAt.toISOString(), savedBy: saver! }, lastVersion };
 }

@@ -1,14 +1,37 @@
-import { createHash } from "node:crypto";
+import { createHash, randomUUID } from "node:crypto";
 import { existsSync, mkdirSync, readdirSync, readFileSync, renameSync, writeFileSync } from "node:fs";
 import path from "node:path";
-import { openPglite } from "../../server/db/client";
+import { sql } from "drizzle-orm";
+import { openPglite, openPostgres, type OpenDatabase } from "../../server/db/client";
 import { places } from "../../server/places";
 
 const cache = path.resolve(import.meta.dirname, "../../node_modules/.cache/tenuity");
 
-/** A database in memory at the latest migration. The first run migrates and keeps the state; later ones load it. */
-export async function openTestDatabase() {
-  return openPglite({ dump: await migratedState() });
+/** A PostgreSQL server to run the tests on instead of PGlite: `TENUITY_TEST_DATABASE_URL=postgres://… npm run unit`. */
+const serverUrl = process.env.TENUITY_TEST_DATABASE_URL;
+
+/**
+ * A database of its own at the latest migration. In memory, the first run migrates and keeps the state and later ones
+ * load it; on a server it is made anew.
+ */
+export async function openTestDatabase(): Promise<OpenDatabase> {
+  return serverUrl ? openServerDatabase(serverUrl) : openPglite({ dump: await migratedState() });
+}
+
+async function openServerDatabase(url: string): Promise<OpenDatabase> {
+  const name = `tenuity_test_${randomUUID().replaceAll("-", "")}`;
+  const server = openPostgres(url);
+  await server.db.execute(sql`create database ${sql.identifier(name)}`);
+  const database = openPostgres(Object.assign(new URL(url), { pathname: `/${name}` }).href);
+  await database.migrate(places.migrations);
+  return {
+    ...database,
+    close: async () => {
+      await database.close();
+      await server.db.execute(sql`drop database ${sql.identifier(name)}`);
+      await server.close();
+    },
+  };
 }
 
 /** The same in a folder, closed again, so that a server need not make one from nothing. */
