@@ -211,10 +211,10 @@ function lengthToCeiling(
   }
 
   finishStep(columnSlope, position, direction * step);
-  denseCoefficients(columnSlope, size, position, direction * step, landingDense);
+  denseCoefficients(columnSlope, size, position, direction * step, landingDense, 0);
   const estimate = findRoot(
     (length) => {
-      interpolateStep(landingDense, size, start, 0, length / step, landingState);
+      interpolateStep(landingDense, 0, size, start, 0, length / step, landingState);
       return excessAt(length, landingState);
     },
     0,

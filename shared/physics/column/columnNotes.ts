@@ -59,8 +59,8 @@ function cutShort(topAltitude: number): PhysicsNote {
     level: "caution",
     code: "column_cut_short",
     message:
-      `The column ends at ${kilometres(topAltitude)}, below the top asked for: above it fewer than 1e-260 ` +
-      "particles fill a cubic metre. Set the top lower.",
+      `The column ends at ${kilometres(topAltitude)}, below the top asked for: above it the pressure is below ` +
+      "1e-280 Pa. Set the top lower.",
   };
 }
 

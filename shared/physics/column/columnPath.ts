@@ -28,8 +28,9 @@ export interface ColumnPath {
   /** `keptStages` slopes of each gas for each step. */
   stages: Float64Array;
   laws: StepLaw[];
-  /** Coefficients of the dense output, made when first asked for. */
-  dense: (Float64Array | undefined)[];
+  /** Coefficients of the dense output of each step, made when first asked for, and whether they are. */
+  dense: Float64Array;
+  isDense: Uint8Array;
 }
 
 export function emptyPath(problem: ColumnProblem, fluxes: BaseFluxes | null): ColumnPath {
@@ -42,7 +43,8 @@ export function emptyPath(problem: ColumnProblem, fluxes: BaseFluxes | null): Co
     states: new Float64Array((firstCapacity + 1) * size),
     stages: new Float64Array(firstCapacity * keptStages * size),
     laws: [],
-    dense: [],
+    dense: new Float64Array(firstCapacity * denseRows * size),
+    isDense: new Uint8Array(firstCapacity),
   };
 }
 
@@ -57,6 +59,10 @@ export function makeRoom(path: ColumnPath): void {
   path.positions = extended(path.positions, capacity + 1);
   path.states = extended(path.states, (capacity + 1) * size);
   path.stages = extended(path.stages, capacity * keptStages * size);
+  path.dense = extended(path.dense, capacity * denseRows * size);
+  const isDense = new Uint8Array(capacity);
+  isDense.set(path.isDense);
+  path.isDense = isDense;
 }
 
 function extended(array: Float64Array, length: number): Float64Array {
@@ -94,25 +100,18 @@ export function stateWithin(path: ColumnPath, step: number, height: number, out:
   const size = path.problem.masses.length;
   const position = path.positions[step];
   const length = path.positions[step + 1] - position;
-  const coefficients = path.dense[step] ?? makeDense(path, step, size, position, length);
-  interpolateStep(coefficients, size, path.states, step * size, (height - position) / length, out);
+  if (path.isDense[step] === 0) makeDense(path, step, size, position, length);
+  const place = step * denseRows * size;
+  interpolateStep(path.dense, place, size, path.states, step * size, (height - position) / length, out);
 }
 
-function makeDense(
-  path: ColumnPath,
-  step: number,
-  size: number,
-  position: number,
-  length: number,
-): Float64Array {
-  const coefficients = new Float64Array(denseRows * size);
+function makeDense(path: ColumnPath, step: number, size: number, position: number, length: number): void {
   for (let i = 0; i < size; i += 1) {
     start[i] = path.states[step * size + i];
     end[i] = path.states[(step + 1) * size + i];
   }
   bindColumn(path.problem, path.fluxes, path.laws[step]);
   restoreStages(size, path.stages, step * keptStages * size);
-  denseCoefficients(columnSlope, size, position, length, coefficients);
-  path.dense[step] = coefficients;
-  return coefficients;
+  denseCoefficients(columnSlope, size, position, length, path.dense, step * denseRows * size);
+  path.isDense[step] = 1;
 }

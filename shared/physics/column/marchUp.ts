@@ -1,4 +1,3 @@
-import { boltzmann } from "../constants/codata2022";
 import { escapeParameter } from "../escape/escapeParameter";
 import { findKnudsenBand, smallestBoundParameter, type KnudsenBand } from "../exobase/findExobase";
 import { addKnudsen, findLargestKnudsen, type KnudsenAlong } from "../exobase/knudsenAlong";
@@ -29,8 +28,8 @@ const topOverExobase = 2.3;
 const farEnough = logarithm(10.5);
 /** A column without a given top has at least so many scale heights, or twice its base's distance from the centre. */
 const smallestExtent = 3;
-/** ln of 1e-260 m⁻³: below it numbers lose their meaning, and a column ends. */
-const smallestLogDensity = logarithm(1e-260);
+/** ln of 1e-280 Pa: below it numbers lose their meaning, and a column ends. */
+const smallestLogPressure = logarithm(1e-280);
 
 /** Marches up to the given top, or to where the exobase and its band have been passed. */
 export function marchUp(problem: ColumnProblem, tolerance: number): UpwardMarch {
@@ -69,24 +68,29 @@ function marchToOwnTop(march: ColumnMarch, along: KnudsenAlong): UpwardMarch {
     const isFar = along.values[path.steps] >= farEnough;
     if ((isRunaway || isFar) && heightOfMarch(march) >= extent) break;
   }
-  const wanted = Math.min(limit, wantedTop(along, extent, isRunaway));
+  const band = findKnudsenBand(along);
+  const wanted = Math.min(limit, wantedTop(along, band, extent, isRunaway));
   while (heightOfMarch(march) < wanted && !isThin) isThin = marchOn(march, along, wanted);
   const top = isThin ? Math.min(wanted, thinHeight(path)) : wanted;
-  return { along, band: findKnudsenBand(along), top, isRunaway, isCutShort: false };
+  const isBandWhole = band.exobase !== null && band.upper !== null;
+  return { along, band: isBandWhole ? band : findKnudsenBand(along), top, isRunaway, isCutShort: false };
 }
 
 /** One step; whether the gas is now too thin to go on. */
 function marchOn(march: ColumnMarch, along: KnudsenAlong, limit: number): boolean {
   advance(march, limit);
-  addKnudsen(along, march.slope);
-  return logDensityAt(march.path, march.path.steps) < smallestLogDensity;
+  return addKnudsen(along, march.slope) < smallestLogPressure;
 }
 
 /** The top of a column that sets its own; it depends on the gas alone, not on the steps. */
-function wantedTop(along: KnudsenAlong, extent: number, isRunaway: boolean): number {
+function wantedTop(
+  along: KnudsenAlong,
+  { exobase, upper }: KnudsenBand,
+  extent: number,
+  isRunaway: boolean,
+): number {
   const { problem } = along.path;
   const { baseAltitude, radius } = problem.input;
-  const { exobase, upper } = findKnudsenBand(along);
   if (exobase !== null) {
     const altitude = altitudeOf(problem, exobase);
     const reach = Math.max(altitude, altitude - baseAltitude);
@@ -125,23 +129,14 @@ export function smallestEscapeParameter(path: ColumnPath, node: number): number 
 
 const state = new Float64Array(maximumDimension);
 
-/** ln n at a position of a path. */
-function logDensityAt(path: ColumnPath, node: number): number {
-  nodeState(path, node, state);
-  const temperature = pathTemperature(path, Math.min(node, path.steps - 1), path.positions[node]);
-  return setComposition(state, path.problem.masses.length) - logarithm(boltzmann.value * temperature);
-}
-
 /** Height within the last step at which the gas becomes too thin. */
 function thinHeight(path: ColumnPath): number {
   const step = path.steps - 1;
   const from = path.positions[step];
   const length = path.positions[path.steps] - from;
   const excessAt = (part: number) => {
-    const height = from + part * length;
-    stateWithin(path, step, height, state);
-    const thermalEnergy = boltzmann.value * pathTemperature(path, step, height);
-    return setComposition(state, path.problem.masses.length) - logarithm(thermalEnergy) - smallestLogDensity;
+    stateWithin(path, step, from + part * length, state);
+    return setComposition(state, path.problem.masses.length) - smallestLogPressure;
   };
   const found = findRoot(excessAt, 0, 1, { value: 1e-10, bracket: 1e-15 });
   return from + rootOf("part of a step up to the end of the gas", found) * length;

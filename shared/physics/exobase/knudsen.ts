@@ -14,30 +14,28 @@ import { logarithm } from "../numerics/elementary";
  * @source [ChapmanCowling1970] for the mean free path
  */
 export function logKnudsen(problem: ColumnProblem, height: number, state: Float64Array): number {
-  const { masses, crossSections } = problem;
-  const logPressure = setComposition(state, masses.length);
-  const meanMass = weighted(masses);
-  const meanCrossSection = weighted(crossSections);
+  const logPressure = setComposition(state, problem.masses.length);
+  return logKnudsenOfComposition(problem, height, logPressure);
+}
+
+/** The same for the composition that was just set, under the pressure that came with it. */
+export function logKnudsenOfComposition(problem: ColumnProblem, height: number, logPressure: number): number {
+  const meanMass = weighted(problem.masses);
+  const meanCrossSection = weighted(problem.crossSections);
   const gravity = gravityAt(problem, height);
   return logarithm((meanMass * gravity) / (Math.SQRT2 * meanCrossSection)) - logPressure;
 }
 
 /**
- * d ln Kn/dh.
+ * d ln Kn/dh, for the composition that was just set.
  *
  *   C_h + Σ C_i d ln pᵢ/dh,   C_i = Xᵢ(mᵢ/m̄ − σᵢ/σ̄) − Xᵢ,   C_h = d ln g/dh
  *
  * @param slope  d ln pᵢ/dh  [m⁻¹]; the other parameters as of `logKnudsen`
  * @returns      [m⁻¹]
  */
-export function logKnudsenSlope(
-  problem: ColumnProblem,
-  height: number,
-  state: Float64Array,
-  slope: Float64Array,
-): number {
+export function logKnudsenSlope(problem: ColumnProblem, height: number, slope: Float64Array): number {
   const { masses, crossSections, baseRadius, centrifugalFactor } = problem;
-  setComposition(state, masses.length);
   const meanMass = weighted(masses);
   const meanCrossSection = weighted(crossSections);
   const radius = (baseRadius * baseRadius) / (baseRadius - height);

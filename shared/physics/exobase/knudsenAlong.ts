@@ -1,8 +1,9 @@
 import { nodeState, stateWithin, type ColumnPath } from "../column/columnPath";
+import { setComposition } from "../column/composition";
 import { bindColumn, columnSlope } from "../column/columnSlope";
 import { maximumDimension } from "../numerics/dormandPrince";
 import { findRoot, rootOf } from "../numerics/findRoot";
-import { logKnudsen, logKnudsenSlope } from "./knudsen";
+import { logKnudsen, logKnudsenOfComposition, logKnudsenSlope } from "./knudsen";
 
 /** ln Kn and its slope at the positions of a path. */
 export interface KnudsenAlong {
@@ -21,13 +22,21 @@ export interface KnudsenCrossing {
 const subsamples = 8;
 const rootTolerance = { value: 1e-13, bracket: 4e-16 };
 
-/** Adds the position that a march has reached. */
-export function addKnudsen(along: KnudsenAlong, slope: Float64Array): void {
+/**
+ * Adds the position that a march has reached.
+ *
+ * @param slope  d ln p/dh of each gas there
+ * @returns      ln of the pressure there
+ */
+export function addKnudsen(along: KnudsenAlong, slope: Float64Array): number {
   const { path, values, slopes } = along;
   const node = values.length;
+  const height = path.positions[node];
   nodeState(path, node, stateHere);
-  values.push(logKnudsen(path.problem, path.positions[node], stateHere));
-  slopes.push(logKnudsenSlope(path.problem, path.positions[node], stateHere, slope));
+  const logPressure = setComposition(stateHere, path.problem.masses.length);
+  values.push(logKnudsenOfComposition(path.problem, height, logPressure));
+  slopes.push(logKnudsenSlope(path.problem, height, slope));
+  return logPressure;
 }
 
 const stateHere = new Float64Array(maximumDimension);
@@ -109,7 +118,8 @@ function summitWithin({ path }: KnudsenAlong, step: number): number {
     stateWithin(path, step, height, stateHere);
     bindColumn(path.problem, path.fluxes, path.laws[step]);
     columnSlope(height, stateHere, slopeHere);
-    return logKnudsenSlope(path.problem, height, stateHere, slopeHere);
+    setComposition(stateHere, path.problem.masses.length);
+    return logKnudsenSlope(path.problem, height, slopeHere);
   };
   const found = findRoot(slopeAt, 0, 1, { value: 0, bracket: 1e-12 });
   return from + rootOf("part of a step up to the largest Knudsen number", found) * length;

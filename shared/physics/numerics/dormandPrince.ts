@@ -205,7 +205,7 @@ export function restoreStages(dimension: number, source: Float64Array, offset: n
 
 /**
  * Writes the coefficients of the dense output of the step whose `start`, `end` and stages are at hand:
- * three more calls of `slope`.
+ * three more calls of `slope`. They take `denseRows` × `dimension` numbers from `place` on.
  */
 export function denseCoefficients(
   slope: Slope,
@@ -213,6 +213,7 @@ export function denseCoefficients(
   position: number,
   step: number,
   coefficients: Float64Array,
+  place: number,
 ): void {
   for (let i = 0; i < dimension; i += 1) {
     trial[i] =
@@ -259,10 +260,10 @@ export function denseCoefficients(
   for (let i = 0; i < dimension; i += 1) {
     const rise = end[i] - start[i];
     const first = step * k1[i] - rise;
-    coefficients[i] = rise;
-    coefficients[dimension + i] = first;
-    coefficients[2 * dimension + i] = rise - step * k13[i] - first;
-    coefficients[3 * dimension + i] =
+    coefficients[place + i] = rise;
+    coefficients[place + dimension + i] = first;
+    coefficients[place + 2 * dimension + i] = rise - step * k13[i] - first;
+    coefficients[place + 3 * dimension + i] =
       step *
       (t.d4_1 * k1[i] +
         t.d4_6 * k6[i] +
@@ -276,7 +277,7 @@ export function denseCoefficients(
         t.d4_14 * k14[i] +
         t.d4_15 * k15[i] +
         t.d4_16 * k16[i]);
-    coefficients[4 * dimension + i] =
+    coefficients[place + 4 * dimension + i] =
       step *
       (t.d5_1 * k1[i] +
         t.d5_6 * k6[i] +
@@ -290,7 +291,7 @@ export function denseCoefficients(
         t.d5_14 * k14[i] +
         t.d5_15 * k15[i] +
         t.d5_16 * k16[i]);
-    coefficients[5 * dimension + i] =
+    coefficients[place + 5 * dimension + i] =
       step *
       (t.d6_1 * k1[i] +
         t.d6_6 * k6[i] +
@@ -304,7 +305,7 @@ export function denseCoefficients(
         t.d6_14 * k14[i] +
         t.d6_15 * k15[i] +
         t.d6_16 * k16[i]);
-    coefficients[6 * dimension + i] =
+    coefficients[place + 6 * dimension + i] =
       step *
       (t.d7_1 * k1[i] +
         t.d7_6 * k6[i] +
@@ -324,6 +325,7 @@ export function denseCoefficients(
 /** Writes the state at `fraction` (0 … 1) of a step that began with `states[offset …]`. */
 export function interpolateStep(
   coefficients: Float64Array,
+  place: number,
   dimension: number,
   states: Float64Array,
   offset: number,
@@ -332,13 +334,13 @@ export function interpolateStep(
 ): void {
   const left = 1 - fraction;
   for (let i = 0; i < dimension; i += 1) {
-    let sum = coefficients[6 * dimension + i] * fraction;
-    sum = (sum + coefficients[5 * dimension + i]) * left;
-    sum = (sum + coefficients[4 * dimension + i]) * fraction;
-    sum = (sum + coefficients[3 * dimension + i]) * left;
-    sum = (sum + coefficients[2 * dimension + i]) * fraction;
-    sum = (sum + coefficients[dimension + i]) * left;
-    sum = (sum + coefficients[i]) * fraction;
+    let sum = coefficients[place + 6 * dimension + i] * fraction;
+    sum = (sum + coefficients[place + 5 * dimension + i]) * left;
+    sum = (sum + coefficients[place + 4 * dimension + i]) * fraction;
+    sum = (sum + coefficients[place + 3 * dimension + i]) * left;
+    sum = (sum + coefficients[place + 2 * dimension + i]) * fraction;
+    sum = (sum + coefficients[place + dimension + i]) * left;
+    sum = (sum + coefficients[place + i]) * fraction;
     out[i] = states[offset + i] + sum;
   }
 }

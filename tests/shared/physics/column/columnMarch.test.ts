@@ -53,7 +53,7 @@ describe("a march", () => {
       const to = heightOf(230e3, input.radius, input.radius + input.baseAltitude);
       const up = marchAlong(input, { from: 0, to, state: base });
       const down = marchAlong(input, { from: to, to: 0, state: up.end });
-        down.end.forEach((value, i) => expect(Math.abs(value - base[i])).toBeLessThan(1e-7));
+      down.end.forEach((value, i) => expect(Math.abs(value - base[i])).toBeLessThan(1e-7));
       expect(down.march.law).toMatchObject({ isCapped: up.march.path.laws[0].isCapped });
     },
   );

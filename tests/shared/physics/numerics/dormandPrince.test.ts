@@ -54,11 +54,11 @@ function denseError(step: number): number {
   takeStep(swing, 2, 0, step);
   finishStep(swing, 0, step);
   const coefficients = new Float64Array(2 * denseRows);
-  denseCoefficients(swing, 2, 0, step, coefficients);
+  denseCoefficients(swing, 2, 0, step, coefficients, 0);
   const out = new Float64Array(2);
   let largest = 0;
   for (let part = 1; part < 20; part += 1) {
-    interpolateStep(coefficients, 2, start, 0, part / 20, out);
+    interpolateStep(coefficients, 0, 2, start, 0, part / 20, out);
     const [y, v] = swung((part / 20) * step);
     largest = Math.max(largest, Math.abs(out[0] - y), Math.abs(out[1] - v));
   }
@@ -144,11 +144,11 @@ describe("the dense output", () => {
     takeStep(swing, 2, 0, 0.7);
     finishStep(swing, 0, 0.7);
     const coefficients = new Float64Array(2 * denseRows);
-    denseCoefficients(swing, 2, 0, 0.7, coefficients);
+    denseCoefficients(swing, 2, 0, 0.7, coefficients, 0);
     const out = new Float64Array(2);
-    interpolateStep(coefficients, 2, start, 0, 0, out);
+    interpolateStep(coefficients, 0, 2, start, 0, 0, out);
     expect([...out]).toEqual([start[0], start[1]]);
-    interpolateStep(coefficients, 2, start, 0, 1, out);
+    interpolateStep(coefficients, 0, 2, start, 0, 1, out);
     expect(out[0]).toBeCloseTo(end[0], 15);
     expect(out[1]).toBeCloseTo(end[1], 15);
   });
@@ -162,14 +162,14 @@ describe("the dense output", () => {
     keepStages(2, kept, 0);
     const ends = [start.slice(), end.slice()];
     const atOnce = new Float64Array(2 * denseRows);
-    denseCoefficients(swing, 2, 0, 0.5, atOnce);
+    denseCoefficients(swing, 2, 0, 0.5, atOnce, 0);
 
     errorAfter(3, 1);
     start.set(ends[0]);
     end.set(ends[1]);
     restoreStages(2, kept, 0);
     const later = new Float64Array(2 * denseRows);
-    denseCoefficients(swing, 2, 0, 0.5, later);
+    denseCoefficients(swing, 2, 0, 0.5, later, 0);
     expect([...later]).toEqual([...atOnce]);
     expect([...k13.slice(0, 2)]).toEqual([...kept.slice(16, 18)]);
   });
