@@ -68,3 +68,58 @@ export { thermalSpeed } from "./escape/thermalSpeed";
 
 export { diffusionCoefficient } from "./column/diffusionCoefficient";
 export { defaultTolerance, solveColumn } from "./column/solveColumn";
+
+export { magnitude } from "./numerics/magnitude";
+export { incompleteGamma, scaledUpperGamma } from "./numerics/incompleteGamma";
+export { scaledErfc } from "./numerics/scaledErfc";
+export { lowerLambertLogarithm, principalLambertLogarithm } from "./numerics/lambertW";
+
+export { type CoronaColumn, limbColumn, overheadColumn } from "./corona/coronaColumn";
+export { type Corona, coronaDensity, type CoronaDensity } from "./corona/coronaDensity";
+export { coronaShareAtExobase } from "./corona/coronaShareAtExobase";
+export { type CoronaPlace, partitionFunctions, type PartitionFunctions } from "./corona/partitionFunctions";
+
+export { columnCrossoverMass, type ColumnCrossoverMass } from "./limits/columnCrossoverMass";
+export { columnDiffusionLimit, type ColumnDiffusionLimit } from "./limits/columnDiffusionLimit";
+export { columnInventory } from "./limits/columnInventory";
+export { crossoverMass, type OutflowingGas } from "./limits/crossoverMass";
+export { depletionTime } from "./limits/depletionTime";
+export { diffusionLimit, type DiffusionLimit, type DiffusionLimitPlace } from "./limits/diffusionLimit";
+export { energyLimitedMassRate, type HeatedBody } from "./limits/energyLimitedMassRate";
+export { isothermalWind, type IsothermalWind, type WindBase } from "./limits/isothermalWind";
+export { limitLevel, type LimitLevel } from "./limits/limitLevel";
+export { supplyFraction } from "./limits/supplyFraction";
+
+export { equivalentTime, type LossSpan } from "./loss/equivalentTime";
+export { lossHistory, type LossHistory } from "./loss/lossHistory";
+export { moleculesFromWaterLayer } from "./loss/moleculesFromWaterLayer";
+export { particlesFromSurfacePressure } from "./loss/particlesFromSurfacePressure";
+export { relativeXuv } from "./loss/relativeXuv";
+export { surfacePressureFromParticles } from "./loss/surfacePressureFromParticles";
+export { waterDensity, waterLayerFromMolecules, waterMass } from "./loss/waterLayerFromMolecules";
+export { waterPerParticle } from "./loss/waterPerParticle";
+export { solarXuvExponent, type XuvHistory } from "./loss/xuvHistory";
+
+export {
+  findRecombiningIon,
+  recombiningIons,
+  type RecombinationChannel,
+  type RecombinationPiece,
+  type RecombiningIon,
+} from "./handbook/recombination";
+export { escapeEnergy } from "./nonthermal/escapeEnergy";
+export {
+  escapingFragments,
+  type ChannelAnswer,
+  type Fragment,
+  type FragmentYield,
+} from "./nonthermal/escapingFragments";
+export { fragmentEnergy } from "./nonthermal/fragmentEnergy";
+export { pickupEnergy } from "./nonthermal/pickupEnergy";
+export { pickupGyroradius } from "./nonthermal/pickupGyroradius";
+export { recombinationCoefficient } from "./nonthermal/recombinationCoefficient";
+export {
+  recombinationEscape,
+  type Ionosphere,
+  type RecombinationEscape,
+} from "./nonthermal/recombinationEscape";

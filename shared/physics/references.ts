@@ -25,18 +25,27 @@ export const references: Readonly<Record<string, string>> = {
     "S. Chapman and T. G. Cowling (1970), The Mathematical Theory of Non-Uniform Gases, 3rd edition, Cambridge University Press.",
   CODATA2022:
     "E. Tiesinga, P. J. Mohr, D. B. Newell and B. N. Taylor (2024), The 2022 CODATA Recommended Values of the Fundamental Physical Constants (Web Version 9.0), National Institute of Standards and Technology.",
+  Corless1996:
+    "R. M. Corless, G. H. Gonnet, D. E. G. Hare, D. J. Jeffrey and D. E. Knuth (1996), On the Lambert W function, Adv. Comput. Math. 5, 329–359.",
+  Cranmer2004:
+    "S. R. Cranmer (2004), New views of the solar wind with the Lambert W function, Am. J. Phys. 72, 1397–1403.",
   CRCDiffusion:
     "CRC Handbook of Chemistry and Physics, table Diffusion in Gases, after Marrero and Mason (1972).",
   Dekker1971:
     "T. J. Dekker (1971), A floating-point technique for extending the available precision, Numer. Math. 18, 224–242.",
+  DLMF: "F. W. J. Olver et al. (2010 and later), NIST Digital Library of Mathematical Functions, National Institute of Standards and Technology.",
   DowellJarratt1971:
     "M. Dowell and P. Jarratt (1971), A modified regula falsi method for computing the root of an equation, BIT 11, 168–174.",
   Erkaev2007:
     "N. V. Erkaev, Yu. N. Kulikov, H. Lammer, F. Selsis, D. Langmayr, G. F. Jaritz and H. K. Biernat (2007), Roche lobe effects on the atmospheric loss from “Hot Jupiters”, Astron. Astrophys. 472, 329–334.",
+  FoxHac1997:
+    "J. L. Fox and A. Hać (1997), Spectrum of hot O at the exobases of the terrestrial planets, J. Geophys. Res. 102, 24005–24011.",
   FritschCarlson1980:
     "F. N. Fritsch and R. E. Carlson (1980), Monotone piecewise cubic interpolation, SIAM J. Numer. Anal. 17, 238–246.",
   GolubVanLoan2013:
     "G. H. Golub and C. F. Van Loan (2013), Matrix Computations, 4th edition, Johns Hopkins University Press.",
+  Gougousi1997:
+    "T. Gougousi, M. F. Golde and R. Johnsen (1997), Electron–ion recombination rate coefficient measurements in a flowing afterglow plasma, Chem. Phys. Lett. 265, 399–403.",
   GRIMech3:
     "G. P. Smith et al. (1999), GRI-Mech 3.0, Gas Research Institute; Lennard-Jones parameters of its transport data.",
   Gustafsson1994:
@@ -49,6 +58,8 @@ export const references: Readonly<Record<string, string>> = {
     "R. Hu, S. Seager and Y. L. Yung (2015), Helium atmospheres on warm Neptune- and sub-Neptune-sized exoplanets and applications to GJ 436b, Astrophys. J. 807, 8.",
   Hunten1973:
     "D. M. Hunten (1973), The escape of light gases from planetary atmospheres, J. Atmos. Sci. 30, 1481–1494.",
+  HuntenPepinWalker1987:
+    "D. M. Hunten, R. O. Pepin and J. C. G. Walker (1987), Mass fractionation in hydrodynamic escape, Icarus 69, 532–549.",
   IAU1976:
     "International Astronomical Union (1976), System of Astronomical Constants: the Julian century of 36,525 days of 86,400 s.",
   IAU2012B2:
@@ -59,10 +70,14 @@ export const references: Readonly<Record<string, string>> = {
   JPLElements:
     "E. M. Standish and J. G. Williams, Keplerian elements for approximate positions of the major planets (J2000), Jet Propulsion Laboratory.",
   JPLSatellites: "Planetary satellite mean elements, Jet Propulsion Laboratory, Solar System Dynamics.",
+  Kella1997:
+    "D. Kella, L. Vejby-Christensen, P. J. Johnson, H. B. Pedersen and L. H. Andersen (1997), The source of green light emission determined from a heavy-ion storage ring experiment, Science 276, 1530–1533.",
   MarreroMason1972:
     "T. R. Marrero and E. A. Mason (1972), Gaseous diffusion coefficients, J. Phys. Chem. Ref. Data 1, 3–118.",
   MasonMarrero1970:
     "E. A. Mason and T. R. Marrero (1970), The diffusion of atoms and molecules, Adv. At. Mol. Phys. 6, 155–232.",
+  MehrBiondi1969:
+    "F. J. Mehr and M. A. Biondi (1969), Electron temperature dependence of recombination of O2+ and N2+ ions with electrons, Phys. Rev. 181, 264–271.",
   Meija2016:
     "J. Meija et al. (2016), Atomic weights of the elements 2013 (IUPAC Technical Report), Pure Appl. Chem. 88, 265–291: conventional atomic weights.",
   Minzner1976:
@@ -80,19 +95,39 @@ export const references: Readonly<Record<string, string>> = {
     "E. N. Parker (1958), Dynamics of the interplanetary gas and magnetic fields, Astrophys. J. 128, 664–676.",
   Pavlov2019:
     "A. V. Pavlov (2019), Surv. Geophys.: table of binary diffusion coefficients after Mason and Marrero (1970).",
+  Peterson1998:
+    "J. R. Peterson et al. (1998), Dissociative recombination and excitation of N2+: cross sections and product branching ratios, J. Chem. Phys. 108, 1978–1988.",
+  Petrignani2005:
+    "A. Petrignani, W. J. van der Zande, P. C. Cosby, F. Hellberg, R. D. Thomas and M. Larsson (2005), Vibrationally resolved rate coefficients and branching fractions in the dissociative recombination of O2+, J. Chem. Phys. 122, 014302.",
   Poling2001:
     "B. E. Poling, J. M. Prausnitz and J. P. O'Connell (2001), The Properties of Gases and Liquids, 5th edition, McGraw-Hill, Appendix B.",
   Prohaska2022:
     "T. Prohaska et al. (2022), Standard atomic weights of the elements 2021 (IUPAC Technical Report), Pure Appl. Chem. 94, 573–600.",
+  Ribas2005:
+    "I. Ribas, E. F. Guinan, M. Güdel and M. Audard (2005), Evolution of the solar activity over time and effects on planetary atmospheres. I. High-energy irradiances (1–1700 Å), Astrophys. J. 622, 680–694.",
+  Rosati2003:
+    "R. E. Rosati, R. Johnsen and M. F. Golde (2003), Absolute yields of CO(a′3Σ+, d3Δ, e3Σ−) + O from the dissociative recombination of CO2+ ions with electrons, J. Chem. Phys. 119, 11630–11635.",
+  Rosen1998:
+    "S. Rosén et al. (1998), Absolute cross sections and final-state distributions for dissociative recombination and excitation of CO+ (v = 0) using an ion storage ring, Phys. Rev. A 57, 4462–4471.",
+  ShepherdLaframboise1981:
+    "M. M. Shepherd and J. G. Laframboise (1981), Chebyshev approximation of (1 + 2x) exp(x²) erfc x in 0 ≤ x < ∞, Math. Comput. 36, 249–253.",
+  TakahasiMori1974:
+    "H. Takahasi and M. Mori (1974), Double exponential formulas for numerical integration, Publ. RIMS Kyoto Univ. 9, 721–741.",
   Tang1989:
     "P. T. P. Tang (1989), Table-driven implementation of the exponential function in IEEE floating-point arithmetic, ACM Trans. Math. Softw. 15, 144–157.",
   Tang1990:
     "P. T. P. Tang (1990), Table-driven implementation of the logarithm function in IEEE floating-point arithmetic, ACM Trans. Math. Softw. 16, 378–400.",
   USSA1976: "NOAA, NASA and USAF (1976), U.S. Standard Atmosphere, 1976, NOAA-S/T 76-1562.",
+  VejbyChristensen1998:
+    "L. Vejby-Christensen, D. Kella, H. B. Pedersen and L. H. Andersen (1998), Dissociative recombination of NO+, Phys. Rev. A 57, 3627–3634.",
   Volkov2011:
     "A. N. Volkov, R. E. Johnson, O. J. Tucker and J. T. Erwin (2011), Thermally driven atmospheric escape: transition from hydrodynamic to Jeans escape, Astrophys. J. Lett. 729, L24.",
   Wang2012:
     "M. Wang, G. Audi, A. H. Wapstra, F. G. Kondev, M. MacCormick, X. Xu and B. Pfeiffer (2012), The AME2012 atomic mass evaluation (II), Chin. Phys. C 36, 1603–2014.",
+  Watson1981:
+    "A. J. Watson, T. M. Donahue and J. C. G. Walker (1981), The dynamics of a rapidly escaping atmosphere: applications to the evolution of Earth and Venus, Icarus 48, 150–166.",
   ZahnleKasting1986:
     "K. J. Zahnle and J. F. Kasting (1986), Mass fractionation during transonic escape and implications for loss of water from Mars and Venus, Icarus 68, 462–480.",
+  Zipf1980:
+    "E. C. Zipf (1980), The dissociative recombination of vibrationally excited N2+ ions, Geophys. Res. Lett. 7, 645–648.",
 };
