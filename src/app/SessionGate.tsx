@@ -44,7 +44,7 @@ export function SessionGate() {
   const handleSignedIn = useCallback(
     (next: SessionResponse) => {
       const before = queryClient.getQueryData(sessionQuery.queryKey)?.user;
-      const isBack = before != null && before.id === next.user?.id;
+      const isBack = before ? before.id === next.user?.id : false;
       if (!isBack) {
         // Another person: nothing of the last one may be seen, nor sent in the new one's name.
         settle(false);

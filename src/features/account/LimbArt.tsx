@@ -16,8 +16,8 @@ const names: readonly { altitude: number; name: string; drop: number }[] = [
   { altitude: exobase, name: `exobase, ${exobase}`, drop: -18 },
 ];
 
-/** Below this width the scale of altitudes and its names give way. */
-const leastForScale = 700;
+/** In a smaller window the scale of altitudes and its names give way. */
+const leastForScale = { width: 700, height: 560 };
 
 /** The limb of Ilmara, at dusk on the light page and at night on the dark one, drawn at the size it has. */
 export function LimbArt({ lettering }: LimbArtProps) {
@@ -36,7 +36,7 @@ interface LimbDrawingProps extends LimbArtProps {
 
 function LimbDrawing({ width, height, lettering }: LimbDrawingProps) {
   const limb = useMemo(() => limbOf(width, height), [width, height]);
-  const hasScale = width >= leastForScale;
+  const hasScale = width >= leastForScale.width && height >= leastForScale.height;
   const dots = useMemo(
     () => dotPaths(limbDots(limb, hasScale ? [...lettering, ...scaleBoxes(limb)] : lettering)),
     [limb, lettering, hasScale],

@@ -20,7 +20,7 @@ export function SignInFrame({ title, children }: SignInFrameProps) {
   return (
     <div className="grid min-h-dvh wide:grid-cols-[minmax(0,1fr)_460px]">
       <title>{`${title} · Tenuity`}</title>
-      <div className="relative min-h-330 overflow-hidden wide:sticky wide:top-0 wide:h-dvh wide:min-h-640">
+      <header className="relative min-h-330 overflow-hidden wide:sticky wide:top-0 wide:h-dvh wide:min-h-640">
         <LimbArt lettering={isWide ? wideLettering : narrowLettering} />
         <div className="absolute top-26 left-18 wide:top-58 wide:left-64">
           <Wordmark size={isWide ? 112 : 66} className="-ml-4 block wide:-ml-6" />
@@ -32,9 +32,9 @@ export function SignInFrame({ title, children }: SignInFrameProps) {
           Limb of Ilmara after dusk. Layers and exobase to scale
           <span className="hidden wide:inline">; particles thin out as its densities do</span>.
         </p>
-      </div>
+      </header>
       <div className="flex flex-col px-18 pt-12 pb-28 wide:px-56 wide:pt-28">
-        <main className="my-auto w-full pb-18 wide:pt-12">
+        <main className="my-auto w-full max-w-[460px] pb-18 wide:pt-12">
           <Mark size={40} className="hidden wide:block" />
           {children}
         </main>

@@ -27,7 +27,7 @@ export function NotebookLine({ notebook, now, onRename }: NotebookLineProps) {
         {summary?.strip && <StripThumb strip={summary.strip} />}
       </div>
       <div className="notebook-name">
-        <h3 className="font-serif text-[20px]/[26px]">
+        <h2 className="font-serif text-[20px]/[26px]">
           {deletedAt === null ? (
             <Link to={`/notebooks/${notebook.id}`} className="notebook-link">
               {notebook.title}
@@ -35,7 +35,7 @@ export function NotebookLine({ notebook, now, onRename }: NotebookLineProps) {
           ) : (
             notebook.title
           )}
-        </h3>
+        </h2>
         <p className="type-meta text-ink2">{peopleLine(notebook)}</p>
       </div>
       <div className="notebook-headline">

@@ -33,14 +33,18 @@ afterEach(() => vi.useRealTimers());
 it("is announced politely and goes by itself", () => {
   removeCell();
   expect(screen.getByRole("status").textContent).toContain("Cell halo removed.");
-  act(() => vi.advanceTimersByTime(20_000));
+  act(() => {
+    vi.advanceTimersByTime(20_000);
+  });
   expect(screen.queryByText("Cell halo removed.")).toBeNull();
 });
 
 it("stays as long as it holds the focus", () => {
   removeCell();
   fireEvent.focus(screen.getByRole("button", { name: "Put back" }));
-  act(() => vi.advanceTimersByTime(60_000));
+  act(() => {
+    vi.advanceTimersByTime(60_000);
+  });
   expect(screen.getByText("Cell halo removed.")).toBeTruthy();
 });
 
