@@ -1,5 +1,5 @@
 import { useRef } from "react";
-import type { CellEvaluation } from "../../../../shared/notebook/result";
+import type { CellEvaluation, Note } from "../../../../shared/notebook/result";
 import { CrossingFigure } from "../../../ui/plots/CrossingFigure";
 import { DensityFigure } from "../../../ui/plots/DensityFigure";
 import { EscapeTable } from "../../../ui/tables/EscapeTable";
@@ -11,6 +11,7 @@ import { Computing } from "./Computing";
 interface CellResultsProps extends CellViewProps {
   /** Figures are made when the cell first comes near the screen. */
   isNear: boolean;
+  onRemedy: ((note: Note) => void) | undefined;
 }
 
 /**
@@ -52,6 +53,7 @@ function Answer({
   figureNumber,
   tableNumber,
   isNear,
+  onRemedy,
 }: CellResultsProps & { evaluation: CellEvaluation }) {
   const { result, gases, strip } = evaluation;
   switch (result.kind) {
@@ -88,6 +90,7 @@ function Answer({
           unitSystem={unitSystem}
           number={tableNumber}
           notes={notes}
+          onRemedy={onRemedy}
         />
       );
     default:

@@ -1,4 +1,4 @@
-import { memo, useId, useMemo, useRef } from "react";
+import { memo, useCallback, useId, useMemo, useRef } from "react";
 import type { Cell } from "../../../../shared/notebook/document";
 import type { CellEvaluation, Note } from "../../../../shared/notebook/result";
 import type { UnitSystem } from "../../../lib/format";
@@ -53,6 +53,14 @@ export const CellView = memo(function CellView(props: CellViewProps) {
   );
   const result = evaluation?.result;
   const isProse = cell.kind === "prose";
+
+  const applyRemedy = useCallback(
+    ({ remedy }: Note) => {
+      if (remedy) commands.replace(cell.id, remedy.range, remedy.replacement);
+    },
+    [cell.id, commands],
+  );
+  const onRemedy = isEditable ? applyRemedy : undefined;
 
   const handleKeyDown = (event: React.KeyboardEvent) => {
     if (event.target !== event.currentTarget || !isEditable) return;
@@ -110,8 +118,8 @@ export const CellView = memo(function CellView(props: CellViewProps) {
             <pre className="entries entries-waiting">{cell.text}</pre>
           )}
           {evaluation && <DefaultsLine defaults={evaluation.defaults} />}
-          <CellResults {...props} isNear={isNear} />
-          <CellNotes notes={props.notes} cell={cell} isEditable={isEditable} commands={commands} />
+          <CellResults {...props} isNear={isNear} onRemedy={onRemedy} />
+          <CellNotes notes={props.notes} cell={cell} onRemedy={onRemedy} />
         </>
       )}
     </section>

@@ -5,6 +5,7 @@ const nothing = (): void => {};
 /** Commands of a page that is only read: one can leave an editor, and change nothing. */
 export const readingCommands: CellCommands = {
   write: nothing,
+  replace: nothing,
   insert: nothing,
   remove: nothing,
   rename: nothing,

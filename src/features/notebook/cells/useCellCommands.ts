@@ -1,6 +1,7 @@
 import { useEffect, useRef, useState } from "react";
 import type { CellKind, NotebookDocument } from "../../../../shared/notebook/document";
 import type { DocumentEdit } from "../../../../shared/notebook/editDocument";
+import type { TextRange } from "../../../../shared/notebook/result";
 import { useNotify, type Notice } from "../../../ui/Notices";
 import { cellTitle } from "./cellTitle";
 import { newCell } from "./newCell";
@@ -42,6 +43,16 @@ function createCellCommands(now: () => Surroundings, onNewCell: (id: string) => 
     write(id: string, text: string): void {
       const cell = cellOf(id);
       if (cell && cell.text !== text) now().edit({ type: "changeText", id, text });
+    },
+    /** Writes over a part of a cell's text. */
+    replace(id: string, { from, to }: TextRange, replacement: string): void {
+      const cell = cellOf(id);
+      if (!cell || to > cell.text.length) return;
+      now().edit({
+        type: "changeText",
+        id,
+        text: cell.text.slice(0, from) + replacement + cell.text.slice(to),
+      });
     },
     insert(kind: CellKind, index: number): void {
       const cell = newCell(kind, now().document, index);

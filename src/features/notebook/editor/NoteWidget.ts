@@ -1,6 +1,8 @@
 import { WidgetType, type EditorView } from "@codemirror/view";
 import type { Note } from "../../../../shared/notebook/result";
-import { complaintAndRest, noteParts } from "../cells/noteParts";
+import { formatMessage } from "../../../lib/formatMessage";
+import { complaintAndRest } from "../cells/complaintAndRest";
+import { richNodes } from "./richNodes";
 
 /** What is wrong with an entry, under it: the complaint, the reason, and the remedy as a word to press. */
 export class NoteWidget extends WidgetType {
@@ -21,8 +23,9 @@ export class NoteWidget extends WidgetType {
     const { level, message, remedy } = this.note;
     const [complaint, rest] = complaintAndRest(message);
     const line = element("div", `entry-note entry-note-${level}`);
-    line.append(withWords(element("strong", ""), complaint));
-    if (rest !== "") line.append(withWords(element("span", ""), rest));
+    const first = element("strong", "");
+    first.append(...richNodes(formatMessage(complaint)));
+    line.append(first, ...richNodes(formatMessage(rest)));
     if (remedy && !view.state.readOnly) {
       const button = element("button", "entry-remedy");
       button.textContent = remedy.label;
@@ -46,15 +49,5 @@ export class NoteWidget extends WidgetType {
 function element(name: string, className: string): HTMLElement {
   const node = document.createElement(name);
   if (className !== "") node.className = className;
-  return node;
-}
-
-function withWords(node: HTMLElement, message: string): HTMLElement {
-  for (const { text, setting } of noteParts(message)) {
-    const part =
-      setting === "plain" ? document.createTextNode("") : element(setting === "code" ? "code" : "sub", "");
-    part.textContent = text;
-    node.append(part);
-  }
   return node;
 }

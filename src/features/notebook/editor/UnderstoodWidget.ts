@@ -1,7 +1,6 @@
 import { WidgetType } from "@codemirror/view";
-import { understoodParts } from "./understoodParts";
-
-const elements = { raised: "sup", low: "sub", symbol: "i" } as const;
+import { formatUnderstood } from "./formatUnderstood";
+import { richNodes } from "./richNodes";
 
 /** The value as understood, quiet, after the expression it belongs to. */
 export class UnderstoodWidget extends WidgetType {
@@ -16,12 +15,7 @@ export class UnderstoodWidget extends WidgetType {
   override toDOM(): HTMLElement {
     const output = document.createElement("span");
     output.className = "entry-understood";
-    for (const { text, setting } of understoodParts(this.text)) {
-      const part =
-        setting === "plain" ? document.createTextNode("") : document.createElement(elements[setting]);
-      part.textContent = text;
-      output.append(part);
-    }
+    output.append(...richNodes(formatUnderstood(this.text)));
     return output;
   }
 

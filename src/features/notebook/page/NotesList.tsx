@@ -1,10 +1,11 @@
 import type { Cell } from "../../../../shared/notebook/document";
 import type { Note, NoteLevel } from "../../../../shared/notebook/result";
 import { formatCount } from "../../../lib/format";
+import { formatMessage } from "../../../lib/formatMessage";
+import { Rich } from "../../../lib/Rich";
 import { StateMark } from "../../../ui/StateMark";
 import type { LetteredNote } from "../../../ui/tables/tableProps";
-import { complaintAndRest } from "../cells/noteParts";
-import { NoteText } from "../cells/NoteText";
+import { complaintAndRest } from "../cells/complaintAndRest";
 
 export interface ListedNote extends LetteredNote {
   cell: Pick<Cell, "id" | "name" | "kind">;
@@ -27,11 +28,11 @@ export function NotesList({ notes }: { notes: readonly ListedNote[] }) {
         {sorted.map(({ note, letter, cell }, index) => (
           <li key={`${cell.id} ${note.code} ${index}`}>
             <StateMark state={note.level} label={note.level} />
-            <i className="note-letter" data-level={note.level}>
+            <i className="table-letter" data-level={note.level}>
               {letter}
             </i>
             <a href={`#cell-${cell.id}`}>
-              <b>{cell.name || cell.kind}</b>: <NoteText message={complaintOf(note)} />
+              <b>{cell.name || cell.kind}</b>: <Rich text={formatMessage(complaintOf(note))} />
             </a>
           </li>
         ))}
