@@ -71,7 +71,7 @@ describe("a notebook file", () => {
     );
   });
 
-  it("gives every document back to the character", () => {
+  it("gives every document back to the character", { timeout: 60_000 }, () => {
     const piece = fc.constantFrom(
       ..."\n|\n\n| |  |    |\t|```|````|~~~|`|<!-- prose x -->|<!--|-->|<script>|</script>|<div>|<?|- |1. |> |# |===|---|[a]: /b|body x|```body x|```notebook|\\|&amp;|&#35;|*|_|µ|é|𝛼|\u00a0|\u202e|a|x = 1 m|# s".split(
         "|",
@@ -192,7 +192,7 @@ describe("a notebook file", () => {
     expect(reading.notes).toContainEqual(expect.objectContaining({ level: "fault", code, line }));
   });
 
-  it("refuses a file beyond the bounds of a document", () => {
+  it("refuses a file beyond the bounds of a document", { timeout: 60_000 }, () => {
     expect(notesOf(head + "a".repeat(4_200_000))).toEqual([{ level: "fault", code: "too_long", line: 1 }]);
     expect(notesOf(head + "\n```values v\n```\n".repeat(501))).toContainEqual(
       expect.objectContaining({ code: "too_many_cells" }),
