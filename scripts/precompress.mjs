@@ -13,7 +13,7 @@ async function compressFile(file) {
   if (content.length < smallest) return;
   const brotli = await promisify(brotliCompress)(content, {
     params: {
-      [constants.BROTLI_PARAM_QUALITY]: 10,
+      [constants.BROTLI_PARAM_QUALITY]: 9,
       [constants.BROTLI_PARAM_SIZE_HINT]: content.length,
     },
   });

@@ -2,8 +2,14 @@ import { randomBytes } from "node:crypto";
 import type { RequestHandler, Response } from "express";
 import helmet from "helmet";
 
-/** Hash of an empty style element, which figures open and then fill through the style sheet's own interface. */
-const emptyStyle = "'sha256-47DEQpj8HBSa+/TImW+5JCeuQeRkm5NMpJWZG3hSuFU='";
+/**
+ * Hashes of the style elements that Plotly 4.1.2 adds when it loads: an empty one, which it then fills through the
+ * style sheet's own interface, and one for maps. After a change of version the browser's console names the new ones.
+ */
+const plotlyStyles = [
+  "'sha256-47DEQpj8HBSa+/TImW+5JCeuQeRkm5NMpJWZG3hSuFU='",
+  "'sha256-2GF9hCGTDj/GGFNlQA54jDdMGl2fvoeZmZjAvBSiAtM='",
+];
 
 /** The token of this answer by which the page's own style elements, such as the editor's, pass the policy. */
 export const nonceOf = (res: Response): string => (res.locals as { nonce: string }).nonce;
@@ -23,7 +29,7 @@ export function securityHeaders({ isHttps }: { isHttps: boolean }): RequestHandl
       directives: {
         "default-src": ["'self'"],
         "script-src": ["'self'"],
-        "style-src": ["'self'", emptyStyle, (_req, res) => `'nonce-${nonceOf(res as Response)}'`],
+        "style-src": ["'self'", ...plotlyStyles, (_req, res) => `'nonce-${nonceOf(res as Response)}'`],
         "style-src-attr": ["'unsafe-inline'"],
         "img-src": ["'self'", "data:", "blob:"],
         "font-src": ["'self'"],

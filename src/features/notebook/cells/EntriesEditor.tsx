@@ -3,6 +3,7 @@ import { Prec } from "@codemirror/state";
 import CodeMirror, { type BasicSetupOptions } from "@uiw/react-codemirror";
 import { useCallback, useEffect, useMemo, useState } from "react";
 import type { Note, Understood } from "../../../../shared/notebook/result";
+import { pageNonce } from "../../../lib/pageNonce";
 import { entryCompletion, type CompletionSurroundings } from "../editor/entryCompletion";
 import { entryLanguage } from "../editor/entryLanguage";
 import { entryLayout } from "../editor/entryLayout";
@@ -62,6 +63,7 @@ export function EntriesEditor({
   const extensions = useMemo(
     () => [
       entryLanguage,
+      EditorView.cspNonce.of(pageNonce),
       EditorView.lineWrapping,
       entryLayout,
       entryNames,

@@ -3,6 +3,7 @@ import { Prec } from "@codemirror/state";
 import CodeMirror, { type BasicSetupOptions } from "@uiw/react-codemirror";
 import { useCallback, useMemo, useState } from "react";
 import type { Cell } from "../../../../shared/notebook/document";
+import { pageNonce } from "../../../lib/pageNonce";
 import { TextButton } from "../../../ui/TextButton";
 import { MoveHandle } from "./CellHead";
 import { ProseText } from "./ProseText";
@@ -42,6 +43,7 @@ export function ProseCell({ cell, isEditable, isNew, commands, onDragStart }: Pr
   const { id } = cell;
   const extensions = useMemo(
     () => [
+      EditorView.cspNonce.of(pageNonce),
       EditorView.lineWrapping,
       EditorView.contentAttributes.of({
         "aria-label": "Prose, in Markdown",
