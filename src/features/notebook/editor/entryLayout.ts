@@ -1,5 +1,5 @@
 import { syntaxTree } from "@codemirror/language";
-import { Prec, RangeSetBuilder, type EditorState, type Extension } from "@codemirror/state";
+import { Prec, type EditorState, type Extension, type Range } from "@codemirror/state";
 import { Decoration, EditorView, ViewPlugin, type DecorationSet, type ViewUpdate } from "@codemirror/view";
 
 interface EntryStart {
@@ -14,22 +14,25 @@ const longest = 60_000;
 const widestName = 32;
 
 const equalsSign = Decoration.mark({ class: "entry-equals" });
+const remarkGap = Decoration.mark({ class: "entry-gap" });
 
 /**
- * Names padded to the longest in the cell, so that the signs stand in line, and a hanging indent for what runs over
- * the line. Only looks change; the text stays as it was typed.
+ * Names padded to the longest in the cell, so that the signs stand in line, a hanging indent for what runs over the
+ * line, and one space before a remark on lines that are not being written. Only looks change; the text stays as it was
+ * typed.
  */
 const plugin = ViewPlugin.fromClass(
   class {
     decorations: DecorationSet;
 
     constructor(view: EditorView) {
-      this.decorations = layOut(view.state);
+      this.decorations = layOut(view);
     }
 
     update(update: ViewUpdate): void {
-      if (update.docChanged || syntaxTree(update.startState) !== syntaxTree(update.state)) {
-        this.decorations = layOut(update.state);
+      const isReread = syntaxTree(update.startState) !== syntaxTree(update.state);
+      if (update.docChanged || isReread || update.selectionSet || update.focusChanged) {
+        this.decorations = layOut(update.view);
       }
     }
   },
@@ -39,30 +42,28 @@ const plugin = ViewPlugin.fromClass(
 /** Lowest, so that a name stays one piece with the marks inside it. */
 export const entryLayout: Extension = Prec.lowest(plugin);
 
-function layOut(state: EditorState): DecorationSet {
-  const starts = state.doc.length > longest ? [] : entryStarts(state);
+function layOut(view: EditorView): DecorationSet {
+  const { state } = view;
+  if (state.doc.length > longest) return Decoration.none;
+  const starts = entryStarts(state);
   const widths = starts
     .map(({ lineFrom, equals }) => equals - lineFrom)
     .filter((width) => width <= widestName);
   const column = Math.max(1, ...widths);
-  const line = Decoration.line({
-    attributes: { style: `--hang:${column + 2}ch` },
-    class: "entry-line",
-  });
+  const line = Decoration.line({ attributes: { style: `--hang:${column + 2}ch` }, class: "entry-line" });
   const name = Decoration.mark({ attributes: { style: `min-width:${column}ch` }, class: "entry-name" });
-  const builder = new RangeSetBuilder<Decoration>();
+
+  const marks: Range<Decoration>[] = remarkGaps(state, view.hasFocus);
   for (const { lineFrom, equals } of starts) {
-    builder.add(lineFrom, lineFrom, line);
-    if (equals > lineFrom) builder.add(lineFrom, equals, name);
-    builder.add(equals, equals + 1, equalsSign);
+    marks.push(line.range(lineFrom), equalsSign.range(equals, equals + 1));
+    if (equals > lineFrom) marks.push(name.range(lineFrom, equals));
   }
-  return builder.finish();
+  return Decoration.set(marks, true);
 }
 
 function entryStarts(state: EditorState): EntryStart[] {
   const starts: EntryStart[] = [];
-  for (let node = syntaxTree(state).topNode.firstChild; node; node = node.nextSibling) {
-    if (node.name !== "Entry") continue;
+  for (const node of syntaxTree(state).topNode.getChildren("Entry")) {
     const key = node.getChild("Key");
     if (!key) continue;
     const { from: lineFrom, to: lineTo } = state.doc.lineAt(key.from);
@@ -71,4 +72,22 @@ function entryStarts(state: EditorState): EntryStart[] {
     starts.push({ lineFrom, equals: key.to + equals });
   }
   return starts;
+}
+
+/** Spaces before remarks beyond the last one, which the value as understood has pushed out of any order. */
+function remarkGaps(state: EditorState, isWritten: boolean): Range<Decoration>[] {
+  const gaps: Range<Decoration>[] = [];
+  const activeLine = isWritten ? state.doc.lineAt(state.selection.main.head).number : -1;
+  syntaxTree(state).iterate({
+    enter(node) {
+      if (node.name !== "Remark") return;
+      const line = state.doc.lineAt(node.from);
+      const written = state.sliceDoc(line.from, node.from);
+      const end = line.from + written.trimEnd().length;
+      if (end > line.from && node.from - end > 1 && line.number !== activeLine) {
+        gaps.push(remarkGap.range(end, node.from - 1));
+      }
+    },
+  });
+  return gaps;
 }
