@@ -3,8 +3,10 @@ import { plainText, type RichText } from "./richText";
 
 export type UnitSystem = NotebookDocument["unitSystem"];
 
-/** Narrow no-break space: in thousands, before units, round the × of a power. */
+/** Narrow no-break space: in thousands and round the × of a power. */
 export const thinSpace = "\u202f";
+/** Before a unit and between its factors, where the narrow one would run "m s" together into "ms". */
+export const unitSpace = "\u00a0";
 const minus = "\u2212";
 
 const trueMinus = (text: string): string => text.replace(/-/g, minus);
@@ -59,7 +61,7 @@ export function formatUnit(unit: string): RichText {
   const pieces: (string | { sup: string })[] = [];
   for (const [index, factor] of unit.split(" ").entries()) {
     const [symbol = "", exponent] = factor.split("^");
-    pieces.push(index === 0 ? symbol : `${thinSpace}${symbol}`);
+    pieces.push(index === 0 ? symbol : `${unitSpace}${symbol}`);
     if (exponent) pieces.push({ sup: trueMinus(exponent) });
   }
   return pieces;
@@ -152,9 +154,9 @@ export function formatQuantity(
   };
 }
 
-/** Number, thin space, unit. */
+/** Number, space, unit. */
 export function quantityRich(quantity: FormattedQuantity): RichText {
-  return quantity.unit.length > 0 ? [...quantity.number, thinSpace, ...quantity.unit] : quantity.number;
+  return quantity.unit.length > 0 ? [...quantity.number, unitSpace, ...quantity.unit] : quantity.number;
 }
 
 export function quantityText(quantity: FormattedQuantity): string {

@@ -1,6 +1,6 @@
 import { useMemo } from "react";
 import type { Strip } from "../../../shared/notebook/summary";
-import { formatFixed, formatKilometres, formatQuantity, quantityText, thinSpace } from "../../lib/format";
+import { formatFixed, formatKilometres, formatQuantity, quantityText, unitSpace } from "../../lib/format";
 import { gasStyles } from "../../lib/gasStyle";
 import { Rich } from "../../lib/Rich";
 import { densityCurves, interpolateProfile } from "./columnCurves";
@@ -49,7 +49,7 @@ export function DensityFigure({ profiles, strip, unitSystem, number, caption }: 
     return formatQuantity({ value, unit: "m^-3" }, unitSystem, { digits: 2 });
   };
   const temperatureAt = (altitude: number) =>
-    `${formatFixed(interpolateProfile(profiles.altitude!, profiles.temperature!, altitude, false))}${thinSpace}K`;
+    `${formatFixed(interpolateProfile(profiles.altitude!, profiles.temperature!, altitude, false))}${unitSpace}K`;
   const rows = (altitude: number) => [
     { key: "T", symbol: "T", value: temperatureAt(altitude) },
     ...strip.gases.flatMap((gas) => {
@@ -61,7 +61,7 @@ export function DensityFigure({ profiles, strip, unitSystem, number, caption }: 
           <Rich text={name} />
         </b>
       );
-      return [{ key: gas, symbol, value: <Rich text={[...density.number, thinSpace, ...density.unit]} /> }];
+      return [{ key: gas, symbol, value: <Rich text={[...density.number, unitSpace, ...density.unit]} /> }];
     }),
   ];
   const spoken = (altitude: number) =>

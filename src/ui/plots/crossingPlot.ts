@@ -49,7 +49,7 @@ export function crossingPlot({ profiles, strip, room, inks, zoom }: CrossingPlot
   const scale = panelScale(room, decades, altitudes);
   const { sans, serif } = figureFonts();
   const km = rows.map((row) => altitude[row]! / 1000);
-  const lettering = exobaseNotes(strip, room, inks, scale);
+  const lettering = exobaseNotes(strip, room, inks, scale, "left");
   const places = placeNames(
     lengths.map(({ key, words }) => ({
       key,

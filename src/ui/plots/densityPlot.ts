@@ -138,7 +138,7 @@ export function densityPlot(input: DensityPlotInput): DensityPlot {
   const scale = panelScale(room, decades, altitudes);
   const { sans } = figureFonts();
   const panels: ("x" | "x2")[] = room.second > 0 ? ["x", "x2"] : ["x"];
-  const lettering = exobaseNotes(strip, room, inks, scale);
+  const lettering = exobaseNotes(strip, room, inks, scale, "right");
   const homopauseBoxes = strip.homopauses.map(({ altitude }): Box => {
     const y = scale.y(altitude / 1000);
     return { left: 0, right: 16, top: y - 2, bottom: y + 2 };

@@ -1,6 +1,6 @@
 import type { Annotation } from "plotly.js";
 import type { Strip } from "../../../shared/notebook/summary";
-import { formatKilometres, thinSpace } from "../../lib/format";
+import { formatKilometres, unitSpace } from "../../lib/format";
 import { figureFonts, note } from "./figureLayout";
 import type { FigureRoom } from "./figureRoom";
 import type { Box } from "./placeNames";
@@ -18,34 +18,44 @@ export function panelScale(room: FigureRoom, decades: [number, number], altitude
 
 export type PanelScale = ReturnType<typeof panelScale>;
 
-/** Lettering of exobase and Knudsen band at the right end of the panel, with the room it takes. */
-export function exobaseNotes(strip: Strip, room: FigureRoom, inks: FigureInks, scale: PanelScale) {
+/** Lettering of exobase and Knudsen band at one end of the panel, with the room it takes. */
+export function exobaseNotes(
+  strip: Strip,
+  room: FigureRoom,
+  inks: FigureInks,
+  scale: PanelScale,
+  side: "left" | "right",
+) {
   const { sans, serif } = figureFonts();
   const notes: Partial<Annotation>[] = [];
   const boxes: Box[] = [];
-  const add = (km: number | null, text: string, width: number, lift: number, size: number, color: string) => {
-    if (km === null) return;
-    const y = scale.y(km) - lift;
+  const [x, xshift] = side === "left" ? [0, 6] : [1, -2];
+  const add = (
+    altitude: number | null,
+    text: string,
+    width: number,
+    lift: number,
+    font: [number, string],
+  ) => {
+    if (altitude === null) return;
+    const y = scale.y(altitude / 1000) - lift;
     if (y < 6 || y > room.tall - 6) return;
-    const place = {
-      x: 1,
-      y: km,
-      xref: "x domain" as const,
-      xanchor: "right" as const,
-      yanchor: "middle" as const,
-    };
-    notes.push(note(text, { ...place, xshift: -2, yshift: lift }, { family: sans, size, color }));
-    boxes.push({ left: room.panel - width, right: room.panel, top: y - 9, bottom: y + 9 });
+    const place = { x, y: altitude / 1000, xref: "x domain", xanchor: side, yanchor: "middle" } as const;
+    notes.push(
+      note(text, { ...place, xshift, yshift: lift }, { family: sans, size: font[0], color: font[1] }),
+    );
+    const left = side === "left" ? 0 : room.panel - width;
+    boxes.push({ left, right: left + width, top: y - 9, bottom: y + 9 });
   };
-  const inKm = (metres: number | null) => (metres === null ? null : metres / 1000);
   if (strip.exobase !== null) {
     const symbol = `<span style="font-family:${serif.replace(/"/g, "'")};font-style:italic;font-size:13.5px">l = H</span>`;
-    const text = `<span style="font-weight:600">exobase</span> ${formatKilometres(strip.exobase)}${thinSpace}km, ${symbol}`;
-    add(inKm(strip.exobase), text, 136, 10, 12.5, inks.ink!);
+    const text = `<span style="font-weight:600">exobase</span> ${formatKilometres(strip.exobase)}${unitSpace}km, ${symbol}`;
+    add(strip.exobase, text, 140, 10, [12.5, inks.ink!]);
   }
-  const isClear = (metres: number | null) =>
-    metres !== null && Math.abs(scale.y(metres / 1000) - (scale.y((strip.exobase ?? 0) / 1000) - 10)) > 17;
-  if (isClear(strip.upper)) add(inKm(strip.upper), "Kn 10", 44, 0, 12, inks.ink2!);
-  if (isClear(strip.lower)) add(inKm(strip.lower), "Kn 0.1", 44, 0, 12, inks.ink2!);
+  const exobaseY = scale.y((strip.exobase ?? 0) / 1000) - 10;
+  const isClear = (altitude: number | null) =>
+    altitude !== null && Math.abs(scale.y(altitude / 1000) - exobaseY) > 17;
+  if (isClear(strip.upper)) add(strip.upper, "Kn 10", 44, 0, [12, inks.ink2!]);
+  if (isClear(strip.lower)) add(strip.lower, "Kn 0.1", 44, 0, [12, inks.ink2!]);
   return { notes, boxes };
 }

@@ -1,5 +1,5 @@
 import { useMemo } from "react";
-import { formatKilometres, thinSpace } from "../../lib/format";
+import { formatKilometres, unitSpace } from "../../lib/format";
 import { useElementSize } from "../../lib/useElementSize";
 import "./strip.css";
 import { StripBand } from "./StripBand";
@@ -12,11 +12,17 @@ const lettering = 48;
 const widest = { apart: 193, band: 104, height: 266 };
 const narrowest = { apart: 138, band: 76, height: 192 };
 
-/** One scale for all: from the ground to a fifth above the highest exobase. */
+/** An exobase this many times the middle one would press all others flat. */
+const outlier = 6;
+
+/** One scale for all: from the ground to a fifth above the highest exobase that leaves the others legible. */
 function shelfScale(bodies: readonly ShelfBody[], length: number): StripScale {
-  const exobases = bodies.flatMap(({ strip }) => strip.exobase ?? []);
+  const exobases = bodies.flatMap(({ strip }) => strip.exobase ?? []).sort((a, b) => a - b);
+  const middle = exobases[Math.floor((exobases.length - 1) / 2)];
   const highest =
-    exobases.length > 0 ? Math.max(...exobases) : Math.max(...bodies.map(({ strip }) => strip.top));
+    middle === undefined
+      ? Math.max(...bodies.map(({ strip }) => strip.top))
+      : Math.max(...exobases.filter((exobase) => exobase <= outlier * middle));
   return stripScale(0, highest * 1.2, length);
 }
 
@@ -46,22 +52,21 @@ function ShelfBand({ body: { body, note, strip }, scale, breadth, apart }: Shelf
     <>
       <StripBand strip={strip} scale={scale} breadth={breadth} direction="standing" closest={4} dot={1.3} />
       <path className="strip-below" d={airBelow(y(strip.base), scale.length, breadth)} />
-      {strip.exobase === null ? (
+      {strip.exobase === null || strip.exobase > scale.high ? (
         <>
           <path className="strip-unbound" d={`M${breadth + 4} 8l5-6l5 6`} />
           <text className="strip-label strip-strong strip-halo" x={beside} y="23">
-            no exobase
+            {strip.exobase === null ? "no exobase" : altitudeText(strip.exobase)}
           </text>
           <text className="strip-halo" x={beside} y="39">
-            the gas runs on
+            {strip.exobase === null ? "the gas runs on" : "above this scale"}
           </text>
         </>
       ) : (
         <>
           <path className="strip-exobase" d={`M0 ${y(strip.exobase).toFixed(1)}H${breadth + 8}`} />
           <text className="strip-label" x={breadth + 12} y={(y(strip.exobase) + 4).toFixed(1)}>
-            {formatKilometres(strip.exobase)}
-            {thinSpace}km
+            {altitudeText(strip.exobase)}
           </text>
         </>
       )}
@@ -73,17 +78,20 @@ function ShelfBand({ body: { body, note, strip }, scale, breadth, apart }: Shelf
   );
 }
 
+const altitudeText = (altitude: number): string => `${formatKilometres(altitude)}${unitSpace}km`;
+
 const bodySentence = ({ body, strip }: ShelfBody): string =>
   strip.exobase === null
     ? `${body}: no exobase, the gas runs on`
-    : `${body}: exobase at ${formatKilometres(strip.exobase)} km`;
+    : `${body}: exobase at ${altitudeText(strip.exobase)}`;
 
 /** All bodies side by side on one scale; where they do not fit, the shelf is drawn past by hand or by key. */
 export function StripShelf({ bodies }: StripShelfProps) {
   const { ref, size } = useElementSize<HTMLDivElement>({ width: 1244, height: 320 });
   const fits = (size.width - axisRoom) / bodies.length >= narrowest.apart * 1.15;
-  const { band: breadth, height } = fits ? widest : narrowest;
+  const { height } = fits ? widest : narrowest;
   const apart = fits ? Math.min(widest.apart, (size.width - axisRoom) / bodies.length) : narrowest.apart;
+  const breadth = fits ? Math.min(widest.band, apart - 74) : narrowest.band;
   const scale = useMemo(() => shelfScale(bodies, height), [bodies, height]);
   const ticks = useMemo(() => stripTicks(scale, 56), [scale]);
   if (bodies.length === 0) return null;

@@ -6,13 +6,13 @@ import {
   formatPercent,
   formatQuantity,
   quantityText,
-  thinSpace,
+  unitSpace,
   type UnitSystem,
 } from "../../lib/format";
 import { plainText } from "../../lib/richText";
 import { leadingGas, sampleStrip } from "./stripSample";
 
-const altitudeText = (metres: number): string => `${formatKilometres(metres)}${thinSpace}km`;
+const altitudeText = (metres: number): string => `${formatKilometres(metres)}${unitSpace}km`;
 
 /** The strip in one line, for those who do not see it. */
 export function stripLabel(strip: Strip): string {
@@ -31,7 +31,7 @@ export function stripSentences(strip: Strip): string[] {
     marks.push([strip.lower, `The Knudsen number is 0.1 at ${altitudeText(strip.lower)}.`]);
   if (strip.exobase !== null) {
     const { temperature } = sampleStrip(strip, strip.exobase);
-    const warmth = `${formatFixed(temperature)}${thinSpace}K`;
+    const warmth = `${formatFixed(temperature)}${unitSpace}K`;
     marks.push([strip.exobase, `The exobase is at ${altitudeText(strip.exobase)}, where it is ${warmth}.`]);
   }
   if (strip.upper !== null)
@@ -62,7 +62,7 @@ export function readStrip(strip: Strip, altitude: number, unitSystem: UnitSystem
   const knudsen = formatNumber(10 ** sample.log10Knudsen, 2);
   const reading = {
     altitude: altitudeText(altitude),
-    temperature: `${formatFixed(sample.temperature)}${thinSpace}K`,
+    temperature: `${formatFixed(sample.temperature)}${unitSpace}K`,
     density,
     gas: strip.gases[leader] ?? "",
     share: plainText(formatPercent(sample.moleFractions[leader] ?? 0)),

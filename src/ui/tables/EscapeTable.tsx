@@ -1,5 +1,5 @@
 import type { CellResult } from "../../../shared/notebook/result";
-import { formatKilometres, formatFixed, formatQuantity, quantityRich, thinSpace } from "../../lib/format";
+import { formatKilometres, formatFixed, formatQuantity, quantityRich, unitSpace } from "../../lib/format";
 import { gasStyle } from "../../lib/gasStyle";
 import { Rich } from "../../lib/Rich";
 import { useElementSize } from "../../lib/useElementSize";
@@ -46,8 +46,8 @@ function OwnCaption({ result, unitSystem }: Pick<EscapeTableProps, "result" | "u
         <>
           {" "}
           Exobase at {formatKilometres(altitude)}
-          {thinSpace}km, where <i>T</i> = {formatFixed(temperature)}
-          {thinSpace}K and <i>v</i>
+          {unitSpace}km, where <i>T</i> = {formatFixed(temperature)}
+          {unitSpace}K and <i>v</i>
           <sub>esc</sub> ={" "}
           <Rich text={quantityRich(formatQuantity({ value: speed, unit: "m s^-1" }, unitSystem))} />.
         </>

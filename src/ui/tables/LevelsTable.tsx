@@ -1,11 +1,5 @@
 import type { ResultRow } from "../../../shared/notebook/result";
-import {
-  displayScale,
-  formatKilometres,
-  formatMagnitude,
-  formatUnit,
-  type UnitSystem,
-} from "../../lib/format";
+import { displayScale, formatKilometres, formatNumber, formatUnit, type UnitSystem } from "../../lib/format";
 import { gasStyle } from "../../lib/gasStyle";
 import { Rich } from "../../lib/Rich";
 import type { RichText } from "../../lib/richText";
@@ -113,9 +107,7 @@ export function LevelsTable({ result, gases, unitSystem, number, caption }: Leve
                 const value = numberOf(row[key]);
                 return (
                   <td key={key} title={value === null ? undefined : `${value} ${unit}`.replace(/ 1$/, "")}>
-                    <Rich
-                      text={formatMagnitude(value === null ? null : value * scales.get(key)!.factor, null)}
-                    />
+                    <Rich text={value === null ? ["–"] : formatNumber(value * scales.get(key)!.factor)} />
                   </td>
                 );
               })}

@@ -1,4 +1,5 @@
-import { useId, useState, type PropsWithChildren, type ReactNode } from "react";
+import { useId, useLayoutEffect, useState, type PropsWithChildren, type ReactNode } from "react";
+import { useElementSize } from "../../lib/useElementSize";
 import "./tables.css";
 
 interface TableFrameProps {
@@ -37,10 +38,31 @@ export function TableFrame({ number, caption, text, notes, children }: PropsWith
       <p className="table-said" role="status">
         {copied}
       </p>
-      <div className="table-scroll">{children}</div>
+      <ScrollBox label={`Table ${number}`}>{children}</ScrollBox>
       {notes}
       <AllDigits text={text} />
     </section>
+  );
+}
+
+/** A table wider than its page can be drawn past, by hand or, then, by key. */
+function ScrollBox({ label, children }: PropsWithChildren<{ label: string }>) {
+  const { ref, size } = useElementSize<HTMLDivElement>({ width: 736, height: 200 });
+  const [isWide, setIsWide] = useState(false);
+  useLayoutEffect(() => {
+    const box = ref.current;
+    setIsWide(box !== null && box.scrollWidth > box.clientWidth + 1);
+  }, [ref, size, children]);
+  return (
+    <div
+      ref={ref}
+      className="table-scroll"
+      role={isWide ? "region" : undefined}
+      aria-label={isWide ? label : undefined}
+      tabIndex={isWide ? 0 : undefined}
+    >
+      {children}
+    </div>
   );
 }
 

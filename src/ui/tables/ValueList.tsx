@@ -4,7 +4,7 @@ import {
   formatQuantity,
   quantityRich,
   resultScale,
-  thinSpace,
+  unitSpace,
   type UnitSystem,
 } from "../../lib/format";
 import { Rich } from "../../lib/Rich";
@@ -19,7 +19,7 @@ function shownValue(result: CellResult, name: string, unitSystem: UnitSystem): R
   if (typeof value === "string") return [value.replace(/_/g, " ")];
   const radius = result.values.radius?.value;
   if (name === "hill_radius" && typeof radius === "number" && value !== null)
-    return [...formatNumber(value / radius), `${thinSpace}radii`];
+    return [...formatNumber(value / radius), `${unitSpace}radii`];
   const twin = result.values[name.replace(/([^.]+)$/, "log10_$1")]?.value;
   const log10 = typeof twin === "number" ? twin : null;
   const scale = resultScale(name, unit, unitSystem, value ?? 0);
