@@ -16,7 +16,7 @@ import {
 import { logarithm } from "../numerics/elementary";
 import { findRoot } from "../numerics/findRoot";
 import { growthAfter, rememberStep, shrinkAfter, type StepMemory } from "../numerics/stepControl";
-import { emptyPath, makeRoom, type ColumnPath } from "./columnPath";
+import { emptyPath, makeRoom, nodeState, type ColumnPath } from "./columnPath";
 import { altitudeOf, type ColumnProblem } from "./columnProblem";
 import { bindColumn, columnSlope, type BaseFluxes } from "./columnSlope";
 import { fractions, setComposition } from "./composition";
@@ -100,32 +100,18 @@ export function heightOfMarch({ path }: ColumnMarch): number {
  * @throws  PhysicsDomainError if the column cannot be passed in 20,000 steps
  */
 export function advance(march: ColumnMarch, limit: number): void {
-  const { path, tolerance, direction, memory } = march;
+  const { path, direction, memory } = march;
   const { problem } = path;
-  const size = problem.masses.length;
   const position = heightOfMarch(march);
   refuseEndlessMarch(march);
   makeRoom(path);
-  for (let i = 0; i < size; i += 1) {
-    start[i] = path.states[path.steps * size + i];
-    k1[i] = march.slope[i];
-  }
+  nodeState(path, path.steps, start);
+  k1.set(march.slope);
   bindColumn(problem, path.fluxes, march.law);
 
   const stop = nextStop(problem, march.law, direction, limit);
   const room = direction * (stop - position);
-  let proposed = Math.min(march.step, stepCap(size, direction));
-  let step = 0;
-  let error = NaN;
-  let hasRejected = false;
-  for (;;) {
-    step = room <= stretch * proposed ? room : proposed;
-    error = takeStep(columnSlope, size, position, direction * step) / tolerance;
-    if (error <= 1) break;
-    hasRejected = true;
-    proposed = step * shrinkAfter(error);
-    if (position + direction * proposed === position) refuseImpassable(problem, position);
-  }
+  const { step, error, hasRejected } = takeAcceptableStep(march, position, room);
   const growth = growthAfter(step, error, memory);
   const nextStep = step * (hasRejected ? Math.min(1, growth) : growth);
 
@@ -141,10 +127,31 @@ export function advance(march: ColumnMarch, limit: number): void {
   }
   // A step cut short says little about the next, which may be as long as this one was to be.
   march.step = hasRejected ? nextStep : Math.max(nextStep, march.step);
-  const law = lawBeyond(problem, march.law, direction, heightOfMarch(march), ceiling !== null);
+  putOnLaw(march, lawBeyond(problem, march.law, direction, heightOfMarch(march), ceiling !== null));
+}
+
+/** Shortens the step until its error is within the tolerance. */
+function takeAcceptableStep(
+  { path, tolerance, direction, step: wished }: ColumnMarch,
+  position: number,
+  room: number,
+) {
+  const size = path.problem.masses.length;
+  let proposed = Math.min(wished, stepCap(size, direction));
+  for (let rejections = 0; ; rejections += 1) {
+    const step = room <= stretch * proposed ? room : proposed;
+    const error = takeStep(columnSlope, size, position, direction * step) / tolerance;
+    if (error <= 1) return { step, error, hasRejected: rejections > 0 };
+    proposed = step * shrinkAfter(error);
+    if (position + direction * proposed === position) refuseImpassable(path.problem, position);
+  }
+}
+
+/** Goes on under another law, with the slope evaluated anew. */
+function putOnLaw(march: ColumnMarch, law: StepLaw): void {
   if (law === march.law) return;
   march.law = law;
-  bindColumn(problem, path.fluxes, law);
+  bindColumn(march.path.problem, march.path.fluxes, law);
   columnSlope(heightOfMarch(march), end, march.slope);
 }
 

@@ -3,41 +3,11 @@ import { describe, expect, it } from "vitest";
 import { diffusionCoefficient } from "../../../../shared/physics/column/diffusionCoefficient";
 import { solveColumn } from "../../../../shared/physics/column/solveColumn";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
-import type { Column, ColumnInput } from "../../../../shared/physics/types";
+import type { ColumnInput } from "../../../../shared/physics/types";
 import "../../../toBeCloseToRelative";
+import { numbersOf, verdictOf } from "./columnAnswers";
 import { randomColumn } from "./randomColumn";
 import { altitudesBetween, sampleColumn } from "./sampleColumns";
-
-/** Every number that a column answers with. */
-function numbersOf(column: Column): number[] {
-  const { exobase, topAltitude, input } = column;
-  const numbers = [topAltitude];
-  if (exobase.found) {
-    const { level, lower, upper, otherAltitudes } = exobase;
-    numbers.push(
-      level.altitude,
-      level.temperature,
-      level.numberDensity,
-      level.scaleHeight,
-      ...otherAltitudes,
-    );
-    numbers.push(...level.numberDensities, lower ?? 0, upper ?? 0);
-  } else numbers.push(exobase.largestKnudsen, exobase.altitudeOfLargest);
-  for (const homopause of column.homopauses) numbers.push(homopause.found ? homopause.altitude : 0);
-  for (const altitude of altitudesBetween(input.baseAltitude, topAltitude, 7)) {
-    const level = column.levelAt(altitude);
-    numbers.push(
-      level.pressure,
-      level.meanMass,
-      level.knudsen,
-      level.eddyCoefficient,
-      ...level.numberDensities,
-    );
-  }
-  return numbers;
-}
-
-const verdict = (column: Column) => (column.exobase.found ? "found" : column.exobase.reason);
 
 describe("solveColumn on random planets", { timeout: 60_000 }, () => {
   const seeds = Array.from({ length: 200 }, (_, k) => 20_000 + k);
@@ -48,7 +18,7 @@ describe("solveColumn on random planets", { timeout: 60_000 }, () => {
       const column = solveColumn(randomColumn(seed));
       const odd = numbersOf(column).find((value) => !Number.isFinite(value));
       expect(odd, `seed ${seed}`).toBeUndefined();
-      verdicts.set(verdict(column), (verdicts.get(verdict(column)) ?? 0) + 1);
+      verdicts.set(verdictOf(column), (verdicts.get(verdictOf(column)) ?? 0) + 1);
     }
     expect([...verdicts.keys()].sort()).toEqual(["base_unbound", "found", "runaway", "top_below_exobase"]);
   });
@@ -57,7 +27,7 @@ describe("solveColumn on random planets", { timeout: 60_000 }, () => {
     for (const seed of seeds.slice(0, 100)) {
       const input = randomColumn(seed);
       const [column, finer] = [solveColumn(input), solveColumn(input, 5e-11)];
-      expect(verdict(finer), `seed ${seed}`).toBe(verdict(column));
+      expect(verdictOf(finer), `seed ${seed}`).toBe(verdictOf(column));
       const expected = numbersOf(finer);
       numbersOf(column).forEach((value, k) => {
         // A density that is itself next to nothing (below 1e-100) may move by more.
