@@ -95,6 +95,7 @@ export { lossHistory, type LossHistory } from "./loss/lossHistory";
 export { moleculesFromWaterLayer } from "./loss/moleculesFromWaterLayer";
 export { particlesFromSurfacePressure } from "./loss/particlesFromSurfacePressure";
 export { relativeXuv } from "./loss/relativeXuv";
+export { solarXuvAges } from "./loss/solarXuvAges";
 export { surfacePressureFromParticles } from "./loss/surfacePressureFromParticles";
 export { waterDensity, waterLayerFromMolecules, waterMass } from "./loss/waterLayerFromMolecules";
 export { waterPerParticle } from "./loss/waterPerParticle";
@@ -123,3 +124,14 @@ export {
   type Ionosphere,
   type RecombinationEscape,
 } from "./nonthermal/recombinationEscape";
+
+export type { Distribution, PhysicalBounds } from "./spread/distribution";
+export { histogram, type HistogramBin } from "./spread/histogram";
+export { normalProbability } from "./spread/normalProbability";
+export { normalQuantile } from "./spread/normalQuantile";
+export { rankCorrelation } from "./spread/rankCorrelation";
+export { sampleQuantile } from "./spread/sampleQuantile";
+export { scrambledSobol, type ScrambledSobol } from "./spread/scrambledSobol";
+export { largestSobolDimension } from "./spread/sobolDirections";
+export { truncatedDistribution, type TruncatedDistribution } from "./spread/truncatedDistribution";
+export { varianceShare, type VarianceShare } from "./spread/varianceShare";
