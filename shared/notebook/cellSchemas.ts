@@ -3,8 +3,11 @@ import type { CellKind } from "./document";
 import { bodySchema } from "./kinds/body";
 import type { CellSchema } from "./kinds/cellSchema";
 import { columnSchema } from "./kinds/column";
+import { coronaSchema } from "./kinds/corona";
 import { escapeSchema } from "./kinds/escape";
 import { gasSchema } from "./kinds/gas";
+import { lossSchema } from "./kinds/loss";
+import { nonthermalSchema } from "./kinds/nonthermal";
 import { proseSchema } from "./kinds/prose";
 import { valuesSchema } from "./kinds/values";
 
@@ -15,4 +18,7 @@ export const cellSchemas: Readonly<Record<CellKind, CellSchema>> = {
   gas: gasSchema,
   column: columnSchema,
   escape: escapeSchema,
+  corona: coronaSchema,
+  nonthermal: nonthermalSchema,
+  loss: lossSchema,
 };

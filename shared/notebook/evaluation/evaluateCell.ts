@@ -3,8 +3,11 @@ import type { Cell } from "../document";
 import { evaluateBody } from "./evaluateBody";
 import type { CellAnswer } from "./cellAnswer";
 import { evaluateColumn } from "./evaluateColumn";
+import { evaluateCorona } from "./evaluateCorona";
 import { evaluateEscape } from "./evaluateEscape";
 import { evaluateGas } from "./evaluateGas";
+import { evaluateLoss } from "./evaluateLoss";
+import { evaluateNonthermal } from "./evaluateNonthermal";
 import { evaluateValues } from "./evaluateValues";
 import { locateNotes } from "../language/locateNotes";
 import type { ParsedEntries } from "../language/syntax";
@@ -27,6 +30,9 @@ const evaluators: Readonly<Record<Cell["kind"], (cell: OpenCell) => CellAnswer>>
   gas: evaluateGas,
   column: evaluateColumn,
   escape: evaluateEscape,
+  corona: evaluateCorona,
+  nonthermal: evaluateNonthermal,
+  loss: evaluateLoss,
 };
 
 /** One cell in its surroundings. Never throws: what cannot be answered becomes a fault of the cell. */

@@ -1,11 +1,16 @@
-import { thermalEscape, type ColumnLevel, type GasEscape, type PhysicsNote } from "../../physics";
+import type { ColumnLevel, GasEscape, PhysicsNote } from "../../physics";
 import { checkName } from "./checkName";
 import { exobaseValues } from "./columnResults";
+import { crossoverValues, energyLimitValues, limitValues, windValues } from "./escapeLimits";
+import { boundValues, escapeFrom, gasValues, leavingGases, type Corrections } from "./escapeValues";
 import type { ColumnModel } from "./models";
-import { requireEntries, type OpenCell } from "./openCell";
+import { requireEntries, sayWhichCentresAct, type OpenCell } from "./openCell";
 import { readCellEntry, readEntry } from "./readEntries";
 import { measured } from "./resultValue";
+import { quantityKinds } from "../language/dimensions";
+import { formatQuantity } from "../language/formatQuantity";
 import { changeTo } from "../language/notes";
+import { readGasFactors } from "../language/readGasFactors";
 import { readGasNames } from "../language/readGasName";
 import type { CellResult } from "../result";
 import type { CellAnswer } from "./cellAnswer";
@@ -17,21 +22,44 @@ export function evaluateEscape(cell: OpenCell): CellAnswer {
   const isCouplingSaid = readCoupling(cell);
   const isCriterionKnown = readCriterion(cell);
   const gases = source ? readGases(cell, source) : undefined;
-  if (!source || !isCouplingSaid || !isCriterionKnown) return { gases: gases ?? [] };
+  const corrections = source ? readCorrections(cell, source) : undefined;
+  sayWhichCentresAct(cell);
+  if (!source || !isCouplingSaid || !isCriterionKnown || !corrections) return { gases: gases ?? [] };
 
   const { exobase } = source.column;
-  if (!exobase.found) {
-    cell.say("fault", `no_exobase_${exobase.reason}`, `No exobase. ${exobase.message}`, cell.entry("column"));
-    return { gases: gases ?? [] };
-  }
+  if (!exobase.found) return { gases: gases ?? [], values: valuesWithoutExobase(cell, source, exobase) };
   for (const note of exobase.notes) sayOf(cell, note);
   sayWhatBandLacks(cell, exobase);
-  const { values, notes } = escapeValues(source, exobase.level, gases ?? []);
-  for (const note of notes) sayOf(cell, note);
+  const { lower, upper, level } = exobase;
   return {
     gases: gases ?? [],
-    values: { ...exobaseValues(exobase.level, exobase.lower, exobase.upper), ...values },
+    values: {
+      ...exobaseValues(level, lower, upper),
+      ...escapeValues(cell, source, level, gases ?? [], corrections),
+    },
+    model: { kind: "escape", source, exobase: level },
   };
+}
+
+/** What can be said where no exobase exists: the fault, and the mass rates that need none. */
+function valuesWithoutExobase(
+  cell: OpenCell,
+  source: ColumnModel,
+  { reason, message }: { reason: string; message: string },
+): CellResult["values"] {
+  const isWind = reason === "runaway" || reason === "base_unbound";
+  const { column } = source;
+  const { temperature } = column.levelAt(column.topAltitude);
+  const winds = windValues(cell, source, temperature);
+  const wind = winds.wind_mass_rate?.value;
+  const shown = (value: number, kind: "temperature" | "massRate") =>
+    formatQuantity(value, quantityKinds[kind].dimension, { unitSystem: cell.unitSystem, digits: 3 });
+  const instead =
+    isWind && typeof wind === "number"
+      ? ` An isothermal wind from the base at ${shown(temperature, "temperature")} would carry ${shown(wind, "massRate")}.`
+      : "";
+  cell.say("fault", `no_exobase_${reason}`, `No exobase. ${message}${instead}`, cell.entry("column"));
+  return { ...(isWind ? { regime: { value: "wind" } } : {}), ...energyLimitValues(source), ...winds };
 }
 
 /** The convention changes every rate, so it is written out; what is not computed is not silently taken for what is. */
@@ -90,6 +118,14 @@ function readGases(cell: OpenCell, { column }: ColumnModel): string[] | undefine
   return all;
 }
 
+/** Factors on Jeans rates by formula; undefined if the list has a fault. */
+function readCorrections(cell: OpenCell, { column }: ColumnModel): Corrections | undefined {
+  if (!cell.entry("correction")) return {};
+  const all = column.input.gases.map(({ formula }) => formula);
+  const factors = readEntry(cell, "correction", (node) => readGasFactors(node, all, cell.surroundings));
+  return factors && Object.fromEntries(factors.map(({ formula, value }) => [formula, value.value]));
+}
+
 function sayOf(cell: OpenCell, { level, code, message }: PhysicsNote): void {
   cell.say(level, code, message, cell.entry("column"));
 }
@@ -112,46 +148,42 @@ function sayWhatBandLacks(
 }
 
 function escapeValues(
-  { column, body }: ColumnModel,
+  cell: OpenCell,
+  source: ColumnModel,
   level: ColumnLevel,
   gases: readonly string[],
-): { values: CellResult["values"]; notes: PhysicsNote[] } {
-  const all = column.input.gases;
-  const escape = thermalEscape({
-    gravitationalParameter: body.gravitationalParameter,
-    radius: level.radius,
-    temperature: level.temperature,
-    meanMass: level.meanMass,
-    hillRadius: body.hillRadius,
-    gases: gases.map((formula) => {
-      const index = all.findIndex((gas) => gas.formula === formula);
-      return { formula, mass: all[index].mass, logNumberDensity: level.logNumberDensities[index] };
-    }),
-  });
+  corrections: Corrections,
+): CellResult["values"] {
+  const escape = escapeFrom(source, level);
+  const leaving = leavingGases(escape, corrections);
+  for (const note of escape.notes) sayOf(cell, note);
   const values: CellResult["values"] = {
     "exobase.escape_speed": measured(escape.escapeSpeed, "m s^-1"),
     bulk_escape_parameter: measured(escape.bulkEscapeParameter, "1"),
     regime: { value: escape.regime },
   };
-  for (const gas of escape.gases) {
-    const index = all.findIndex(({ formula }) => formula === gas.formula);
-    Object.assign(values, gasValues(gas, level.numberDensities[index]));
+  const isWind = escape.regime === "wind";
+  const asked = gases.map((formula) => leaving.find((gas) => gas.formula === formula)!);
+  const limits = isWind ? {} : limitValues(cell, source, level, asked);
+  for (const { formula, index } of asked) {
+    const gas = escape.gases[index];
+    const density = level.numberDensities[index];
+    const factor = corrections[formula];
+    Object.assign(values, isWind ? boundValues(gas, density) : gasValues(gas, density, factor));
+    Object.assign(values, limits[formula]);
+    if (!isWind) sayOfGas(cell, gas, factor);
   }
-  return { values, notes: [...escape.notes, ...escape.gases.flatMap(({ notes }) => notes)] };
+  return {
+    ...values,
+    ...energyLimitValues(source),
+    ...(isWind ? {} : crossoverValues(cell, source, leaving)),
+    ...windValues(cell, source, level.temperature),
+  };
 }
 
-function gasValues(gas: GasEscape, numberDensity: number): CellResult["values"] {
-  const { formula } = gas;
-  return {
-    [`${formula}.number_density`]: measured(numberDensity === 0 ? null : numberDensity, "m^-3"),
-    [`${formula}.escape_parameter`]: measured(gas.escapeParameter, "1"),
-    [`${formula}.thermal_speed`]: measured(gas.thermalSpeed, "m s^-1"),
-    [`${formula}.effusion_velocity`]: measured(gas.effusionVelocity, "m s^-1"),
-    [`${formula}.log10_effusion_velocity`]: measured(gas.log10EffusionVelocity, "1"),
-    [`${formula}.jeans_flux`]: measured(gas.jeansFlux, "m^-2 s^-1"),
-    [`${formula}.log10_jeans_flux`]: measured(gas.log10JeansFlux, "1"),
-    [`${formula}.rate`]: measured(gas.rate, "s^-1"),
-    [`${formula}.log10_rate`]: measured(gas.log10Rate, "1"),
-    [`${formula}.mass_rate`]: measured(gas.massRate, "kg s^-1"),
-  };
+/** A gas whose departure from the Jeans rate is given is not told of published ones. */
+function sayOfGas(cell: OpenCell, { notes }: GasEscape, factor: number | undefined): void {
+  for (const note of notes) {
+    if (factor === undefined || note.code !== "jeans_correction_range") sayOf(cell, note);
+  }
 }

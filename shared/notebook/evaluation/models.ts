@@ -1,5 +1,5 @@
 /** What a cell hands to the cells below it, besides its values. Bare numbers are SI. */
-import type { Column, CollisionParameter, ColumnInput } from "../../physics";
+import type { Column, CollisionParameter, ColumnInput, ColumnLevel } from "../../physics";
 
 export interface BodyModel {
   kind: "body";
@@ -7,6 +7,8 @@ export interface BodyModel {
   radius: number;
   centrifugal: ColumnInput["centrifugal"];
   hillRadius: number | null;
+  /** null where flux or efficiency is not given, or where no tidal factor exists. */
+  energyLimitedMassRate: number | null;
 }
 
 /** What a gas cell states; null where the handbook goes on to hold. */
@@ -26,4 +28,11 @@ export interface ColumnModel {
   body: BodyModel;
 }
 
-export type CellModel = BodyModel | GasModel | ColumnModel;
+export interface EscapeModel {
+  kind: "escape";
+  source: ColumnModel;
+  /** The column's level at the exobase. */
+  exobase: ColumnLevel;
+}
+
+export type CellModel = BodyModel | GasModel | ColumnModel | EscapeModel;

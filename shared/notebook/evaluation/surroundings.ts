@@ -127,7 +127,7 @@ function resultOf(cell: CellAbove, name: string, path: string): Quantity | Unava
   if (typeof result.value === "string") return result.value;
   if (result.value === null) {
     return {
-      unavailable: `*${path}* is below 1e-300 and has no value; use *${twinOf(cell, name)}* instead.`,
+      unavailable: `*${path}* lies outside 1e-300 to 1e300 and has no value; use *${twinOf(cell, name)}* instead.`,
     };
   }
   return { value: result.value, dimension: dimensionOfUnit(result.unit ?? "1") };

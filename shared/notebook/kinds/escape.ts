@@ -47,5 +47,15 @@ export const escapeSchema: CellSchema = {
       default: { text: "gases of the column", meaning: "all of them" },
       example: "gases = H, H2, O",
     },
+    {
+      key: "correction",
+      needed: false,
+      form: "factors",
+      dimension: "number",
+      bounds: { above: 0 },
+      description: "Factor by which a gas leaves faster or slower than the Jeans rate.",
+      default: null,
+      example: "correction = H: 0.73 ± 0.03, He: 0.98",
+    },
   ],
 };

@@ -1,6 +1,7 @@
 /** What the grammar can't say by itself: where an entry ends, and which signs belong to a unit. */
 import { ContextTracker, ExternalTokenizer, type InputStream } from "@lezer/lr";
 import {
+  Charge,
   Close,
   Comma,
   Join,
@@ -107,4 +108,18 @@ export const unitSigns = new ExternalTokenizer((input) => {
   const isUnit = isReservedUnit(unitWordAt(input, at));
   if (isSlash) input.acceptToken(isUnit ? Per : Over, 1);
   else if (isUnit) input.acceptToken(Join, 1);
+});
+
+const plus = 43;
+const hash = 35;
+/** What may follow an ion: a comma, a closing bracket, a colon, a remark. */
+const endsItem = new Set([44, 41, 58, hash]);
+
+/** `O2+`: the plus sign stands right behind the name and joins it to nothing. */
+export const ionCharge = new ExternalTokenizer((input) => {
+  if (input.next !== plus || !isNameCharacter(input.peek(-1))) return;
+  let at = 1;
+  while (isSpace(input.peek(at))) at += 1;
+  const code = input.peek(at);
+  if (code < 0 || isLineEnd(code) || endsItem.has(code)) input.acceptToken(Charge, 1);
 });
