@@ -27,6 +27,9 @@ export const figureFonts = () => ({ sans: fontOf("--sans"), serif: fontOf("--ser
 
 type Axis = NonNullable<Layout["xaxis"]>;
 
+/** Under a finger a drag scrolls the page; drawing closer is for those who have a pointer. */
+const isTouched = (): boolean => "matchMedia" in window && window.matchMedia("(pointer: coarse)").matches;
+
 /** Axis ink 1, ticks outside .8, 7 px for major and 4 for minor ones; no grid, no frame. */
 export function axis(inks: FigureInks, title: string): Partial<Axis> {
   const { sans } = figureFonts();
@@ -45,6 +48,7 @@ export function axis(inks: FigureInks, title: string): Partial<Axis> {
     exponentformat: "power",
     separatethousands: true,
     automargin: false,
+    fixedrange: isTouched(),
   };
 }
 
@@ -129,5 +133,6 @@ export function baseLayout(room: FigureRoom): Partial<Layout> {
     separators: `.${thinSpace}`,
     showlegend: false,
     hovermode: false,
+    dragmode: isTouched() ? false : "zoom",
   };
 }
