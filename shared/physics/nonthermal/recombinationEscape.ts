@@ -2,8 +2,9 @@ import { PhysicsDomainError } from "../errors";
 import { requirePositive } from "../guards";
 import type { RecombiningIon } from "../handbook/recombination";
 import { exponential, logarithm } from "../numerics/elementary";
+import { freeEndedCubic } from "../numerics/freeEndedCubic";
 import { gaussLegendre } from "../numerics/gaussLegendre";
-import { cubicValue, monotoneCubic } from "../numerics/monotoneCubic";
+import { cubicValue } from "../numerics/monotoneCubic";
 import type { PhysicsNote } from "../types";
 import { escapingFragments, type FragmentYield } from "./escapingFragments";
 import { recombinationCoefficient } from "./recombinationCoefficient";
@@ -74,7 +75,7 @@ export function recombinationEscape({
   for (let i = 0; i < electrons.temperatures.length; i += 1) {
     requirePositive("electron temperature", electrons.temperatures[i]);
   }
-  const temperatureCurve = monotoneCubic(electrons.radii, electrons.temperatures);
+  const temperatureCurve = freeEndedCubic(electrons.radii, electrons.temperatures);
 
   const lowest = Math.max(ions.radii[0], electrons.radii[0]);
   const from = Math.max(exobaseRadius, lowest);
@@ -112,7 +113,7 @@ function logCurve(quantity: string, radii: ArrayLike<number>, densities: ArrayLi
     requirePositive(quantity, density);
     return logarithm(density);
   });
-  return monotoneCubic(radii, logs);
+  return freeEndedCubic(radii, logs);
 }
 
 /** The ends and every sampled radius between them, ascending. */
