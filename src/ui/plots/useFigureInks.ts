@@ -1,4 +1,5 @@
 import { useSyncExternalStore } from "react";
+import { askMedia } from "../../lib/askMedia";
 
 /** Colours as a figure needs them, resolved: it cannot read custom properties. */
 export type FigureInks = Record<string, string>;
@@ -13,8 +14,7 @@ function subscribeToTheme(onChange: () => void): () => void {
   };
   const observer = new MutationObserver(handle);
   observer.observe(document.documentElement, { attributes: true, attributeFilter: ["data-theme", "class"] });
-  // A document that is not shown, as in tests, has no media to ask.
-  const preference = "matchMedia" in window ? window.matchMedia("(prefers-color-scheme: dark)") : null;
+  const preference = askMedia("(prefers-color-scheme: dark)");
   preference?.addEventListener("change", handle);
   return () => {
     observer.disconnect();
