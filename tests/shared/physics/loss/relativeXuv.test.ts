@@ -38,6 +38,7 @@ describe("relativeXuv", () => {
 
   it("stays as it was before saturation ends, and beyond the ends of a table", () => {
     const saturated = relativeXuv(sun, 0.1 * gyr, gyr);
+    expect(saturated).toBeCloseToRelative(0.1 ** -1.23, 1e-13);
     for (const t of [0, 1e-9, 0.05, 0.0999]) expect(relativeXuv(sun, t * gyr, gyr)).toBe(saturated);
     expect(relativeXuv(table, 0, gyr)).toBeCloseToRelative(504 / 29.7, 1e-14);
     expect(relativeXuv(table, 12 * gyr, gyr)).toBeCloseToRelative(4.594 / 29.7, 1e-14);
