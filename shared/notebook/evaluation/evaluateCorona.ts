@@ -127,8 +127,8 @@ function tabulate(cell: OpenCell, place: CoronaPlace, levels: readonly number[])
   const entry = cell.entry("levels")!;
   const ranges = entry.node.type === "list" ? entry.node.items.map(({ range }) => range) : [entry.valueRange];
   return levels.flatMap((altitude, index) => {
-    const radius = bodyRadius + altitude;
-    if (radius >= corona.exobaseRadius) {
+    if (altitude >= exobaseAltitude) {
+      const radius = Math.max(bodyRadius + altitude, corona.exobaseRadius);
       const density = coronaDensity(corona, radius);
       const { numberDensity, ballistic, satellite, escaping } = density;
       return [

@@ -1,4 +1,5 @@
 import {
+  electronMass,
   elementaryCharge,
   escapingFragments,
   findGas,
@@ -80,9 +81,10 @@ function answerRecombination(
   ion: RecombiningIon,
   profiles: Profiles | undefined,
 ): Pick<CellAnswer, "values" | "tables"> {
+  const { source } = escape;
   const place = {
     ion,
-    gravitationalParameter: escape.source.body.gravitationalParameter,
+    gravitationalParameter: source.body.gravitationalParameter,
     exobaseRadius: escape.exobase.radius,
   };
   const { channels } = escapingFragments(place);
@@ -93,7 +95,8 @@ function answerRecombination(
 
   const ionosphere = ionosphereOf(cell, escape, profiles);
   if (!ionosphere) return { tables };
-  const { rate, notes } = recombinationEscape({ ...place, ionosphere });
+  const { rate, notes, from, to } = recombinationEscape({ ...place, ionosphere });
+  sayIfTemperatureEnds(cell, profiles.electron_temperature, { from, to, radius: source.body.radius });
   for (const { level, code, message } of notes) {
     if (code !== "branching_unknown") cell.say(level, code, message, cell.entry("ion_density"));
   }
@@ -110,7 +113,7 @@ function channelRow({ fragments, energy, branching, escaping }: ChannelAnswer): 
 }
 
 const electronvolts = (energy: number): string =>
-  `${formatPlainNumber(energy / elementaryCharge.value, 3)}${thinSpace}eV`;
+  `${formatPlainNumber(energy / elementaryCharge.value, 4)}${thinSpace}eV`;
 
 function sayWhatIsNeeded(cell: OpenCell, channels: readonly ChannelAnswer[]): void {
   const fragments = channels.flatMap((channel) => channel.fragments);
@@ -193,6 +196,22 @@ function sayWhereConstantsEnd(cell: OpenCell, profiles: Profiles, top: string): 
   cell.say("caution", "constant_to_top", message, cell.entry("ion_density"));
 }
 
+/** Beyond its points a temperature is constant. */
+function sayIfTemperatureEnds(
+  cell: OpenCell,
+  temperature: Samples,
+  { from, to, radius }: { from: number; to: number; radius: number },
+): void {
+  if (temperature.kind === "constant") return;
+  const { altitudes } = temperature;
+  const last = altitudes[altitudes.length - 1];
+  if (radius + altitudes[0] <= from && radius + last >= to) return;
+  const shown = (altitude: number) =>
+    formatQuantity(altitude, quantityKinds.length.dimension, { unitSystem: cell.unitSystem });
+  const message = `The electron temperature is given from ${shown(altitudes[0])} to ${shown(last)}; beyond, up to ${shown(to - radius)}, it is taken as constant.`;
+  cell.say("caution", "temperature_extrapolated", message, cell.entry("electron_temperature"));
+}
+
 function sayWithoutRecombination(cell: OpenCell, ion: string): void {
   const known = inWords(
     recombiningIons.map(({ formula }) => formula),
@@ -202,19 +221,20 @@ function sayWithoutRecombination(cell: OpenCell, ion: string): void {
   cell.say("remark", "no_recombination", message, cell.entry("ion"));
 }
 
-/** Of a singly charged ion born at rest in the wind; its mass is that of the neutral gas. */
+/** Of a singly charged ion born at rest in the wind. */
 function pickupValues(
   cell: OpenCell,
   ion: string,
   flowSpeed: number | undefined,
   magneticField: number | undefined,
 ): CellResult["values"] {
-  const mass = findGas(ion.replace(/\+$/, ""))?.mass;
+  const gas = findGas(ion.replace(/\+$/, ""));
   const field = cell.entry("magnetic_field");
   if (field && !cell.entry("flow_speed")) {
     cell.say("remark", "pickup_incomplete", "*magnetic_field* acts only together with *flow_speed*.", field);
   }
-  if (mass === undefined || flowSpeed === undefined) return {};
+  if (!gas || flowSpeed === undefined) return {};
+  const mass = gas.mass - electronMass.value;
   const charge = elementaryCharge.value;
   return {
     ...(magneticField === undefined

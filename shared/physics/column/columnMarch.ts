@@ -143,7 +143,7 @@ function takeAcceptableStep(
     const error = takeStep(columnSlope, size, position, direction * step) / tolerance;
     if (error <= 1) return { step, error, hasRejected: rejections > 0 };
     proposed = step * shrinkAfter(error);
-    if (position + direction * proposed === position) refuseImpassable(path.problem, position);
+    if (!(Math.abs(position + direction * proposed - position) > 0)) refuseImpassable(path.problem, position);
   }
 }
 

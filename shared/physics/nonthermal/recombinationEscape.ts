@@ -2,8 +2,9 @@ import { PhysicsDomainError } from "../errors";
 import { requirePositive } from "../guards";
 import type { RecombiningIon } from "../handbook/recombination";
 import { exponential, logarithm } from "../numerics/elementary";
+import { freeEndedCubic } from "../numerics/freeEndedCubic";
 import { gaussLegendre } from "../numerics/gaussLegendre";
-import { cubicValue, monotoneCubic } from "../numerics/monotoneCubic";
+import { cubicValue } from "../numerics/monotoneCubic";
 import type { PhysicsNote } from "../types";
 import { escapingFragments, type FragmentYield } from "./escapingFragments";
 import { recombinationCoefficient } from "./recombinationCoefficient";
@@ -77,7 +78,7 @@ export function recombinationEscape({
     requirePositive("electron temperature", electrons.temperatures[i]);
   }
   const temperatureRadii = electrons.temperatureRadii ?? electrons.radii;
-  const temperatureCurve = monotoneCubic(temperatureRadii, electrons.temperatures);
+  const temperatureCurve = freeEndedCubic(temperatureRadii, electrons.temperatures);
 
   const lowest = Math.max(ions.radii[0], electrons.radii[0]);
   const from = Math.max(exobaseRadius, lowest);
@@ -115,7 +116,7 @@ function logCurve(quantity: string, radii: ArrayLike<number>, densities: ArrayLi
     requirePositive(quantity, density);
     return logarithm(density);
   });
-  return monotoneCubic(radii, logs);
+  return freeEndedCubic(radii, logs);
 }
 
 /** The ends and every sampled radius between them, ascending. */

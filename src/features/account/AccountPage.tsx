@@ -44,11 +44,16 @@ export function AccountPage({ groups }: { groups: readonly GroupSummary[] }) {
             None yet. <Link to="/groups">Found one</Link>, or be added by the lead of another.
           </p>
         ) : (
-          groups.map((group) => (
-            <Line key={group.id} label={group.role}>
-              <Link to={`/groups/${group.id}`}>{group.name}</Link>
-            </Line>
-          ))
+          <>
+            {groups.map((group) => (
+              <Line key={group.id} label={group.role}>
+                <Link to={`/groups/${group.id}`}>{group.name}</Link>
+              </Line>
+            ))}
+            <p className="type-label">
+              <Link to="/groups">Found another</Link>
+            </p>
+          </>
         )}
       </AccountSection>
 

@@ -65,7 +65,7 @@ export function NotebooksPage({ groups }: { groups: readonly GroupSummary[] }) {
     <Page title="Notebooks">
       <div className="flex flex-wrap items-center justify-between gap-x-18 gap-y-18 pt-28 wide:pt-44">
         <h1 className="type-display">Notebooks</h1>
-        <div className="flex w-full items-center gap-16 wide:w-auto">
+        <div data-print="never" className="flex w-full items-center gap-16 wide:w-auto">
           {!isBare && <SearchField value={filters.q} onChange={handleSearch} />}
           {!isBare && (
             <Button tone="main" onClick={() => openNew("outline")}>
@@ -94,7 +94,7 @@ export function NotebooksPage({ groups }: { groups: readonly GroupSummary[] }) {
       ) : (
         <>
           {filters.place === "shelf" && <NotebookShelf notebooks={notebooks} className="pt-18" />}
-          <p className="pt-36 pb-10 font-serif text-[20px]/[32px]">
+          <p data-print="never" className="pt-36 pb-10 font-serif text-[20px]/[32px]">
             Notebooks{" "}
             <WordMenu
               label="Where"
@@ -135,7 +135,7 @@ export function NotebooksPage({ groups }: { groups: readonly GroupSummary[] }) {
           )}
           <p className="pt-18 type-label text-ink3">
             <span role="status">{countLine(notebooks.length)}</span>{" "}
-            <TextButton className="text-[13px]/[18px]" onClick={openImport}>
+            <TextButton data-print="never" className="text-[13px]/[18px]" onClick={openImport}>
               Import a Markdown file
             </TextButton>
           </p>

@@ -16,6 +16,7 @@ export function FigureNames({ gases, styles, hidden, onToggle, unnamed }: Figure
   return (
     <div
       className="figure-names"
+      data-print="never"
       role="group"
       aria-label="Curves shown"
       data-shown={unnamed.length > 0 || undefined}

@@ -21,27 +21,30 @@ export function FigureTable({ label, columns, unitSystem }: FigureTableProps) {
   const scales = columns.map(({ head }) =>
     head.startsWith("altitude") ? kilometreScale : displayScale(unitOf(head), unitSystem, 1),
   );
+  // A table keeps the width of its columns whatever it is told; what hides it is a box around it.
   return (
-    <table className="visually-hidden">
-      <caption>{label}</caption>
-      <thead>
-        <tr>
-          {columns.map(({ head }, i) => (
-            <th key={head} scope="col">
-              {head.replace(/\(.*\)/, `(${scales[i]!.unit})`)}
-            </th>
-          ))}
-        </tr>
-      </thead>
-      <tbody>
-        {rows.map((row) => (
-          <tr key={row}>
-            {columns.map(({ head, values }, i) => (
-              <td key={head}>{plainText(formatNumber(values[row]! * scales[i]!.factor))}</td>
+    <div className="visually-hidden">
+      <table>
+        <caption>{label}</caption>
+        <thead>
+          <tr>
+            {columns.map(({ head }, i) => (
+              <th key={head} scope="col">
+                {head.replace(/\(.*\)/, `(${scales[i]!.unit})`)}
+              </th>
             ))}
           </tr>
-        ))}
-      </tbody>
-    </table>
+        </thead>
+        <tbody>
+          {rows.map((row) => (
+            <tr key={row}>
+              {columns.map(({ head, values }, i) => (
+                <td key={head}>{plainText(formatNumber(values[row]! * scales[i]!.factor))}</td>
+              ))}
+            </tr>
+          ))}
+        </tbody>
+      </table>
+    </div>
   );
 }

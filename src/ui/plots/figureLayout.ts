@@ -1,4 +1,5 @@
 import type { Annotation, Layout, Shape } from "plotly.js";
+import { askMedia } from "../../lib/askMedia";
 import { formatPower, thinSpace } from "../../lib/format";
 import { figureText } from "../../lib/richText";
 import { tickSteps } from "../strip/stripScale";
@@ -27,6 +28,9 @@ export const figureFonts = () => ({ sans: fontOf("--sans"), serif: fontOf("--ser
 
 type Axis = NonNullable<Layout["xaxis"]>;
 
+/** Under a finger a drag scrolls the page; drawing closer is for those who have a pointer. */
+const isTouched = (): boolean => askMedia("(pointer: coarse)")?.matches ?? false;
+
 /** Axis ink 1, ticks outside .8, 7 px for major and 4 for minor ones; no grid, no frame. */
 export function axis(inks: FigureInks, title: string): Partial<Axis> {
   const { sans } = figureFonts();
@@ -45,6 +49,7 @@ export function axis(inks: FigureInks, title: string): Partial<Axis> {
     exponentformat: "power",
     separatethousands: true,
     automargin: false,
+    fixedrange: isTouched(),
   };
 }
 
@@ -129,5 +134,6 @@ export function baseLayout(room: FigureRoom): Partial<Layout> {
     separators: `.${thinSpace}`,
     showlegend: false,
     hovermode: false,
+    dragmode: isTouched() ? false : "zoom",
   };
 }

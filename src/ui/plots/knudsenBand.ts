@@ -4,7 +4,7 @@ import { altitudeOfKnudsen, type Profiles } from "./columnCurves";
 /** Lines across the band; they part as the gas thins, and fade away from Kn = 1. */
 const lines = 26;
 /** Lines of like opacity are drawn as one, since each drawing costs time at every keystroke. */
-const shades = 7;
+const shades = 5;
 
 /** The band round the exobase as hairlines that part and fade, never a filled box. */
 export function knudsenBand(

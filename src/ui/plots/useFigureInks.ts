@@ -1,22 +1,32 @@
 import { useSyncExternalStore } from "react";
+import { askMedia } from "../../lib/askMedia";
 
 /** Colours as a figure needs them, resolved: it cannot read custom properties. */
 export type FigureInks = Record<string, string>;
 
 /** Counts changes of the theme, so that figures resolve their colours anew. */
 let themeRevision = 0;
+/** On paper every figure is as by day. */
+let isPrinting = false;
 
 function subscribeToTheme(onChange: () => void): () => void {
   const handle = () => {
     themeRevision += 1;
     onChange();
   };
+  const handlePrint = ({ type }: Event) => {
+    isPrinting = type === "beforeprint";
+    handle();
+  };
+  window.addEventListener("beforeprint", handlePrint);
+  window.addEventListener("afterprint", handlePrint);
   const observer = new MutationObserver(handle);
   observer.observe(document.documentElement, { attributes: true, attributeFilter: ["data-theme", "class"] });
-  // A document that is not shown, as in tests, has no media to ask.
-  const preference = "matchMedia" in window ? window.matchMedia("(prefers-color-scheme: dark)") : null;
+  const preference = askMedia("(prefers-color-scheme: dark)");
   preference?.addEventListener("change", handle);
   return () => {
+    window.removeEventListener("beforeprint", handlePrint);
+    window.removeEventListener("afterprint", handlePrint);
     observer.disconnect();
     preference?.removeEventListener("change", handle);
   };
@@ -30,7 +40,7 @@ function subscribeToTheme(onChange: () => void): () => void {
 export function resolveInks(values: Readonly<Record<string, string>>, light: "page" | "day"): FigureInks {
   const probe = document.createElement("span");
   probe.hidden = true;
-  if (light === "day") probe.style.colorScheme = "light";
+  if (light === "day" || isPrinting) probe.style.colorScheme = "light";
   document.body.append(probe);
   const style = getComputedStyle(probe);
   const inks = Object.fromEntries(

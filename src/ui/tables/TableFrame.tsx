@@ -1,5 +1,4 @@
-import { useId, useLayoutEffect, useState, type PropsWithChildren, type ReactNode } from "react";
-import { useElementSize } from "../../lib/useElementSize";
+import { useEffect, useId, useRef, useState, type PropsWithChildren, type ReactNode } from "react";
 import "./tables.css";
 
 interface TableFrameProps {
@@ -47,12 +46,17 @@ export function TableFrame({ number, caption, text, notes, children }: PropsWith
 
 /** A table wider than its page can be drawn past, by hand or, then, by key. */
 function ScrollBox({ label, children }: PropsWithChildren<{ label: string }>) {
-  const { ref, size } = useElementSize<HTMLDivElement>({ width: 736, height: 200 });
+  const ref = useRef<HTMLDivElement>(null);
   const [isWide, setIsWide] = useState(false);
-  useLayoutEffect(() => {
+  useEffect(() => {
     const box = ref.current;
-    setIsWide(box !== null && box.scrollWidth > box.clientWidth + 1);
-  }, [ref, size, children]);
+    if (!box || typeof ResizeObserver === "undefined") return undefined;
+    // Asked after layout, so that no key that changes a number waits for one.
+    const observer = new ResizeObserver(() => setIsWide(box.scrollWidth > box.clientWidth + 1));
+    observer.observe(box);
+    if (box.firstElementChild) observer.observe(box.firstElementChild);
+    return () => observer.disconnect();
+  }, []);
   return (
     <div
       ref={ref}

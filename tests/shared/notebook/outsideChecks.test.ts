@@ -8,7 +8,8 @@ import type { ResultRow } from "../../../shared/notebook/result";
 import jeansCases from "../../fixtures/jeansCases.json";
 import standard from "../../fixtures/standardAtmosphere1976.json";
 import "../../toBeCloseToRelative";
-import { numberIn, resultOf, type WrittenCell } from "./evaluateCells";
+import { numberIn, resultOf } from "./evaluateCells";
+import { notebookWithExobaseAt, type radiiKm } from "./notebookWithExobaseAt";
 
 function evaluateFile(name: string) {
   const file = path.join(import.meta.dirname, "../../fixtures/notebooks", name);
@@ -59,53 +60,6 @@ describe("the U.S. Standard Atmosphere 1976 through a notebook, from its row at 
     expect(levelAt(altitudeKm).scale_height).toBeCloseToRelative(pressureScaleHeightKm! * 1000, 5e-4);
   });
 });
-
-/** Constants of the program that computed the cases. */
-const { boltzmann, atomicMass, massesU, gravitationalParametersKm3S2 } = jeansCases.inputs;
-
-/** Radii that the altitudes of the cases count from, km. */
-const radiiKm = { Earth: 6371.0084, Mars: 3389.5 } as const;
-
-/**
- * A notebook whose exobase lies where a case wants it: isothermal CO2 (d = 3.763 Å, stated) with traces, without
- * mixing. Then n = n_b exp(Λ_b − Λ), Λ = GMm/kTr, and l = H gives n = mg/(√2 σ kT) at the exobase.
- */
-function notebookWithExobaseAt(place: {
-  body: keyof typeof radiiKm;
-  radiusKm: number;
-  temperature: number;
-  hydrogenAtExobase?: number;
-}): WrittenCell[] {
-  const { body, radiusKm, temperature } = place;
-  const gm = gravitationalParametersKm3S2[body] * 1e9;
-  const kT = boltzmann * temperature;
-  const base = radiusKm * 1e3 - 60e3;
-  const rise = (massU: number) => ((gm * massU * atomicMass) / kT) * (1 / base - 1 / (radiusKm * 1e3));
-  const crossSection = Math.PI * 3.763e-10 ** 2;
-  const mass = massesU.CO2 * atomicMass;
-  const atExobase = (mass * gm) / (radiusKm * 1e3) ** 2 / (Math.SQRT2 * crossSection * kT);
-  const co2 = atExobase * Math.exp(rise(massesU.CO2));
-  const trace = (formula: keyof typeof massesU) =>
-    formula === "H" && place.hydrogenAtExobase
-      ? place.hydrogenAtExobase * Math.exp(rise(massesU.H))
-      : atExobase * 1e-9 * Math.exp(rise(massesU[formula]));
-  const traces = (["H", "D", "He", "O", "H2", "HD"] as const).map((gas) => `${gas}: ${trace(gas)} /m^3`);
-  const masses = Object.entries(massesU).map(([formula, massU]): WrittenCell => [
-    "gas",
-    formula,
-    `mass = ${massU} u\nthermal_diffusion = 0${formula === "CO2" ? `\ncross_section = ${crossSection} m^2` : ""}`,
-  ]);
-  return [
-    ["body", "planet", `gm = ${gm} m^3/s^2\nradius = ${radiiKm[body]} km`],
-    ...masses,
-    [
-      "column",
-      "air",
-      `body = planet\nbase = ${base / 1e3 - radiiKm[body]} km\ngases = CO2: ${co2} /m^3, ${traces.join(", ")}\ntemperature = ${temperature} K`,
-    ],
-    ["escape", "leak", "column = air\ncoupling = open"],
-  ];
-}
 
 describe("escape parameters and effusion velocities of Earth and Mars through a notebook", () => {
   const cases = jeansCases.rows.filter(({ body }) => body === "Earth" || body === "Mars");

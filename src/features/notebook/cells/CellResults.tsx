@@ -1,11 +1,10 @@
 import { useRef } from "react";
 import type { CellEvaluation, Note } from "../../../../shared/notebook/result";
-import { CrossingFigure } from "../../../ui/plots/CrossingFigure";
-import { DensityFigure } from "../../../ui/plots/DensityFigure";
 import { EscapeTable } from "../../../ui/tables/EscapeTable";
 import { LevelsTable } from "../../../ui/tables/LevelsTable";
 import { ValueList } from "../../../ui/tables/ValueList";
 import type { CellViewProps } from "./CellView";
+import { ColumnFigures } from "./ColumnFigures";
 import { Computing } from "./Computing";
 
 interface CellResultsProps extends CellViewProps {
@@ -55,27 +54,12 @@ function Answer({
   isNear,
   onRemedy,
 }: CellResultsProps & { evaluation: CellEvaluation }) {
-  const { result, gases, strip } = evaluation;
+  const { result, gases } = evaluation;
   switch (result.kind) {
     case "column":
       return (
         <>
-          {result.profiles && strip && isNear && (
-            <>
-              <DensityFigure
-                profiles={result.profiles}
-                strip={strip}
-                unitSystem={unitSystem}
-                number={figureNumber}
-              />
-              <CrossingFigure
-                profiles={result.profiles}
-                strip={strip}
-                unitSystem={unitSystem}
-                number={figureNumber + 1}
-              />
-            </>
-          )}
+          {isNear && <ColumnFigures evaluation={evaluation} unitSystem={unitSystem} number={figureNumber} />}
           {(result.tables.levels?.length ?? 0) > 0 && (
             <LevelsTable result={result} gases={gases} unitSystem={unitSystem} number={tableNumber} />
           )}

@@ -12,13 +12,16 @@ export function useColumnInView(
   answers: ReadonlyMap<string, CellEvaluation> | undefined,
 ): string | null {
   const [inView, setInView] = useState<string | null>(null);
+  const columns = columnsRead(document, answers);
+  const key = columns.map(({ id, column }) => `${id} ${column}`).join("\n");
 
   useEffect(
     function followReading() {
+      const read = columnsFromKey(key);
       let frame = 0;
       const look = () => {
         frame = 0;
-        setInView(columnAt(document, answers, window.innerHeight * readingLine));
+        setInView(columnAt(read, window.innerHeight * readingLine));
       };
       const lookSoon = () => {
         if (frame === 0) frame = requestAnimationFrame(look);
@@ -32,33 +35,46 @@ export function useColumnInView(
         window.removeEventListener("resize", lookSoon);
       };
     },
-    [document, answers],
+    [key],
   );
 
   const isThere = document.cells.some((cell) => cell.id === inView && cell.kind === "column");
   return isThere ? inView : (document.cells.find((cell) => cell.kind === "column")?.id ?? null);
 }
 
-function columnAt(
-  document: NotebookDocument,
-  answers: ReadonlyMap<string, CellEvaluation> | undefined,
-  line: number,
-): string | null {
-  let found: string | null = null;
-  for (const { id, kind } of document.cells) {
-    if (kind !== "column" && kind !== "escape") continue;
-    const top = cellElement(id)?.getBoundingClientRect().top;
-    if (top === undefined || top > line) break;
-    found = kind === "column" ? id : (columnUnder(id, document, answers) ?? found);
-  }
-  return found;
+/** A cell that speaks of a column, and the column's id. */
+interface ColumnReader {
+  id: string;
+  column: string;
 }
 
-function columnUnder(
-  id: string,
-  document: NotebookDocument,
+/** Columns and the escape cells that rest on them, in the order of the notebook. */
+function columnsRead(
+  { cells }: NotebookDocument,
   answers: ReadonlyMap<string, CellEvaluation> | undefined,
-): string | null {
-  const uses = answers?.get(id)?.uses ?? [];
-  return document.cells.find((cell) => cell.kind === "column" && uses.includes(cell.name))?.id ?? null;
+): ColumnReader[] {
+  return cells.flatMap(({ id, kind }) => {
+    if (kind === "column") return [{ id, column: id }];
+    if (kind !== "escape") return [];
+    const uses = answers?.get(id)?.uses ?? [];
+    const column = cells.find((cell) => cell.kind === "column" && uses.includes(cell.name));
+    return column ? [{ id, column: column.id }] : [];
+  });
+}
+
+const columnsFromKey = (key: string): ColumnReader[] =>
+  key
+    .split("\n")
+    .map((line) => line.split(" "))
+    .map(([id = "", column = ""]) => ({ id, column }));
+
+/** The column of the last cell that begins above a line of the window. */
+function columnAt(readers: readonly ColumnReader[], line: number): string | null {
+  let found: string | null = null;
+  for (const { id, column } of readers) {
+    const top = cellElement(id)?.getBoundingClientRect().top;
+    if (top === undefined || top > line) break;
+    found = column;
+  }
+  return found;
 }

@@ -1,14 +1,14 @@
-import { useSyncExternalStore } from "react";
+import { useCallback, useMemo, useSyncExternalStore } from "react";
 
 /** Whether a media query holds now. */
 export function useMediaQuery(query: string): boolean {
-  return useSyncExternalStore(
-    (onChange) => {
-      const list = window.matchMedia(query);
+  const list = useMemo(() => window.matchMedia(query), [query]);
+  const subscribe = useCallback(
+    (onChange: () => void) => {
       list.addEventListener("change", onChange);
       return () => list.removeEventListener("change", onChange);
     },
-    () => window.matchMedia(query).matches,
-    () => false,
+    [list],
   );
+  return useSyncExternalStore(subscribe, () => list.matches);
 }

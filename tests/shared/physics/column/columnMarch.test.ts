@@ -198,3 +198,16 @@ describe("a flux", () => {
     one.forEach((value, i) => expect(two[i]).toBeCloseToRelative(2 * value, 1e-2));
   });
 });
+
+describe("a march that cannot go on", () => {
+  it("says so instead of shortening its steps for ever", () => {
+    const problem = columnProblem(sampleColumn());
+    const masses = problem.masses.map(() => NaN);
+    const state = problem.baseLogPressures;
+    const march = beginMarch({
+      problem: { ...problem, masses },
+      ...{ fluxes: null, height: 0, state, direction: 1, tolerance: 1e-10 },
+    });
+    expect(() => advance(march, 1e5)).toThrow(/passable in steps that a number can tell apart/);
+  });
+});

@@ -1,0 +1,49 @@
+import { useRef } from "react";
+import type { CellEvaluation } from "../../../../shared/notebook/result";
+import type { UnitSystem } from "../../../lib/format";
+import { useSettled } from "../../../lib/useSettled";
+import { CrossingFigure } from "../../../ui/plots/CrossingFigure";
+import { DensityFigure } from "../../../ui/plots/DensityFigure";
+import type { ColumnFigureProps } from "../../../ui/plots/figureProps";
+import { useOnScreen } from "./useOnScreen";
+
+interface ColumnFiguresProps {
+  evaluation: CellEvaluation;
+  unitSystem: UnitSystem;
+  /** Number of the first of them. */
+  number: number;
+}
+
+/** How long writing rests before figures that nobody sees are drawn anew, ms. */
+const rest = 500;
+
+/** The figures of a column. */
+export function ColumnFigures({ evaluation, unitSystem, number }: ColumnFiguresProps) {
+  return (
+    <>
+      <SeenFigure figure={DensityFigure} evaluation={evaluation} unitSystem={unitSystem} number={number} />
+      <SeenFigure figure={CrossingFigure} evaluation={evaluation} unitSystem={unitSystem} number={number + 1} />
+    </>
+  );
+}
+
+/** On the screen a figure follows every key; off it, it waits for a rest and costs the writer nothing. */
+function SeenFigure({
+  figure: Figure,
+  evaluation,
+  unitSystem,
+  number,
+}: ColumnFiguresProps & { figure: React.ComponentType<ColumnFigureProps> }) {
+  const place = useRef<HTMLDivElement>(null);
+  const isOnScreen = useOnScreen(place);
+  const settled = useSettled(evaluation, rest);
+  const { result, strip } = isOnScreen ? evaluation : settled;
+
+  return (
+    <div ref={place}>
+      {result.profiles && strip && (
+        <Figure profiles={result.profiles} strip={strip} unitSystem={unitSystem} number={number} />
+      )}
+    </div>
+  );
+}
