@@ -9,6 +9,8 @@ import { gasSchema } from "./kinds/gas";
 import { lossSchema } from "./kinds/loss";
 import { nonthermalSchema } from "./kinds/nonthermal";
 import { proseSchema } from "./kinds/prose";
+import { spreadSchema } from "./kinds/spread";
+import { sweepSchema } from "./kinds/sweep";
 import { valuesSchema } from "./kinds/values";
 
 export const cellSchemas: Readonly<Record<CellKind, CellSchema>> = {
@@ -20,5 +22,7 @@ export const cellSchemas: Readonly<Record<CellKind, CellSchema>> = {
   escape: escapeSchema,
   corona: coronaSchema,
   nonthermal: nonthermalSchema,
+  sweep: sweepSchema,
+  spread: spreadSchema,
   loss: lossSchema,
 };

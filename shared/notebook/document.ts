@@ -10,6 +10,8 @@ export const cellKinds = [
   "escape",
   "corona",
   "nonthermal",
+  "sweep",
+  "spread",
   "loss",
 ] as const;
 export type CellKind = (typeof cellKinds)[number];

@@ -33,14 +33,15 @@ export interface TaskPart {
   to: number;
   /**
    * For each watched name in the order written, its value at each point, SI. NaN where there is no answer;
-   * `belowMagnitude` where the value is below 1e-300 and only a log10 twin carries it.
+   * `belowMagnitude` or `aboveMagnitude` where only a log10 twin carries it.
    */
   values: Float64Array[];
   outcomes: PointOutcome[];
 }
 
-/** Stands for a magnitude below 1e-300 that is not zero. */
+/** Stand for a magnitude below 1e-300 that is not zero, and for one above 1e300. */
 export const belowMagnitude = Number.MIN_VALUE;
+export const aboveMagnitude = Number.MAX_VALUE;
 
 /** What `evaluateNotebook` needs to answer the cell. */
 export interface TaskAnswer {
@@ -52,7 +53,9 @@ export interface TaskAnswer {
   tables: CellResult["tables"];
   notes: Pick<Note, "level" | "code" | "message">[];
   /** Of a spread: by watched name, what its own cell then carries. */
-  spreads: Record<string, ResultSpread>;
+  spreads: Record<string, Omit<ResultSpread, "cell">>;
+  /** Of a spread: names of the uncertain entries that were drawn. */
+  drawn: string[];
   /** Watched values point by point, as in `TaskPart`. */
   watched: { name: string; values: Float64Array }[];
 }

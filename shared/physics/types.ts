@@ -118,6 +118,7 @@ export type ExobaseOutcome =
       found: false;
       reason: "base_above_exobase" | "base_unbound" | "runaway" | "top_below_exobase";
       message: string;
+      /** The largest Knudsen number or, by another criterion, of the number that is 1 at the exobase; and where, m. */
       largestKnudsen: number;
       altitudeOfLargest: number;
     };

@@ -2,6 +2,8 @@ import type { CellModel } from "./models";
 import type { Quantity } from "../language/quantity";
 import type { CellResult } from "../result";
 import type { Strip } from "../summary";
+import type { TaskAnswer } from "../tasks";
+import type { TaskPlan } from "./taskPlan";
 
 /** What a kind finds out about one of its cells, besides its notes. */
 export interface CellAnswer {
@@ -14,4 +16,7 @@ export interface CellAnswer {
   model?: CellModel;
   /** Entries that are names of the whole notebook; null where one has a fault. */
   globals?: Record<string, Quantity | null>;
+  /** Of a sweep or spread: what is to be computed, and its answer once it has been. */
+  plan?: TaskPlan;
+  taskAnswer?: TaskAnswer;
 }

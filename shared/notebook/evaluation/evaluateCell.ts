@@ -8,12 +8,16 @@ import { evaluateEscape } from "./evaluateEscape";
 import { evaluateGas } from "./evaluateGas";
 import { evaluateLoss } from "./evaluateLoss";
 import { evaluateNonthermal } from "./evaluateNonthermal";
+import { evaluateSpread } from "./evaluateSpread";
+import { evaluateSweep } from "./evaluateSweep";
 import { evaluateValues } from "./evaluateValues";
 import { locateNotes } from "../language/locateNotes";
 import type { ParsedEntries } from "../language/syntax";
 import type { CellEvaluation, CellResult, CellStatus, Note } from "../result";
 import { openCell, type OpenCell } from "./openCell";
-import type { CellAbove, RecordedSurroundings } from "./surroundings";
+import type { TaskPlan } from "./taskPlan";
+import { usedNames, type CellAbove, type RecordedSurroundings } from "./surroundings";
+import type { TaskAnswer } from "../tasks";
 
 export interface EvaluatedCell extends Pick<
   CellEvaluation,
@@ -21,6 +25,9 @@ export interface EvaluatedCell extends Pick<
 > {
   /** What the cells below see of it. */
   above: CellAbove;
+  /** Of a sweep or spread that can be computed. */
+  plan: TaskPlan | null;
+  taskAnswer: TaskAnswer | null;
 }
 
 const evaluators: Readonly<Record<Cell["kind"], (cell: OpenCell) => CellAnswer>> = {
@@ -32,6 +39,8 @@ const evaluators: Readonly<Record<Cell["kind"], (cell: OpenCell) => CellAnswer>>
   escape: evaluateEscape,
   corona: evaluateCorona,
   nonthermal: evaluateNonthermal,
+  sweep: evaluateSweep,
+  spread: evaluateSpread,
   loss: evaluateLoss,
 };
 
@@ -42,9 +51,10 @@ export function evaluateCell(
   surroundings: RecordedSurroundings,
   unitSystem: "SI" | "cgs",
   last: EvaluatedCell | undefined,
+  isDraw = false,
 ): EvaluatedCell {
   const lastModel = last?.above.model ?? null;
-  const open = openCell(cell, parsed, cellSchemas[cell.kind], surroundings, unitSystem, lastModel);
+  const open = openCell(cell, parsed, cellSchemas[cell.kind], surroundings, unitSystem, lastModel, isDraw);
   const answer = evaluateSafely(open, cell.kind);
   const values = finiteValues(open, answer.values ?? {});
   const notes = orderNotes(locateNotes(open.notes, open.text, open.entries));
@@ -63,13 +73,18 @@ export function evaluateCell(
     defaults: open.defaults,
     gases: answer.gases ?? [],
     ...(answer.strip ? { strip: answer.strip } : {}),
+    plan: answer.plan ?? null,
+    taskAnswer: answer.taskAnswer ?? null,
     above: {
+      id: cell.id,
       kind: cell.kind,
       name: cell.name,
       values,
       globals: answer.globals ?? {},
       model: answer.model ?? null,
       isFaulty: result.status === "fault",
+      entries: open.entries,
+      uses: usedNames(surroundings.questions),
     },
   };
 }

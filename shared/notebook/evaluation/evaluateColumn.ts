@@ -43,13 +43,15 @@ export function evaluateColumn(cell: OpenCell): CellAnswer {
   if (!column) return { gases };
   sayWhatColumnMeans(cell, column, gasList!.rest);
   sayWhatColumnLacks(cell, column);
+  const model = { kind: "column", column, body: input.body } as const;
+  if (cell.isDraw) return { gases, values: columnValues(column), model };
   return {
     gases,
     values: columnValues(column),
     tables: levels ? { levels: tabulate(cell, column, levels) } : {},
     profiles: columnProfiles(column),
     strip: columnStrip(cell.name, column),
-    model: { kind: "column", column, body: input.body },
+    model,
   };
 }
 
@@ -72,7 +74,8 @@ function readInput(
     return undefined;
 
   const table = collisionTable(known);
-  sayWhereGasesComeFrom(cell, cell.entry("gases")!, known, eddy.kind === "none" ? null : table);
+  if (!cell.isDraw)
+    sayWhereGasesComeFrom(cell, cell.entry("gases")!, known, eddy.kind === "none" ? null : table);
   const column: ColumnInput = {
     gravitationalParameter: body.gravitationalParameter,
     radius: body.radius,

@@ -19,7 +19,8 @@ export interface EntrySchema {
    * quantity: one number with a unit. profile: a quantity, or a call such as bates(…). gases: a list of gases with
    * fractions. gasName: a formula. gasNames: a list of formulas. factors: a list of gases, each with a number.
    * pairs: a list of gases with binary(…). lengths: a list of altitudes. samples: a quantity, or points(…) against
-   * altitude. history: points(…) against age. ion: an ion such as O2+. cell: the name of a cell above. choice: one of
+   * altitude. history: points(…) against age. ion: an ion such as O2+. variation: a name from one value to another in
+   * steps. results: names of results. cell: the name of a cell above. choice: one of
    * `choices`. handbook: handbook(Name).
    */
   form:
@@ -34,6 +35,8 @@ export interface EntrySchema {
     | "samples"
     | "history"
     | "ion"
+    | "variation"
+    | "results"
     | "cell"
     | "choice"
     | "handbook";

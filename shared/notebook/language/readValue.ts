@@ -51,6 +51,10 @@ const punctuation = new Set([
   "And",
   "Within",
   "Factor",
+  "From",
+  "To",
+  "In",
+  "Steps",
   "=",
   ":",
 ]);
@@ -250,6 +254,10 @@ function convert(conversion: Conversion, node: SyntaxNode, path: string, depth: 
         path: name,
         range,
       };
+    }
+    case "Variation": {
+      const [subject, first, last, steps] = parts.map(inside);
+      return { type: "variation", subject, first, last, steps, range };
     }
     default:
       conversion.notes.push(

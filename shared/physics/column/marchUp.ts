@@ -1,6 +1,7 @@
 import { escapeParameter } from "../escape/escapeParameter";
-import { findKnudsenBand, smallestBoundParameter, type KnudsenBand } from "../exobase/findExobase";
-import { addKnudsen, findLargestKnudsen, type KnudsenAlong } from "../exobase/knudsenAlong";
+import { exobaseNumber } from "../exobase/exobaseNumber";
+import { findExobaseBand, smallestBoundParameter, type ExobaseBand } from "../exobase/findExobase";
+import { addNumber, findLargest, type NumberAlong } from "../exobase/numberAlong";
 import { maximumDimension } from "../numerics/dormandPrince";
 import { logarithm, power } from "../numerics/elementary";
 import { findRoot, rootOf } from "../numerics/findRoot";
@@ -12,8 +13,11 @@ import { largestCentrifugalShare } from "./requireColumnInput";
 
 /** A march from the base to the top, without flux. */
 export interface UpwardMarch {
-  along: KnudsenAlong;
-  band: KnudsenBand;
+  march: ColumnMarch;
+  /** The Knudsen number. */
+  along: NumberAlong;
+  /** By the bulk criterion. */
+  band: ExobaseBand;
   /** Geopotential height of the top, m. */
   top: number;
   /** Whether Kn fell where the escape parameter of the mean mass was below 2. */
@@ -35,13 +39,14 @@ const smallestLogPressure = logarithm(1e-280);
 export function marchUp(problem: ColumnProblem, tolerance: number): UpwardMarch {
   const state = problem.baseLogPressures;
   const march = beginMarch({ problem, fluxes: null, height: 0, state, direction: 1, tolerance });
-  const along: KnudsenAlong = { path: march.path, values: [], slopes: [] };
-  addKnudsen(along, march.slope);
+  const number = exobaseNumber(problem, { kind: "bulk" });
+  const along: NumberAlong = { path: march.path, number, values: [], slopes: [] };
+  addNumber(along, march.law, march.slope);
   const { top } = problem.input;
   return top === "auto" ? marchToOwnTop(march, along) : marchToGivenTop(march, along, top);
 }
 
-function marchToGivenTop(march: ColumnMarch, along: KnudsenAlong, topAltitude: number): UpwardMarch {
+function marchToGivenTop(march: ColumnMarch, along: NumberAlong, topAltitude: number): UpwardMarch {
   const { problem } = march.path;
   const { radius } = problem.input;
   const limit = heightOf(topAltitude, radius, problem.baseRadius);
@@ -52,10 +57,10 @@ function marchToGivenTop(march: ColumnMarch, along: KnudsenAlong, topAltitude: n
     isRunaway ||= runsAway(along);
   }
   const top = isThin ? thinHeight(march.path) : limit;
-  return { along, band: findKnudsenBand(along), top, isRunaway, isCutShort: isThin };
+  return { march, along, band: findExobaseBand(along, along), top, isRunaway, isCutShort: isThin };
 }
 
-function marchToOwnTop(march: ColumnMarch, along: KnudsenAlong): UpwardMarch {
+function marchToOwnTop(march: ColumnMarch, along: NumberAlong): UpwardMarch {
   const { path } = march;
   const { problem } = path;
   const limit = farthestHeight(problem);
@@ -68,24 +73,42 @@ function marchToOwnTop(march: ColumnMarch, along: KnudsenAlong): UpwardMarch {
     const isFar = along.values[path.steps] >= farEnough;
     if ((isRunaway || isFar) && heightOfMarch(march) >= extent) break;
   }
-  const band = findKnudsenBand(along);
+  const band = findExobaseBand(along, along);
   const wanted = Math.min(limit, wantedTop(along, band, extent, isRunaway));
   while (heightOfMarch(march) < wanted && !isThin) isThin = marchOn(march, along, wanted);
   const top = isThin ? Math.min(wanted, thinHeight(path)) : wanted;
   const isBandWhole = band.exobase !== null && band.upper !== null;
-  return { along, band: isBandWhole ? band : findKnudsenBand(along), top, isRunaway, isCutShort: false };
+  const wholeBand = isBandWhole ? band : findExobaseBand(along, along);
+  return { march, along, band: wholeBand, top, isRunaway, isCutShort: false };
+}
+
+/**
+ * Goes on, beyond the top of a column that set its own, until `isFarEnough`; or until the gas is too thin, runs away
+ * or has no height left.
+ *
+ * @param isFarEnough  asked before the first step and after each
+ * @returns            whether the gas runs away
+ */
+export function marchFurther({ march, along }: UpwardMarch, isFarEnough: () => boolean): boolean {
+  const limit = farthestHeight(march.path.problem);
+  let isThin = false;
+  while (!isThin && heightOfMarch(march) < limit && !isFarEnough()) {
+    if (runsAway(along)) return true;
+    isThin = marchOn(march, along, limit);
+  }
+  return false;
 }
 
 /** One step; whether the gas is now too thin to go on. */
-function marchOn(march: ColumnMarch, along: KnudsenAlong, limit: number): boolean {
+function marchOn(march: ColumnMarch, along: NumberAlong, limit: number): boolean {
   advance(march, limit);
-  return addKnudsen(along, march.slope) < smallestLogPressure;
+  return addNumber(along, march.law, march.slope) < smallestLogPressure;
 }
 
 /** The top of a column that sets its own; it depends on the gas alone, not on the steps. */
 function wantedTop(
-  along: KnudsenAlong,
-  { exobase, upper }: KnudsenBand,
+  along: NumberAlong,
+  { exobase, upper }: ExobaseBand,
   extent: number,
   isRunaway: boolean,
 ): number {
@@ -97,12 +120,12 @@ function wantedTop(
     const top = heightOf(altitude + (topOverExobase - 1) * reach, radius, problem.baseRadius);
     return Math.max(extent, top, upper ?? 0);
   }
-  const summit = isRunaway ? findLargestKnudsen(along, heightOfLast(along.path)).height : 0;
+  const summit = isRunaway ? findLargest(along, heightOfLast(along.path)).height : 0;
   return Math.max(extent, summit, upper ?? 0);
 }
 
 /** Whether, where the march stands, Kn falls and the gas is unbound. */
-function runsAway({ path, slopes }: KnudsenAlong): boolean {
+function runsAway({ path, slopes }: NumberAlong): boolean {
   return slopes[path.steps] < 0 && smallestEscapeParameter(path, path.steps) < smallestBoundParameter;
 }
 

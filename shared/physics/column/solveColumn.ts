@@ -1,4 +1,5 @@
 import { PhysicsDomainError } from "../errors";
+import { exobaseBy } from "../exobase/exobaseBy";
 import { exobaseOutcome } from "../exobase/findExobase";
 import type { Column, ColumnInput } from "../types";
 import { columnNotes } from "./columnNotes";
@@ -35,13 +36,16 @@ export function solveColumn(input: ColumnInput, tolerance = defaultTolerance): C
   const problem = columnProblem(input);
   const march = marchUp(problem, tolerance);
   const { path } = march.along;
-  const exobase = exobaseOutcome({ ...march, baseEscapeParameter: smallestEscapeParameter(path, 0) });
+  const baseEscapeParameter = smallestEscapeParameter(path, 0);
+  const exobase = exobaseOutcome({ ...march, baseEscapeParameter });
   const homopauses = findHomopauses(path, march.top);
   const topAltitude = input.top === "auto" || march.isCutShort ? altitudeOf(problem, march.top) : input.top;
   return {
     input,
     topAltitude,
     exobase,
+    exobaseBy: (criterion) =>
+      criterion.kind === "bulk" ? exobase : exobaseBy(march, criterion, baseEscapeParameter),
     homopauses: homopauses.map(({ outcome }) => outcome),
     ...columnReaders(path, topAltitude),
     notes: columnNotes(input, topAltitude, homopauses, march.isCutShort),

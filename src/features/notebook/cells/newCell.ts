@@ -12,6 +12,8 @@ const names: Record<CellKind, string> = {
   escape: "leak",
   corona: "halo",
   nonthermal: "hot",
+  sweep: "across",
+  spread: "sure",
   loss: "lost",
 };
 
