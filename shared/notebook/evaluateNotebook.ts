@@ -99,9 +99,18 @@ function answer(
   last: EvaluatedCell | undefined,
 ): RememberedCell {
   const evaluated = evaluateCell(cell, parsed, surroundings, unitSystem, last);
-  const { result, understood, defaults, gases, strip } = evaluated;
+  const { result, understood, defaults, gases, strip, convention } = evaluated;
   const uses = usedNames(surroundings.questions);
-  const evaluation = { id: cell.id, result, understood, defaults, uses, gases, ...(strip ? { strip } : {}) };
+  const evaluation = {
+    id: cell.id,
+    result,
+    understood,
+    defaults,
+    uses,
+    gases,
+    ...(strip ? { strip } : {}),
+    ...(convention ? { convention } : {}),
+  };
   return { cell, parsed, unitSystem, questions: surroundings.questions, evaluated, evaluation };
 }
 

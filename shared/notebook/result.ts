@@ -91,6 +91,8 @@ export interface CellEvaluation {
   gases: string[];
   /** Of a column. */
   strip?: Strip;
+  /** Of an escape cell: what its numbers rest on, in a few words. */
+  convention?: { coupling: "coupled" | "open"; criterion: string };
 }
 
 export interface Evaluation {

@@ -1,6 +1,6 @@
 import type { CellModel } from "./models";
 import type { Quantity } from "../language/quantity";
-import type { CellResult } from "../result";
+import type { CellEvaluation, CellResult } from "../result";
 import type { Strip } from "../summary";
 import type { TaskAnswer } from "../tasks";
 import type { TaskPlan } from "./taskPlan";
@@ -12,6 +12,8 @@ export interface CellAnswer {
   profiles?: CellResult["profiles"];
   gases?: string[];
   strip?: Strip;
+  /** Of an escape cell. */
+  convention?: CellEvaluation["convention"];
   /** What the cells below may build on. */
   model?: CellModel;
   /** Entries that are names of the whole notebook; null where one has a fault. */

@@ -15,14 +15,9 @@ import { inWords } from "../language/notes";
 import type { CellResult } from "../result";
 import type { ColumnModel } from "./models";
 import type { OpenCell } from "./openCell";
+import type { EscapeConvention } from "./readEscape";
 import { carried, measured } from "./resultValue";
-
-/** A gas that leaves, by its place in the column; the rate with its correction factor. */
-export interface LeavingGas {
-  formula: string;
-  index: number;
-  log10Rate: number;
-}
+import type { LeavingGas } from "./solveEscape";
 
 /** Above this share of what diffusion supplies, the supply sets the rate. */
 const nearlyAll = 0.9;
@@ -33,6 +28,7 @@ export function limitValues(
   { column }: ColumnModel,
   exobase: ColumnLevel,
   leaving: readonly LeavingGas[],
+  coupling: EscapeConvention["coupling"],
 ): Record<string, CellResult["values"]> {
   const byGas: Record<string, CellResult["values"]> = {};
   const limits = leaving.map(({ formula, index, log10Rate }) => {
@@ -46,7 +42,7 @@ export function limitValues(
       });
       values[`${formula}.diffusion_limit`] = measured(limit.flux, "m^-2 s^-1");
       Object.assign(values, carried(`${formula}.supply_fraction`, share, log10Share, "1"));
-      saySupply(cell, formula, share);
+      saySupply(cell, formula, share, coupling);
     }
     const { logParticles } = columnInventory(column, index, column.input.baseAltitude, exobase.altitude);
     const { time, log10Time } = depletionTime({ logParticles, log10Rate });
@@ -57,15 +53,20 @@ export function limitValues(
   return byGas;
 }
 
-function saySupply(cell: OpenCell, formula: string, share: number | null): void {
+function saySupply(
+  cell: OpenCell,
+  formula: string,
+  share: number | null,
+  coupling: EscapeConvention["coupling"],
+): void {
   if (share === null || share < nearlyAll) return;
   const shown = formatPlainNumber(share, 3);
-  if (share > 1) {
-    const message = `${formula} leaves at ${shown} times the rate that diffusion supplies: more than the column can keep up. Its rate is an upper bound; the supply sets what really leaves.`;
+  if (coupling === "open" && share > 1) {
+    const message = `${formula} leaves at ${shown} times the rate that diffusion supplies: more than the column can keep up. On an open column its rate is an upper bound; coupling = coupled reckons with the supply.`;
     cell.say("caution", "above_diffusion_limit", message, cell.entry("column"));
     return;
   }
-  const message = `${formula} leaves at ${shown} of the rate that diffusion supplies: the supply from below, more than the exobase, sets it.`;
+  const message = `${formula} leaves at ${shown} of the diffusion limit: the supply from below, more than the exobase, sets its rate.`;
   cell.say("remark", "supply_limited", message, cell.entry("column"));
 }
 

@@ -21,7 +21,7 @@ import type { TaskAnswer } from "../tasks";
 
 export interface EvaluatedCell extends Pick<
   CellEvaluation,
-  "result" | "understood" | "defaults" | "gases" | "strip"
+  "result" | "understood" | "defaults" | "gases" | "strip" | "convention"
 > {
   /** What the cells below see of it. */
   above: CellAbove;
@@ -73,6 +73,7 @@ export function evaluateCell(
     defaults: open.defaults,
     gases: answer.gases ?? [],
     ...(answer.strip ? { strip: answer.strip } : {}),
+    ...(answer.convention ? { convention: answer.convention } : {}),
     plan: answer.plan ?? null,
     taskAnswer: answer.taskAnswer ?? null,
     above: {

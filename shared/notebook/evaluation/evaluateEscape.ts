@@ -1,45 +1,49 @@
-import type { ColumnLevel, GasEscape, PhysicsNote } from "../../physics";
+import type { GasEscape, PhysicsNote } from "../../physics";
 import { checkName } from "./checkName";
 import { exobaseValues } from "./columnResults";
 import { crossoverValues, energyLimitValues, limitValues, windValues } from "./escapeLimits";
-import { boundValues, escapeFrom, gasValues, leavingGases, type Corrections } from "./escapeValues";
+import { boundValues, gasValues } from "./escapeValues";
 import type { ColumnModel } from "./models";
 import { requireEntries, sayWhichCentresAct, type OpenCell } from "./openCell";
-import { readCellEntry, readEntry } from "./readEntries";
+import { readCellEntry } from "./readEntries";
+import { criterionWords, readConvention, readGases, type EscapeConvention } from "./readEscape";
 import { measured } from "./resultValue";
+import { solveEscape, type EscapeSolution } from "./solveEscape";
 import { quantityKinds } from "../language/dimensions";
 import { formatQuantity } from "../language/formatQuantity";
-import { changeTo } from "../language/notes";
-import { readGasFactors } from "../language/readGasFactors";
-import { readGasNames } from "../language/readGasName";
 import type { CellResult } from "../result";
 import type { CellAnswer } from "./cellAnswer";
 
+type Solved = Extract<EscapeSolution, { found: true }>;
+
 export function evaluateEscape(cell: OpenCell): CellAnswer {
   checkName(cell, cell.name);
-  requireEntries(cell, ["coupling"]);
+  requireEntries(cell);
   const source = readCellEntry(cell, "column");
-  const isCouplingSaid = readCoupling(cell);
-  const isCriterionKnown = readCriterion(cell);
-  const gases = source ? readGases(cell, source) : undefined;
-  const corrections = source ? readCorrections(cell, source) : undefined;
+  const gases = (source && readGases(cell, source)) ?? [];
+  const convention = readConvention(cell, source);
   sayWhichCentresAct(cell);
-  if (!source || !isCouplingSaid || !isCriterionKnown || !corrections) return { gases: gases ?? [] };
+  if (!source || !convention) return { gases };
 
-  const { exobase } = source.column;
-  if (!exobase.found) return { gases: gases ?? [], values: valuesWithoutExobase(cell, source, exobase) };
-  for (const note of exobase.notes) sayOf(cell, note);
+  const { coupling, criterion } = convention;
+  const convened = { gases, convention: { coupling, criterion: criterionWords(criterion) } };
+  const solution = solveEscape(cell, source, convention);
+  if (!solution.found) return { ...convened, values: valuesWithoutExobase(cell, source, solution) };
+  const { exobase, notes, coupled } = solution;
+  for (const note of [...exobase.notes, ...notes]) sayOf(cell, note);
   sayWhatBandLacks(cell, exobase);
-  const { lower, upper, level } = exobase;
   return {
-    gases: gases ?? [],
+    ...convened,
     values: {
-      ...exobaseValues(level, lower, upper),
-      ...escapeValues(cell, source, level, gases ?? [], corrections),
+      ...exobaseValues(exobase.level, exobase.lower, exobase.upper),
+      ...escapeValues(cell, solution, gases, convention),
     },
-    model: { kind: "escape", source, exobase: level },
+    model: { kind: "escape", source: solution.source, exobase: exobase.level, coupled },
   };
 }
+
+/** Why there is no exobase, where the gas is too loosely bound to have one and flows off as a wind. */
+const windReasons: readonly string[] = ["runaway", "base_unbound", "turn"];
 
 /** What can be said where no exobase exists: the fault, and the mass rates that need none. */
 function valuesWithoutExobase(
@@ -47,7 +51,7 @@ function valuesWithoutExobase(
   source: ColumnModel,
   { reason, message }: { reason: string; message: string },
 ): CellResult["values"] {
-  const isWind = reason === "runaway" || reason === "base_unbound";
+  const isWind = windReasons.includes(reason);
   const { column } = source;
   const { temperature } = column.levelAt(column.topAltitude);
   const winds = windValues(cell, source, temperature);
@@ -60,70 +64,6 @@ function valuesWithoutExobase(
       : "";
   cell.say("fault", `no_exobase_${reason}`, `No exobase. ${message}${instead}`, cell.entry("column"));
   return { ...(isWind ? { regime: { value: "wind" } } : {}), ...energyLimitValues(source), ...winds };
-}
-
-/** The convention changes every rate, so it is written out; what is not computed is not silently taken for what is. */
-function readCoupling(cell: OpenCell): boolean {
-  if (cell.entry("coupling")) return readOnlyChoice(cell, "coupling", "open", openMeans);
-  const { length } = cell.text;
-  const isFreshLine = length === 0 || cell.text.endsWith("\n");
-  const remedy = {
-    label: "Write coupling = open",
-    range: { from: length, to: length },
-    replacement: `${isFreshLine ? "" : "\n"}coupling = open`,
-  };
-  cell.say(
-    "fault",
-    "missing_coupling",
-    `The entry *coupling* is missing. Write coupling = open: ${openMeans}.`,
-    undefined,
-    remedy,
-  );
-  return false;
-}
-
-const openMeans =
-  "the column is solved without a flux and the Jeans flux evaluated after, so that what diffusion can supply does not limit it";
-
-function readCriterion(cell: OpenCell): boolean {
-  if (cell.entry("criterion")) {
-    return readOnlyChoice(
-      cell,
-      "criterion",
-      "bulk",
-      "the mean free path of the mixture equals its scale height",
-    );
-  }
-  cell.actByDefault("criterion");
-  return true;
-}
-
-/** An entry that has one choice so far; anything else is told what that choice means. */
-function readOnlyChoice(cell: OpenCell, key: string, choice: string, meaning: string): boolean {
-  const { node, valueRange } = cell.entry(key)!;
-  if (node.type === "broken") return false;
-  if (node.type === "name" && node.path === choice) return true;
-  const message = `The ${key} computed here is *${choice}*: ${meaning}. Write ${key} = ${choice}.`;
-  cell.say("fault", "choice", message, valueRange, changeTo(valueRange, choice));
-  return false;
-}
-
-/** Gases to answer for, in the order written; undefined if the list has a fault. */
-function readGases(cell: OpenCell, { column }: ColumnModel): string[] | undefined {
-  const all = column.input.gases.map(({ formula }) => formula);
-  if (cell.entry("gases")) {
-    return readEntry(cell, "gases", (node) => readGasNames(node, all))?.map(({ formula }) => formula);
-  }
-  cell.actByDefault("gases", { text: `gases = ${all.join(", ")}` });
-  return all;
-}
-
-/** Factors on Jeans rates by formula; undefined if the list has a fault. */
-function readCorrections(cell: OpenCell, { column }: ColumnModel): Corrections | undefined {
-  if (!cell.entry("correction")) return {};
-  const all = column.input.gases.map(({ formula }) => formula);
-  const factors = readEntry(cell, "correction", (node) => readGasFactors(node, all, cell.surroundings));
-  return factors && Object.fromEntries(factors.map(({ formula, value }) => [formula, value.value]));
 }
 
 function sayOf(cell: OpenCell, { level, code, message }: PhysicsNote): void {
@@ -149,13 +89,11 @@ function sayWhatBandLacks(
 
 function escapeValues(
   cell: OpenCell,
-  source: ColumnModel,
-  level: ColumnLevel,
+  { source, exobase, escape, leaving }: Solved,
   gases: readonly string[],
-  corrections: Corrections,
+  { coupling, corrections }: EscapeConvention,
 ): CellResult["values"] {
-  const escape = escapeFrom(source, level);
-  const leaving = leavingGases(escape, corrections);
+  const { level } = exobase;
   for (const note of escape.notes) sayOf(cell, note);
   const values: CellResult["values"] = {
     "exobase.escape_speed": measured(escape.escapeSpeed, "m s^-1"),
@@ -164,14 +102,14 @@ function escapeValues(
   };
   const isWind = escape.regime === "wind";
   const asked = gases.map((formula) => leaving.find((gas) => gas.formula === formula)!);
-  const limits = isWind ? {} : limitValues(cell, source, level, asked);
-  for (const { formula, index } of asked) {
+  const limits = isWind ? {} : limitValues(cell, source, level, asked, coupling);
+  for (const leavingGas of asked) {
+    const { formula, index } = leavingGas;
     const gas = escape.gases[index];
     const density = level.numberDensities[index];
-    const factor = corrections[formula];
-    Object.assign(values, isWind ? boundValues(gas, density) : gasValues(gas, density, factor));
+    Object.assign(values, isWind ? boundValues(gas, density) : gasValues(gas, density, leavingGas));
     Object.assign(values, limits[formula]);
-    if (!isWind) sayOfGas(cell, gas, factor);
+    if (!isWind) sayOfGas(cell, gas, corrections[formula]);
   }
   return {
     ...values,

@@ -1,5 +1,12 @@
 /** What a cell hands to the cells below it, besides its values. Bare numbers are SI. */
-import type { Column, CollisionParameter, ColumnInput, ColumnLevel } from "../../physics";
+import type {
+  Column,
+  CollisionParameter,
+  ColumnInput,
+  ColumnLevel,
+  CoupledInput,
+  CoupledOutcome,
+} from "../../physics";
 
 export interface BodyModel {
   kind: "body";
@@ -30,9 +37,12 @@ export interface ColumnModel {
 
 export interface EscapeModel {
   kind: "escape";
+  /** The column that the gases leave from, with their fluxes where they are coupled. */
   source: ColumnModel;
   /** The column's level at the exobase. */
   exobase: ColumnLevel;
+  /** What was solved, where the flux is coupled; kept to be used again. */
+  coupled: { input: CoupledInput; outcome: CoupledOutcome } | null;
 }
 
 export type CellModel = BodyModel | GasModel | ColumnModel | EscapeModel;

@@ -11,16 +11,17 @@ import "../../toBeCloseToRelative";
 import { numberIn, resultOf } from "./evaluateCells";
 import { notebookWithExobaseAt, type radiiKm } from "./notebookWithExobaseAt";
 
-function evaluateFile(name: string) {
+function documentOf(name: string) {
   const file = path.join(import.meta.dirname, "../../fixtures/notebooks", name);
   let count = 0;
   const reading = readNotebookFile(readFileSync(file, "utf8"), () => String((count += 1)));
   if (!reading.ok) throw new Error(reading.notes.map(({ message }) => message).join("\n"));
-  return evaluateNotebook(reading.document).evaluation.cells.map(({ result }) => result);
+  return reading.document;
 }
 
 describe("the U.S. Standard Atmosphere 1976 through a notebook, from its row at 150 km", () => {
-  const cells = evaluateFile("standard-atmosphere.md");
+  const { evaluation } = evaluateNotebook(documentOf("standard-atmosphere.md"));
+  const cells = evaluation.cells.map(({ result }) => result);
   const column = cells.find(({ kind }) => kind === "column")!;
   const levelAt = (altitudeKm: number): ResultRow => {
     const row = column.tables.levels.find(({ altitude }) => altitude === altitudeKm * 1000);
@@ -58,6 +59,33 @@ describe("the U.S. Standard Atmosphere 1976 through a notebook, from its row at 
     ),
   )("has the scale height at $altitudeKm km within 5e-4", ({ altitudeKm, pressureScaleHeightKm }) => {
     expect(levelAt(altitudeKm).scale_height).toBeCloseToRelative(pressureScaleHeightKm! * 1000, 5e-4);
+  });
+});
+
+describe("the exobase of the U.S. Standard Atmosphere 1976 through a notebook", () => {
+  /** With d = 3.65 Å, and so much hydrogen at 150 km; the file has none. */
+  const withHydrogen = (atBase: number, criterion: string) => {
+    const document = documentOf("standard-atmosphere.md");
+    const cells = document.cells.map((cell) => {
+      const text = cell.text.replace("He: 2.106e13 /m^3", `He: 2.106e13 /m^3, H: ${atBase} /m^3`);
+      if (cell.kind === "gas") return { ...cell, text: `${text}\ncross_section = pi * (3.65 angstrom)^2` };
+      return { ...cell, text: cell.kind === "escape" ? `${text}\ncriterion = ${criterion}` : text };
+    });
+    const { evaluation } = evaluateNotebook({ ...document, cells });
+    return evaluation.cells.map(({ result }) => result);
+  };
+  // The standard's own hydrogen flows; here it stands, and is made to meet the standard's 500 km row.
+  const wanted = standard.rows.find(({ altitudeKm }) => altitudeKm === 500)!.numberDensity.H!;
+  const tried = withHydrogen(1e11, "bulk").find(({ kind }) => kind === "column")!;
+  const got = tried.tables.levels.find(({ altitude }) => altitude === 500e3)!["H.number_density"] as number;
+
+  // Recomputed from the standard's column with the pressure scale height.
+  it.each([
+    ["bulk", 491.2],
+    ["simple", 465.5],
+  ])("lies by the criterion %s at %d km within 0.5 km", (criterion, altitudeKm) => {
+    const result = withHydrogen((1e11 * wanted) / got, criterion).at(-1)!;
+    expect(Math.abs(numberIn(result, "exobase.altitude") / 1e3 - altitudeKm)).toBeLessThan(0.5);
   });
 });
 
