@@ -81,7 +81,7 @@ export { type CoronaPlace, partitionFunctions, type PartitionFunctions } from ".
 
 export { columnCrossoverMass, type ColumnCrossoverMass } from "./limits/columnCrossoverMass";
 export { columnDiffusionLimit, type ColumnDiffusionLimit } from "./limits/columnDiffusionLimit";
-export { columnInventory } from "./limits/columnInventory";
+export { columnInventory, type Inventory } from "./limits/columnInventory";
 export { crossoverMass, type OutflowingGas } from "./limits/crossoverMass";
 export { depletionTime } from "./limits/depletionTime";
 export { diffusionLimit, type DiffusionLimit, type DiffusionLimitPlace } from "./limits/diffusionLimit";

@@ -31,7 +31,9 @@ export function limitValues(
   coupling: EscapeConvention["coupling"],
 ): Record<string, CellResult["values"]> {
   const byGas: Record<string, CellResult["values"]> = {};
-  const limits = leaving.map(({ formula, index, log10Rate }) => {
+  const indices = leaving.map(({ index }) => index);
+  const inventories = columnInventory(column, indices, column.input.baseAltitude, exobase.altitude);
+  const limits = leaving.map(({ formula, index, log10Rate }, place) => {
     const values: CellResult["values"] = (byGas[formula] = {});
     const limit = columnDiffusionLimit(column, index, exobase.radius);
     if (limit.exists && limit.flux > 0) {
@@ -44,7 +46,7 @@ export function limitValues(
       Object.assign(values, carried(`${formula}.supply_fraction`, share, log10Share, "1"));
       saySupply(cell, formula, share, coupling);
     }
-    const { logParticles } = columnInventory(column, index, column.input.baseAltitude, exobase.altitude);
+    const { logParticles } = inventories[place];
     const { time, log10Time } = depletionTime({ logParticles, log10Rate });
     Object.assign(values, carried(`${formula}.depletion_time`, time, log10Time, "s"));
     return { formula, limit };
