@@ -81,7 +81,8 @@ function uniquePath(conversion: Conversion, path: string): string {
 }
 
 function convertName(conversion: Conversion, node: SyntaxNode): NameNode {
-  return { type: "name", path: plainDigits(textOf(conversion, node)), range: rangeOf(conversion, node) };
+  const path = plainDigits(textOf(conversion, node)).replace("⁺", "+");
+  return { type: "name", path, range: rangeOf(conversion, node) };
 }
 
 function unitExponent(conversion: Conversion, node: SyntaxNode): number {
