@@ -19,9 +19,6 @@ import type { EscapeConvention } from "./readEscape";
 import { carried, measured } from "./resultValue";
 import type { LeavingGas } from "./solveEscape";
 
-/** Above this share of what diffusion supplies, the supply sets the rate. */
-const nearlyAll = 0.9;
-
 /** Diffusion limit, share of it, and time to empty the column, of each gas, by its formula. */
 export function limitValues(
   cell: OpenCell,
@@ -55,21 +52,16 @@ export function limitValues(
   return byGas;
 }
 
+/** Of a coupled column its own solution says where the supply sets the rate. */
 function saySupply(
   cell: OpenCell,
   formula: string,
   share: number | null,
   coupling: EscapeConvention["coupling"],
 ): void {
-  if (share === null || share < nearlyAll) return;
-  const shown = formatPlainNumber(share, 3);
-  if (coupling === "open" && share > 1) {
-    const message = `${formula} leaves at ${shown} times the rate that diffusion supplies: more than the column can keep up. On an open column its rate is an upper bound; coupling = coupled reckons with the supply.`;
-    cell.say("caution", "above_diffusion_limit", message, cell.entry("column"));
-    return;
-  }
-  const message = `${formula} leaves at ${shown} of the diffusion limit: the supply from below, more than the exobase, sets its rate.`;
-  cell.say("remark", "supply_limited", message, cell.entry("column"));
+  if (coupling === "coupled" || share === null || share <= 1) return;
+  const message = `${formula} leaves at ${formatPlainNumber(share, 3)} times the rate that diffusion supplies: more than the column can keep up. On an open column its rate is an upper bound; coupling = coupled reckons with the supply.`;
+  cell.say("caution", "above_diffusion_limit", message, cell.entry("column"));
 }
 
 const whyNone = {
