@@ -105,12 +105,18 @@ function hasFault({ cells }: Evaluation): boolean {
   return cells.some(({ result }) => result.status === "fault");
 }
 
-/** The first interruption asks the work to stop; a second ends the process as usual. */
+/** One key press may reach the process more than once, by the terminal and by what started it, ms. */
+const onePress = 1000;
+
+/** The first interruption asks the work to stop; a second ends the process. */
 function stopOnSignal(): { isStopped: () => boolean; forget: () => void } {
-  let isStopped = false;
-  const handle = () => (isStopped = true);
-  process.once("SIGINT", handle);
-  return { isStopped: () => isStopped, forget: () => process.off("SIGINT", handle) };
+  let stoppedAt: number | null = null;
+  const handle = () => {
+    if (stoppedAt !== null && performance.now() - stoppedAt > onePress) process.exit(130);
+    stoppedAt ??= performance.now();
+  };
+  process.on("SIGINT", handle);
+  return { isStopped: () => stoppedAt !== null, forget: () => process.off("SIGINT", handle) };
 }
 
 function readText(file: string): string | null {
