@@ -15,6 +15,8 @@ export const references: Readonly<Record<string, string>> = {
     "P. Bratley and B. L. Fox (1988), Algorithm 659: implementing Sobol's quasirandom sequence generator, ACM Trans. Math. Softw. 14, 88–100.",
   Brinkmann1970:
     "R. T. Brinkmann (1970), Departures from Jeans' escape rate for H and He in the Earth's atmosphere, Planet. Space Sci. 18, 449–478.",
+  Broyden1965:
+    "C. G. Broyden (1965), A class of methods for solving nonlinear simultaneous equations, Math. Comput. 19, 577–593.",
   CODATA2022:
     "E. Tiesinga, P. J. Mohr, D. B. Newell and B. N. Taylor (2024), The 2022 CODATA Recommended Values of the Fundamental Physical Constants (Web Version 9.0), National Institute of Standards and Technology.",
   CRCDiffusion:

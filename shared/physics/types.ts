@@ -181,7 +181,7 @@ export type CoupledOutcome =
       exobase: Extract<ExobaseOutcome, { found: true }>;
       /** In the order of the input. */
       gases: CoupledGas[];
-      /** Of the coupling; those of the column and of the exobase stand with these. */
+      /** Of the coupling alone: `column` and `exobase` have their own. */
       notes: PhysicsNote[];
       /** Marches through the column and right-hand sides evaluated. */
       marches: number;
@@ -191,7 +191,7 @@ export type CoupledOutcome =
       converged: false;
       reason: "base_above_exobase" | "base_unbound" | "runaway" | "turn" | "not_converged";
       message: string;
-      /** The largest Knudsen number seen, and where, m. */
+      /** The largest number that is 1 at the exobase (Knudsen's for bulk), about; and where, m. */
       largestKnudsen: number;
       altitudeOfLargest: number;
       marches: number;

@@ -51,6 +51,13 @@ export function emptyPath(problem: ColumnProblem, fluxes: BaseFluxes | null): Co
   };
 }
 
+/** Makes a path one without steps, in the room that it has. */
+export function clearPath(path: ColumnPath): void {
+  path.steps = 0;
+  path.laws.length = 0;
+  path.isDense.fill(0);
+}
+
 /** Steps that a path has room for at first. */
 const firstCapacity = 48;
 

@@ -1,14 +1,14 @@
-import { escapeParameter } from "../escape/escapeParameter";
 import { exobaseNumber } from "../exobase/exobaseNumber";
 import { findExobaseBand, smallestBoundParameter, type ExobaseBand } from "../exobase/findExobase";
 import { addNumber, findLargest, type NumberAlong } from "../exobase/numberAlong";
 import { maximumDimension } from "../numerics/dormandPrince";
 import { logarithm, power } from "../numerics/elementary";
 import { findRoot, rootOf } from "../numerics/findRoot";
+import { boundParameter } from "./boundParameter";
 import { advance, beginMarch, heightOfMarch, type ColumnMarch } from "./columnMarch";
-import { nodeState, pathTemperature, stateWithin, type ColumnPath } from "./columnPath";
-import { altitudeOf, heightOf, smallestTemperatureAbove, type ColumnProblem } from "./columnProblem";
-import { fractions, setComposition } from "./composition";
+import { nodeState, stateWithin, type ColumnPath } from "./columnPath";
+import { altitudeOf, heightOf, type ColumnProblem } from "./columnProblem";
+import { setComposition } from "./composition";
 import { largestCentrifugalShare } from "./requireColumnInput";
 
 /** A march from the base to the top, without flux. */
@@ -33,23 +33,46 @@ const farEnough = logarithm(10.5);
 /** A column without a given top has at least so many scale heights, or twice its base's distance from the centre. */
 const smallestExtent = 3;
 /** ln of 1e-280 Pa: below it numbers lose their meaning, and a column ends. */
-const smallestLogPressure = logarithm(1e-280);
+export const smallestLogPressure = logarithm(1e-280);
 
 /** Marches up to the given top, or to where the exobase and its band have been passed. */
 export function marchUp(problem: ColumnProblem, tolerance: number): UpwardMarch {
-  const state = problem.baseLogPressures;
-  const march = beginMarch({ problem, fluxes: null, height: 0, state, direction: 1, tolerance });
+  const { march, along } = setOut(problem, 0, problem.baseLogPressures, tolerance);
+  const { top } = problem.input;
+  if (top === "auto") return marchToOwnTop(march, along, march.scaleHeight, null);
+  return marchToGivenTop(march, along, heightOf(top, problem.input.radius, problem.baseRadius));
+}
+
+/**
+ * Marches up from an exobase to the given top, or to where `marchUp` would end; a little in any case.
+ *
+ * @param height           h  [m]  geopotential height of the exobase above the base
+ * @param state            ln p of each present gas there  [ln Pa]
+ * @param baseScaleHeight  of the whole gas at the base, in h  [m]
+ */
+export function marchOnFromExobase(
+  problem: ColumnProblem,
+  height: number,
+  state: Float64Array,
+  baseScaleHeight: number,
+  tolerance: number,
+): UpwardMarch {
+  const { march, along } = setOut(problem, height, state, tolerance);
+  const { top, radius } = problem.input;
+  if (top === "auto") return marchToOwnTop(march, along, baseScaleHeight, height);
+  const least = Math.min(height + march.scaleHeight / 10, farthestHeight(problem));
+  return marchToGivenTop(march, along, Math.max(heightOf(top, radius, problem.baseRadius), least));
+}
+
+function setOut(problem: ColumnProblem, height: number, state: Float64Array, tolerance: number) {
+  const march = beginMarch({ problem, fluxes: null, height, state, direction: 1, tolerance });
   const number = exobaseNumber(problem, { kind: "bulk" });
   const along: NumberAlong = { path: march.path, number, values: [], slopes: [] };
   addNumber(along, march.law, march.slope);
-  const { top } = problem.input;
-  return top === "auto" ? marchToOwnTop(march, along) : marchToGivenTop(march, along, top);
+  return { march, along };
 }
 
-function marchToGivenTop(march: ColumnMarch, along: NumberAlong, topAltitude: number): UpwardMarch {
-  const { problem } = march.path;
-  const { radius } = problem.input;
-  const limit = heightOf(topAltitude, radius, problem.baseRadius);
+function marchToGivenTop(march: ColumnMarch, along: NumberAlong, limit: number): UpwardMarch {
   let isRunaway = false;
   let isThin = false;
   while (heightOfMarch(march) < limit && !isThin) {
@@ -60,11 +83,16 @@ function marchToGivenTop(march: ColumnMarch, along: NumberAlong, topAltitude: nu
   return { march, along, band: findExobaseBand(along, along), top, isRunaway, isCutShort: isThin };
 }
 
-function marchToOwnTop(march: ColumnMarch, along: NumberAlong): UpwardMarch {
+function marchToOwnTop(
+  march: ColumnMarch,
+  along: NumberAlong,
+  baseScaleHeight: number,
+  knownExobase: number | null,
+): UpwardMarch {
   const { path } = march;
   const { problem } = path;
   const limit = farthestHeight(problem);
-  const extent = Math.min(smallestExtent * march.scaleHeight, problem.baseRadius / 2, limit);
+  const extent = Math.min(smallestExtent * baseScaleHeight, problem.baseRadius / 2, limit);
   let isRunaway = false;
   let isThin = false;
   while (heightOfMarch(march) < limit && !isThin) {
@@ -74,7 +102,10 @@ function marchToOwnTop(march: ColumnMarch, along: NumberAlong): UpwardMarch {
     if ((isRunaway || isFar) && heightOfMarch(march) >= extent) break;
   }
   const band = findExobaseBand(along, along);
-  const wanted = Math.min(limit, wantedTop(along, band, extent, isRunaway));
+  const wanted = Math.min(
+    limit,
+    wantedTop(along, { ...band, exobase: knownExobase ?? band.exobase }, extent, isRunaway),
+  );
   while (heightOfMarch(march) < wanted && !isThin) isThin = marchOn(march, along, wanted);
   const top = isThin ? Math.min(wanted, thinHeight(path)) : wanted;
   const isBandWhole = band.exobase !== null && band.upper !== null;
@@ -129,25 +160,12 @@ function runsAway({ path, slopes }: NumberAlong): boolean {
   return slopes[path.steps] < 0 && smallestEscapeParameter(path, path.steps) < smallestBoundParameter;
 }
 
-/** GMm̄/(kTr) at a position of a path, T the lowest temperature from there up. */
+/** See `boundParameter`; at a position of a path. */
 export function smallestEscapeParameter(path: ColumnPath, node: number): number {
-  const { problem, laws, positions } = path;
-  const step = Math.min(node, path.steps - 1);
-  const height = positions[node];
   nodeState(path, node, state);
-  setComposition(state, problem.masses.length);
-  let meanMass = 0;
-  for (let i = 0; i < problem.masses.length; i += 1) meanMass += fractions[i] * problem.masses[i];
-  return escapeParameter({
-    gravitationalParameter: problem.input.gravitationalParameter,
-    particleMass: meanMass,
-    temperature: smallestTemperatureAbove(
-      problem.temperature,
-      pathTemperature(path, step, height),
-      laws[step].temperaturePiece,
-    ),
-    radius: problem.input.radius + altitudeOf(problem, height),
-  });
+  setComposition(state, path.problem.masses.length);
+  const { temperaturePiece } = path.laws[Math.min(node, path.steps - 1)];
+  return boundParameter(path.problem, path.positions[node], temperaturePiece);
 }
 
 const state = new Float64Array(maximumDimension);
@@ -170,7 +188,7 @@ function heightOfLast(path: ColumnPath): number {
 }
 
 /** How far up a column without a given top may reach: nearly to infinity, or to where gravity is used up. */
-function farthestHeight({ baseRadius, centrifugalFactor }: ColumnProblem): number {
+export function farthestHeight({ baseRadius, centrifugalFactor }: ColumnProblem): number {
   if (centrifugalFactor === 0) return baseRadius * (1 - 1e-6);
   const radius = power(largestCentrifugalShare / centrifugalFactor, 1 / 3);
   return Math.min(baseRadius * (1 - 1e-6), baseRadius - (baseRadius * baseRadius) / radius);

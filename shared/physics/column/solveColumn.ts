@@ -29,9 +29,7 @@ export const defaultTolerance = 1e-10;
  * @source   [ChapmanCowling1970], section 18.2; [BanksKockarts1973], chapter 15
  */
 export function solveColumn(input: ColumnInput, tolerance = defaultTolerance): Column {
-  if (!(tolerance >= 1e-13 && tolerance <= 1e-2)) {
-    throw new PhysicsDomainError("tolerance", tolerance, "between 1e-13 and 1e-2");
-  }
+  requireTolerance(tolerance);
   const before = slopeEvaluations();
   const problem = columnProblem(input);
   const march = marchUp(problem, tolerance);
@@ -51,4 +49,10 @@ export function solveColumn(input: ColumnInput, tolerance = defaultTolerance): C
     notes: columnNotes(input, topAltitude, homopauses, march.isCutShort),
     evaluations: slopeEvaluations() - before,
   };
+}
+
+/** Refuses a tolerance that no march can keep to, or that means nothing. */
+export function requireTolerance(tolerance: number): void {
+  if (tolerance >= 1e-13 && tolerance <= 1e-2) return;
+  throw new PhysicsDomainError("tolerance", tolerance, "between 1e-13 and 1e-2");
 }

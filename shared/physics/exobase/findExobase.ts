@@ -3,7 +3,7 @@ import { stateWithin, stepAt } from "../column/columnPath";
 import { altitudeOf } from "../column/columnProblem";
 import { maximumDimension } from "../numerics/dormandPrince";
 import { exponential, logarithm } from "../numerics/elementary";
-import type { ExobaseOutcome, PhysicsNote } from "../types";
+import type { ExobaseCriterion, ExobaseOutcome, PhysicsNote } from "../types";
 import { nameOfNumber } from "./nameOfNumber";
 import { findCrossings, findLargest, type NumberAlong } from "./numberAlong";
 
@@ -67,10 +67,11 @@ export interface ColumnEnd {
  */
 export function exobaseOutcome(end: ColumnEnd): ExobaseOutcome {
   const { along, band, top, baseEscapeParameter, isRunaway } = end;
-  const name = nameOfNumber(along.number.criterion);
-  const baseFault = faultOfBase(along, baseEscapeParameter);
+  const { criterion } = along.number;
+  const name = nameOfNumber(criterion);
+  const baseFault = faultOfBase(criterion, exponential(along.values[0]), baseEscapeParameter);
   if (baseFault !== null) return notFound(end, baseFault.reason, baseFault.message);
-  if (band.exobase !== null && band.exobase <= top) return found(end, band.exobase);
+  if (band.exobase !== null && band.exobase <= top) return exobaseAt(end, band.exobase);
   if (isRunaway) {
     return notFound(
       end,
@@ -87,17 +88,17 @@ export function exobaseOutcome(end: ColumnEnd): ExobaseOutcome {
   );
 }
 
-/** What is wrong with the base alone; null if nothing is. */
+/** What is wrong with the base alone, where the number of the criterion is `baseNumber`; null if nothing is. */
 export function faultOfBase(
-  along: NumberAlong,
+  criterion: ExobaseCriterion,
+  baseNumber: number,
   baseEscapeParameter: number,
 ): { reason: "base_above_exobase" | "base_unbound"; message: string } | null {
-  const baseNumber = exponential(along.values[0]);
   if (baseNumber >= 1) {
     return {
       reason: "base_above_exobase",
       message:
-        `The ${nameOfNumber(along.number.criterion)} is ${short(baseNumber)} at the base already: the exobase lies ` +
+        `The ${nameOfNumber(criterion)} is ${short(baseNumber)} at the base already: the exobase lies ` +
         "below it. Start the column deeper, or with more gas.",
     };
   }
@@ -112,7 +113,11 @@ export function faultOfBase(
   return null;
 }
 
-function found({ along, band, top }: ColumnEnd, exobase: number): ExobaseOutcome {
+/** The exobase at a height, with its band as far as the top. */
+export function exobaseAt(
+  { along, band, top }: Pick<ColumnEnd, "along" | "band" | "top">,
+  exobase: number,
+): Extract<ExobaseOutcome, { found: true }> {
   const { path } = along;
   const { problem } = path;
   const step = stepAt(path, exobase);

@@ -132,6 +132,13 @@ function valuesFor(
       return [{ label: "points(", detail: "altitude: value, …" }, ...quantities(names, ownName)];
     case "history":
       return [{ label: "points(", detail: "age: light, …" }];
+    case "results":
+      return quantities(names, ownName);
+    case "variation":
+      return [
+        ...quantities(names, ownName),
+        ...["from", "to", "in", "steps", "logarithmic"].map((label) => ({ label, detail: "word" })),
+      ];
     case "profile":
       return [...profiles(schema), ...quantities(names, ownName)];
     default:

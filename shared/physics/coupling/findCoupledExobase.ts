@@ -1,0 +1,316 @@
+import { boundParameter } from "../column/boundParameter";
+import { fractions, maximumGases, setComposition } from "../column/composition";
+import { farthestHeight } from "../column/marchUp";
+import { lawAt } from "../column/stepLaw";
+import { PhysicsDomainError } from "../errors";
+import { logNumber, logNumberGradient, logNumberSlope } from "../exobase/exobaseNumber";
+import { logarithm } from "../numerics/elementary";
+import { solveLinear } from "../numerics/solveLinear";
+import type { EscapingColumn } from "./escapingColumn";
+import { downwardMarch, marchDown, type DownwardMarch } from "./marchDown";
+import { marchJacobian } from "./marchJacobian";
+
+/** The exobase from which the fluxes that it lets go lead down to the given base; or why none was found. */
+export type CoupledExobase =
+  | {
+      converged: true;
+      height: number;
+      /** ln p of each present gas there. */
+      state: Float64Array;
+      /** Marched from there. */
+      down: DownwardMarch;
+      marches: number;
+    }
+  | {
+      converged: false;
+      reason: "turn" | "runaway" | "no_descent" | "too_many_marches";
+      /** Where the search stood, m of geopotential height, and the largest residual there. */
+      height: number;
+      residual: number;
+      marches: number;
+    };
+
+/** March tolerance of the first try; and as a share of the last change of the exobase. */
+const loosest = 1e-5;
+const looseShare = 1e-3;
+/** Residuals of up to so many times the tolerance of their marches are not compared. */
+const noise = 100;
+/** Largest change in one turn: of ln p of a gas, or of the height in scale heights. */
+const largestChange = 3;
+/** A gas of which there is less, before and after, may change by more. */
+const countingFraction = 1e-6;
+/** In the first turns the Jacobian along the march is made anew, as long as the residual is larger than this. */
+const renewals = 3;
+const smallResidual = 1e-2;
+/** Residuals of up to so many times the tolerance of a loose march may come from its looseness. */
+const doubtful = 1e4;
+const smallestContraction = 1e-3;
+/** A change has to bring the residual down by this share of itself; else it is cut by `damping`, so many times. */
+const enoughDecrease = 0.1;
+const damping = 0.35;
+const dampings = 2;
+const differencesLimit = 6;
+const increment = 1e-4;
+const differenceTolerance = 1e-8;
+/** Done when the residual, times how the last turn brought it down, is below so many tolerances. */
+const closeness = 5;
+/** Below this escape parameter of the mean mass the gas drifts through the exobase at over a fifth of √(kT/m). */
+const smallestBound = 1.5;
+const usualLimit = 80;
+
+/** An exobase that was tried. */
+interface Trial {
+  height: number;
+  state: Float64Array;
+  residual: Float64Array;
+  /** The largest of it; Infinity where the march could not reach the base. */
+  norm: number;
+  /** Of its march. */
+  tolerance: number;
+}
+
+interface Search {
+  readonly column: EscapingColumn;
+  readonly size: number;
+  readonly tolerance: number;
+  readonly down: DownwardMarch;
+  marches: number;
+  /** In which changes of the height are counted, m. */
+  scale: number;
+  /** Row by gas; columns by ln p of each gas at the exobase and by its height in `scale`. */
+  readonly jacobian: Float64Array;
+  /** What Newton's method would change. */
+  readonly change: Float64Array;
+}
+
+/**
+ * Finds the exobase of a coupled column: unknown are its height and ln p of every gas there; known that the number
+ * of the criterion is 1, and what a march down has to arrive with. Newton's method, with a Jacobian from the march that
+ * Broyden's rule keeps up; damped; and with one from differences where that does not help.
+ *
+ * @param guess      near the exobase; state in ln Pa
+ * @param tolerance  of ln p per step of the last marches
+ * @param limit      number of marches after which to give up
+ *
+ * @source [Broyden1965]
+ */
+export function findCoupledExobase(
+  column: EscapingColumn,
+  guess: { height: number; state: Float64Array },
+  tolerance: number,
+  limit = usualLimit,
+): CoupledExobase {
+  const search = beginSearch(column, tolerance);
+  let here = tryExobase(search, guess.height, guess.state, Math.max(tolerance, loosest));
+  if (here.norm === Infinity) return failure(search, here, "no_descent");
+  search.scale = scaleHeightOfMarch(search, here);
+  renewJacobian(search);
+  let contraction = 1;
+  let differences = 0;
+
+  for (let turn = 1; search.marches < limit; turn += 1) {
+    if (isUnbound(search, here)) return failure(search, here, "runaway");
+    if (!setChange(search, here)) return failure(search, here, "no_descent");
+    const isLast = here.tolerance <= tolerance && here.norm * contraction < closeness * tolerance;
+    const next = isLast ? correct(search, here) : improve(search, here);
+    if (isLast && next !== null && next.norm <= noise * tolerance) return settled(search, next);
+    if (next !== null) {
+      contraction = Math.max(smallestContraction, next.norm / here.norm);
+      if (turn < renewals && next.norm > smallResidual) renewJacobian(search);
+      else updateJacobian(search, here, next);
+      here = next;
+    } else if (differences < differencesLimit) {
+      differences += 1;
+      here = differenceJacobian(search, here);
+      if (here.norm === Infinity) return failure(search, here, "no_descent");
+    } else return failure(search, here, "no_descent");
+  }
+  return failure(search, here, "too_many_marches");
+}
+
+function beginSearch(column: EscapingColumn, tolerance: number): Search {
+  const size = column.logSpeeds.length;
+  return {
+    column,
+    size,
+    tolerance,
+    down: downwardMarch(column),
+    marches: 0,
+    scale: 1,
+    jacobian: new Float64Array(size * (size + 1)),
+    change: new Float64Array(size + 1),
+  };
+}
+
+/** Marches down from an exobase, whose pressures are first made to meet the criterion. */
+function tryExobase(search: Search, height: number, state: Float64Array, tolerance: number): Trial {
+  const { column, down, size } = search;
+  const excess = logNumber(column.number, height, lawAt(column.problem, height, state, -1), state);
+  const shifted = state.map((value) => value + excess);
+  search.marches += 1;
+  const norm = finiteOr(Infinity, () => marchDown(down, height, shifted, tolerance));
+  return { height, state: shifted, residual: down.residual.slice(0, size), norm, tolerance };
+}
+
+/** A number that a computation gives; the other where it gives none, or breaks a bound of the physics. */
+function finiteOr(other: number, compute: () => number): number {
+  try {
+    const value = compute();
+    return Number.isFinite(value) ? value : other;
+  } catch (error) {
+    if (error instanceof PhysicsDomainError) return other;
+    throw error;
+  }
+}
+
+/** Scale height of the whole gas at the exobase just marched from, in h. */
+function scaleHeightOfMarch({ down, size }: Search, { state }: Trial): number {
+  setComposition(state, size);
+  let fall = 0;
+  for (let i = 0; i < size; i += 1) fall += fractions[i] * down.topSlope[i];
+  return 1 / Math.abs(fall);
+}
+
+function isUnbound({ column, size }: Search, { height, state }: Trial): boolean {
+  const { temperaturePiece } = lawAt(column.problem, height, state, -1);
+  setComposition(state, size);
+  return boundParameter(column.problem, height, temperaturePiece) < smallestBound;
+}
+
+/** Makes the Jacobian along the march just made. */
+function renewJacobian({ down, jacobian, size, scale }: Search): void {
+  marchJacobian(down, jacobian);
+  for (let i = 0; i < size; i += 1) jacobian[i * (size + 1) + size] *= scale;
+}
+
+/** Solves for the change that brings the residual to nothing and keeps to the criterion; false if there is none. */
+function setChange(
+  { column, jacobian, change, size, scale }: Search,
+  { height, state, residual }: Trial,
+): boolean {
+  const unknowns = size + 1;
+  matrix.set(jacobian);
+  const law = lawAt(column.problem, height, state, -1);
+  setComposition(state, size);
+  const lastRow = matrix.subarray(size * unknowns, unknowns * unknowns);
+  lastRow[size] = logNumberGradient(column.number, height, law, lastRow) * scale;
+  for (let i = 0; i < size; i += 1) change[i] = -residual[i];
+  change[size] = 0;
+  return solveLinear(matrix, unknowns, change);
+}
+
+const matrix = new Float64Array((maximumGases + 1) * (maximumGases + 1));
+
+/** The state after a part of the change. */
+function moved({ change, size, scale }: Search, { height, state }: Trial, part: number) {
+  return {
+    height: height + part * change[size] * scale,
+    state: state.map((value, i) => value + part * change[i]),
+  };
+}
+
+/** The part of the change that may be taken at once, and the largest change that counts. */
+function allowedPart(search: Search, here: Trial): { part: number; largest: number } {
+  const { column, change, size, scale } = search;
+  const logCounting = setComposition(here.state, size);
+  let largest = Math.abs(change[size]);
+  for (let i = 0; i < size; i += 1) {
+    const staysRare =
+      fractions[i] < countingFraction && here.state[i] + change[i] < logCounting + logOfCountingFraction;
+    if (!staysRare) largest = Math.max(largest, Math.abs(change[i]));
+  }
+  const rise = change[size] * scale;
+  const room = rise > 0 ? (farthestHeight(column.problem) - here.height) / 2 : here.height / 2;
+  const part = Math.min(1, largestChange / largest, room / Math.abs(rise));
+  return { part, largest: part * largest };
+}
+
+const logOfCountingFraction = logarithm(countingFraction);
+
+/** A trial with a smaller residual in the direction of the change; null if there is none near. */
+function improve(search: Search, here: Trial): Trial | null {
+  const { part, largest } = allowedPart(search, here);
+  const loose = Math.max(search.tolerance, Math.min(loosest, looseShare * largest));
+  let share = part;
+  for (let cut = 0; cut <= dampings; cut += 1) {
+    const next = moved(search, here, share);
+    const trial = tryExobase(search, next.height, next.state, loose);
+    if (isBetter(trial, here, share)) return trial;
+    if (loose > search.tolerance && trial.norm < doubtful * loose) {
+      // A loose march may be what does not improve.
+      const finer = tryExobase(search, next.height, next.state, search.tolerance);
+      if (isBetter(finer, here, share)) return finer;
+    }
+    share *= damping;
+  }
+  return null;
+}
+
+function isBetter(trial: Trial, here: Trial, share: number): boolean {
+  const floor = noise * Math.max(here.tolerance, trial.tolerance);
+  return trial.norm <= floor || trial.norm < here.norm * (1 - enoughDecrease * share);
+}
+
+/** Broyden's rule: the Jacobian that differs least and explains the last change. */
+function updateJacobian({ jacobian, size, scale }: Search, before: Trial, after: Trial): void {
+  const unknowns = size + 1;
+  let square = 0;
+  for (let k = 0; k < size; k += 1) {
+    taken[k] = after.state[k] - before.state[k];
+    square += taken[k] * taken[k];
+  }
+  taken[size] = (after.height - before.height) / scale;
+  square += taken[size] * taken[size];
+  if (square === 0) return;
+  for (let i = 0; i < size; i += 1) {
+    let unexplained = after.residual[i] - before.residual[i];
+    for (let k = 0; k < unknowns; k += 1) unexplained -= jacobian[i * unknowns + k] * taken[k];
+    for (let k = 0; k < unknowns; k += 1) jacobian[i * unknowns + k] += (unexplained * taken[k]) / square;
+  }
+}
+
+const taken = new Float64Array(maximumGases + 1);
+
+/** Makes the Jacobian by marching from slightly changed exobases; the same exobase, marched from as finely. */
+function differenceJacobian(search: Search, { height, state }: Trial): Trial {
+  const { down, jacobian, size, scale, tolerance } = search;
+  const unknowns = size + 1;
+  const fine = Math.max(tolerance, differenceTolerance);
+  const here = tryExobase(search, height, state, fine);
+  for (let k = 0; k < unknowns && here.norm < Infinity; k += 1) {
+    const changed = here.state.map((value, i) => value + (i === k ? increment : 0));
+    const changedHeight = k === size ? height + increment * scale : height;
+    search.marches += 1;
+    const norm = finiteOr(Infinity, () => marchDown(down, changedHeight, changed, fine));
+    if (norm === Infinity) return { ...here, norm };
+    for (let i = 0; i < size; i += 1) {
+      jacobian[i * unknowns + k] = (down.residual[i] - here.residual[i]) / increment;
+    }
+  }
+  return here;
+}
+
+/** Takes the whole change, however small. */
+function correct(search: Search, here: Trial): Trial | null {
+  const next = moved(search, here, 1);
+  const trial = tryExobase(search, next.height, next.state, search.tolerance);
+  return trial.norm < Infinity ? trial : null;
+}
+
+/** The exobase just marched from is the one, if the number rises there. */
+function settled({ column, down, size, marches }: Search, { height, state, norm }: Trial): CoupledExobase {
+  const law = lawAt(column.problem, height, state, -1);
+  setComposition(state, size);
+  if (logNumberSlope(column.number, height, law, down.topSlope) > 0) {
+    return { converged: true, height, state, down, marches };
+  }
+  return { converged: false, reason: "turn", height, residual: norm, marches };
+}
+
+function failure(
+  { marches }: Search,
+  { height, norm }: Trial,
+  reason: Extract<CoupledExobase, { converged: false }>["reason"],
+): CoupledExobase {
+  return { converged: false, reason, height, residual: norm, marches };
+}

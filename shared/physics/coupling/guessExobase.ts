@@ -1,0 +1,308 @@
+import { boundParameter } from "../column/boundParameter";
+import { stepCap } from "../column/columnMarch";
+import { bindColumn, columnSlope, slopeParts, type BaseFluxes } from "../column/columnSlope";
+import { fractions, maximumGases, setComposition } from "../column/composition";
+import { farthestHeight, smallestLogPressure } from "../column/marchUp";
+import { lawAt, type StepLaw } from "../column/stepLaw";
+import { boltzmann } from "../constants/codata2022";
+import { logNumberOfComposition, logNumberSlope } from "../exobase/exobaseNumber";
+import { smallestBoundParameter } from "../exobase/findExobase";
+import {
+  denseCoefficients,
+  denseRows,
+  end,
+  finishStep,
+  interpolateStep,
+  k1,
+  k13,
+  maximumDimension,
+  start,
+  takeStep,
+} from "../numerics/dormandPrince";
+import { exponential, log1p, logarithm } from "../numerics/elementary";
+import { findRoot } from "../numerics/findRoot";
+import { pieceAt } from "../numerics/piecewiseCubic";
+import { growthAfter, rememberStep, shrinkAfter } from "../numerics/stepControl";
+import { logFluxes, logVelocities, setFluxes, setVelocities, velocitySlopes } from "./escapeFluxes";
+import type { EscapingColumn } from "./escapingColumn";
+
+/**
+ * Where the exobase of a coupled column should be, by one march upward that knows the escape at every height. For a
+ * trace gas in a fixed background the flux that leaves a height h is Φ₀ = wₕn_F(h)/(1 + wJ), n_F the density without
+ * flux, so that the density left there is
+ *
+ *   n = n_F/(1 + wJ),   J = n_F ∫ dh/[(D + K) n_F],   (ln J)′ = (ln n_F)′ + 1/[(D + K)J]
+ *
+ * (w referred to the base). The march is of ln p_F and ln J of each gas; m̄, friction and K at a height are those of
+ * the composition left there. A trace gas comes out exact to the tolerance of the march, others nearly so.
+ */
+export interface ExobaseGuess {
+  /** Whether the number of the criterion rose through 1; else the state is that where it was largest. */
+  hasCrossing: boolean;
+  height: number;
+  state: Float64Array;
+  /** Largest wJ of any gas there. */
+  largestDepletion: number;
+  /** The largest ln of the number met, and where. */
+  largestLogNumber: number;
+  heightOfLargest: number;
+}
+
+const tolerance = 1e-2;
+/** Height of the start over the base, in scale heights: J is nothing at the base itself. */
+const startOfMarch = 0.02;
+const endOfMarch = logarithm(10);
+/** Where a flux drags another gas by more than this, in ln p up to the exobase, the march is repeated with it. */
+const smallDrag = 0.1;
+const settledDrag = 0.05;
+const repetitions = 3;
+const subsamples = 8;
+const stepLimit = 3000;
+/** ln J of a gas that nothing else is there to hold back. */
+const smallestLogJ = -600;
+
+let column: EscapingColumn;
+let drag: BaseFluxes;
+let size = 0;
+/** ln p of what is left of each gas, and the share wJ/(1 + wJ) that is gone, as `setDepleted` left them. */
+const depleted = new Float64Array(maximumGases);
+const gone = new Float64Array(maximumGases);
+const depletedSlopes = new Float64Array(maximumGases);
+/** 1/(D + K) of each gas, s m⁻², as `depletedSlope` left them. */
+const conductances = new Float64Array(maximumGases);
+
+/** Guesses the exobase. */
+export function guessExobase(escaping: EscapingColumn): ExobaseGuess {
+  column = escaping;
+  size = escaping.problem.masses.length;
+  drag = new Float64Array(size);
+  let guess = marchDepleted();
+  let largest = dragOf(guess);
+  for (let k = 0; k < repetitions && guess.hasCrossing && largest > smallDrag; k += 1) {
+    for (let i = 0; i < size; i += 1) drag[i] = exponential(logFluxes[i]);
+    guess = marchDepleted();
+    const before = largest;
+    largest = dragOf(guess);
+    if (Math.abs(largest - before) < settledDrag * before) break;
+  }
+  return guess;
+}
+
+/** The largest change of ln p of a gas up to the exobase by the fluxes of the others; sets `logFluxes`. */
+function dragOf({ height, state }: ExobaseGuess): number {
+  const { problem } = column;
+  const law = lawAt(problem, height, state, 1);
+  setFluxes(column, height, law.temperaturePiece, state);
+  bindColumn(problem, drag, law, true);
+  columnSlope(height, state, depletedSlopes);
+  const { frictions } = slopeParts;
+  const sums = new Float64Array(size);
+  let pair = 0;
+  for (let i = 0; i < size; i += 1) {
+    for (let j = 0; j < i; j += 1) {
+      sums[i] += exponential(logFluxes[j]) * frictions[pair];
+      sums[j] += exponential(logFluxes[i]) * frictions[pair];
+      pair += 1;
+    }
+  }
+  return height * Math.max(...sums);
+}
+
+/** Sets what is left of each gas at a height where the state of the march is ln p_F and ln J. */
+function setDepleted(height: number, state: Float64Array): StepLaw {
+  const { temperature } = column.problem;
+  setVelocities(
+    column,
+    height,
+    temperature.kind === "points" ? pieceAt(temperature.heights, height, true) : 0,
+  );
+  for (let i = 0; i < size; i += 1) {
+    const logDepletion = logVelocities[i] + state[size + i];
+    if (logDepletion > 36) {
+      depleted[i] = state[i] - logDepletion;
+      gone[i] = 1;
+    } else {
+      const depletion = exponential(logDepletion);
+      depleted[i] = state[i] - log1p(depletion);
+      gone[i] = depletion / (1 + depletion);
+    }
+  }
+  return lawAt(column.problem, height, depleted, 1);
+}
+
+/** The right-hand side of the march. */
+function depletedSlope(height: number, state: Float64Array, slope: Float64Array): void {
+  const law = setDepleted(height, state);
+  const pressure = exponential(setComposition(depleted, size));
+  bindColumn(column.problem, drag, law, true);
+  columnSlope(height, depleted, slope);
+  const { resistances } = slopeParts;
+  const density = pressure / (boltzmann.value * slopeParts.temperature());
+  const kappa = slopeParts.kappa();
+  const warming = slopeParts.warming();
+  for (let i = 0; i < size; i += 1) {
+    conductances[i] = (density * resistances[i]) / (1 + kappa * resistances[i]);
+    const gain = conductances[i] === 0 ? 0 : conductances[i] * exponential(-state[size + i]);
+    slope[size + i] = slope[i] - warming + gain;
+  }
+}
+
+/** What is to be known where a step ends. */
+interface Waymark {
+  logNumber: number;
+  /** d ln of the number/dh, m⁻¹. */
+  slope: number;
+  logKnudsen: number;
+  /** Whether Kn falls and the gas is unbound. */
+  runsAway: boolean;
+  isThin: boolean;
+  /** Longest step from here, m. */
+  cap: number;
+}
+
+/** @param slope  of the march at that state */
+function waymarkAt(height: number, state: Float64Array, slope: Float64Array): Waymark {
+  const { problem, number, bulk } = column;
+  const law = setDepleted(height, state);
+  for (let i = 0; i < size; i += 1) {
+    depletedSlopes[i] = slope[i] - gone[i] * (velocitySlopes[i] + slope[size + i]);
+  }
+  const cap = stepCap(depleted, depletedSlopes, size, 1);
+  const logPressure = setComposition(depleted, size);
+  const logNumber = logNumberOfComposition(number, height, law, logPressure);
+  const numberSlope = logNumberSlope(number, height, law, depletedSlopes);
+  const isBulk = number === bulk;
+  const bulkSlope = isBulk ? numberSlope : logNumberSlope(bulk, height, law, depletedSlopes);
+  return {
+    logNumber,
+    slope: numberSlope,
+    logKnudsen: isBulk ? logNumber : logNumberOfComposition(bulk, height, law, logPressure),
+    runsAway: bulkSlope < 0 && boundParameter(problem, height, law.temperaturePiece) < smallestBoundParameter,
+    isThin: logPressure < smallestLogPressure,
+    cap,
+  };
+}
+
+/** One march from the base to beyond the exobase, or as far as there is gas that is held. */
+function marchDepleted(): ExobaseGuess {
+  const limit = farthestHeight(column.problem);
+  let position = setOut();
+  let step = position;
+  let here = waymarkAt(position, start, k1);
+  const memory = { step: 0, error: 1 };
+  const guess = emptyGuess();
+  consider(guess, here.logNumber, position);
+  for (let steps = 0; steps < stepLimit && position < limit; steps += 1) {
+    const taken = takeStepUp(position, Math.min(step, here.cap), limit);
+    if (taken === null) break;
+    finishStep(depletedSlope, position, taken.step);
+    step = taken.step * growthAfter(taken.step, taken.error, memory);
+    rememberStep(memory, taken.step, taken.error);
+    const there = waymarkAt(position + taken.step, end, k13);
+    lookWithin(guess, position, taken.step, here, there);
+    here = there;
+    position += taken.step;
+    start.set(end);
+    k1.set(k13);
+    if (here.isThin || here.runsAway || (here.logKnudsen > endOfMarch && guess.hasCrossing)) break;
+  }
+  return guess;
+}
+
+/** Loads `start` and `k1` a little above the base; returns the height. */
+function setOut(): number {
+  start.set(column.problem.baseLogPressures);
+  start.fill(smallestLogJ, size, 2 * size);
+  depletedSlope(0, start, k1);
+  let fall = 0;
+  for (let i = 0; i < size; i += 1) fall += fractions[i] * k1[i];
+  const height = startOfMarch / Math.abs(fall);
+  for (let i = 0; i < size; i += 1) {
+    start[i] += height * k1[i];
+    start[size + i] = Math.max(smallestLogJ, logarithm(height * conductances[i]));
+  }
+  depletedSlope(height, start, k1);
+  return height;
+}
+
+function takeStepUp(position: number, wished: number, limit: number): { step: number; error: number } | null {
+  let proposed = wished;
+  for (;;) {
+    const step = Math.min(proposed, limit - position);
+    const error = takeStep(depletedSlope, 2 * size, position, step) / tolerance;
+    if (error <= 1) return { step, error };
+    proposed = step * shrinkAfter(error);
+    if (!(proposed > 1e-9 * position)) return null;
+  }
+}
+
+function emptyGuess(): ExobaseGuess {
+  return {
+    hasCrossing: false,
+    height: 0,
+    state: new Float64Array(size),
+    largestDepletion: 0,
+    largestLogNumber: -Infinity,
+    heightOfLargest: 0,
+  };
+}
+
+/** Looks for the exobase, and for the largest number, within a step just finished. */
+function lookWithin(
+  guess: ExobaseGuess,
+  position: number,
+  step: number,
+  here: Waymark,
+  there: Waymark,
+): void {
+  const onlyRises = here.slope > 0 && there.slope > 0;
+  if (onlyRises && here.logNumber >= 0 === there.logNumber >= 0) {
+    consider(guess, there.logNumber, position + step);
+    return;
+  }
+  denseCoefficients(depletedSlope, 2 * size, position, step, dense, 0);
+  const valueAt = (part: number) => {
+    const height = position + part * step;
+    interpolateStep(dense, 0, 2 * size, start, 0, part, within);
+    const law = setDepleted(height, within);
+    return logNumberOfComposition(column.number, height, law, setComposition(depleted, size));
+  };
+  const parts = onlyRises ? 1 : subsamples;
+  let valueBelow = here.logNumber;
+  for (let part = 1; part <= parts; part += 1) {
+    const value = onlyRises ? there.logNumber : valueAt(part / parts);
+    const isWanted = !guess.hasCrossing || here.logKnudsen < endOfMarch;
+    if (valueBelow < 0 && value >= 0 && isWanted) {
+      const found = findRoot(valueAt, (part - 1) / parts, part / parts, rootTolerance);
+      if (found.converged) {
+        valueAt(found.root);
+        settle(guess, position + found.root * step);
+        guess.hasCrossing = true;
+      }
+    }
+    consider(guess, value, position + (part / parts) * step);
+    valueBelow = value;
+  }
+}
+
+/** Takes what is left at a height as the guess. */
+function settle(guess: ExobaseGuess, height: number): void {
+  guess.height = height;
+  guess.largestDepletion = 0;
+  for (let i = 0; i < size; i += 1) {
+    guess.state[i] = depleted[i];
+    guess.largestDepletion = Math.max(guess.largestDepletion, gone[i]);
+  }
+}
+
+/** Remembers where the number is largest and, as long as it did not pass 1, the state there. */
+function consider(guess: ExobaseGuess, logNumber: number, height: number): void {
+  if (!(logNumber > guess.largestLogNumber)) return;
+  guess.largestLogNumber = logNumber;
+  guess.heightOfLargest = height;
+  if (!guess.hasCrossing) settle(guess, height);
+}
+
+const rootTolerance = { value: 1e-6, bracket: 1e-9 };
+const dense = new Float64Array(denseRows * maximumDimension);
+const within = new Float64Array(maximumDimension);
