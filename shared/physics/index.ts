@@ -68,6 +68,7 @@ export { thermalSpeed } from "./escape/thermalSpeed";
 
 export { diffusionCoefficient } from "./column/diffusionCoefficient";
 export { defaultTolerance, solveColumn } from "./column/solveColumn";
+export { solveCoupledColumn } from "./coupling/solveCoupledColumn";
 
 export { magnitude } from "./numerics/magnitude";
 export { incompleteGamma, scaledUpperGamma } from "./numerics/incompleteGamma";

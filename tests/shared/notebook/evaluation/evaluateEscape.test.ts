@@ -1,6 +1,8 @@
 import { describe, expect, it } from "vitest";
 import "../../../toBeCloseToRelative";
-import { evaluateCells, numberIn, resultOf, type WrittenCell } from "../evaluateCells";
+import { evaluateNotebook, type EvaluationMemory } from "../../../../shared/notebook/evaluateNotebook";
+import type { EscapeModel } from "../../../../shared/notebook/evaluation/models";
+import { evaluateCells, notebookOf, numberIn, resultOf, type WrittenCell } from "../evaluateCells";
 
 const ilmara: WrittenCell = ["body", "ilmara", "mass = 0.41 earth_mass\nradius = 4943 km"];
 const air =
@@ -239,5 +241,93 @@ describe("correction factors", () => {
     expect(ranges("")).toEqual(["H"]);
     expect(ranges("correction = H: 0.73 ± 0.03")).toEqual([]);
     expect(codes("correction = H: 0.73 ± 0.03")).toContain("acts_by_centre");
+  });
+});
+
+describe("a coupled column", () => {
+  const coupled = (text = "", column = mixed) =>
+    resultOf(ilmara, column, ["escape", "leak", `column = air\n${text}`]);
+
+  it("is the default, shown as such, and may be written out", () => {
+    const { defaults, convention, result } = evaluateCells([
+      ilmara,
+      mixed,
+      ["escape", "leak", "column = air"],
+    ])[2];
+    expect(defaults.find(({ key }) => key === "coupling")?.text).toBe("coupling = coupled");
+    expect(convention).toEqual({ coupling: "coupled", criterion: "bulk, l = H" });
+    expect(coupled("coupling = coupled").values).toEqual(result.values);
+  });
+
+  it("loses at its exobase what Jeans escape takes there", () => {
+    const result = coupled();
+    const area = 4 * Math.PI * numberIn(result, "exobase.radius") ** 2;
+    for (const gas of ["H", "H2", "O", "CO2"]) {
+      const [rate, flux] = ["rate", "jeans_flux"].map((name) => numberIn(result, `${gas}.log10_${name}`));
+      expect(10 ** (rate - flux)).toBeCloseToRelative(area, 1e-6);
+    }
+  });
+
+  it("loses less of a light gas than an open column, and never much more than diffusion supplies", () => {
+    for (const column of [mixed, still]) {
+      const [open, closed] = [answer("", column), coupled("", column)];
+      expect(numberIn(closed, "H.rate")).toBeLessThan(numberIn(open, "H.rate"));
+      expect(numberIn(closed, "H.supply_fraction")).toBeLessThan(1.05);
+      // Carbon dioxide does not feel that it escapes; it feels the exobase, which hydrogen moves.
+      expect(numberIn(closed, "CO2.log10_rate")).toBeCloseToRelative(numberIn(open, "CO2.log10_rate"), 0.05);
+    }
+  });
+
+  it("is the open column where nothing escapes to speak of", () => {
+    const cold: WrittenCell = [
+      "column",
+      "air",
+      air.replace("428 K", "170 K").replace(", H2: 15 ppm, H: 1.2 ppm", ""),
+    ];
+    const [open, closed] = [answer("", cold), coupled("", cold)];
+    expect(closed.values["exobase.altitude"]).toEqual(open.values["exobase.altitude"]);
+    expect(numberIn(closed, "O.log10_rate")).toBeCloseToRelative(numberIn(open, "O.log10_rate"), 1e-9);
+  });
+
+  it("takes correction factors into the solution: the rate grows by less, the flux falls", () => {
+    const [plain, corrected] = [coupled(), coupled("correction = H: 3")];
+    const ratio = (name: string) => numberIn(corrected, name) / numberIn(plain, name);
+    expect(ratio("H.rate")).toBeGreaterThan(1.1);
+    expect(ratio("H.rate")).toBeLessThan(2.9);
+    expect(ratio("H.jeans_flux")).toBeLessThan(1);
+    expect(ratio("H.rate") / ratio("H.jeans_flux")).toBeCloseToRelative(3, 1e-3);
+  });
+
+  it("answers by every criterion", () => {
+    const altitudes = ["bulk", "simple", "unit_depth", "gas\ngas = O"].map((criterion) =>
+      numberIn(coupled(`criterion = ${criterion}`), "exobase.altitude"),
+    );
+    expect(new Set(altitudes).size).toBe(4);
+    for (const altitude of altitudes) expect(altitude).toBeCloseToRelative(altitudes[0], 0.2);
+  });
+
+  it("hands the column that it leaves behind to the corona", () => {
+    const cells: WrittenCell[] = [ilmara, mixed, ["escape", "leak", "column = air"]];
+    const halo = resultOf(...cells, ["corona", "halo", "escape = leak\ngas = H"]);
+    const [density] = ["H.number_density"].map((name) => numberIn(coupled(), name));
+    expect(numberIn(halo, "exobase.number_density")).toBe(density);
+    expect(density).toBeLessThan(0.9 * numberIn(answer(), "H.number_density"));
+  });
+
+  it("is a wind where no exobase is left", () => {
+    const result = coupled("", ["column", "air", air.replace("428 K", "40000 K")]);
+    expect(result.status).toBe("fault");
+    expect(result.values.regime).toEqual({ value: "wind" });
+    expect(result.values).toHaveProperty("wind_mass_rate");
+  });
+
+  it("is solved once for the same column, criterion and factors", () => {
+    const cells: WrittenCell[] = [ilmara, mixed, ["escape", "leak", "column = air\ngases = H"]];
+    const first = evaluateNotebook(notebookOf(cells));
+    const more = notebookOf([...cells.slice(0, 2), ["escape", "leak", "column = air\ngases = H, O"]]);
+    const model = (memory: EvaluationMemory) => memory.get("2")!.evaluated.above.model as EscapeModel;
+    const second = evaluateNotebook(more, first.memory);
+    expect(model(second.memory).coupled?.outcome).toBe(model(first.memory).coupled?.outcome);
+    expect(second.evaluation).toEqual(evaluateNotebook(more).evaluation);
   });
 });
