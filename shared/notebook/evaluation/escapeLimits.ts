@@ -48,9 +48,12 @@ export function limitValues(
       Object.assign(values, carried(`${formula}.supply_fraction`, share, log10Share, "1"));
       saySupply(cell, formula, share);
     }
-    const { logParticles } = columnInventory(column, index, column.input.baseAltitude, exobase.altitude);
-    const { time, log10Time } = depletionTime({ logParticles, log10Rate });
-    Object.assign(values, carried(`${formula}.depletion_time`, time, log10Time, "s"));
+    const name = `${formula}.depletion_time`;
+    if (cell.isWanted(name) || cell.isWanted(`${formula}.log10_depletion_time`)) {
+      const { logParticles } = columnInventory(column, index, column.input.baseAltitude, exobase.altitude);
+      const { time, log10Time } = depletionTime({ logParticles, log10Rate });
+      Object.assign(values, carried(name, time, log10Time, "s"));
+    }
     return { formula, limit };
   });
   sayWhereLimitsAre(cell, limits);
