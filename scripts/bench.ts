@@ -3,6 +3,7 @@
 // scripts/bench/ that exports a function from a `Timer` to a `BenchTable`, and name it here.
 import { columnBench } from "./bench/columnBench";
 import { evaluationBench } from "./bench/evaluationBench";
+import { spreadBench } from "./bench/spreadBench";
 import { printTable, timer } from "./bench/timing";
 
-for (const bench of [columnBench, evaluationBench]) printTable(bench(timer));
+for (const bench of [columnBench, evaluationBench, spreadBench]) printTable(bench(timer));

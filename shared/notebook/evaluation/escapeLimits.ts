@@ -28,9 +28,8 @@ export function limitValues(
   coupling: EscapeConvention["coupling"],
 ): Record<string, CellResult["values"]> {
   const byGas: Record<string, CellResult["values"]> = {};
-  const indices = leaving.map(({ index }) => index);
-  const inventories = columnInventory(column, indices, column.input.baseAltitude, exobase.altitude);
-  const limits = leaving.map(({ formula, index, log10Rate }, place) => {
+  const inventories = inventoriesOf(cell, column, exobase, leaving);
+  const limits = leaving.map(({ formula, index, log10Rate }) => {
     const values: CellResult["values"] = (byGas[formula] = {});
     const limit = columnDiffusionLimit(column, index, exobase.radius);
     if (limit.exists && limit.flux > 0) {
@@ -43,13 +42,32 @@ export function limitValues(
       Object.assign(values, carried(`${formula}.supply_fraction`, share, log10Share, "1"));
       saySupply(cell, formula, share, coupling);
     }
-    const { logParticles } = inventories[place];
-    const { time, log10Time } = depletionTime({ logParticles, log10Rate });
-    Object.assign(values, carried(`${formula}.depletion_time`, time, log10Time, "s"));
+    const logParticles = inventories.get(index);
+    if (logParticles !== undefined) {
+      const { time, log10Time } = depletionTime({ logParticles, log10Rate });
+      Object.assign(values, carried(`${formula}.depletion_time`, time, log10Time, "s"));
+    }
     return { formula, limit };
   });
   sayWhereLimitsAre(cell, limits);
   return byGas;
+}
+
+/** ln of the particles up to the exobase, by the place of the gas; of those whose time is asked for. */
+function inventoriesOf(
+  cell: OpenCell,
+  column: ColumnModel["column"],
+  exobase: ColumnLevel,
+  leaving: readonly LeavingGas[],
+): Map<number, number> {
+  const indices = leaving
+    .filter(({ formula }) =>
+      ["depletion_time", "log10_depletion_time"].some((name) => cell.isWanted(`${formula}.${name}`)),
+    )
+    .map(({ index }) => index);
+  if (indices.length === 0) return new Map();
+  const inventories = columnInventory(column, indices, column.input.baseAltitude, exobase.altitude);
+  return new Map(inventories.map(({ logParticles }, place) => [indices[place], logParticles]));
 }
 
 /** Of a coupled column its own solution says where the supply sets the rate. */

@@ -44,17 +44,21 @@ const evaluators: Readonly<Record<Cell["kind"], (cell: OpenCell) => CellAnswer>>
   loss: evaluateLoss,
 };
 
-/** One cell in its surroundings. Never throws: what cannot be answered becomes a fault of the cell. */
+/**
+ * One cell in its surroundings. Never throws: what cannot be answered becomes a fault of the cell.
+ *
+ * @param wanted  at a point of a sweep or spread, the names of the values that are asked for; null for all there is
+ */
 export function evaluateCell(
   cell: Cell,
   parsed: ParsedEntries,
   surroundings: RecordedSurroundings,
   unitSystem: "SI" | "cgs",
   last: EvaluatedCell | undefined,
-  isDraw = false,
+  wanted: ReadonlySet<string> | null = null,
 ): EvaluatedCell {
   const lastModel = last?.above.model ?? null;
-  const open = openCell(cell, parsed, cellSchemas[cell.kind], surroundings, unitSystem, lastModel, isDraw);
+  const open = openCell(cell, parsed, cellSchemas[cell.kind], surroundings, unitSystem, lastModel, wanted);
   const answer = evaluateSafely(open, cell.kind);
   const values = finiteValues(open, answer.values ?? {});
   const notes = orderNotes(locateNotes(open.notes, open.text, open.entries));

@@ -35,9 +35,11 @@ export function evaluateCorona(cell: OpenCell): CellAnswer {
   sayStep(cell, place.corona, gas);
   sayIfBeyondHillRadius(cell, place, levels ?? []);
   const density = escape.exobase.numberDensities[place.index];
+  const values = { "exobase.number_density": measured(density === 0 ? null : density, "m^-3") };
+  if (cell.isDraw) return { gases: [gas], values };
   return {
     gases: [gas],
-    values: { "exobase.number_density": measured(density === 0 ? null : density, "m^-3") },
+    values,
     tables: levels ? { levels: tabulate(cell, place, levels) } : {},
     profiles: profilesOf(place),
   };

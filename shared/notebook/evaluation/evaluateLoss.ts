@@ -41,7 +41,7 @@ export function evaluateLoss(cell: OpenCell): CellAnswer {
   return {
     gases: [gas.formula],
     values: lossValues(cell, body, gas, particles),
-    tables: Number.isFinite(particles) ? { history: historyOf(span, rate) } : {},
+    tables: Number.isFinite(particles) && !cell.isDraw ? { history: historyOf(span, rate) } : {},
   };
 }
 

@@ -24,7 +24,7 @@ export function evaluateValues(cell: OpenCell): CellAnswer {
     globals[entry.key] = quantity;
     if (!quantity) continue;
     values[entry.key] = measured(quantity.value, siUnitText(quantity.dimension));
-    cell.understand(entry, understoodText(entry.node, quantity, cell));
+    if (!cell.isDraw) cell.understand(entry, understoodText(entry.node, quantity, cell));
   }
   sayWhichCentresAct(cell);
   return { values, globals };

@@ -18,7 +18,7 @@ export interface OpenCell {
   readonly surroundings: RecordedSurroundings;
   /** What the cell handed on when it was last evaluated; to be used again only where it is sure to be the same. */
   readonly lastModel: CellModel | null;
-  /** One of many points of a sweep or spread: only values, models and notes are asked for. */
+  /** One of many points of a sweep or spread: only wanted values, models and notes are asked for. */
   readonly isDraw: boolean;
   /** In the order written; of a key that stands twice, the first. */
   readonly entries: readonly Entry[];
@@ -27,6 +27,8 @@ export interface OpenCell {
   readonly understood: ReadonlyMap<string, Understood>;
   readonly defaults: CellEvaluation["defaults"];
   entry(key: string): Entry | undefined;
+  /** Whether anyone asks for a value; what is costly and not wanted may be left out. */
+  isWanted(name: string): boolean;
   /** Adds a note; at an entry's value, a range, or with no place on the cell as a whole. */
   say(level: Note["level"], code: string, message: string, at?: Entry | TextRange, remedy?: Remedy): void;
   understand(entry: Entry, text: string | null): void;
@@ -42,7 +44,7 @@ export function openCell(
   surroundings: RecordedSurroundings,
   unitSystem: "SI" | "cgs",
   lastModel: CellModel | null,
-  isDraw: boolean,
+  wanted: ReadonlySet<string> | null,
 ): OpenCell {
   const notes: Note[] = [...syntaxNotes];
   const understood = new Map<string, Understood>();
@@ -58,7 +60,8 @@ export function openCell(
     unitSystem,
     surroundings,
     lastModel,
-    isDraw,
+    isDraw: wanted !== null,
+    isWanted: (name) => wanted === null || wanted.has(name),
     entries: [...byKey.values()],
     notes,
     understood,

@@ -22,6 +22,8 @@ interface TaskCell {
   evaluated: EvaluatedCell;
   /** Whether it rests on anything that is varied or drawn. */
   isMoved: boolean;
+  /** Names of those of its values that are watched or that other cells use. */
+  wanted: ReadonlySet<string>;
 }
 
 /** What is drawn, as the notebook has it. */
@@ -59,12 +61,23 @@ export function openTask(document: NotebookDocument, task: LongTask): OpenTask {
   if (!plan || plan.key !== task.key) throw new Error(`The document has no task for ${task.name}.`);
 
   const moved = movedCells(plan);
+  const used = [...plan.watch, ...plan.trace.names];
   const taskCells = cells.flatMap((cell): TaskCell[] => {
     const remembered = memory.get(cell.id)!;
     const nodes = plan.trace.nodes.filter(({ cellId }) => cellId === cell.id);
     if (nodes.length === 0) return [];
     const parsed = onlyEntries(remembered.parsed, nodes);
-    return [{ cell, parsed, evaluated: remembered.evaluated, isMoved: moved.has(cell.id) }];
+    const prefix = `${cell.name}.`;
+    const wanted = used.flatMap((name) => (name.startsWith(prefix) ? [name.slice(prefix.length)] : []));
+    return [
+      {
+        cell,
+        parsed,
+        evaluated: remembered.evaluated,
+        isMoved: moved.has(cell.id),
+        wanted: new Set(wanted),
+      },
+    ];
   });
   const evaluate = evaluatorOf(taskCells, plan, document.unitSystem);
   const above = aboveOf(taskCells);
@@ -123,7 +136,7 @@ function evaluatorOf(
   return (replacements) => {
     let above = stillAbove;
     const said: EvaluatedPoint["said"] = [];
-    for (const { cell, parsed, evaluated, isMoved } of cells.slice(still.length)) {
+    for (const { cell, parsed, evaluated, isMoved, wanted } of cells.slice(still.length)) {
       if (!isMoved) {
         above = addCell(above, evaluated.above);
         continue;
@@ -139,7 +152,7 @@ function evaluatorOf(
         surroundings,
         unitSystem,
         last.get(cell.id) ?? evaluated,
-        true,
+        wanted,
       );
       last.set(cell.id, answer);
       for (const note of answer.result.notes) said.push({ cell: cell.name, note });

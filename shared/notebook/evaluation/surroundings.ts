@@ -109,7 +109,7 @@ export function surroundingsOf(
       }
       const [name = "", ...rest] = path.split(".");
       const cell = above.byName.get(name);
-      if (cell && rest.length === 0) return `a ${cell.kind} cell`;
+      if (cell && rest.length === 0) return kindInWords(cell.kind);
       if (cell) return resultOf(cell, rest.join("."), path);
       if (isBelow(name)) {
         return {
@@ -134,7 +134,7 @@ export function surroundingsOf(
     gas: (formula) => above.gases.get(formula) ?? null,
     definedAbove(name) {
       const cell = above.byName.get(name);
-      if (cell) return `a ${cell.kind} cell`;
+      if (cell) return kindInWords(cell.kind);
       const global = above.globals.get(name);
       return global ? `an entry of the values cell ${global.cell.name}`.trimEnd() : null;
     },
@@ -142,6 +142,10 @@ export function surroundingsOf(
     trace: (names) => traceResults(above, names.split(" ")),
     taskAnswer,
   };
+}
+
+function kindInWords(kind: CellKind): string {
+  return `${/^[aeiou]/.test(kind) ? "an" : "a"} ${kind} cell`;
 }
 
 function resultOf(cell: CellAbove, name: string, path: string): Quantity | Unavailable | string | undefined {

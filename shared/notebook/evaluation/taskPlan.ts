@@ -56,7 +56,10 @@ function checkWatched(cell: OpenCell, { path, range }: NameNode): boolean {
     const remedy = nearest === undefined ? undefined : changeTo(range, nearest);
     cell.say("fault", "unknown_name", `No result above is called *${path}*.${hint}`, range, remedy);
   } else if (typeof found === "string") {
-    const message = `*${path}* is *${found}*, no number; only numbers can be watched.`;
+    const isCell = cell.surroundings.cell(path).found === "above";
+    const message = isCell
+      ? `*${path}* is ${found}; name one of its results, such as leak.exobase.altitude.`
+      : `*${path}* is *${found}*, no number; only numbers can be watched.`;
     cell.say("fault", "not_a_quantity", message, range);
   } else cell.say("fault", "unavailable", found.unavailable, range);
   return false;

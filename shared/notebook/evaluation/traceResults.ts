@@ -31,6 +31,8 @@ export interface Trace {
   nodes: TraceNode[];
   /** In the order of the notebook. */
   inputs: UncertainInput[];
+  /** Every name that they use, as it is written. */
+  names: string[];
   /** Name of a sweep or spread among what the results rest on. */
   longWork: string | null;
 }
@@ -52,6 +54,7 @@ export function traceResults(above: NotebookAbove, names: readonly string[]): Tr
     key: places.map(textOf).join("\n"),
     nodes,
     inputs: uncertainInputs(above, places),
+    names: [...new Set(places.flatMap(namesOf))],
     longWork: places.find(({ cell }) => cell.kind === "sweep" || cell.kind === "spread")?.cell.name ?? null,
   };
 }
@@ -94,12 +97,15 @@ function entryOf(cell: CellAbove, key: string): Place | null {
   return entry ? { cell, entry } : null;
 }
 
-function usesOf(above: NotebookAbove, { cell, entry }: Place): Place[] {
-  // What a cell did not look up as it stands, it may look up at another point; so all that it writes counts.
+function usesOf(above: NotebookAbove, at: Place): Place[] {
+  const used = namesOf(at).flatMap((name) => placeOf(above, name) ?? []);
+  return used.filter(({ cell, entry }) => cell !== at.cell || (at.entry !== null && entry !== at.entry));
+}
+
+/** What a cell did not look up as it stands, it may look up at another point; so all that it writes counts. */
+function namesOf({ cell, entry }: Place): string[] {
   const written = (entry ? [entry] : cell.entries).flatMap(({ node }) => namesIn(node));
-  const names = entry ? written : [...new Set([...cell.uses, ...written])];
-  const used = names.flatMap((name) => placeOf(above, name) ?? []);
-  return used.filter((place) => place.cell !== cell || (entry !== null && place.entry !== entry));
+  return entry ? written : [...new Set([...cell.uses, ...written])];
 }
 
 function namesIn(node: ValueNode): string[] {
