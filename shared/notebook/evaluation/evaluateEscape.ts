@@ -20,8 +20,8 @@ export function evaluateEscape(cell: OpenCell): CellAnswer {
   checkName(cell, cell.name);
   requireEntries(cell);
   const source = readCellEntry(cell, "column");
-  const gases = (source && readGases(cell, source)) ?? [];
   const convention = readConvention(cell, source);
+  const gases = (source && readGases(cell, source)) ?? [];
   sayWhichCentresAct(cell);
   if (!source || !convention) return { gases };
 

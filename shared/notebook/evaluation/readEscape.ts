@@ -25,8 +25,8 @@ export function readConvention(
   source: ColumnModel | undefined,
 ): EscapeConvention | undefined {
   const all = source?.column.input.gases.map(({ formula }) => formula);
-  const coupling = readWord(cell, "coupling", couplings, "coupled");
   const criterion = readCriterion(cell, all);
+  const coupling = readWord(cell, "coupling", couplings, "coupled");
   const corrections = all && readCorrections(cell, all);
   return coupling && criterion && corrections && { coupling, criterion, corrections };
 }
