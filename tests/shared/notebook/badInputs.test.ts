@@ -423,6 +423,7 @@ describe("whatever is written", { timeout: 60_000 }, () => {
           ["body", "ilmara", bodyWritten],
           column(changes),
           leak,
+          ["escape", "fed", "column = dayside"],
           ["values", "v", "x = leak.H.rate"],
           ["corona", "halo", "escape = leak\ngas = H\nsatellites = 0.5\nlevels = 3000 km"],
           [
