@@ -151,6 +151,9 @@ function kindInWords(kind: CellKind): string {
 function resultOf(cell: CellAbove, name: string, path: string): Quantity | Unavailable | string | undefined {
   const result = Object.hasOwn(cell.values, name) ? cell.values[name] : undefined;
   if (!result) {
+    if (cell.kind === "escape" && cell.isFaulty && !Object.hasOwn(cell.values, "exobase.altitude")) {
+      return { unavailable: `*${cell.name}* has no exobase, so there is no *${path}*.` };
+    }
     const hasNone = Object.keys(cell.values).length === 0;
     if (hasNone && cell.kind === "spread" && !cell.isFaulty)
       return { unavailable: `*${cell.name}* is still to be computed.` };

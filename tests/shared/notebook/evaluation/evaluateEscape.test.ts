@@ -166,6 +166,13 @@ describe("where there is no exobase", () => {
     expect(fault.message).toMatch(/An isothermal wind from the base at 40.000.K would carry .*kg.s⁻¹\.$/);
   });
 
+  it("cells below are told why the rates they name are not there", () => {
+    const { notes } = resultOf(lit, hot, leak(), ["values", "v", "x = leak.H.rate"]);
+    expect(notes[0].message).toBe("*leak* has no exobase, so there is no *leak.H.rate*.");
+    const wind = resultOf(lit, hot, leak(), ["values", "v", "x = leak.wind_mass_rate"]);
+    expect(numberIn(wind, "x")).toBeGreaterThan(0);
+  });
+
   it("no wind is claimed where the column merely ends too low", () => {
     const result = answer("", ["column", "air", `${air}\ntop = 120 km`]);
     expect(result.values).not.toHaveProperty("regime");
@@ -174,6 +181,13 @@ describe("where there is no exobase", () => {
 });
 
 describe("criteria", () => {
+  it("are followed above the top that the column set for itself", () => {
+    const thin = air.replace("0.42 Pa", "4e-4 Pa").replace("428 K", "300 K");
+    const [bulk, depth] = ["", "criterion = unit_depth"].map((text) => answer(text, ["column", "air", thin]));
+    expect(bulk.values).toHaveProperty(["exobase.altitude"]);
+    expect(depth.values).toHaveProperty(["H.depletion_time"]);
+  });
+
   it("put the exobase where each says, and name themselves", () => {
     const altitude = (text: string) => numberIn(answer(text), "exobase.altitude");
     const bulk = altitude("");

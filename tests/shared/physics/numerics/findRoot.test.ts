@@ -55,9 +55,17 @@ describe("findRoot", () => {
     expect(outcome.converged && outcome.root).toBeCloseTo(1 / 3, 10);
   });
 
+  it("gets there where the false position never helps, by halving alone", () => {
+    // Of a jump this lopsided the slanted line always meets the end of the bracket.
+    const lopsided = (x: number) => (x < 0.1576 ? -1e-200 : 1e200);
+    const outcome = findRoot(lopsided, 0, 1, { value: 0, bracket: 1e-12 });
+    expect(outcome.converged && outcome.root).toBeCloseTo(0.1576, 11);
+    expect(outcome.iterations).toBeGreaterThan(100);
+  });
+
   it("says that it did not get there", () => {
-    const outcome = findRoot((x) => (x < 1e-9 ? -1 : 2), 0, 1e300, { value: 0, bracket: 0 });
-    expect(outcome).toMatchObject({ converged: false, reason: "too_many_iterations", iterations: 100 });
+    const outcome = findRoot((x) => (x < 1e-300 ? -1 : 2), 0, 1e300, { value: 0, bracket: 0 });
+    expect(outcome).toMatchObject({ converged: false, reason: "too_many_iterations", iterations: 210 });
   });
 });
 
