@@ -71,7 +71,6 @@ export { defaultTolerance, solveColumn } from "./column/solveColumn";
 
 export { supplyLimitedShare } from "./coupling/coupledNotes";
 export { solveCoupledColumn } from "./coupling/solveCoupledColumn";
-export { solveCoupledColumn } from "./coupling/solveCoupledColumn";
 
 export { magnitude } from "./numerics/magnitude";
 export { incompleteGamma, scaledUpperGamma } from "./numerics/incompleteGamma";
