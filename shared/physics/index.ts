@@ -68,6 +68,8 @@ export { thermalSpeed } from "./escape/thermalSpeed";
 
 export { diffusionCoefficient } from "./column/diffusionCoefficient";
 export { defaultTolerance, solveColumn } from "./column/solveColumn";
+
+export { supplyLimitedShare } from "./coupling/coupledNotes";
 export { solveCoupledColumn } from "./coupling/solveCoupledColumn";
 
 export { magnitude } from "./numerics/magnitude";

@@ -30,9 +30,13 @@ export type CoupledExobase =
       marches: number;
     };
 
-/** March tolerance of the first try; and as a share of the last change of the exobase. */
-const loosest = 1e-5;
+/** March tolerance of the first try, and of those whose residual will be large in any case. */
+const loosest = 1e-6;
+/** What a change leaves of itself: by the error of the Jacobian, or by itself again. */
+const jacobianError = 1e-4;
+/** March tolerance as a share of the residual expected; where it comes below the limit, the march is made for good. */
 const looseShare = 1e-3;
+const loosestForGood = 1e-7;
 /** Residuals of up to so many times the tolerance of their marches are not compared. */
 const noise = 100;
 /** Largest change in one turn: of ln p of a gas, or of the height in scale heights. */
@@ -44,7 +48,6 @@ const renewals = 3;
 const smallResidual = 1e-2;
 /** Residuals of up to so many times the tolerance of a loose march may come from its looseness. */
 const doubtful = 1e4;
-const smallestContraction = 1e-3;
 /** A change has to bring the residual down by this share of itself; else it is cut by `damping`, so many times. */
 const enoughDecrease = 0.1;
 const damping = 0.35;
@@ -52,9 +55,9 @@ const dampings = 2;
 const differencesLimit = 6;
 const increment = 1e-4;
 const differenceTolerance = 1e-8;
-/** Done when the residual, times how the last turn brought it down, is below so many tolerances. */
-const closeness = 5;
-/** Below this escape parameter of the mean mass the gas drifts through the exobase at over a fifth of √(kT/m). */
+/** Done when nothing would change by more than so many tolerances, or all residuals are as small as one. */
+const closeness = 20;
+/** Below this escape parameter of the mean mass, where the gas would drift at over a fifth of √(kT/m), none is tried. */
 const smallestBound = 1.5;
 const usualLimit = 80;
 
@@ -75,6 +78,10 @@ interface Search {
   readonly tolerance: number;
   readonly down: DownwardMarch;
   marches: number;
+  /** Where the last march set out. */
+  lastHeight: number;
+  /** Whether a trial was refused since the gas would be unbound there. */
+  metUnbound: boolean;
   /** In which changes of the height are counted, m. */
   scale: number;
   /** Row by gas; columns by ln p of each gas at the exobase and by its height in `scale`. */
@@ -102,28 +109,30 @@ export function findCoupledExobase(
 ): CoupledExobase {
   const search = beginSearch(column, tolerance);
   let here = tryExobase(search, guess.height, guess.state, Math.max(tolerance, loosest));
-  if (here.norm === Infinity) return failure(search, here, "no_descent");
+  if (here.norm === Infinity) return failure(search, here, search.metUnbound ? "runaway" : "no_descent");
   search.scale = scaleHeightOfMarch(search, here);
   renewJacobian(search);
-  let contraction = 1;
   let differences = 0;
+  let triedDifferences = false;
 
   for (let turn = 1; search.marches < limit; turn += 1) {
-    if (isUnbound(search, here)) return failure(search, here, "runaway");
     if (!setChange(search, here)) return failure(search, here, "no_descent");
-    const isLast = here.tolerance <= tolerance && here.norm * contraction < closeness * tolerance;
-    const next = isLast ? correct(search, here) : improve(search, here);
-    if (isLast && next !== null && next.norm <= noise * tolerance) return settled(search, next);
+    if (isSettled(search, here)) return settled(search, here);
+    const next = improve(search, here);
     if (next !== null) {
-      contraction = Math.max(smallestContraction, next.norm / here.norm);
       if (turn < renewals && next.norm > smallResidual) renewJacobian(search);
       else updateJacobian(search, here, next);
       here = next;
-    } else if (differences < differencesLimit) {
-      differences += 1;
-      here = differenceJacobian(search, here);
-      if (here.norm === Infinity) return failure(search, here, "no_descent");
-    } else return failure(search, here, "no_descent");
+      triedDifferences = false;
+      continue;
+    }
+    if (triedDifferences || differences === differencesLimit) {
+      return failure(search, here, search.metUnbound ? "runaway" : "no_descent");
+    }
+    triedDifferences = true;
+    differences += 1;
+    here = differenceJacobian(search, here);
+    if (here.norm === Infinity) return failure(search, here, "no_descent");
   }
   return failure(search, here, "too_many_marches");
 }
@@ -136,6 +145,8 @@ function beginSearch(column: EscapingColumn, tolerance: number): Search {
     tolerance,
     down: downwardMarch(column),
     marches: 0,
+    lastHeight: 0,
+    metUnbound: false,
     scale: 1,
     jacobian: new Float64Array(size * (size + 1)),
     change: new Float64Array(size + 1),
@@ -147,9 +158,17 @@ function tryExobase(search: Search, height: number, state: Float64Array, toleran
   const { column, down, size } = search;
   const excess = logNumber(column.number, height, lawAt(column.problem, height, state, -1), state);
   const shifted = state.map((value) => value + excess);
-  search.marches += 1;
-  const norm = finiteOr(Infinity, () => marchDown(down, height, shifted, tolerance));
+  const isHopeless = isUnbound(search, height, shifted);
+  if (isHopeless) search.metUnbound = true;
+  const norm = isHopeless ? Infinity : march(search, height, shifted, tolerance);
   return { height, state: shifted, residual: down.residual.slice(0, size), norm, tolerance };
+}
+
+/** The largest residual of a march down; Infinity where the base cannot be reached. */
+function march(search: Search, height: number, state: Float64Array, tolerance: number): number {
+  search.marches += 1;
+  search.lastHeight = height;
+  return finiteOr(Infinity, () => marchDown(search.down, height, state, tolerance));
 }
 
 /** A number that a computation gives; the other where it gives none, or breaks a bound of the physics. */
@@ -171,7 +190,8 @@ function scaleHeightOfMarch({ down, size }: Search, { state }: Trial): number {
   return 1 / Math.abs(fall);
 }
 
-function isUnbound({ column, size }: Search, { height, state }: Trial): boolean {
+/** Whether the gas drifts off so fast that no hydrostatic column leads there. */
+function isUnbound({ column, size }: Search, height: number, state: Float64Array): boolean {
   const { temperaturePiece } = lawAt(column.problem, height, state, -1);
   setComposition(state, size);
   return boundParameter(column.problem, height, temperaturePiece) < smallestBound;
@@ -196,7 +216,7 @@ function setChange(
   lastRow[size] = logNumberGradient(column.number, height, law, lastRow) * scale;
   for (let i = 0; i < size; i += 1) change[i] = -residual[i];
   change[size] = 0;
-  return solveLinear(matrix, unknowns, change);
+  return solveLinear(matrix, unknowns, change, 1);
 }
 
 const matrix = new Float64Array((maximumGases + 1) * (maximumGases + 1));
@@ -230,7 +250,9 @@ const logOfCountingFraction = logarithm(countingFraction);
 /** A trial with a smaller residual in the direction of the change; null if there is none near. */
 function improve(search: Search, here: Trial): Trial | null {
   const { part, largest } = allowedPart(search, here);
-  const loose = Math.max(search.tolerance, Math.min(loosest, looseShare * largest));
+  const expected = largest * Math.max(jacobianError, Math.min(1, largest));
+  const wished = Math.min(loosest, looseShare * expected);
+  const loose = wished < loosestForGood ? search.tolerance : Math.max(search.tolerance, wished);
   let share = part;
   for (let cut = 0; cut <= dampings; cut += 1) {
     const next = moved(search, here, share);
@@ -280,8 +302,7 @@ function differenceJacobian(search: Search, { height, state }: Trial): Trial {
   for (let k = 0; k < unknowns && here.norm < Infinity; k += 1) {
     const changed = here.state.map((value, i) => value + (i === k ? increment : 0));
     const changedHeight = k === size ? height + increment * scale : height;
-    search.marches += 1;
-    const norm = finiteOr(Infinity, () => marchDown(down, changedHeight, changed, fine));
+    const norm = march(search, changedHeight, changed, fine);
     if (norm === Infinity) return { ...here, norm };
     for (let i = 0; i < size; i += 1) {
       jacobian[i * unknowns + k] = (down.residual[i] - here.residual[i]) / increment;
@@ -290,15 +311,18 @@ function differenceJacobian(search: Search, { height, state }: Trial): Trial {
   return here;
 }
 
-/** Takes the whole change, however small. */
-function correct(search: Search, here: Trial): Trial | null {
-  const next = moved(search, here, 1);
-  const trial = tryExobase(search, next.height, next.state, search.tolerance);
-  return trial.norm < Infinity ? trial : null;
+function isSettled({ change, size, tolerance }: Search, here: Trial): boolean {
+  if (here.tolerance > tolerance) return false;
+  if (here.norm <= tolerance) return true;
+  for (let k = 0; k <= size; k += 1) if (Math.abs(change[k]) > closeness * tolerance) return false;
+  return true;
 }
 
-/** The exobase just marched from is the one, if the number rises there. */
-function settled({ column, down, size, marches }: Search, { height, state, norm }: Trial): CoupledExobase {
+/** An exobase that was reached is the one, if the number rises there. */
+function settled(search: Search, { height, state, norm, tolerance }: Trial): CoupledExobase {
+  const { column, down, size } = search;
+  if (search.lastHeight !== height) tryExobase(search, height, state, tolerance);
+  const { marches } = search;
   const law = lawAt(column.problem, height, state, -1);
   setComposition(state, size);
   if (logNumberSlope(column.number, height, law, down.topSlope) > 0) {

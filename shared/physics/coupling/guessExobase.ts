@@ -1,5 +1,6 @@
 import { boundParameter } from "../column/boundParameter";
 import { stepCap } from "../column/columnMarch";
+import { altitudeOf, temperatureOf } from "../column/columnProblem";
 import { bindColumn, columnSlope, slopeParts, type BaseFluxes } from "../column/columnSlope";
 import { fractions, maximumGases, setComposition } from "../column/composition";
 import { farthestHeight, smallestLogPressure } from "../column/marchUp";
@@ -23,7 +24,7 @@ import { exponential, log1p, logarithm } from "../numerics/elementary";
 import { findRoot } from "../numerics/findRoot";
 import { pieceAt } from "../numerics/piecewiseCubic";
 import { growthAfter, rememberStep, shrinkAfter } from "../numerics/stepControl";
-import { logFluxes, logVelocities, setFluxes, setVelocities, velocitySlopes } from "./escapeFluxes";
+import { logFluxes, setFluxes, setVelocities, velocitySlopes } from "./escapeFluxes";
 import type { EscapingColumn } from "./escapingColumn";
 
 /**
@@ -50,7 +51,7 @@ export interface ExobaseGuess {
 
 const tolerance = 1e-2;
 /** Height of the start over the base, in scale heights: J is nothing at the base itself. */
-const startOfMarch = 0.02;
+const startOfMarch = 0.05;
 const endOfMarch = logarithm(10);
 /** Where a flux drags another gas by more than this, in ln p up to the exobase, the march is repeated with it. */
 const smallDrag = 0.1;
@@ -64,6 +65,9 @@ const smallestLogJ = -600;
 let column: EscapingColumn;
 let drag: BaseFluxes;
 let size = 0;
+let piece = 0;
+/** kT, as `setDepleted` left it. */
+const thermal = new Float64Array(1);
 /** ln p of what is left of each gas, and the share wJ/(1 + wJ) that is gone, as `setDepleted` left them. */
 const depleted = new Float64Array(maximumGases);
 const gone = new Float64Array(maximumGases);
@@ -108,36 +112,58 @@ function dragOf({ height, state }: ExobaseGuess): number {
   return height * Math.max(...sums);
 }
 
-/** Sets what is left of each gas at a height where the state of the march is ln p_F and ln J. */
-function setDepleted(height: number, state: Float64Array): StepLaw {
-  const { temperature } = column.problem;
-  setVelocities(
-    column,
-    height,
-    temperature.kind === "points" ? pieceAt(temperature.heights, height, true) : 0,
-  );
+/**
+ * Sets what is left of each gas at a height where the state of the march is ln p_F and ln J.
+ *
+ * @returns  ln of the pressure of what is left, whose composition is set
+ */
+function setDepleted(height: number, state: Float64Array): number {
+  const { problem, logSpeeds } = column;
+  const { input, masses, baseRadius, temperature: along } = problem;
+  const stretch = baseRadius / (baseRadius - height);
+  const altitude = altitudeOf(problem, height);
+  piece = along.kind === "points" ? pieceAt(along.heights, height, true) : 0;
+  const temperature = temperatureOf(along, height, altitude, piece);
+  const thermalEnergy = boltzmann.value * temperature;
+  thermal[0] = thermalEnergy;
+  const lambdaOfUnitMass = input.gravitationalParameter / (thermalEnergy * (input.radius + altitude));
+  const shared = logarithm(temperature * stretch * stretch * stretch * stretch) / 2;
   for (let i = 0; i < size; i += 1) {
-    const logDepletion = logVelocities[i] + state[size + i];
-    if (logDepletion > 36) {
-      depleted[i] = state[i] - logDepletion;
+    const lambda = lambdaOfUnitMass * masses[i];
+    const exponent = logSpeeds[i] + shared - lambda + state[size + i];
+    if (exponent > 36) {
+      depleted[i] = state[i] - exponent - log1p(lambda);
       gone[i] = 1;
+    } else if (exponent < -60) {
+      depleted[i] = state[i];
+      gone[i] = 0;
     } else {
-      const depletion = exponential(logDepletion);
+      const depletion = exponential(exponent) * (1 + lambda);
       depleted[i] = state[i] - log1p(depletion);
       gone[i] = depletion / (1 + depletion);
     }
   }
-  return lawAt(column.problem, height, depleted, 1);
+  return setComposition(depleted, size);
+}
+
+/** The law where T, its piece and the pressure are those that `setDepleted` left. */
+function lawOfDepleted(height: number, logPressure: number): StepLaw {
+  const { eddy } = column.problem;
+  const eddyPiece = eddy.kind === "points" ? pieceAt(eddy.heights, height, true) : 0;
+  const isCapped =
+    eddy.kind === "power" &&
+    eddy.ceiling !== null &&
+    eddy.exponent * (logPressure - logarithm(thermal[0]) - eddy.ceiling.logDensity) <= 0;
+  return { isCapped, temperaturePiece: piece, eddyPiece };
 }
 
 /** The right-hand side of the march. */
 function depletedSlope(height: number, state: Float64Array, slope: Float64Array): void {
-  const law = setDepleted(height, state);
-  const pressure = exponential(setComposition(depleted, size));
-  bindColumn(column.problem, drag, law, true);
+  const logPressure = setDepleted(height, state);
+  bindColumn(column.problem, drag, lawOfDepleted(height, logPressure), true);
   columnSlope(height, depleted, slope);
   const { resistances } = slopeParts;
-  const density = pressure / (boltzmann.value * slopeParts.temperature());
+  const density = exponential(logPressure) / thermal[0];
   const kappa = slopeParts.kappa();
   const warming = slopeParts.warming();
   for (let i = 0; i < size; i += 1) {
@@ -163,12 +189,13 @@ interface Waymark {
 /** @param slope  of the march at that state */
 function waymarkAt(height: number, state: Float64Array, slope: Float64Array): Waymark {
   const { problem, number, bulk } = column;
-  const law = setDepleted(height, state);
+  const logPressure = setDepleted(height, state);
+  const law = lawOfDepleted(height, logPressure);
+  setVelocities(column, height, piece);
   for (let i = 0; i < size; i += 1) {
     depletedSlopes[i] = slope[i] - gone[i] * (velocitySlopes[i] + slope[size + i]);
   }
   const cap = stepCap(depleted, depletedSlopes, size, 1);
-  const logPressure = setComposition(depleted, size);
   const logNumber = logNumberOfComposition(number, height, law, logPressure);
   const numberSlope = logNumberSlope(number, height, law, depletedSlopes);
   const isBulk = number === bulk;
@@ -264,8 +291,8 @@ function lookWithin(
   const valueAt = (part: number) => {
     const height = position + part * step;
     interpolateStep(dense, 0, 2 * size, start, 0, part, within);
-    const law = setDepleted(height, within);
-    return logNumberOfComposition(column.number, height, law, setComposition(depleted, size));
+    const logPressure = setDepleted(height, within);
+    return logNumberOfComposition(column.number, height, lawOfDepleted(height, logPressure), logPressure);
   };
   const parts = onlyRises ? 1 : subsamples;
   let valueBelow = here.logNumber;

@@ -16,6 +16,7 @@ import { escapingGases } from "./escapingGases";
 import { findCoupledExobase, type CoupledExobase } from "./findCoupledExobase";
 import { guessExobase, type ExobaseGuess } from "./guessExobase";
 import { supplyShares } from "./supplyShares";
+import { walkToExobase } from "./walkToExobase";
 
 /** Where escape keeps no more than this share of any gas away from the exobase, the column is the one without flux. */
 const negligibleDepletion = 1e-12;
@@ -68,15 +69,19 @@ function answerOf(input: CoupledInput, column: EscapingColumn, tolerance: number
   }
   if (!guess.hasCrossing && largest < nearlyOne) return runaway(input, column, guess, 1, tolerance);
   const found = findCoupledExobase(column, guess, tolerance, guess.hasCrossing ? undefined : shortSearch);
-  if (found.converged) return converged(input, column, found, tolerance);
-  if (!guess.hasCrossing) return runaway(input, column, guess, found.marches, tolerance);
+  if (found.converged) return converged(input, column, found, tolerance, found.marches + 1);
+  if (!guess.hasCrossing) return runaway(input, column, guess, found.marches + 1, tolerance);
+  // A guess from which not even a march is possible is beyond what escape of another strength could mend.
+  const walk = found.marches > 1 ? walkToExobase(column, tolerance) : { found: null, marches: 0 };
+  const marches = 1 + found.marches + walk.marches;
+  if (walk.found !== null) return converged(input, column, walk.found, tolerance, marches);
   return {
     converged: false,
     reason: found.reason === "turn" || found.reason === "runaway" ? found.reason : "not_converged",
     message: messageOf(column, found),
     largestKnudsen: largest,
     altitudeOfLargest: altitudeOf(column.problem, guess.heightOfLargest),
-    marches: found.marches + 1,
+    marches,
   };
 }
 
@@ -121,6 +126,7 @@ function converged(
   escaping: EscapingColumn,
   found: Extract<CoupledExobase, { converged: true }>,
   tolerance: number,
+  marches: number,
 ): Answer {
   const { column, exobase, path } = coupledColumn(escaping, found, tolerance);
   const shares = new Float64Array(input.gases.length);
@@ -132,7 +138,7 @@ function converged(
     exobase,
     gases,
     notes: coupledNotes(gases, exobase.level.altitude, column.topAltitude),
-    marches: found.marches + 2,
+    marches: marches + 1,
   };
 }
 
