@@ -86,8 +86,8 @@ export function rootOf(quantity: string, outcome: RootOutcome): number {
 
 /** After so many steps the bracket should have halved. */
 const patience = 4;
-/** At worst one step in `patience` halves the bracket; from 1 to two units in the last place that takes 51. */
-const iterationLimit = 210;
+/** At worst every second round of so many halves the bracket; from 1 to two units in the last place that takes 51. */
+const iterationLimit = 2 * patience * 52;
 /** Two units in the last place. */
 const roundingWidth = 4.5e-16;
 
