@@ -1,6 +1,9 @@
-import type { Data, Layout } from "plotly.js";
+import type { Layout } from "plotly.js";
 import { lazy, Suspense, useEffect, useState } from "react";
+import type { FigureDrawing } from "./exportFigure";
 import type { FigureZoom } from "./figureLayout";
+import { isPagePrinting } from "./useFigureInks";
+import { useInTurn } from "./useInTurn";
 
 /** The figure library is large: it is fetched once, after the page has been painted. */
 const Plot = lazy(async () => {
@@ -9,8 +12,8 @@ const Plot = lazy(async () => {
 });
 
 interface PlotlyFigureProps {
-  data: Data[];
-  layout: Partial<Layout>;
+  /** The same object as long as nothing changes. */
+  plot: FigureDrawing;
   /** Called with what a drag drew closer, or null to show all again. */
   onZoom: (zoom: FigureZoom | null) => void;
   /** Called with the place in `layout.annotations` of a name that was pressed. */
@@ -53,8 +56,10 @@ function zoomOf(event: RelayoutEvent, layout: Partial<Layout>): FigureZoom | nul
 }
 
 /** Drag to draw closer, double press to go back; touch scrolls the page instead. */
-export function PlotlyFigure({ data, layout, onZoom, onNamePress }: PlotlyFigureProps) {
+export function PlotlyFigure({ plot, onZoom, onNamePress }: PlotlyFigureProps) {
   const isPainted = useAfterFirstPaint();
+  const inTurn = useInTurn(plot);
+  const { data, layout } = isPagePrinting() ? plot : inTurn;
   const place = <div style={{ width: layout.width, height: layout.height }} />;
   if (!isPainted) return place;
   return (
