@@ -22,7 +22,12 @@ export function ColumnFigures({ evaluation, unitSystem, number }: ColumnFiguresP
   return (
     <>
       <SeenFigure figure={DensityFigure} evaluation={evaluation} unitSystem={unitSystem} number={number} />
-      <SeenFigure figure={CrossingFigure} evaluation={evaluation} unitSystem={unitSystem} number={number + 1} />
+      <SeenFigure
+        figure={CrossingFigure}
+        evaluation={evaluation}
+        unitSystem={unitSystem}
+        number={number + 1}
+      />
     </>
   );
 }

@@ -84,11 +84,7 @@ function createCellCommands(now: () => Surroundings, onNewCell: (id: string) => 
     focusCell: (id: string): void => cellElement(id)?.focus({ preventScroll: true }),
     /** Opens the menu of kinds under a cell. */
     openInsert(afterId: string): void {
-      const caret = window.document.querySelector<HTMLElement>(
-        `[data-insert-after="${CSS.escape(afterId)}"]`,
-      );
-      caret?.focus();
-      caret?.dispatchEvent(new KeyboardEvent("keydown", { key: "Enter", bubbles: true }));
+      window.document.querySelector<HTMLElement>(`[data-insert-after="${CSS.escape(afterId)}"]`)?.click();
     },
   };
 }
