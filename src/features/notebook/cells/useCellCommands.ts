@@ -34,7 +34,7 @@ function createCellCommands(now: () => Surroundings, onNewCell: (id: string) => 
   function moveTo(id: string, index: number): void {
     const cell = cellOf(id);
     if (!cell || index === indexOf(id) || index < 0 || index >= now().document.cells.length) return;
-    const isWriting = window.document.activeElement?.closest(".cm-editor") != null;
+    const isWriting = window.document.activeElement?.closest(".cm-editor") instanceof HTMLElement;
     now().edit({ type: "moveCell", id, index }, `${cellTitle(cell)} moved`);
     keepInSight(id, isWriting);
   }

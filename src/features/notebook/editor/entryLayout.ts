@@ -1,6 +1,7 @@
 import { syntaxTree } from "@codemirror/language";
 import { Prec, type EditorState, type Extension, type Range } from "@codemirror/state";
-import { Decoration, EditorView, ViewPlugin, type DecorationSet, type ViewUpdate } from "@codemirror/view";
+import type { EditorView } from "@codemirror/view";
+import { Decoration, ViewPlugin, type DecorationSet, type ViewUpdate } from "@codemirror/view";
 
 interface EntryStart {
   lineFrom: number;
