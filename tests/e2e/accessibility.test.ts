@@ -101,7 +101,7 @@ it("The main job can be done by keyboard alone", async () => {
 
   await tabTo(async () =>
     page.evaluate(() =>
-      (document.activeElement?.getAttribute("aria-label") ?? "").includes("Entries of values given"),
+      (document.activeElement?.getAttribute("aria-label") ?? "").includes("Entries of Values given"),
     ),
   );
   await page.keyboard.press("Control+Home");

@@ -106,7 +106,10 @@ export async function startServer(): Promise<RunningServer> {
   };
 }
 
-/** A page of its own session; whatever the console or a script complains of is collected in `complaints`. */
+/**
+ * A page of its own session; whatever the console or a script complains of is collected in `complaints`, but for refusals
+ * and lost connections that a test brings about.
+ */
 export async function openPage(
   browser: Browser,
   options: Parameters<Browser["newContext"]>[0] = {},
@@ -120,7 +123,12 @@ export async function openPage(
   const complaints: string[] = [];
   page.on("pageerror", (error) => complaints.push(String(error)));
   page.on("console", (message) => {
-    if (message.type() === "error" && !/status of (401|404|409|422|429|503)/.test(message.text()))
+    if (
+      message.type() === "error" &&
+      !/status of (401|404|409|422|429|503)|ERR_CONNECTION_REFUSED|ERR_INTERNET_DISCONNECTED/.test(
+        message.text(),
+      )
+    )
       complaints.push(message.text());
   });
   return { page, context, complaints };

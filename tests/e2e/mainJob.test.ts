@@ -170,8 +170,8 @@ it("Two tabs that change the same entry settle it without losing either state", 
   expect(await panel.innerText()).toContain("5e5 cm^2/s within factor 3");
   await panel.getByRole("radio", { name: /3e6/ }).click();
   await panel.getByRole("button", { name: "Save as chosen" }).click();
-  await waitUntilSaved(two.page, "K_base = 3e6 cm^2/s");
-  expect(await entryLine(two.page, "K_base").innerText()).toContain("3e6 cm^2/s");
+  await panel.waitFor({ state: "detached" });
+  await two.page.locator(".cm-line", { hasText: "K_base = 3e6 cm^2/s" }).waitFor();
   await one.context.close();
   await two.context.close();
 });

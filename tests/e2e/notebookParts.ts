@@ -12,6 +12,7 @@ export const entryLine = (page: Page, key: string): Locator =>
 
 /** Writes another value in an entry's place, as a person would: to the end of its line, back to the sign, over it. */
 export async function writeEntry(page: Page, key: string, value: string): Promise<void> {
+  await scrollTo(page, entryLine(page, key));
   await entryLine(page, key).click();
   await page.keyboard.press("Home");
   await page.keyboard.press("Shift+End");
@@ -51,13 +52,18 @@ export async function waitUntilSaved(page: Page, text: string): Promise<void> {
 
 /** Scrolls down to where a cell's answer stands, as a reader would; answers are drawn near the window only. */
 export async function seeTable(page: Page, caption: RegExp): Promise<Locator> {
-  const table = page.getByRole("table", { name: caption }).first();
-  for (let tries = 0; tries < 60 && (await table.count()) === 0; tries += 1) {
-    await page.mouse.wheel(0, 500);
+  const table = page.getByRole("region", { name: caption }).first();
+  await scrollTo(page, table);
+  return table;
+}
+
+/** Scrolls down until a part of the page is drawn: what is far from the window waits. */
+async function scrollTo(page: Page, part: Locator): Promise<void> {
+  for (let tries = 0; tries < 60 && (await part.count()) === 0; tries += 1) {
+    await page.mouse.wheel(0, 400);
     await page.waitForTimeout(150);
   }
-  await table.scrollIntoViewIfNeeded();
-  return table;
+  await part.scrollIntoViewIfNeeded();
 }
 
 /** Scrolls to the first figure, which is drawn only where it is seen. */

@@ -1,5 +1,8 @@
 import type { Layout } from "plotly.js";
 import { lazy, Suspense, useEffect, useState } from "react";
+import { fetchPart } from "../../lib/fetchPart";
+import { Message } from "../Message";
+import { PartBoundary } from "../PartBoundary";
 import type { FigureDrawing } from "./exportFigure";
 import type { FigureZoom } from "./figureLayout";
 import { isPagePrinting } from "./useFigureInks";
@@ -7,7 +10,7 @@ import { useInTurn } from "./useInTurn";
 
 /** The figure library is large: it is fetched once, after the page has been painted. */
 const Plot = lazy(async () => {
-  const { createPlot } = await import("./loadPlotly");
+  const { createPlot } = await fetchPart(() => import("./loadPlotly"));
   return { default: createPlot };
 });
 
@@ -62,21 +65,29 @@ export function PlotlyFigure({ plot, onZoom, onNamePress }: PlotlyFigureProps) {
   const { data, layout } = isPagePrinting() ? plot : inTurn;
   const place = <div style={{ width: layout.width, height: layout.height }} />;
   if (!isPainted) return place;
+  const unfetched = (
+    <Message state="fault">
+      The figure could not be drawn: its program did not come. Load the page again; the numbers stand in the
+      tables.
+    </Message>
+  );
   return (
-    <Suspense fallback={place}>
-      <Plot
-        className="figure-plot"
-        data={data}
-        layout={layout}
-        config={config}
-        style={{ width: layout.width, height: layout.height }}
-        onRelayout={(event: RelayoutEvent) => {
-          const zoom = zoomOf(event, layout);
-          if (zoom) onZoom(zoom);
-        }}
-        onDoubleClick={() => onZoom(null)}
-        onClickAnnotation={({ index }: { index: number }) => onNamePress?.(index)}
-      />
-    </Suspense>
+    <PartBoundary instead={unfetched}>
+      <Suspense fallback={place}>
+        <Plot
+          className="figure-plot"
+          data={data}
+          layout={layout}
+          config={config}
+          style={{ width: layout.width, height: layout.height }}
+          onRelayout={(event: RelayoutEvent) => {
+            const zoom = zoomOf(event, layout);
+            if (zoom) onZoom(zoom);
+          }}
+          onDoubleClick={() => onZoom(null)}
+          onClickAnnotation={({ index }: { index: number }) => onNamePress?.(index)}
+        />
+      </Suspense>
+    </PartBoundary>
   );
 }
