@@ -17,7 +17,8 @@ export default defineConfig({
     chunkSizeWarningLimit: 5000,
   },
   worker: { format: "es" },
-  server: { proxy: { "/api": "http://127.0.0.1:4710" } },
+  // The page's own address stays in the request: the server takes changes from its own pages only.
+  server: { proxy: { "/api": { target: "http://127.0.0.1:4710", changeOrigin: false } } },
   test: {
     env: testEnvironment,
     reporters: ["default", "./tests/closingLine.ts"],

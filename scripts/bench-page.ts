@@ -48,8 +48,7 @@ try {
     const elapsed = await page.evaluate(async (temperature) => {
       const editor = document.activeElement?.closest(".cm-editor");
       const host = editor?.querySelector(".cm-content") as
-        | (HTMLElement & { cmTile?: { view?: unknown }; cmView?: { view?: unknown } })
-        | null;
+        (HTMLElement & { cmTile?: { view?: unknown }; cmView?: { view?: unknown } }) | null;
       const view = (host?.cmTile?.view ?? host?.cmView?.view) as {
         state: { doc: { toString(): string } };
         dispatch(change: object): void;

@@ -39,7 +39,9 @@ function readDocument(): NotebookDocument {
 
 /** Evaluates with what is remembered of the other text, to and fro, so that every turn has something to do. */
 function afterWriting(document: NotebookDocument, name: string, from: string, to: string): () => void {
-  const cells = document.cells.map((cell) => (cell.name === name ? { ...cell, text: cell.text.replace(from, to) } : cell));
+  const cells = document.cells.map((cell) =>
+    cell.name === name ? { ...cell, text: cell.text.replace(from, to) } : cell,
+  );
   const changed = { ...document, cells };
   let { memory } = evaluateNotebook(document);
   let isChanged = false;

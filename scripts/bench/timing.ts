@@ -17,9 +17,9 @@ export interface BenchTable {
   rows: readonly (readonly string[])[];
 }
 
-/** How long a task is warmed up and measured, ms. */
-const warming = 400;
-const measuring = 1200;
+/** How long (ms) and how often at least a task is warmed up and measured; a busy machine may give little of either. */
+const warming = { duration: 400, turns: 100 };
+const measuring = { duration: 1200, turns: 60 };
 
 /** Times a task in turn with the plain loop, so that both meet the same load. */
 export const timer: Timer = (task) => {
@@ -41,10 +41,9 @@ export const timer: Timer = (task) => {
   return { median: median(times), ratio: median(ratios) };
 };
 
-function repeatFor(duration: number, turn: () => void): void {
-  const end = performance.now() + duration;
-  do turn();
-  while (performance.now() < end);
+function repeatFor(least: { duration: number; turns: number }, turn: () => void): void {
+  const end = performance.now() + least.duration;
+  for (let turns = 0; turns < least.turns || performance.now() < end; turns += 1) turn();
 }
 
 const loopValues = new Float64Array(64).map((_, i) => 1 + i / 64);

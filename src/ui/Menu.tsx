@@ -1,5 +1,6 @@
 /** Menus of verbs. Their parts are fetched when a menu is first pointed at, so that no page waits for them. */
 import { cloneElement, lazy, Suspense, useState } from "react";
+import { fetchPart } from "../lib/fetchPart";
 
 export interface MenuProps {
   /** The button or word that opens it. */
@@ -30,7 +31,7 @@ export interface MenuChoiceProps<Value extends string> {
   onChange: (value: Value) => void;
 }
 
-const fetchParts = () => import("./menuParts");
+const fetchParts = () => fetchPart(() => import("./menuParts"));
 const OpenedMenu = lazy(() => fetchParts().then((parts) => ({ default: parts.OpenedMenu })));
 
 /** One verb of a menu. */

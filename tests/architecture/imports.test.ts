@@ -61,7 +61,12 @@ const rooms: Room[] = [
     npm: "any",
   },
   { name: "src/lib", holds: /^src\/lib\//, mayImport: ["physics", "notebook", "schemas"], npm: "any" },
-  { name: "src/ui", holds: /^src\/ui\//, mayImport: ["physics", "notebook", "schemas", "src/lib"], npm: "any" },
+  {
+    name: "src/ui",
+    holds: /^src\/ui\//,
+    mayImport: ["physics", "notebook", "schemas", "src/lib"],
+    npm: "any",
+  },
   {
     name: "src/features",
     holds: /^src\/features\//,
@@ -96,7 +101,9 @@ function trespasses(file: string, source: string): string[] {
       if (!allowed) found.push(`${file}: ${room.name} may not use the package ${target}`);
       continue;
     }
-    const resolved = path.posix.normalize(path.posix.join(path.posix.dirname(file), target)).replace(/\?.*$/, "");
+    const resolved = path.posix
+      .normalize(path.posix.join(path.posix.dirname(file), target))
+      .replace(/\?.*$/, "");
     const there = roomOf(/\.\w+$/.test(resolved) ? resolved : `${resolved}.ts`) ?? roomOf(`${resolved}/`);
     if (!there) found.push(`${file}: ${target} leads out of the house`);
     else if (there !== room && !room.mayImport.includes(there.name))
@@ -117,7 +124,9 @@ describe("the rooms of the house", () => {
   it("imports go one way only", () => {
     const files = ["shared", "server", "src"].flatMap(sourceFiles);
     expect(files.length).toBeGreaterThan(50);
-    expect(files.flatMap((file) => trespasses(file, readFileSync(path.join(root, file), "utf8")))).toEqual([]);
+    expect(files.flatMap((file) => trespasses(file, readFileSync(path.join(root, file), "utf8")))).toEqual(
+      [],
+    );
   });
 
   it.each([
@@ -125,19 +134,29 @@ describe("the rooms of the house", () => {
     ["the physics reaching up", "shared/physics/a.ts", 'import type { Note } from "../notebook/result";'],
     ["the notebook using the page's library", "shared/notebook/a.ts", 'import { useState } from "react";'],
     ["one feature using another", "src/features/notebook/A.tsx", 'import { b } from "../group/b";'],
-    ["a part of the interface that knows a feature", "src/ui/A.tsx", 'export { b } from "../features/group/b";'],
+    [
+      "a part of the interface that knows a feature",
+      "src/ui/A.tsx",
+      'export { b } from "../features/group/b";',
+    ],
     ["the page reaching into the server", "src/lib/api.ts", 'import("../../server/env");'],
     ["the database asking a route", "server/db/reads.ts", 'import { r } from "../routes/session";'],
     ["a command that authorises", "server/commands/a.ts", 'import "../policies/notebookPolicy";'],
     ["a policy with a package", "server/policies/a.ts", 'import { eq } from "drizzle-orm";'],
-    ["a worker from another room", "src/lib/a.ts", 'new Worker(new URL("../features/b/w.ts", import.meta.url))'],
+    [
+      "a worker from another room",
+      "src/lib/a.ts",
+      'new Worker(new URL("../features/b/w.ts", import.meta.url))',
+    ],
     ["a file in no room", "shared/loose.ts", ""],
   ])("notices %s", (_, file, source) => {
     expect(trespasses(file, source)).toHaveLength(1);
   });
 
   it("lets a room use itself and what lies below", () => {
-    expect(trespasses("shared/notebook/kinds/body.ts", 'import { g } from "../../physics/body/gravity";')).toEqual([]);
+    expect(
+      trespasses("shared/notebook/kinds/body.ts", 'import { g } from "../../physics/body/gravity";'),
+    ).toEqual([]);
     expect(trespasses("src/features/group/A.tsx", 'import { b } from "./b";')).toEqual([]);
   });
 });
@@ -152,7 +171,9 @@ describe("the core is the same on every machine", () => {
         .replace(/\/\*[\s\S]*?\*\//g, "")
         .replace(/(^|\s)\/\/.*$/gm, "")
         .replace(/`(?:[^`\\]|\\.)*`|"(?:[^"\\\n]|\\.)*"/g, '""');
-      return forbidden.test(code.replace(/\bdocument\.(cells|title|authors|headline|unitSystem|format)/g, ""));
+      return forbidden.test(
+        code.replace(/\bdocument\.(cells|title|authors|headline|unitSystem|format)/g, ""),
+      );
     });
     expect(offenders).toEqual([]);
   });

@@ -4,7 +4,7 @@ import type { AxeResults } from "axe-core";
 import type { Browser, Page } from "playwright-core";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { launchBrowser, openPage, signInAs, startServer, type RunningServer } from "./harness";
-import { openNotebook } from "./notebookParts";
+import { openNotebook, seeFirstFigure } from "./notebookParts";
 
 let server: RunningServer;
 let browser: Browser;
@@ -22,11 +22,10 @@ afterAll(async () => {
 /** What axe finds against WCAG 2.2 A and AA, as "rule: selector". */
 async function violations(page: Page): Promise<string[]> {
   await page.evaluate(axeSource);
-  const results = await page.evaluate(
-    () =>
-      (window as unknown as { axe: { run(options: object): Promise<AxeResults> } }).axe.run({
-        runOnly: ["wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22aa"],
-      }),
+  const results = await page.evaluate(() =>
+    (window as unknown as { axe: { run(options: object): Promise<AxeResults> } }).axe.run({
+      runOnly: ["wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22aa"],
+    }),
   );
   return results.violations.flatMap((violation) =>
     violation.nodes.map((node) => `${violation.id}: ${node.target.join(" ")}`),
@@ -58,7 +57,10 @@ describe.each(["light", "dark"] as const)("by %s", (colorScheme) => {
       };
       await look("notebooks");
       await page.goto(`${server.origin}/groups`);
-      await page.getByRole("link", { name: /Carrow Aeronomy/ }).first().click();
+      await page
+        .getByRole("link", { name: /Carrow Aeronomy/ })
+        .first()
+        .click();
       await page.getByRole("heading", { name: /Carrow Aeronomy/ }).waitFor();
       await look("group");
       await page.goto(`${server.origin}/account`);
@@ -69,7 +71,7 @@ describe.each(["light", "dark"] as const)("by %s", (colorScheme) => {
       await look("not found");
       await page.goto(server.origin);
       await openNotebook(page, /Escape of hydrogen from Ilmara/);
-      await page.locator(".js-plotly-plot").first().waitFor({ timeout: 20_000 });
+      await seeFirstFigure(page);
       await look("notebook");
       for (const [name, list] of Object.entries(found)) expect(list, name).toEqual([]);
       await context.close();
@@ -98,7 +100,9 @@ it("The main job can be done by keyboard alone", async () => {
   const before = await page.locator(".headline-number").first().innerText();
 
   await tabTo(async () =>
-    page.evaluate(() => (document.activeElement?.getAttribute("aria-label") ?? "").includes("Entries of values given")),
+    page.evaluate(() =>
+      (document.activeElement?.getAttribute("aria-label") ?? "").includes("Entries of Values given"),
+    ),
   );
   await page.keyboard.press("Control+Home");
   await page.keyboard.press("Shift+End");

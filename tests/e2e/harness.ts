@@ -11,7 +11,8 @@ const browserPaths = ["/usr/bin/chromium", "/usr/bin/chromium-browser", "/usr/bi
 
 export async function launchBrowser(): Promise<Browser> {
   const executablePath = browserPaths.find(existsSync);
-  if (!executablePath) throw new Error(`No chromium at ${browserPaths.join(", ")}. Install the package chromium.`);
+  if (!executablePath)
+    throw new Error(`No chromium at ${browserPaths.join(", ")}. Install the package chromium.`);
   return chromium.launch({
     executablePath,
     args: [
@@ -32,7 +33,9 @@ function freePort(): Promise<number> {
     probe.on("error", reject);
     probe.listen(0, "127.0.0.1", () => {
       const address = probe.address();
-      probe.close(() => (address && typeof address === "object" ? resolve(address.port) : reject(new Error("no port"))));
+      probe.close(() =>
+        address && typeof address === "object" ? resolve(address.port) : reject(new Error("no port")),
+      );
     });
   });
 }
@@ -103,17 +106,29 @@ export async function startServer(): Promise<RunningServer> {
   };
 }
 
-/** A page of its own session; whatever the console or a script complains of is collected in `complaints`. */
+/**
+ * A page of its own session; whatever the console or a script complains of is collected in `complaints`, but for refusals
+ * and lost connections that a test brings about.
+ */
 export async function openPage(
   browser: Browser,
   options: Parameters<Browser["newContext"]>[0] = {},
 ): Promise<{ page: Page; context: BrowserContext; complaints: string[] }> {
-  const context = await browser.newContext({ viewport: { width: 1440, height: 900 }, timezoneId: "UTC", ...options });
+  const context = await browser.newContext({
+    viewport: { width: 1440, height: 900 },
+    timezoneId: "UTC",
+    ...options,
+  });
   const page = await context.newPage();
   const complaints: string[] = [];
   page.on("pageerror", (error) => complaints.push(String(error)));
   page.on("console", (message) => {
-    if (message.type() === "error" && !/status of (401|404|409|422|429|503)/.test(message.text()))
+    if (
+      message.type() === "error" &&
+      !/status of (401|404|409|422|429|503)|ERR_CONNECTION_REFUSED|ERR_INTERNET_DISCONNECTED/.test(
+        message.text(),
+      )
+    )
       complaints.push(message.text());
   });
   return { page, context, complaints };

@@ -6,7 +6,17 @@ import type { Browser } from "playwright-core";
 import { afterAll, beforeAll, expect, it } from "vitest";
 import type { ResultDocument } from "../../shared/notebook/result";
 import { launchBrowser, openPage, signInAs, startServer, type RunningServer } from "./harness";
-import { entryLine, headline, openNotebook, waitForHeadline, waitUntilSaved, writeEntry } from "./notebookParts";
+import {
+  entryLine,
+  headline,
+  openNotebook,
+  paste,
+  seeFirstFigure,
+  seeTable,
+  waitForHeadline,
+  waitUntilSaved,
+  writeEntry,
+} from "./notebookParts";
 
 const root = path.resolve(import.meta.dirname, "../..");
 const ilmara = /Escape of hydrogen from Ilmara/;
@@ -26,14 +36,14 @@ it("A researcher changes the exospheric temperature, sees every answer move, and
   const { page, context, complaints } = await openPage(browser);
   const foreign: string[] = [];
   page.on("request", (request) => {
-    if (!/^(data|blob):/.test(request.url()) && !request.url().startsWith(server.origin)) foreign.push(request.url());
+    if (!/^(data|blob):/.test(request.url()) && !request.url().startsWith(server.origin))
+      foreign.push(request.url());
   });
   await signInAs(page, server.origin, "Tamsin Orevale");
   await openNotebook(page, ilmara);
-  await page.locator(".js-plotly-plot").first().waitFor({ timeout: 20_000 });
-  const escape = page.getByRole("table", { name: /Thermal escape/ }).first();
+  await seeFirstFigure(page);
   const [exobaseBefore, rateBefore] = await headline(page);
-  const tableBefore = await escape.innerText();
+  const tableBefore = await (await seeTable(page, /Thermal escape/)).innerText();
 
   await writeEntry(page, "T_quiet", "520 ± 45 K");
   const exobaseAfter = await waitForHeadline(page, 0, exobaseBefore!);
@@ -41,8 +51,8 @@ it("A researcher changes the exospheric temperature, sees every answer move, and
   const kilometres = (text: string): number => Number(text.replace(/[^\d.]/g, ""));
   expect(kilometres(exobaseAfter)).toBeGreaterThan(kilometres(exobaseBefore!));
   expect(rateAfter).not.toBe(rateBefore);
-  expect(await escape.innerText()).not.toBe(tableBefore);
-  await waitUntilSaved(page);
+  expect(await (await seeTable(page, /Thermal escape/)).innerText()).not.toBe(tableBefore);
+  await waitUntilSaved(page, "T_quiet = 520 ± 45 K");
 
   await server.restart();
   await page.reload();
@@ -72,10 +82,14 @@ it("The notebook exported as Markdown gives the same numbers on the command line
   ]);
   const file = path.join(server.dataFolder, "exported.md");
   await writeFile(file, await readFile(await download.path()));
-  const { stdout } = await promisify(execFile)("npx", ["tsx", "scripts/evaluate.ts", file, "--json"], { cwd: root });
+  const { stdout } = await promisify(execFile)("npx", ["tsx", "scripts/evaluate.ts", file, "--json"], {
+    cwd: root,
+  });
   const onCommandLine = JSON.parse(stdout) as ResultDocument;
 
-  const listed = (await (await context.request.get(`${server.origin}/api/notebooks/${id}/versions`)).json()) as {
+  const listed = (await (
+    await context.request.get(`${server.origin}/api/notebooks/${id}/versions`)
+  ).json()) as {
     versions?: { number: number }[];
   } & { number: number }[];
   const newest = Math.max(...(listed.versions ?? listed).map((version) => version.number));
@@ -93,10 +107,13 @@ it("A mistake is marked where it stands, with a remedy, and the text stays as ty
   await signInAs(page, server.origin, "Tamsin Orevale");
   await openNotebook(page, ilmara);
   await writeEntry(page, "T_base", "165 km");
-  await page.getByText(/temperature/i).and(page.locator(".note-widget, .cell-note, [data-note]")).first().waitFor();
+  await page
+    .locator(".entry-note-fault", { hasText: /temperature/i })
+    .first()
+    .waitFor();
   expect(await entryLine(page, "T_base").innerText()).toContain("165 km");
   await writeEntry(page, "T_base", "165 K");
-  await waitUntilSaved(page);
+  await waitUntilSaved(page, "T_base = 165 K");
   expect(complaints).toEqual([]);
   await context.close();
 });
@@ -105,7 +122,11 @@ it("A reader sees the numbers and cannot write; a co-author can; a stranger find
   const reader = await openPage(browser);
   await signInAs(reader.page, server.origin, "Pello Marrash");
   await openNotebook(reader.page, ilmara);
-  expect(await reader.page.locator(".cm-content[contenteditable=true]").count()).toBe(0);
+  const asRead = await entryLine(reader.page, "T_quiet").innerText();
+  await entryLine(reader.page, "T_quiet").click();
+  await reader.page.keyboard.type("9");
+  await reader.page.keyboard.press("Backspace");
+  expect(await entryLine(reader.page, "T_quiet").innerText()).toBe(asRead);
   expect(await reader.page.getByRole("button", { name: "Keep a version" }).count()).toBe(0);
   const address = reader.page.url();
   await reader.context.close();
@@ -114,7 +135,7 @@ it("A reader sees the numbers and cannot write; a co-author can; a stranger find
   await signInAs(coAuthor.page, server.origin, "Wiremu Castellane");
   await openNotebook(coAuthor.page, ilmara);
   await writeEntry(coAuthor.page, "H_share", "1.3 ppm within factor 1.5");
-  await waitUntilSaved(coAuthor.page);
+  await waitUntilSaved(coAuthor.page, "H_share = 1.3 ppm");
   await coAuthor.context.close();
 
   const stranger = await openPage(browser);
@@ -125,7 +146,7 @@ it("A reader sees the numbers and cannot write; a co-author can; a stranger find
   await stranger.page.getByRole("button", { name: "Create" }).click();
   await stranger.page.getByRole("heading", { name: "Notebooks", level: 1 }).waitFor();
   await stranger.page.goto(address);
-  await stranger.page.getByText(/no such notebook/i).waitFor();
+  await stranger.page.getByRole("heading", { name: "Not found" }).waitFor();
   await stranger.context.close();
 });
 
@@ -137,17 +158,20 @@ it("Two tabs that change the same entry settle it without losing either state", 
   await signInAs(two.page, server.origin, "Wiremu Castellane");
   await openNotebook(two.page, ilmara);
 
+  // Out of reach while the other saves: else the other's save shows up here at once, and there is nothing to settle.
+  await two.context.setOffline(true);
   await writeEntry(one.page, "K_base", "3e6 cm^2/s within factor 2");
-  await waitUntilSaved(one.page);
+  await waitUntilSaved(one.page, "K_base = 3e6 cm^2/s");
   await writeEntry(two.page, "K_base", "5e5 cm^2/s within factor 3");
+  await two.context.setOffline(false);
   const panel = two.page.getByRole("region", { name: "Two states to settle" });
   await panel.waitFor();
   expect(await panel.innerText()).toContain("3e6 cm^2/s within factor 2");
   expect(await panel.innerText()).toContain("5e5 cm^2/s within factor 3");
   await panel.getByRole("radio", { name: /3e6/ }).click();
   await panel.getByRole("button", { name: "Save as chosen" }).click();
-  await waitUntilSaved(two.page);
-  expect(await entryLine(two.page, "K_base").innerText()).toContain("3e6 cm^2/s");
+  await panel.waitFor({ state: "detached" });
+  await two.page.locator(".cm-line", { hasText: "K_base = 3e6 cm^2/s" }).waitFor();
   await one.context.close();
   await two.context.close();
 });
@@ -158,9 +182,11 @@ it("Without a network the text is kept here, and saved when the server is back",
   await openNotebook(page, ilmara);
   await context.setOffline(true);
   await writeEntry(page, "T_base", "171 K");
-  await page.locator(".save-status", { hasText: /not saved: (offline|the server does not answer)/ }).waitFor();
+  await page
+    .locator(".save-status", { hasText: /not saved: (offline|the server does not answer)/ })
+    .waitFor();
   await context.setOffline(false);
-  await waitUntilSaved(page);
+  await waitUntilSaved(page, "T_base = 171 K");
   await page.reload();
   await page.locator(".headline-number").first().waitFor();
   expect(await entryLine(page, "T_base").innerText()).toContain("171 K");
@@ -175,7 +201,7 @@ it("After the session has ended, one signs in again and what was written is save
   await writeEntry(page, "T_base", "169 K");
   await page.getByText(/session has ended/).waitFor();
   await page.getByRole("button", { name: "Tamsin Orevale" }).click();
-  await waitUntilSaved(page);
+  await waitUntilSaved(page, "T_base = 169 K");
   await page.reload();
   await page.locator(".headline-number").first().waitFor();
   expect(await entryLine(page, "T_base").innerText()).toContain("169 K");
@@ -190,16 +216,13 @@ it("Ten thousand pasted lines neither freeze the page nor get lost", async () =>
   await line.click();
   await page.keyboard.press("End");
   const lines = Array.from({ length: 10_000 }, (_, index) => `q_${index} = ${index} m`).join("\n");
-  await page.keyboard.insertText(`\n${lines}`);
+  await paste(page, `\n${lines}`);
   const begun = Date.now();
   await page.getByRole("button", { name: "More", exact: true }).click({ timeout: 10_000 });
   await page.getByRole("menuitem", { name: "Print" }).waitFor({ timeout: 10_000 });
   expect(Date.now() - begun).toBeLessThan(10_000);
   await page.keyboard.press("Escape");
-  await waitUntilSaved(page);
-  await line.click();
-  await page.keyboard.press("Control+z");
-  await waitUntilSaved(page);
+  await waitUntilSaved(page, "q_9999 = 9999 m");
   expect(complaints).toEqual([]);
   await context.close();
 });

@@ -14,6 +14,7 @@ import { useNotebookNotes } from "./evaluation/useNotebookNotes";
 import { Article } from "./page/Article";
 import { MoreMenu } from "./page/MoreMenu";
 import { NotebookBar } from "./page/NotebookBar";
+import { resultNames } from "./page/resultNames";
 import { SaveStatus } from "./page/SaveStatus";
 import { useDeskKeys } from "./page/useDeskKeys";
 import { visibleTo } from "./page/visibleTo";
@@ -104,6 +105,14 @@ export function NotebookDesk({ notebook, person }: NotebookDeskProps) {
               onDeleted={() => void navigate("/notebooks")}
               unitSystem={unitSystem}
               onUnitSystem={handleUnitSystem}
+              headline={
+                isEditable
+                  ? {
+                      names: () => resultNames(live.evaluated?.cells),
+                      onChange: (headline) => edit({ type: "changeHeadline", headline }, "Headline changed"),
+                    }
+                  : null
+              }
               onKeep={notebook.abilities.keepVersion && isEditable ? () => setKeeping(true) : null}
             />
           </>

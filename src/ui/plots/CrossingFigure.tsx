@@ -73,7 +73,7 @@ export function CrossingFigure({ profiles, strip, unitSystem, number, caption }:
           spoken={spoken}
         >
           <div role="img" aria-label={crossingLabel(strip)}>
-            <PlotlyFigure data={plot.data} layout={plot.layout} onZoom={setZoom} />
+            <PlotlyFigure plot={plot} onZoom={setZoom} />
           </div>
         </FigureReader>
       </div>

@@ -100,8 +100,7 @@ export function DensityFigure({ profiles, strip, unitSystem, number, caption }: 
         >
           <div role="img" aria-label={densityLabel(strip, styles)}>
             <PlotlyFigure
-              data={plot.data}
-              layout={plot.layout}
+              plot={plot}
               onZoom={setZoom}
               onNamePress={(index) => {
                 const gas = plot.named[index];

@@ -1,16 +1,22 @@
-import type { Data, Layout } from "plotly.js";
+import type { Layout } from "plotly.js";
 import { lazy, Suspense, useEffect, useState } from "react";
+import { fetchPart } from "../../lib/fetchPart";
+import { Message } from "../Message";
+import { PartBoundary } from "../PartBoundary";
+import type { FigureDrawing } from "./exportFigure";
 import type { FigureZoom } from "./figureLayout";
+import { isPagePrinting } from "./useFigureInks";
+import { useInTurn } from "./useInTurn";
 
 /** The figure library is large: it is fetched once, after the page has been painted. */
 const Plot = lazy(async () => {
-  const { createPlot } = await import("./loadPlotly");
+  const { createPlot } = await fetchPart(() => import("./loadPlotly"));
   return { default: createPlot };
 });
 
 interface PlotlyFigureProps {
-  data: Data[];
-  layout: Partial<Layout>;
+  /** The same object as long as nothing changes. */
+  plot: FigureDrawing;
   /** Called with what a drag drew closer, or null to show all again. */
   onZoom: (zoom: FigureZoom | null) => void;
   /** Called with the place in `layout.annotations` of a name that was pressed. */
@@ -53,25 +59,35 @@ function zoomOf(event: RelayoutEvent, layout: Partial<Layout>): FigureZoom | nul
 }
 
 /** Drag to draw closer, double press to go back; touch scrolls the page instead. */
-export function PlotlyFigure({ data, layout, onZoom, onNamePress }: PlotlyFigureProps) {
+export function PlotlyFigure({ plot, onZoom, onNamePress }: PlotlyFigureProps) {
   const isPainted = useAfterFirstPaint();
+  const inTurn = useInTurn(plot);
+  const { data, layout } = isPagePrinting() ? plot : inTurn;
   const place = <div style={{ width: layout.width, height: layout.height }} />;
   if (!isPainted) return place;
+  const unfetched = (
+    <Message state="fault">
+      The figure could not be drawn: its program did not come. Load the page again; the numbers stand in the
+      tables.
+    </Message>
+  );
   return (
-    <Suspense fallback={place}>
-      <Plot
-        className="figure-plot"
-        data={data}
-        layout={layout}
-        config={config}
-        style={{ width: layout.width, height: layout.height }}
-        onRelayout={(event: RelayoutEvent) => {
-          const zoom = zoomOf(event, layout);
-          if (zoom) onZoom(zoom);
-        }}
-        onDoubleClick={() => onZoom(null)}
-        onClickAnnotation={({ index }: { index: number }) => onNamePress?.(index)}
-      />
-    </Suspense>
+    <PartBoundary instead={unfetched}>
+      <Suspense fallback={place}>
+        <Plot
+          className="figure-plot"
+          data={data}
+          layout={layout}
+          config={config}
+          style={{ width: layout.width, height: layout.height }}
+          onRelayout={(event: RelayoutEvent) => {
+            const zoom = zoomOf(event, layout);
+            if (zoom) onZoom(zoom);
+          }}
+          onDoubleClick={() => onZoom(null)}
+          onClickAnnotation={({ index }: { index: number }) => onNamePress?.(index)}
+        />
+      </Suspense>
+    </PartBoundary>
   );
 }

@@ -9,6 +9,9 @@ let themeRevision = 0;
 /** On paper every figure is as by day. */
 let isPrinting = false;
 
+/** Whether the page is being laid out for paper, when nothing may be put off. */
+export const isPagePrinting = (): boolean => isPrinting;
+
 function subscribeToTheme(onChange: () => void): () => void {
   const handle = () => {
     themeRevision += 1;

@@ -79,7 +79,7 @@ export const CellView = memo(function CellView(props: CellViewProps) {
       className={isProse ? "cell cell-prose" : "cell"}
       tabIndex={-1}
       aria-labelledby={isProse ? undefined : titleId}
-      aria-label={isProse ? "Prose" : undefined}
+      aria-label={isProse && cell.name !== "" ? `Prose ${cell.name}` : undefined}
       onKeyDown={handleKeyDown}
     >
       {isProse ? (

@@ -1,7 +1,7 @@
 import { DropdownMenu } from "radix-ui";
-import { memo } from "react";
-import { cellKinds, type CellKind } from "../../../../shared/notebook/document";
+import { memo, useRef, useState } from "react";
 import { cellSchemas } from "../../../../shared/notebook/cellSchemas";
+import { cellKinds, type CellKind } from "../../../../shared/notebook/document";
 import type { CellCommands } from "./useCellCommands";
 
 /** What one does with the kinds, in the order of the menu. */
@@ -22,7 +22,10 @@ interface InsertCellProps {
   commands: CellCommands;
 }
 
-/** A proof-reader's caret between two cells, and the menu of kinds that hangs from it. */
+/**
+ * A proof-reader's caret between two cells, and the menu of kinds that hangs from it. The menu is made only while it
+ * is open: each made one listens to every key on the page, and there is one caret a cell.
+ */
 export const InsertCell = memo(function InsertCell({
   index,
   afterId,
@@ -30,58 +33,101 @@ export const InsertCell = memo(function InsertCell({
   isLast,
   commands,
 }: InsertCellProps) {
+  const [isOpen, setOpen] = useState(false);
+  const caret = useRef<HTMLButtonElement>(null);
+
+  const handleClose = () => {
+    setOpen(false);
+    requestAnimationFrame(() => {
+      // A cell just inserted has taken the focus to itself.
+      if (document.activeElement === document.body) caret.current?.focus({ preventScroll: true });
+    });
+  };
+
   return (
     <div className="insert" data-last={isLast || undefined} data-print="never">
-      <DropdownMenu.Root modal={false}>
-        <DropdownMenu.Trigger
+      {isOpen ? (
+        <KindMenu place={place} onClose={handleClose} onKind={(kind) => commands.insert(kind, index)} />
+      ) : (
+        <button
+          ref={caret}
+          type="button"
           className="insert-caret"
           data-insert-after={afterId ?? ""}
           aria-label={`Insert a cell ${place}`}
+          aria-haspopup="menu"
+          aria-expanded={false}
+          onClick={() => setOpen(true)}
         >
-          <svg
-            width="18"
-            height="12"
-            viewBox="0 0 18 12"
-            fill="none"
-            stroke="currentColor"
-            strokeWidth="1.5"
-            aria-hidden="true"
-          >
-            <path d="M2 11L9 2l7 9" />
-          </svg>
-          <span className="insert-words" aria-hidden="true">
-            Insert a cell
-          </span>
-        </DropdownMenu.Trigger>
-        <DropdownMenu.Portal>
-          <DropdownMenu.Content
-            className="insert-menu"
-            align="start"
-            sideOffset={6}
-            collisionPadding={18}
-            loop
-          >
-            {groups.map(({ words, kinds }) => (
-              <DropdownMenu.Group key={words} className="insert-group">
-                <DropdownMenu.Label className="insert-group-words">{words}</DropdownMenu.Label>
-                <div>
-                  {kinds.map((kind) => (
-                    <DropdownMenu.Item
-                      key={kind}
-                      className="insert-kind"
-                      textValue={kind}
-                      onSelect={() => commands.insert(kind, index)}
-                    >
-                      <b>{kind}</b>
-                      <span>{cellSchemas[kind].description}</span>
-                    </DropdownMenu.Item>
-                  ))}
-                </div>
-              </DropdownMenu.Group>
-            ))}
-          </DropdownMenu.Content>
-        </DropdownMenu.Portal>
-      </DropdownMenu.Root>
+          <CaretFace />
+        </button>
+      )}
     </div>
   );
 });
+
+interface KindMenuProps {
+  place: string;
+  onClose: () => void;
+  onKind: (kind: CellKind) => void;
+}
+
+function KindMenu({ place, onClose, onKind }: KindMenuProps) {
+  return (
+    <DropdownMenu.Root modal={false} open onOpenChange={(open) => open || onClose()}>
+      <DropdownMenu.Trigger className="insert-caret" aria-label={`Insert a cell ${place}`}>
+        <CaretFace />
+      </DropdownMenu.Trigger>
+      <DropdownMenu.Portal>
+        <DropdownMenu.Content
+          className="insert-menu"
+          align="start"
+          sideOffset={6}
+          collisionPadding={18}
+          loop
+          onCloseAutoFocus={(event) => event.preventDefault()}
+        >
+          {groups.map(({ words, kinds }) => (
+            <DropdownMenu.Group key={words} className="insert-group">
+              <DropdownMenu.Label className="insert-group-words">{words}</DropdownMenu.Label>
+              <div>
+                {kinds.map((kind) => (
+                  <DropdownMenu.Item
+                    key={kind}
+                    className="insert-kind"
+                    textValue={kind}
+                    onSelect={() => onKind(kind)}
+                  >
+                    <b>{kind}</b>
+                    <span>{cellSchemas[kind].description}</span>
+                  </DropdownMenu.Item>
+                ))}
+              </div>
+            </DropdownMenu.Group>
+          ))}
+        </DropdownMenu.Content>
+      </DropdownMenu.Portal>
+    </DropdownMenu.Root>
+  );
+}
+
+function CaretFace() {
+  return (
+    <>
+      <svg
+        width="18"
+        height="12"
+        viewBox="0 0 18 12"
+        fill="none"
+        stroke="currentColor"
+        strokeWidth="1.5"
+        aria-hidden="true"
+      >
+        <path d="M2 11L9 2l7 9" />
+      </svg>
+      <span className="insert-words" aria-hidden="true">
+        Insert a cell
+      </span>
+    </>
+  );
+}

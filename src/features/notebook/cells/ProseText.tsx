@@ -1,16 +1,21 @@
 import { lazy, memo, Suspense } from "react";
+import { fetchPart } from "../../../lib/fetchPart";
+import { PartBoundary } from "../../../ui/PartBoundary";
 
-const MarkdownProse = lazy(() => import("./MarkdownProse"));
-const MathProse = lazy(() => import("./MathProse"));
+const MarkdownProse = lazy(() => fetchPart(() => import("./MarkdownProse")));
+const MathProse = lazy(() => fetchPart(() => import("./MathProse")));
 
-/** Prose as it reads. Until the code for it has come, the text stands as it was typed, in the same type. */
+/** Prose as it reads. Until the code for it has come, or where it can't, the text stands as it was typed. */
 export const ProseText = memo(function ProseText({ text }: { text: string }) {
   const Prose = text.includes("$") ? MathProse : MarkdownProse;
+  const asTyped = <p className="whitespace-pre-wrap">{text}</p>;
   return (
     <div className="prose">
-      <Suspense fallback={<p className="whitespace-pre-wrap">{text}</p>}>
-        <Prose text={text} />
-      </Suspense>
+      <PartBoundary instead={asTyped}>
+        <Suspense fallback={asTyped}>
+          <Prose text={text} />
+        </Suspense>
+      </PartBoundary>
     </div>
   );
 });

@@ -34,7 +34,7 @@ function createCellCommands(now: () => Surroundings, onNewCell: (id: string) => 
   function moveTo(id: string, index: number): void {
     const cell = cellOf(id);
     if (!cell || index === indexOf(id) || index < 0 || index >= now().document.cells.length) return;
-    const isWriting = window.document.activeElement?.closest(".cm-editor") != null;
+    const isWriting = window.document.activeElement?.closest(".cm-editor") instanceof HTMLElement;
     now().edit({ type: "moveCell", id, index }, `${cellTitle(cell)} moved`);
     keepInSight(id, isWriting);
   }
@@ -84,11 +84,7 @@ function createCellCommands(now: () => Surroundings, onNewCell: (id: string) => 
     focusCell: (id: string): void => cellElement(id)?.focus({ preventScroll: true }),
     /** Opens the menu of kinds under a cell. */
     openInsert(afterId: string): void {
-      const caret = window.document.querySelector<HTMLElement>(
-        `[data-insert-after="${CSS.escape(afterId)}"]`,
-      );
-      caret?.focus();
-      caret?.dispatchEvent(new KeyboardEvent("keydown", { key: "Enter", bubbles: true }));
+      window.document.querySelector<HTMLElement>(`[data-insert-after="${CSS.escape(afterId)}"]`)?.click();
     },
   };
 }

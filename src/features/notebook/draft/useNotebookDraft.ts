@@ -5,7 +5,7 @@ import type { NotebookResponse } from "../../../../shared/schemas/notebooks";
 import type { Person } from "../../../../shared/schemas/people";
 import { notebookQuery, saveDraft } from "../notebookQueries";
 import { beginDraft, draftReducer, isUnsaved, openMerge, type Draft } from "./draftReducer";
-import { dropDraft, keepDraft, readKeptDrafts } from "./keptDrafts";
+import { dropDraft, keepDraft, readKeptDrafts, type KeptDraft } from "./keptDrafts";
 import type { Side } from "./mergeDocuments";
 import { createSaveQueue, type SaveQueue, type SaveState } from "./saveQueue";
 import { claimTab, livingTabs } from "./tabIdentity";
@@ -160,14 +160,7 @@ function useKeptCopy({ draft, notebookId, personId, canEdit, dispatch }: KeptCop
         setKept(true);
         return;
       }
-      const keep = () =>
-        keepDraft(notebookId, tabId, {
-          userId: personId,
-          revision: draft.agreed.revision,
-          base: draft.agreed.document,
-          document: draft.document,
-          changedAt: Date.now(),
-        });
+      const keep = () => keepDraft(notebookId, tabId, copyOf(draft, personId));
       const timer = setTimeout(() => setKept(keep()), keepRest);
       window.addEventListener("pagehide", keep);
       return () => {
@@ -178,7 +171,26 @@ function useKeptCopy({ draft, notebookId, personId, canEdit, dispatch }: KeptCop
     [draft, tabId, canEdit, notebookId, personId],
   );
 
+  const latest = useRef({ draft, tabId });
+  useEffect(function rememberLatest() {
+    latest.current = { draft, tabId };
+  });
+  useEffect(
+    function keepOnLeaving() {
+      return () => {
+        const last = latest.current;
+        if (last.tabId === null || !canEdit || !isUnsaved(last.draft)) return;
+        keepDraft(notebookId, last.tabId, copyOf(last.draft, personId));
+      };
+    },
+    [canEdit, notebookId, personId],
+  );
+
   return isKept;
+}
+
+function copyOf({ agreed, document }: Draft, userId: string): KeptDraft {
+  return { userId, revision: agreed.revision, base: agreed.document, document, changedAt: Date.now() };
 }
 
 /** Asks before the page is left while the server lacks something. */

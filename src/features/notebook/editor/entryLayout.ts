@@ -1,6 +1,7 @@
 import { syntaxTree } from "@codemirror/language";
 import { Prec, type EditorState, type Extension, type Range } from "@codemirror/state";
-import { Decoration, EditorView, ViewPlugin, type DecorationSet, type ViewUpdate } from "@codemirror/view";
+import type { EditorView } from "@codemirror/view";
+import { Decoration, ViewPlugin, type DecorationSet, type ViewUpdate } from "@codemirror/view";
 
 interface EntryStart {
   lineFrom: number;
@@ -15,6 +16,8 @@ const widestName = 32;
 
 const equalsSign = Decoration.mark({ class: "entry-equals" });
 const remarkGap = Decoration.mark({ class: "entry-gap" });
+/** The sign of a remark is not left alone at the end of a line. */
+const remarkStart = Decoration.mark({ class: "entry-remark-start" });
 
 /**
  * Names padded to the longest in the cell, so that the signs stand in line, a hanging indent for what runs over the
@@ -53,7 +56,7 @@ function layOut(view: EditorView): DecorationSet {
   const line = Decoration.line({ attributes: { style: `--hang:${column + 2}ch` }, class: "entry-line" });
   const name = Decoration.mark({ attributes: { style: `min-width:${column}ch` }, class: "entry-name" });
 
-  const marks: Range<Decoration>[] = remarkGaps(state, view.hasFocus);
+  const marks: Range<Decoration>[] = remarkMarks(state, view.hasFocus);
   for (const { lineFrom, equals } of starts) {
     marks.push(line.range(lineFrom), equalsSign.range(equals, equals + 1));
     if (equals > lineFrom) marks.push(name.range(lineFrom, equals));
@@ -74,20 +77,21 @@ function entryStarts(state: EditorState): EntryStart[] {
   return starts;
 }
 
-/** Spaces before remarks beyond the last one, which the value as understood has pushed out of any order. */
-function remarkGaps(state: EditorState, isWritten: boolean): Range<Decoration>[] {
-  const gaps: Range<Decoration>[] = [];
+/** How remarks begin, and the spaces before them beyond the last, which the value as understood has pushed out of any order. */
+function remarkMarks(state: EditorState, isWritten: boolean): Range<Decoration>[] {
+  const marks: Range<Decoration>[] = [];
   const activeLine = isWritten ? state.doc.lineAt(state.selection.main.head).number : -1;
   syntaxTree(state).iterate({
     enter(node) {
       if (node.name !== "Remark") return;
       const line = state.doc.lineAt(node.from);
-      const written = state.sliceDoc(line.from, node.from);
-      const end = line.from + written.trimEnd().length;
+      const end = line.from + state.sliceDoc(line.from, node.from).trimEnd().length;
       if (end > line.from && node.from - end > 1 && line.number !== activeLine) {
-        gaps.push(remarkGap.range(end, node.from - 1));
+        marks.push(remarkGap.range(end, node.from - 1));
       }
+      const [beginning = "#"] = /^#+\s*\S{0,24}/.exec(state.sliceDoc(node.from, node.to)) ?? [];
+      marks.push(remarkStart.range(node.from, node.from + beginning.length));
     },
   });
-  return gaps;
+  return marks;
 }

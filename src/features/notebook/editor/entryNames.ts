@@ -1,6 +1,7 @@
 import { syntaxTree } from "@codemirror/language";
 import { Facet, RangeSetBuilder, type EditorState, type Extension } from "@codemirror/state";
-import { Decoration, EditorView, ViewPlugin, type DecorationSet, type ViewUpdate } from "@codemirror/view";
+import type { EditorView } from "@codemirror/view";
+import { Decoration, ViewPlugin, type DecorationSet, type ViewUpdate } from "@codemirror/view";
 import { gasStyle } from "../../../lib/gasStyle";
 
 /** What the names in a cell may stand for. */

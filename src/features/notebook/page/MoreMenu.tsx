@@ -11,6 +11,8 @@ import { Message } from "../../../ui/Message";
 import { TextButton } from "../../../ui/TextButton";
 import { useDeleteNotebook } from "../notebookQueries";
 import { downloadNotebook } from "./downloadNotebook";
+import { HeadlineDialog } from "./HeadlineDialog";
+import { KeysDialog } from "./KeysDialog";
 import { useMediaQuery } from "./useMediaQuery";
 
 interface MoreMenuProps {
@@ -23,6 +25,8 @@ interface MoreMenuProps {
   onUnitSystem: (system: UnitSystem) => void;
   /** null where no version can be kept now. */
   onKeep: (() => void) | null;
+  /** null where the notebook is only read. */
+  headline: { names: () => string[]; onChange: (headline: string[]) => void } | null;
 }
 
 const unitOptions: readonly { value: UnitSystem; label: string }[] = [
@@ -31,9 +35,18 @@ const unitOptions: readonly { value: UnitSystem; label: string }[] = [
 ];
 
 /** What else can be done with a notebook. */
-export function MoreMenu({ notebook, document, onDeleted, unitSystem, onUnitSystem, onKeep }: MoreMenuProps) {
+export function MoreMenu({
+  notebook,
+  document,
+  onDeleted,
+  unitSystem,
+  onUnitSystem,
+  onKeep,
+  headline,
+}: MoreMenuProps) {
   const isNarrow = useMediaQuery("(max-width: 639.98px)");
   const [isAsking, setAsking] = useState(false);
+  const [shown, setShown] = useState<"headline" | "keys" | null>(null);
   const deletion = useDeleteNotebook(notebook.id);
 
   return (
@@ -56,6 +69,8 @@ export function MoreMenu({ notebook, document, onDeleted, unitSystem, onUnitSyst
         <MenuLink to={`/notebooks/${notebook.id}/versions`}>Versions</MenuLink>
         <MenuItem onSelect={() => void downloadNotebook(document)}>Export as Markdown</MenuItem>
         <MenuItem onSelect={() => setTimeout(() => window.print(), 50)}>Print</MenuItem>
+        {headline && <MenuItem onSelect={() => setShown("headline")}>Headline</MenuItem>}
+        <MenuItem onSelect={() => setShown("keys")}>Keys</MenuItem>
         {notebook.abilities.delete && (
           <>
             <MenuRule />
@@ -65,6 +80,15 @@ export function MoreMenu({ notebook, document, onDeleted, unitSystem, onUnitSyst
           </>
         )}
       </Menu>
+      {shown === "headline" && headline && (
+        <HeadlineDialog
+          headline={document.headline}
+          names={headline.names()}
+          onChange={headline.onChange}
+          onClose={() => setShown(null)}
+        />
+      )}
+      {shown === "keys" && <KeysDialog onClose={() => setShown(null)} />}
       <Dialog
         open={isAsking}
         onOpenChange={setAsking}

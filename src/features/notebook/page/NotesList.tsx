@@ -1,9 +1,12 @@
+import { useState } from "react";
 import type { Cell } from "../../../../shared/notebook/document";
 import type { Note, NoteLevel } from "../../../../shared/notebook/result";
 import { formatCount } from "../../../lib/format";
 import { formatMessage } from "../../../lib/formatMessage";
 import { Rich } from "../../../lib/Rich";
+import { useSettled } from "../../../lib/useSettled";
 import { StateMark } from "../../../ui/StateMark";
+import { TextButton } from "../../../ui/TextButton";
 import type { LetteredNote } from "../../../ui/tables/tableProps";
 import { complaintAndRest } from "../cells/complaintAndRest";
 
@@ -13,31 +16,58 @@ export interface ListedNote extends LetteredNote {
 
 const levels: readonly NoteLevel[] = ["fault", "caution", "remark"];
 
+/** So many remarks are shown at once; more are folded under their number. */
+const mostRemarks = 4;
+
 /** In the margin: all that is wrong or doubtful in the notebook, faults first; each leads to its cell. */
 export function NotesList({ notes }: { notes: readonly ListedNote[] }) {
-  const counts = levels
-    .map((level) => ({ level, count: notes.filter(({ note }) => note.level === level).length }))
-    .filter(({ count }) => count > 0);
-  const sorted = levels.flatMap((level) => notes.filter(({ note }) => note.level === level));
-  const summary = counts.map(({ level, count }) => formatCount(count, level)).join(", ");
+  const [isUnfolded, setUnfolded] = useState(false);
+  const of = (level: NoteLevel) => notes.filter(({ note }) => note.level === level);
+  const summary = levels
+    .filter((level) => of(level).length > 0)
+    .map((level) => formatCount(of(level).length, level))
+    .join(", ");
+  // Said aloud once writing has rested, not at each key.
+  const spoken = useSettled(summary, 1_500);
+  const remarks = of("remark");
+  const isFolded = remarks.length > mostRemarks && !isUnfolded;
 
   return (
     <section className="notes-list" aria-label="Faults, cautions and remarks">
-      <h2 role="status">{summary === "" ? "" : summary[0]!.toUpperCase() + summary.slice(1)}</h2>
+      {summary !== "" && <h2>{summary[0]!.toUpperCase() + summary.slice(1)}</h2>}
+      <span className="visually-hidden" role="status">
+        {spoken}
+      </span>
       <ul>
-        {sorted.map(({ note, letter, cell }, index) => (
-          <li key={`${cell.id} ${note.code} ${index}`}>
-            <StateMark state={note.level} label={note.level} />
-            <i className="table-letter" data-level={note.level}>
-              {letter}
-            </i>
-            <a href={`#cell-${cell.id}`}>
-              <b>{cell.name || cell.kind}</b>: <Rich text={formatMessage(complaintOf(note))} />
-            </a>
-          </li>
+        {[...of("fault"), ...of("caution"), ...(isFolded ? [] : remarks)].map((listed, index) => (
+          <NoteLine key={`${listed.cell.id} ${listed.note.code} ${index}`} {...listed} />
         ))}
       </ul>
+      {remarks.length > mostRemarks && (
+        <TextButton
+          className="ml-36"
+          data-print="never"
+          aria-expanded={isUnfolded}
+          onClick={() => setUnfolded((before) => !before)}
+        >
+          {isFolded ? `show ${formatCount(remarks.length, "remark")}` : "fold the remarks"}
+        </TextButton>
+      )}
     </section>
+  );
+}
+
+function NoteLine({ note, letter, cell }: ListedNote) {
+  return (
+    <li>
+      <StateMark state={note.level} label={note.level} />
+      <i className="table-letter" data-level={note.level}>
+        {letter}
+      </i>
+      <a href={`#cell-${cell.id}`}>
+        <b>{cell.name || cell.kind}</b>: <Rich text={formatMessage(complaintOf(note))} />
+      </a>
+    </li>
   );
 }
 
