@@ -49,7 +49,8 @@ export interface ExobaseGuess {
   heightOfLargest: number;
 }
 
-const tolerance = 1e-2;
+/** Error of ln p and ln J allowed in a step. */
+const usualTolerance = 1e-3;
 /** Height of the start over the base, in scale heights: J is nothing at the base itself. */
 const startOfMarch = 0.05;
 const endOfMarch = logarithm(10);
@@ -64,6 +65,7 @@ const smallestLogJ = -600;
 
 let column: EscapingColumn;
 let drag: BaseFluxes;
+let tolerance = usualTolerance;
 let size = 0;
 let piece = 0;
 /** kT, as `setDepleted` left it. */
@@ -75,9 +77,14 @@ const depletedSlopes = new Float64Array(maximumGases);
 /** 1/(D + K) of each gas, s m⁻², as `depletedSlope` left them. */
 const conductances = new Float64Array(maximumGases);
 
-/** Guesses the exobase. */
-export function guessExobase(escaping: EscapingColumn): ExobaseGuess {
+/**
+ * Guesses the exobase.
+ *
+ * @param accuracy  error of ln p and ln J allowed in a step
+ */
+export function guessExobase(escaping: EscapingColumn, accuracy = usualTolerance): ExobaseGuess {
   column = escaping;
+  tolerance = accuracy;
   size = escaping.problem.masses.length;
   drag = new Float64Array(size);
   let guess = marchDepleted();
@@ -236,20 +243,32 @@ function marchDepleted(): ExobaseGuess {
   return guess;
 }
 
-/** Loads `start` and `k1` a little above the base; returns the height. */
+/** Loads `start` and `k1` a little above the base, by the slopes halfway; returns the height. */
 function setOut(): number {
-  start.set(column.problem.baseLogPressures);
+  const { baseLogPressures } = column.problem;
+  start.set(baseLogPressures);
   start.fill(smallestLogJ, size, 2 * size);
   depletedSlope(0, start, k1);
   let fall = 0;
   for (let i = 0; i < size; i += 1) fall += fractions[i] * k1[i];
   const height = startOfMarch / Math.abs(fall);
   for (let i = 0; i < size; i += 1) {
-    start[i] += height * k1[i];
-    start[size + i] = Math.max(smallestLogJ, logarithm(height * conductances[i]));
+    start[i] += (height / 2) * k1[i];
+    start[size + i] = logJ(height / 2, i);
+  }
+  depletedSlope(height / 2, start, k1);
+  const warming = slopeParts.warming();
+  for (let i = 0; i < size; i += 1) {
+    start[i] = baseLogPressures[i] + height * k1[i];
+    start[size + i] = logJ(height, i) + ((k1[i] - warming) * height) / 2;
   }
   depletedSlope(height, start, k1);
   return height;
+}
+
+/** ln J a little above the base, where the conductance is about what was set last. */
+function logJ(height: number, gas: number): number {
+  return Math.max(smallestLogJ, logarithm(height * conductances[gas]));
 }
 
 function takeStepUp(position: number, wished: number, limit: number): { step: number; error: number } | null {

@@ -20,6 +20,7 @@ export function supplyShares(path: ColumnPath): Float64Array {
   for (let step = 0; step < descent; step += 1) {
     const middle = (positions[step] + positions[step + 1]) / 2;
     const half = (positions[step + 1] - positions[step]) / 2;
+    if (half === 0) continue; // a step that only changed the law
     for (let k = 0; k < nodes.length; k += 1) {
       const height = middle + half * nodes[k];
       stateWithin(path, step, height, state);

@@ -75,6 +75,7 @@ export function findCrossings(along: NumberAlong, logValue: number): NumberCross
   for (let step = 0; step < path.steps; step += 1) {
     const from = path.positions[step];
     const length = path.positions[step + 1] - from;
+    if (length === 0) continue; // a step that only changed the law
     const onlyRises = slopes[step] > 0 && slopes[step + 1] > 0;
     const parts = onlyRises ? 1 : subsamples;
     let lower = from;
