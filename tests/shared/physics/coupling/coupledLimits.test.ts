@@ -191,3 +191,35 @@ describe("a gas alone", () => {
     expect(coupled.gases[0].supplyShare).toBe(0);
   });
 });
+
+describe("several exobases", () => {
+  // Hydrogen, an eighth as wide and 40 times as light, takes over from argon near Kn = 1.
+  const separated = (H: number) =>
+    sampleCoupled({
+      fractions: { Ar: 1, H },
+      eddy: { kind: "none" },
+      temperature: isothermal(120),
+      baseNumberDensity: 1e18,
+      corrections: { H: 1e-7 },
+    });
+
+  it("are the last one before Kn = 10 and the others, as without flux", () => {
+    let seen = 0;
+    for (let exponent = -7; exponent <= -3; exponent += 0.25) {
+      const input = separated(10 ** exponent);
+      const open = solveColumn(input).exobase;
+      if (!open.found) continue;
+      const { exobase, marches } = solved(input);
+      expect(exobase.level.altitude).toBeCloseToRelative(open.level.altitude, 1e-3);
+      expect(exobase.otherAltitudes.length).toBe(open.otherAltitudes.length);
+      exobase.otherAltitudes.forEach((altitude, k) =>
+        expect(altitude).toBeCloseToRelative(open.otherAltitudes[k], 1e-3),
+      );
+      if (exobase.otherAltitudes.length > 0 && marches > 1) {
+        seen += 1;
+        expect(exobase.notes).toMatchObject([{ level: "caution", code: "several_exobases" }]);
+      }
+    }
+    expect(seen).toBeGreaterThan(0);
+  });
+});
