@@ -55,7 +55,7 @@ const dampings = 2;
 const differencesLimit = 6;
 const increment = 1e-4;
 const differenceTolerance = 1e-8;
-/** Done when nothing would change by more than so many tolerances, or all residuals are as small as one. */
+/** Done when nothing would change by more than so many tolerances, or all residuals are as small as one twice. */
 const closeness = 20;
 /** Below this escape parameter of the mean mass, where the gas would drift at over a fifth of √(kT/m), none is tried. */
 const smallestBound = 1.5;
@@ -82,6 +82,8 @@ interface Search {
   lastHeight: number;
   /** Whether a trial was refused since the gas would be unbound there. */
   metUnbound: boolean;
+  /** Whether the last turn left no more than the errors of its march. */
+  isNoise: boolean;
   /** In which changes of the height are counted, m. */
   scale: number;
   /** Row by gas; columns by ln p of each gas at the exobase and by its height in `scale`. */
@@ -147,6 +149,7 @@ function beginSearch(column: EscapingColumn, tolerance: number): Search {
     marches: 0,
     lastHeight: 0,
     metUnbound: false,
+    isNoise: false,
     scale: 1,
     jacobian: new Float64Array(size * (size + 1)),
     change: new Float64Array(size + 1),
@@ -311,11 +314,16 @@ function differenceJacobian(search: Search, { height, state }: Trial): Trial {
   return here;
 }
 
-function isSettled({ change, size, tolerance }: Search, here: Trial): boolean {
+/** Whether nothing would change by more than it should, or the residual has been nothing but noise before. */
+function isSettled(search: Search, here: Trial): boolean {
+  const { change, size, tolerance } = search;
   if (here.tolerance > tolerance) return false;
-  if (here.norm <= tolerance) return true;
-  for (let k = 0; k <= size; k += 1) if (Math.abs(change[k]) > closeness * tolerance) return false;
-  return true;
+  let largest = 0;
+  for (let k = 0; k <= size; k += 1) largest = Math.max(largest, Math.abs(change[k]));
+  if (largest <= closeness * tolerance) return true;
+  const wasNoise = search.isNoise;
+  search.isNoise = here.norm <= tolerance;
+  return wasNoise && search.isNoise;
 }
 
 /** An exobase that was reached is the one, if the number rises there. */
