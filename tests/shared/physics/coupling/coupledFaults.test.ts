@@ -5,6 +5,7 @@ import { solveCoupledColumn } from "../../../../shared/physics/coupling/solveCou
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import type { CoupledInput, CoupledOutcome } from "../../../../shared/physics/types";
 import "../../../toBeCloseToRelative";
+import { randomColumn } from "../column/randomColumn";
 import { sampleCoupled, solved, warm } from "./coupledSamples";
 
 function faultOf(input: CoupledInput): Extract<CoupledOutcome, { converged: false }> {
@@ -76,6 +77,20 @@ describe("an exobase that only escape makes", () => {
     });
     expect(solveColumn(input).exobase).toMatchObject({ found: false, reason: "runaway" });
     expect(solved(input).exobase.level.knudsen).toBeCloseToRelative(1, 1e-12);
+  });
+});
+
+describe("an exobase that the guess misses", () => {
+  // Ten gases, points of T and K: where weak escape has its exobase high and strong escape low, the guess lies between.
+  const input: CoupledInput = { ...randomColumn(457), criterion: { kind: "bulk" }, corrections: {} };
+
+  it("is found from that of stronger escape", () => {
+    const { exobase, marches } = solved(input);
+    expect(marches).toBeGreaterThan(20);
+    const stronger = Object.fromEntries(input.gases.map(({ formula }) => [formula, 1.05]));
+    const near = solved({ ...input, corrections: stronger });
+    expect(near.marches).toBeLessThan(20);
+    expect(exobase.level.altitude / near.exobase.level.altitude).toBeCloseTo(1, 1);
   });
 });
 
