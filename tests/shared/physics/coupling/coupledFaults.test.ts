@@ -1,6 +1,8 @@
 import { describe, expect, it } from "vitest";
 
 import { solveColumn } from "../../../../shared/physics/column/solveColumn";
+import { escapingColumn } from "../../../../shared/physics/coupling/escapingColumn";
+import { guessExobase } from "../../../../shared/physics/coupling/guessExobase";
 import { solveCoupledColumn } from "../../../../shared/physics/coupling/solveCoupledColumn";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import type { CoupledInput, CoupledOutcome } from "../../../../shared/physics/types";
@@ -91,6 +93,16 @@ describe("an exobase that the guess misses", () => {
     const near = solved({ ...input, corrections: stronger });
     expect(near.marches).toBeLessThan(20);
     expect(exobase.level.altitude / near.exobase.level.altitude).toBeCloseTo(1, 1);
+  });
+});
+
+describe("an exobase that the guess only comes near", () => {
+  it("is found from where Kn is largest in the guess", () => {
+    const input: CoupledInput = { ...randomColumn(750), criterion: { kind: "bulk" }, corrections: {} };
+    const guess = guessExobase(escapingColumn(input));
+    expect(guess.hasCrossing).toBe(false);
+    expect(Math.exp(guess.largestLogNumber)).toBeCloseTo(0.97, 2);
+    expect(solved(input).exobase.level.knudsen).toBeCloseToRelative(1, 1e-11);
   });
 });
 
