@@ -210,18 +210,13 @@ function setResistances(): void {
 
 /** The drag of the fluxes on each other's gases, and of every gas on its own. */
 function addFluxes(fluxes: BaseFluxes): void {
-  let pair = 0;
   for (let i = 0; i < count; i += 1) {
-    for (let j = 0; j < i; j += 1) {
-      const friction = frictions[pair];
-      pair += 1;
-      forces[i] += fluxes[j] * friction;
-      forces[j] += fluxes[i] * friction;
-    }
-  }
-  if (isDragOnly) return;
-  for (let i = 0; i < count; i += 1) {
-    if (fluxes[i] !== 0) forces[i] -= (fluxes[i] / fractions[i]) * resistances[i];
+    const flux = fluxes[i];
+    if (flux === 0) continue;
+    const firstPair = (i * (i - 1)) / 2;
+    for (let j = 0; j < i; j += 1) forces[j] += flux * frictions[firstPair + j];
+    for (let j = i + 1; j < count; j += 1) forces[j] += flux * frictions[(j * (j - 1)) / 2 + i];
+    if (!isDragOnly) forces[i] -= (flux / fractions[i]) * resistances[i];
   }
 }
 

@@ -39,6 +39,8 @@ const looseShare = 1e-3;
 const loosestForGood = 1e-7;
 /** Residuals of up to so many times the tolerance of their marches are not compared. */
 const noise = 100;
+/** After the first, loose march one with so many times the tolerance, which leaves no more than the last can mend. */
+const nearly = 20;
 /** Largest change in one turn: of ln p of a gas, or of the height in scale heights. */
 const largestChange = 3;
 /** A gas of which there is less, before and after, may change by more. */
@@ -255,7 +257,9 @@ function improve(search: Search, here: Trial): Trial | null {
   const { part, largest } = allowedPart(search, here);
   const expected = largest * Math.max(jacobianError, Math.min(1, largest));
   const wished = Math.min(loosest, looseShare * expected);
-  const loose = wished < loosestForGood ? search.tolerance : Math.max(search.tolerance, wished);
+  const nearlyGood = nearly * search.tolerance;
+  const finest = here.tolerance > nearlyGood ? nearlyGood : search.tolerance;
+  const loose = Math.max(finest, wished < loosestForGood ? 0 : wished);
   let share = part;
   for (let cut = 0; cut <= dampings; cut += 1) {
     const next = moved(search, here, share);
