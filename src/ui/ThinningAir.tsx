@@ -1,4 +1,5 @@
 import { useMemo } from "react";
+import { seededSequence } from "../lib/seededSequence";
 
 interface ThinningAirProps {
   width: number;
@@ -11,17 +12,6 @@ interface ThinningAirProps {
 interface Point {
   x: number;
   y: number;
-}
-
-/** A sequence of numbers in [0, 1) that is the same wherever it runs. */
-function seededSequence(seed: number): () => number {
-  let state = seed;
-  return () => {
-    state = (state + 0x6d2b79f5) | 0;
-    let mixed = Math.imul(state ^ (state >>> 15), 1 | state);
-    mixed = (mixed + Math.imul(mixed ^ (mixed >>> 7), 61 | mixed)) ^ mixed;
-    return ((mixed ^ (mixed >>> 14)) >>> 0) / 4294967296;
-  };
 }
 
 /** Darts kept apart by a distance that grows with height, as the air thins. */

@@ -1,4 +1,5 @@
 /** Where the parts of the limb stand in a window of a given size. Lengths in pixels, altitudes in km. */
+import { seededSequence } from "../../lib/seededSequence";
 import { skyTop } from "./limbSky";
 
 export interface Box {
@@ -72,16 +73,6 @@ function dotDensity(altitude: number): number {
   const share = Math.max(0, Math.min(1.1, (log10Density(altitude) - top) / -top));
   const free = (altitude - bottom) / (exobase - bottom);
   return (share ** 2.1 * 0.95 + 0.05) * (smoothStep(free) * 0.92 + 0.08);
-}
-
-function seededSequence(seed: number): () => number {
-  let state = seed;
-  return () => {
-    state = (state + 0x6d2b79f5) | 0;
-    let mixed = Math.imul(state ^ (state >>> 15), 1 | state);
-    mixed = (mixed + Math.imul(mixed ^ (mixed >>> 7), 61 | mixed)) ^ mixed;
-    return ((mixed ^ (mixed >>> 14)) >>> 0) / 4294967296;
-  };
 }
 
 const cellSize = 48;

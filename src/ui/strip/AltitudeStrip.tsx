@@ -6,6 +6,7 @@ import { StripBand } from "./StripBand";
 import { stripLabels, type StripLabel } from "./stripLabels";
 import { StripMarks } from "./StripMarks";
 import type { AltitudeStripProps } from "./stripProps";
+import { StripReader } from "./StripReader";
 import { StripReadOut } from "./StripReadOut";
 import { scaleAboveBase, stripTicks } from "./stripScale";
 import { readStrip, stripLabel } from "./stripSentences";
@@ -117,18 +118,13 @@ export function AltitudeStrip({ strip, unitSystem }: AltitudeStripProps) {
           </g>
         )}
       </svg>
-      <div
-        className="strip-reader"
+      <StripReader
+        strip={strip}
+        reading={reading}
+        spoken={read.spoken}
+        handlers={handlers}
+        orientation="vertical"
         style={{ width: edge + 40 }}
-        role="slider"
-        tabIndex={0}
-        aria-label={`Altitude read in ${strip.column}`}
-        aria-orientation="vertical"
-        aria-valuemin={Math.round(strip.base / 1000)}
-        aria-valuemax={Math.round(strip.top / 1000)}
-        aria-valuenow={Math.round((reading ?? strip.exobase ?? strip.base) / 1000)}
-        aria-valuetext={read.spoken}
-        {...handlers}
       />
       {reading !== null && (
         <StripReadOut

@@ -5,6 +5,7 @@ import { useElementSize } from "../../lib/useElementSize";
 import "./strip.css";
 import { StripBand } from "./StripBand";
 import type { AltitudeStripProps } from "./stripProps";
+import { StripReader } from "./StripReader";
 import { StripReadOut } from "./StripReadOut";
 import { stripScale, stripTicks } from "./stripScale";
 import { readStrip, stripLabel } from "./stripSentences";
@@ -92,16 +93,12 @@ export function LyingStrip({ strip, unitSystem }: AltitudeStripProps) {
           </g>
         )}
       </svg>
-      <div
-        className="strip-reader"
-        role="slider"
-        tabIndex={0}
-        aria-label={`Altitude read in ${strip.column}`}
-        aria-valuemin={Math.round(strip.base / 1000)}
-        aria-valuemax={Math.round(strip.top / 1000)}
-        aria-valuenow={Math.round((reading ?? strip.exobase ?? strip.base) / 1000)}
-        aria-valuetext={read.spoken}
-        {...handlers}
+      <StripReader
+        strip={strip}
+        reading={reading}
+        spoken={read.spoken}
+        handlers={handlers}
+        orientation="horizontal"
       />
       {reading !== null && (
         <StripReadOut

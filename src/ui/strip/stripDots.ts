@@ -1,4 +1,5 @@
 import type { Strip } from "../../../shared/notebook/summary";
+import { seededSequence } from "../../lib/seededSequence";
 import { sampleStrip } from "./stripSample";
 import type { StripScale } from "./stripScale";
 import { fluidShare } from "./stripTone";
@@ -33,21 +34,10 @@ interface Candidate {
   draw: number;
 }
 
-/** Seeded uniform numbers in [0, 1): mulberry32. */
-function seededUniform(seed: number): () => number {
-  let state = seed | 0;
-  return () => {
-    state = (state + 0x6d2b79f5) | 0;
-    let t = Math.imul(state ^ (state >>> 15), 1 | state);
-    t = (t + Math.imul(t ^ (t >>> 7), 61 | t)) ^ t;
-    return ((t ^ (t >>> 14)) >>> 0) / 4294967296;
-  };
-}
-
 const widestSpacing = 46;
 
 function throwDarts(length: number, width: number, closest: number): Candidate[] {
-  const uniform = seededUniform(12345);
+  const uniform = seededSequence(12345);
   const cell = 3 * closest;
   const columns = Math.max(1, Math.ceil(width / cell));
   const grid = new Map<number, Candidate[]>();
