@@ -1,39 +1,72 @@
 // Answers a notebook file on the command line: a report to read, or with --json the result document.
 import { readFileSync } from "node:fs";
+import { availableParallelism } from "node:os";
+import { performance } from "node:perf_hooks";
+import { drawRows } from "../shared/notebook/drawRows";
 import { evaluateNotebook } from "../shared/notebook/evaluateNotebook";
 import { readNotebookFile } from "../shared/notebook/notebookFile";
+import type { Evaluation } from "../shared/notebook/result";
 import { resultDocument } from "../shared/notebook/resultDocument";
+import { progressLine } from "./evaluate/progressLine";
 import { plainMessage, report } from "./evaluate/report";
+import { runLongTasks } from "./evaluate/runLongTasks";
 
-const help = `npm run evaluate -- FILE [--json]
+const help = `npm run evaluate -- FILE [--json] [--draws] [--threads N]
 
 Evaluates a notebook file and prints a report.
 
-  --json   print the result document instead: values, tables, profiles and notes, in SI
-  --help   print this
+  --json       print the result document instead: values, tables, profiles and notes, in SI
+  --draws      with --json: a table draws for each spread, with the value of each watched result in each draw
+  --threads N  threads for sweeps and spreads; as many as the machine has if left out. The answer is the same
+  --help       print this
+
+Sweeps and spreads tell their progress on standard error. Ctrl-C stops them; what is done so far is then answered,
+and marked as partial.
 
 Exit code
   0   evaluated, no faults (cautions and remarks are no faults)
   1   the file cannot be read or is no notebook; nothing is printed to standard output
-  2   evaluated, but some cell has a fault`;
+  2   evaluated, but some cell has a fault
+  3   stopped early: some sweep or spread is partial`;
 
-function main(commandLine: string[]): number {
-  const options = commandLine.filter((argument) => argument.startsWith("-"));
-  const [file, ...others] = commandLine.filter((argument) => !argument.startsWith("-"));
-  if (options.includes("--help")) {
+interface Wishes {
+  file: string;
+  isJson: boolean;
+  hasDraws: boolean;
+  threads: number;
+}
+
+async function main(commandLine: string[]): Promise<number> {
+  if (commandLine.includes("--help")) {
     console.log(help);
     return 0;
   }
-  const unknown = options.find((option) => option !== "--json");
-  if (unknown !== undefined || file === undefined || others.length > 0) {
-    console.error(unknown === undefined ? "One notebook file is needed.\n" : `No option ${unknown}.\n`);
-    console.error(help);
-    return 1;
-  }
-  return evaluateFile(file, options.includes("--json"));
+  const wishes = readCommandLine(commandLine);
+  if (typeof wishes !== "string") return evaluateFile(wishes);
+  console.error(`${wishes}\n`);
+  console.error(help);
+  return 1;
 }
 
-function evaluateFile(file: string, isJson: boolean): number {
+/** What is asked for, or what is wrong with it. */
+function readCommandLine(commandLine: readonly string[]): Wishes | string {
+  const wishes = { isJson: false, hasDraws: false, threads: availableParallelism() };
+  const files: string[] = [];
+  const left = [...commandLine];
+  for (let argument = left.shift(); argument !== undefined; argument = left.shift()) {
+    if (argument === "--json") wishes.isJson = true;
+    else if (argument === "--draws") wishes.hasDraws = true;
+    else if (argument === "--threads") {
+      wishes.threads = Number(left.shift());
+      if (!Number.isInteger(wishes.threads) || wishes.threads < 1)
+        return "--threads takes a whole number, 1 or more.";
+    } else if (argument.startsWith("-")) return `No option ${argument}.`;
+    else files.push(argument);
+  }
+  return files.length === 1 ? { ...wishes, file: files[0] } : "One notebook file is needed.";
+}
+
+async function evaluateFile({ file, isJson, hasDraws, threads }: Wishes): Promise<number> {
   const text = readText(file);
   if (text === null) return 1;
   let count = 0;
@@ -43,9 +76,47 @@ function evaluateFile(file: string, isJson: boolean): number {
       console.error(`${file}:${line ?? 1}: ${plainMessage(message)}`);
     return 1;
   }
-  const { evaluation } = evaluateNotebook(reading.document);
-  console.log(isJson ? JSON.stringify(resultDocument(evaluation), null, 2) : report(reading, evaluation));
-  return evaluation.cells.some(({ result }) => result.status === "fault") ? 2 : 0;
+  const { document } = reading;
+  const first = evaluateNotebook(document);
+  const stop = stopOnSignal();
+  const progress = progressLine(process.stderr, () => performance.now());
+  const answers = await runLongTasks(document, first.tasks, {
+    threads,
+    onProgress: (task, state) => progress.show(task, state),
+    isStopped: stop.isStopped,
+  });
+  progress.clear();
+  const { evaluation } = evaluateNotebook(document, first.memory, answers);
+  const result = resultDocument(evaluation);
+  if (hasDraws) {
+    for (const task of first.tasks.filter(({ kind }) => kind === "spread")) {
+      const place = document.cells.findIndex(({ id }) => id === task.cellId);
+      const cell = result.cells[place];
+      result.cells[place] = { ...cell, tables: { ...cell.tables, draws: drawRows(answers.get(task.key)!) } };
+    }
+  }
+  console.log(isJson ? JSON.stringify(result, null, 2) : report(reading, evaluation));
+  stop.forget();
+  if ([...answers.values()].some(({ done, points }) => done < points)) return 3;
+  return hasFault(evaluation) ? 2 : 0;
+}
+
+function hasFault({ cells }: Evaluation): boolean {
+  return cells.some(({ result }) => result.status === "fault");
+}
+
+/** One key press may reach the process more than once, by the terminal and by what started it, ms. */
+const onePress = 1000;
+
+/** The first interruption asks the work to stop; a second ends the process. */
+function stopOnSignal(): { isStopped: () => boolean; forget: () => void } {
+  let stoppedAt: number | null = null;
+  const handle = () => {
+    if (stoppedAt !== null && performance.now() - stoppedAt > onePress) process.exit(130);
+    stoppedAt ??= performance.now();
+  };
+  process.on("SIGINT", handle);
+  return { isStopped: () => stoppedAt !== null, forget: () => process.off("SIGINT", handle) };
 }
 
 function readText(file: string): string | null {
@@ -61,4 +132,4 @@ function readText(file: string): string | null {
   }
 }
 
-process.exitCode = main(process.argv.slice(2));
+process.exitCode = await main(process.argv.slice(2));

@@ -4,6 +4,7 @@ import { formatPlainNumber, formatQuantity } from "../../shared/notebook/languag
 import type { NotebookFileReading } from "../../shared/notebook/notebookFile";
 import type { CellEvaluation, CellResult, Evaluation, Note, ResultRow } from "../../shared/notebook/result";
 import { alignColumns } from "./alignColumns";
+import { spreadLines, sweepLines } from "./longWorkReport";
 
 type ReadFile = Extract<NotebookFileReading, { ok: true }>;
 type UnitSystem = ReadFile["document"]["unitSystem"];
@@ -42,13 +43,10 @@ function cellReport(
   const notes = result.notes.map((note) =>
     noteLine(note, note.line === undefined ? textLine - 1 : textLine + note.line - 1),
   );
-  const { common, rows } = valuesByGas(result, gases);
   const parts = [
     [`${result.kind} ${result.name} (${result.status})`],
     byDefault.length > 0 ? [`  By default: ${byDefault.join("; ")}`] : [],
-    alignColumns(common.map((name) => [name, valueText(result, name, unitSystem)])).map(indent),
-    rows.length > 0 ? gasTable(result, rows, gases, unitSystem) : [],
-    ...Object.entries(result.tables).flatMap(([name, table]) => tableLines(name, table, gases)),
+    ...answerLines(result, gases, unitSystem),
     notes,
   ];
   return parts
@@ -57,8 +55,20 @@ function cellReport(
     .join("\n");
 }
 
+/** Values and tables, each kind in its own way. */
+function answerLines(result: CellResult, gases: readonly string[], unitSystem: UnitSystem): string[][] {
+  if (result.kind === "sweep") return [sweepLines(result).map(indent)];
+  if (result.kind === "spread") return [spreadLines(result, unitSystem).map(indent)];
+  const { common, rows } = valuesByGas(result, gases);
+  return [
+    alignColumns(common.map((name) => [name, valueText(result, name, unitSystem)])).map(indent),
+    rows.length > 0 ? gasTable(result, rows, gases, unitSystem) : [],
+    ...Object.entries(result.tables).flatMap(([name, table]) => tableLines(name, table, gases)),
+  ];
+}
+
 function indent(line: string): string {
-  return `  ${line}`;
+  return line === "" ? line : `  ${line}`;
 }
 
 /** Values of an escape cell that exist for each gas go into a table of gases; the others are listed. */
@@ -86,12 +96,23 @@ function gasTable(
   const heads = ["", ...quantities.map((quantity) => quantity.replaceAll("_", " "))];
   const rows = gases.map((gas) => [
     gas,
-    ...quantities.map((quantity) => valueText(result, `${gas}.${quantity}`, unitSystem)),
+    ...quantities.map((quantity) => centreText(result, `${gas}.${quantity}`, unitSystem)),
   ]);
   return ["", ...alignColumns([heads, ...rows]).map(indent), ""];
 }
 
+/** A value, and where a spread watches it the range that holds 68 % of the draws. */
 function valueText(result: CellResult, name: string, unitSystem: UnitSystem): string {
+  const { spread, unit = "1" } = result.values[name];
+  const centre = centreText(result, name, unitSystem);
+  if (!spread || spread.lower === null || spread.upper === null) return centre;
+  const [lower, upper] = [spread.lower, spread.upper].map((end) =>
+    formatQuantity(end, dimensionOfUnit(unit), { unitSystem, digits }),
+  );
+  return `${centre} (68 %: ${lower} to ${upper})`;
+}
+
+function centreText(result: CellResult, name: string, unitSystem: UnitSystem): string {
   const found = result.values[name];
   if (!found) return "–";
   const { value, unit = "1" } = found;

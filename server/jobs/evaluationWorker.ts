@@ -1,11 +1,10 @@
 /** Entry of the worker thread: says that it is ready; then a document in, what the server keeps of its evaluation out. */
 import { parentPort } from "node:worker_threads";
-import type { NotebookDocument } from "../../shared/notebook/document";
-import type { EvaluationAnswer } from "./evaluator";
+import type { EvaluationAnswer, EvaluationRequest } from "./evaluator";
 import { evaluateDocument } from "./evaluateDocument";
 
-parentPort?.on("message", (document: NotebookDocument) => {
-  const answer: EvaluationAnswer = { ok: true, outcome: evaluateDocument(document) };
+parentPort?.on("message", ({ document, longWork }: EvaluationRequest) => {
+  const answer: EvaluationAnswer = { ok: true, outcome: evaluateDocument(document, longWork) };
   parentPort?.postMessage(answer);
 });
 

@@ -14,35 +14,70 @@ export interface EvaluationOutcome {
 export type EvaluationAnswer = { ok: true; outcome: EvaluationOutcome } | { ok: false; reason: string };
 
 export interface Evaluator {
-  /** One after the other; an urgent one goes before those that wait. Never rejects. */
-  evaluate(document: NotebookDocument, options?: { isUrgent: boolean }): Promise<EvaluationAnswer>;
+  /**
+   * One after the other; documents to be kept do not wait for others, and have their sweeps and spreads computed.
+   * Never rejects.
+   */
+  evaluate(document: NotebookDocument, options?: { isKept: boolean }): Promise<EvaluationAnswer>;
   close(): Promise<void>;
 }
 
-interface Task {
+/** What a worker is asked. */
+export interface EvaluationRequest {
   document: NotebookDocument;
-  answer: (answer: EvaluationAnswer) => void;
+  /** ms for sweeps and spreads; null leaves them out. */
+  longWork: number | null;
+}
+
+interface Limits {
+  /** ms for a document, its sweeps and spreads aside. */
+  timeLimit?: number;
+  /** ms for the sweeps and spreads of a document that is kept; what is not done by then is marked as partial. */
+  longWork?: number;
 }
 
 const memoryLimitMb = 512;
 
 /**
- * Evaluates documents in a worker thread, so that no text, however heavy, holds up an answer or takes the server
- * down: what runs over the time or the memory ends with its thread, and the next gets a new one.
+ * Evaluates documents in worker threads, one for drafts and one for what is kept, so that no text, however heavy, holds
+ * up an answer or takes the server down: what runs over the time or the memory ends with its thread, and the next gets
+ * a new one.
  */
-export function createEvaluator({ timeLimit = 10_000 }: { timeLimit?: number } = {}): Evaluator {
-  const waiting: Task[] = [];
+export function createEvaluator({ timeLimit = 10_000, longWork = 60_000 }: Limits = {}): Evaluator {
+  const drafts = createLane(null, timeLimit);
+  const kept = createLane(longWork, timeLimit + longWork);
+  return {
+    evaluate: (document, { isKept } = { isKept: false }) => (isKept ? kept : drafts).evaluate(document),
+    close: async () => {
+      await Promise.all([drafts.close(), kept.close()]);
+    },
+  };
+}
+
+interface WaitingDocument {
+  document: NotebookDocument;
+  answer: (answer: EvaluationAnswer) => void;
+}
+
+interface Lane {
+  evaluate(document: NotebookDocument): Promise<EvaluationAnswer>;
+  close(): Promise<void>;
+}
+
+/** One thread with its queue. */
+function createLane(longWork: number | null, timeLimit: number): Lane {
+  const waiting: WaitingDocument[] = [];
   let worker: Worker | null = null;
   let running: Promise<void> | null = null;
   let isClosed = false;
 
-  const run = async ({ document, answer }: Task): Promise<void> => {
+  const run = async ({ document, answer }: WaitingDocument): Promise<void> => {
     try {
       worker ??= await startWorker(() => (worker = null));
     } catch (error) {
       return answer({ ok: false, reason: `The evaluation could not begin: ${String(error)}` });
     }
-    const reply = await askWorker(worker, document, timeLimit);
+    const reply = await askWorker(worker, { document, longWork }, timeLimit);
     if (!reply.isAlive) {
       await worker?.terminate();
       worker = null;
@@ -51,16 +86,15 @@ export function createEvaluator({ timeLimit = 10_000 }: { timeLimit?: number } =
   };
 
   const runAll = async (): Promise<void> => {
-    for (let task = waiting.shift(); task; task = waiting.shift()) await run(task);
+    for (let next = waiting.shift(); next; next = waiting.shift()) await run(next);
     running = null;
   };
 
   return {
-    evaluate: (document, { isUrgent } = { isUrgent: false }) =>
+    evaluate: (document) =>
       new Promise((answer) => {
         if (isClosed) return answer({ ok: false, reason: "The server is stopping. Try again in a minute." });
-        if (isUrgent) waiting.unshift({ document, answer });
-        else waiting.push({ document, answer });
+        waiting.push({ document, answer });
         running ??= runAll();
       }),
 
@@ -89,7 +123,7 @@ async function startWorker(onExit: () => void): Promise<Worker> {
 /** One question to a worker, with a limit in ms; says also whether the worker can be asked again. */
 function askWorker(
   worker: Worker,
-  document: NotebookDocument,
+  request: EvaluationRequest,
   timeLimit: number,
 ): Promise<{ answer: EvaluationAnswer; isAlive: boolean }> {
   return new Promise((resolve) => {
@@ -112,6 +146,6 @@ function askWorker(
       timeLimit,
     );
     worker.on("message", onMessage).on("error", onError).on("exit", onExit);
-    worker.postMessage(document);
+    worker.postMessage(request);
   });
 }

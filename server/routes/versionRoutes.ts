@@ -34,7 +34,7 @@ export function versionRoutes(parts: { db: Db; evaluator: Evaluator; summaries: 
       throw forbidden("keep a version of this notebook");
     if (notebook.revision !== revision) throw staleRevision(draftStateOf(notebook));
 
-    const answer = await evaluator.evaluate(notebook.document, { isUrgent: true });
+    const answer = await evaluator.evaluate(notebook.document, { isKept: true });
     if (!answer.ok) throw evaluationFailed(`The version was not kept. ${answer.reason}`);
     const { result } = answer.outcome;
     const { number } = await keepVersion(db, {

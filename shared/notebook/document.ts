@@ -1,7 +1,19 @@
 import { z } from "zod";
 
 /** The kinds of cell that a notebook may hold, in the order of the menu. */
-export const cellKinds = ["prose", "values", "body", "gas", "column", "escape"] as const;
+export const cellKinds = [
+  "prose",
+  "values",
+  "body",
+  "gas",
+  "column",
+  "escape",
+  "corona",
+  "nonthermal",
+  "sweep",
+  "spread",
+  "loss",
+] as const;
 export type CellKind = (typeof cellKinds)[number];
 
 /** Bounds on a document, the same for the editor, the file, the API and the database. */

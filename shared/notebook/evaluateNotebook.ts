@@ -14,7 +14,9 @@ import {
 } from "./evaluation/surroundings";
 import { parseEntries } from "./language/parseEntries";
 import type { ParsedEntries } from "./language/syntax";
+import { withSpreads, type DecoratedCell } from "./evaluation/withSpreads";
 import type { CellEvaluation, Evaluation } from "./result";
+import type { LongTask, TaskAnswer, TaskAnswers } from "./tasks";
 
 interface RememberedCell {
   cell: Cell;
@@ -23,6 +25,8 @@ interface RememberedCell {
   questions: RecordedSurroundings["questions"];
   evaluated: EvaluatedCell;
   evaluation: CellEvaluation;
+  /** The evaluation with the spreads of its results, where it has any. */
+  decorated?: DecoratedCell;
 }
 
 /** What one evaluation leaves for the next: by cell id, the answer and all that it rested on. */
@@ -32,29 +36,52 @@ export type EvaluationMemory = ReadonlyMap<string, RememberedCell>;
  * Answers a notebook, from top to bottom. A pure function of the document: `previous` makes it faster, never
  * different. A cell whose text and whose view of the cells above have not changed keeps its answer, the same object.
  *
+ * Sweeps and spreads take long: they are answered from `answers` or the memory where their task has been done, else
+ * listed in `tasks`.
+ *
  * Never throws: whatever cannot be answered is said in the notes of a cell.
  */
 export function evaluateNotebook(
   document: NotebookDocument,
   previous?: EvaluationMemory,
-): { evaluation: Evaluation; memory: EvaluationMemory } {
+  answers?: TaskAnswers,
+): { evaluation: Evaluation; memory: EvaluationMemory; tasks: LongTask[] } {
+  const taskAnswer = knownAnswers(previous, answers);
   const memory = new Map<string, RememberedCell>();
   const parsed = document.cells.map((cell) => parse(cell, previous?.get(cell.id)));
   const places = namePlaces(document, parsed);
   let above = nothingAbove;
 
-  const cells = document.cells.map((cell, place) => {
-    const surroundings = surroundingsOf(above, places, place);
+  const remembered = document.cells.map((cell, place) => {
+    const surroundings = surroundingsOf(above, places, place, taskAnswer);
     const last = previous?.get(cell.id);
-    const remembered =
+    const answered =
       last && isSameCell(last, cell, document) && answersTheSame(last.questions, surroundings)
         ? last
         : answer(cell, parsed[place], recordQuestions(surroundings), document, last?.evaluated);
-    memory.set(cell.id, remembered);
-    above = addCell(above, remembered.evaluated.above);
-    return remembered.evaluation;
+    above = addCell(above, answered.evaluated.above);
+    return answered;
   });
-  return { evaluation: { engine: engineVersion, title: document.title, cells }, memory };
+  const cells = withSpreads(remembered);
+  remembered.forEach((answered, place) => {
+    memory.set(answered.cell.id, { ...answered, decorated: cells[place] });
+  });
+  const tasks = remembered.flatMap(({ cell, evaluated }) => taskOf(cell, evaluated) ?? []);
+  const evaluation = { engine: engineVersion, title: document.title, cells: cells.map((one) => one.shown) };
+  return { evaluation, memory, tasks };
+}
+
+/** What is still to be computed for a cell. */
+function taskOf({ id, name }: Cell, { plan, taskAnswer }: EvaluatedCell): LongTask | null {
+  if (!plan || taskAnswer) return null;
+  return { cellId: id, kind: plan.kind, name, key: plan.key, points: plan.points };
+}
+
+function knownAnswers(previous: EvaluationMemory | undefined, answers: TaskAnswers | undefined) {
+  const remembered = new Map<string, TaskAnswer>();
+  for (const { evaluated } of previous?.values() ?? [])
+    if (evaluated.taskAnswer) remembered.set(evaluated.taskAnswer.key, evaluated.taskAnswer);
+  return (key: string): TaskAnswer | undefined => answers?.get(key) ?? remembered.get(key);
 }
 
 const noEntries: ParsedEntries = { entries: [], notes: [] };
@@ -72,9 +99,18 @@ function answer(
   last: EvaluatedCell | undefined,
 ): RememberedCell {
   const evaluated = evaluateCell(cell, parsed, surroundings, unitSystem, last);
-  const { result, understood, defaults, gases, strip } = evaluated;
+  const { result, understood, defaults, gases, strip, convention } = evaluated;
   const uses = usedNames(surroundings.questions);
-  const evaluation = { id: cell.id, result, understood, defaults, uses, gases, ...(strip ? { strip } : {}) };
+  const evaluation = {
+    id: cell.id,
+    result,
+    understood,
+    defaults,
+    uses,
+    gases,
+    ...(strip ? { strip } : {}),
+    ...(convention ? { convention } : {}),
+  };
   return { cell, parsed, unitSystem, questions: surroundings.questions, evaluated, evaluation };
 }
 

@@ -31,6 +31,22 @@ export interface ResultValue {
   value: number | string | null;
   /** SI, such as "m^-2 s^-1"; "1" for a pure number; absent for a choice. */
   unit?: string;
+  /** Only where a spread cell watches it and has been computed. */
+  spread?: ResultSpread;
+}
+
+/** Quantiles of a watched result in its own unit; null below 1e-300. */
+export interface ResultSpread {
+  median: number | null;
+  /** 16 and 84 %. */
+  lower: number | null;
+  upper: number | null;
+  q2_5: number | null;
+  q97_5: number | null;
+  /** Name of the spread cell. */
+  cell: string;
+  /** The work was stopped before all draws were done. */
+  isPartial?: true;
 }
 
 export type ResultRow = Record<string, number | string | null>;
@@ -75,6 +91,8 @@ export interface CellEvaluation {
   gases: string[];
   /** Of a column. */
   strip?: Strip;
+  /** Of an escape cell: what its numbers rest on, in a few words. */
+  convention?: { coupling: "coupled" | "open"; criterion: string };
 }
 
 export interface Evaluation {

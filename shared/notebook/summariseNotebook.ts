@@ -1,7 +1,7 @@
 import { findGas } from "../physics";
 import type { NotebookDocument } from "./document";
 import { formatPlainNumber, thinSpace } from "./language/formatQuantity";
-import type { CellEvaluation, CellResult, Evaluation, NoteLevel } from "./result";
+import type { CellEvaluation, Evaluation, NoteLevel } from "./result";
 import type { HeadlineItem, NotebookSummary, Strip } from "./summary";
 
 /** What a list shows of a notebook: its headline, how many notes of each level, its bodies, the strip of a column. */
@@ -36,10 +36,10 @@ function headlineOf({ headline }: NotebookDocument, evaluation: Evaluation): Hea
   const escape = evaluation.cells.find(({ result }) => result.kind === "escape");
   if (!escape) return [];
   const { result } = escape;
-  if (!("exobase.altitude" in result.values)) return noExobase(result);
+  if (!("exobase.altitude" in result.values)) return noExobase(escape);
   const fastest = fastestGas(escape);
   const names = ["exobase.altitude", ...(fastest ? [`${fastest}.rate`, `${fastest}.escape_parameter`] : [])];
-  return names.map((name) => itemOf(result, name));
+  return names.map((name) => itemOf(escape, name));
 }
 
 /** The gas with the largest rate of particles. */
@@ -55,11 +55,11 @@ function fastestGas({ result, gases }: CellEvaluation): string | null {
   return fastest;
 }
 
-function noExobase({ name, notes }: CellResult): HeadlineItem[] {
+function noExobase({ result, convention }: CellEvaluation): HeadlineItem[] {
+  const { name, notes, values } = result;
   const reason = notes.find(({ code }) => code.startsWith("no_exobase_"));
   if (!reason) return [];
-  const isWind = reason.code === "no_exobase_runaway" || reason.code === "no_exobase_base_unbound";
-  const value = isWind ? "none: a wind instead" : "none";
+  const value = values.regime?.value === "wind" ? "none: a wind instead" : "none";
   return [
     {
       name: `${name}.exobase.altitude`,
@@ -68,7 +68,7 @@ function noExobase({ name, notes }: CellResult): HeadlineItem[] {
       log10: null,
       unit: "m",
       gas: null,
-      note: "bulk, l = H",
+      note: convention?.criterion ?? "",
     },
   ];
 }
@@ -76,16 +76,18 @@ function noExobase({ name, notes }: CellResult): HeadlineItem[] {
 function namedItem(evaluation: Evaluation, path: string): HeadlineItem {
   const [cellName, ...rest] = path.split(".");
   const name = rest.join(".");
-  const results = evaluation.cells.map(({ result }) => result);
-  const result =
+  const cell =
     name === ""
-      ? results.find(({ kind, values }) => kind === "values" && Object.hasOwn(values, cellName))
-      : results.find((candidate) => candidate.name === cellName && Object.hasOwn(candidate.values, name));
-  if (result) return itemOf(result, name === "" ? cellName : name);
+      ? evaluation.cells.find(
+          ({ result }) => result.kind === "values" && Object.hasOwn(result.values, cellName),
+        )
+      : evaluation.cells.find(({ result }) => result.name === cellName && Object.hasOwn(result.values, name));
+  if (cell) return itemOf(cell, name === "" ? cellName : name);
   return { name: path, label: path, value: "no such result", log10: null, unit: "", gas: null, note: "" };
 }
 
-function itemOf(result: CellResult, name: string): HeadlineItem {
+function itemOf(cell: CellEvaluation, name: string): HeadlineItem {
+  const { result } = cell;
   const { value, unit } = result.values[name];
   const twin = result.values[name.replace(/([^.]+)$/, "log10_$1")]?.value;
   const [first, last] = [name.split(".")[0], name.slice(name.lastIndexOf(".") + 1)];
@@ -97,7 +99,7 @@ function itemOf(result: CellResult, name: string): HeadlineItem {
     log10: typeof twin === "number" ? twin : null,
     unit: unit ?? "",
     gas,
-    note: conventionOf(result, name),
+    note: conventionOf(cell, name),
   };
 }
 
@@ -121,8 +123,10 @@ function sentence(text: string): string {
 }
 
 /** The convention that a number rests on, in a few words. */
-function conventionOf({ kind, name: cell, values }: CellResult, name: string): string {
-  if (kind !== "escape") return cell;
+function conventionOf({ result, convention }: CellEvaluation, name: string): string {
+  const { kind, name: cell, values } = result;
+  if (kind !== "escape" || !convention) return cell;
+  const { criterion, coupling } = convention;
   const numberOf = (key: string) => {
     const value = values[key]?.value;
     return typeof value === "number" ? value : null;
@@ -130,15 +134,18 @@ function conventionOf({ kind, name: cell, values }: CellResult, name: string): s
   if (name.startsWith("exobase.")) {
     const kilometres = (altitude: number) => formatPlainNumber(Math.round(altitude / 1000), 6);
     const [lower, upper] = [numberOf("exobase.lower"), numberOf("exobase.upper")];
-    if (lower === null) return "bulk, l = H";
+    if (lower === null) return criterion;
     return upper === null
-      ? `bulk, l = H; Kn 0.1 at ${kilometres(lower)}${thinSpace}km`
-      : `bulk, l = H; Kn 0.1–10 at ${kilometres(lower)}–${kilometres(upper)}${thinSpace}km`;
+      ? `${criterion}; Kn 0.1 at ${kilometres(lower)}${thinSpace}km`
+      : `${criterion}; Kn 0.1–10 at ${kilometres(lower)}–${kilometres(upper)}${thinSpace}km`;
   }
   const bulk = numberOf("bulk_escape_parameter");
   if (name.endsWith("escape_parameter") && bulk !== null) {
     const regime = String(values.regime?.value ?? "").replaceAll("_", " ");
     return `regime ${regime}, bulk λ ${formatPlainNumber(bulk, 3)}`;
   }
-  return "Jeans, open column";
+  if (name === "energy_limited_mass_rate") return "energy limit";
+  if (name === "wind_mass_rate") return "isothermal wind";
+  if (name.endsWith("diffusion_limit")) return "Hunten's limit";
+  return coupling === "open" ? "Jeans, open column" : "Jeans, coupled column";
 }

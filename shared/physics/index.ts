@@ -69,6 +69,9 @@ export { thermalSpeed } from "./escape/thermalSpeed";
 export { diffusionCoefficient } from "./column/diffusionCoefficient";
 export { defaultTolerance, solveColumn } from "./column/solveColumn";
 
+export { supplyLimitedShare } from "./coupling/coupledNotes";
+export { solveCoupledColumn } from "./coupling/solveCoupledColumn";
+
 export { magnitude } from "./numerics/magnitude";
 export { incompleteGamma, scaledUpperGamma } from "./numerics/incompleteGamma";
 export { scaledErfc } from "./numerics/scaledErfc";
@@ -81,7 +84,7 @@ export { type CoronaPlace, partitionFunctions, type PartitionFunctions } from ".
 
 export { columnCrossoverMass, type ColumnCrossoverMass } from "./limits/columnCrossoverMass";
 export { columnDiffusionLimit, type ColumnDiffusionLimit } from "./limits/columnDiffusionLimit";
-export { columnInventory } from "./limits/columnInventory";
+export { columnInventory, type Inventory } from "./limits/columnInventory";
 export { crossoverMass, type OutflowingGas } from "./limits/crossoverMass";
 export { depletionTime } from "./limits/depletionTime";
 export { diffusionLimit, type DiffusionLimit, type DiffusionLimitPlace } from "./limits/diffusionLimit";
@@ -95,6 +98,7 @@ export { lossHistory, type LossHistory } from "./loss/lossHistory";
 export { moleculesFromWaterLayer } from "./loss/moleculesFromWaterLayer";
 export { particlesFromSurfacePressure } from "./loss/particlesFromSurfacePressure";
 export { relativeXuv } from "./loss/relativeXuv";
+export { solarXuvAges } from "./loss/solarXuvAges";
 export { surfacePressureFromParticles } from "./loss/surfacePressureFromParticles";
 export { waterDensity, waterLayerFromMolecules, waterMass } from "./loss/waterLayerFromMolecules";
 export { waterPerParticle } from "./loss/waterPerParticle";
@@ -123,3 +127,14 @@ export {
   type Ionosphere,
   type RecombinationEscape,
 } from "./nonthermal/recombinationEscape";
+
+export type { Distribution, PhysicalBounds } from "./spread/distribution";
+export { histogram, type HistogramBin } from "./spread/histogram";
+export { normalProbability } from "./spread/normalProbability";
+export { normalQuantile } from "./spread/normalQuantile";
+export { rankCorrelation } from "./spread/rankCorrelation";
+export { sampleQuantile } from "./spread/sampleQuantile";
+export { scrambledSobol, type ScrambledSobol } from "./spread/scrambledSobol";
+export { largestSobolDimension } from "./spread/sobolDirections";
+export { truncatedDistribution, type TruncatedDistribution } from "./spread/truncatedDistribution";
+export { varianceShare, type VarianceShare } from "./spread/varianceShare";

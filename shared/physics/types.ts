@@ -118,16 +118,30 @@ export type ExobaseOutcome =
       found: false;
       reason: "base_above_exobase" | "base_unbound" | "runaway" | "top_below_exobase";
       message: string;
+      /** The largest Knudsen number or, by another criterion, of the number that is 1 at the exobase; and where, m. */
       largestKnudsen: number;
       altitudeOfLargest: number;
     };
 
-/** A column that was marched up without flux (F = 0). */
+/** What makes an exobase. Kn, l, H and the band are those of the whole gas whatever the criterion. */
+export type ExobaseCriterion =
+  /** l = H of the whole gas: Kn = 1. */
+  | { kind: "bulk" }
+  /** lᵢ = Hᵢ of one gas in the mixture. */
+  | { kind: "gas"; formula: string }
+  /** 1/(Σ nⱼσⱼ) = H, without √2. */
+  | { kind: "simple" }
+  /** ∫ Σ nⱼσⱼ dz = 1 from there up. */
+  | { kind: "unit_depth" };
+
+/** A column without flux (F = 0), or, of a coupled solution, with the fluxes of its gases up to the exobase. */
 export interface Column {
   input: ColumnInput;
   topAltitude: number;
-  /** By the bulk criterion, l = H. */
+  /** By the bulk criterion, l = H; of a coupled solution the one that its fluxes leave from. */
   exobase: ExobaseOutcome;
+  /** The exobase of the same column by another criterion. */
+  exobaseBy(criterion: ExobaseCriterion): ExobaseOutcome;
   homopauses: HomopauseOutcome[];
   levelAt(altitude: number): ColumnLevel;
   /** Altitudes ascending, between base and top. */
@@ -136,3 +150,50 @@ export interface Column {
   /** Right-hand sides evaluated, for benchmarks. */
   evaluations: number;
 }
+
+/** A column and how its gases escape. */
+export interface CoupledInput extends ColumnInput {
+  criterion: ExobaseCriterion;
+  /** By formula the factor c on the Jeans rate, above zero; 1 for a gas that is not named. */
+  corrections: Readonly<Record<string, number>>;
+}
+
+/** What leaves of one gas. Logarithms hold what is too small for a number; −Infinity for an absent gas. */
+export interface CoupledGas {
+  formula: string;
+  /** ln of the flux through the exobase with its correction, m⁻² s⁻¹. */
+  logFlux: number;
+  /** ln of the Jeans flux of the exobase without correction, m⁻² s⁻¹. */
+  logJeansFlux: number;
+  /** ln of the global rate with its correction, F = 4πr²Φ, s⁻¹; the same at every altitude below. */
+  logRate: number;
+  /** wJ/(1 + wJ): near 0 the Jeans flux takes what is there, near 1 diffusion from below sets the rate. */
+  supplyShare: number;
+}
+
+/** A column whose gases flow up as they escape, or why there is none. */
+export type CoupledOutcome =
+  | {
+      converged: true;
+      /** With fluxes up to the exobase, hydrostatic (F = 0) above. */
+      column: Column;
+      /** By the criterion asked for; the same as `column.exobase`. */
+      exobase: Extract<ExobaseOutcome, { found: true }>;
+      /** In the order of the input. */
+      gases: CoupledGas[];
+      /** Of the coupling alone: `column` and `exobase` have their own. */
+      notes: PhysicsNote[];
+      /** Marches through the column and right-hand sides evaluated. */
+      marches: number;
+      evaluations: number;
+    }
+  | {
+      converged: false;
+      reason: "base_above_exobase" | "base_unbound" | "runaway" | "turn" | "not_converged";
+      message: string;
+      /** The largest number that is 1 at the exobase (Knudsen's for bulk), about; and where, m. */
+      largestKnudsen: number;
+      altitudeOfLargest: number;
+      marches: number;
+      evaluations: number;
+    };

@@ -17,11 +17,27 @@ export const note = z.object({
 
 const scalar = z.union([z.number(), z.string(), z.null()]);
 
+const magnitude = z.number().nullable();
+
+/** Quantiles of a result that a spread cell watches. */
+const spread = z.object({
+  median: magnitude,
+  lower: magnitude,
+  upper: magnitude,
+  q2_5: magnitude,
+  q97_5: magnitude,
+  cell: z.string(),
+  isPartial: z.literal(true).optional(),
+});
+
 export const cellResult = z.object({
   kind: z.enum(cellKinds),
   name: z.string(),
   status: z.enum(["fine", "caution", "fault"]),
-  values: z.record(z.string(), z.object({ value: scalar, unit: z.string().optional() })),
+  values: z.record(
+    z.string(),
+    z.object({ value: scalar, unit: z.string().optional(), spread: spread.optional() }),
+  ),
   tables: z.record(z.string(), z.array(z.record(z.string(), scalar))),
   notes: z.array(note),
 });

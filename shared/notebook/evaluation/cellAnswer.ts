@@ -1,7 +1,9 @@
 import type { CellModel } from "./models";
 import type { Quantity } from "../language/quantity";
-import type { CellResult } from "../result";
+import type { CellEvaluation, CellResult } from "../result";
 import type { Strip } from "../summary";
+import type { TaskAnswer } from "../tasks";
+import type { TaskPlan } from "./taskPlan";
 
 /** What a kind finds out about one of its cells, besides its notes. */
 export interface CellAnswer {
@@ -10,8 +12,13 @@ export interface CellAnswer {
   profiles?: CellResult["profiles"];
   gases?: string[];
   strip?: Strip;
+  /** Of an escape cell. */
+  convention?: CellEvaluation["convention"];
   /** What the cells below may build on. */
   model?: CellModel;
   /** Entries that are names of the whole notebook; null where one has a fault. */
   globals?: Record<string, Quantity | null>;
+  /** Of a sweep or spread: what is to be computed, and its answer once it has been. */
+  plan?: TaskPlan;
+  taskAnswer?: TaskAnswer;
 }

@@ -76,10 +76,14 @@ export function sayWhatColumnLacks(cell: OpenCell, column: Column): void {
     runaway: "temperature",
     top_below_exobase: "top",
   }[exobase.reason];
+  const coupled =
+    exobase.reason === "runaway"
+      ? " An escape cell may still find an exobase: what escapes thins the light gases, which the column at rest does not know."
+      : "";
   cell.say(
     isImpossible ? "fault" : "caution",
     exobase.reason,
-    exobase.message,
+    `${exobase.message}${coupled}`,
     cell.entry(key) ?? cell.entry("gases"),
   );
 }

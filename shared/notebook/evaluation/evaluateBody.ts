@@ -1,5 +1,6 @@
 import {
   angularSpeed,
+  energyLimitedMassRate,
   escapeSpeed,
   findBody,
   gravitationalParameterFromMass,
@@ -37,6 +38,7 @@ export function evaluateBody(cell: OpenCell): CellAnswer {
   const starDistance = ownOrLike("star_distance", like?.starDistance);
   const starMass = ownOrLike("star_mass", like?.starMass);
   const xuvRadius = ownOrLike("xuv_radius", radius);
+  const xuv = readXuv(cell);
   const centrifugal = readCentrifugal(cell, ownOrLike("rotation_period", like?.rotationPeriod));
   sayWhichCentresAct(cell);
 
@@ -46,7 +48,7 @@ export function evaluateBody(cell: OpenCell): CellAnswer {
     values.gm = measured(gm, "m^3 s^-2");
   }
   if (radius !== undefined) values.radius = measured(radius, "m");
-  if (gm === undefined || radius === undefined) return { values };
+  if (gm === undefined || radius === undefined) return { values: { ...values, ...xuvValues(xuv.flux) } };
 
   const place = { gravitationalParameter: gm, radius };
   values.surface_gravity = measured(gravity(place), "m s^-2");
@@ -55,9 +57,57 @@ export function evaluateBody(cell: OpenCell): CellAnswer {
 
   const hill = readHillRadius(cell, gm, starDistance, starMass);
   if (hill !== null) values.hill_radius = measured(hill, "m");
-  if (hill !== null && xuvRadius !== undefined) addTidalFactor(cell, values, hill, xuvRadius);
-  if (hill !== null && !cell.entry("xuv_radius")) cell.actByDefault("xuv_radius");
-  return { values, model: { kind: "body", ...place, centrifugal, hillRadius: hill } };
+  const tide = xuvRadius === undefined ? null : readTide(cell, hill, xuvRadius);
+  if (hill !== null && tide !== null) values.tidal_factor = measured(tide, "1");
+  Object.assign(values, xuvValues(xuv.flux));
+  const doesXuvRadiusAct = hill !== null || (xuv.flux !== undefined && xuv.efficiency !== undefined);
+  if (doesXuvRadiusAct && !cell.entry("xuv_radius")) cell.actByDefault("xuv_radius");
+  const limit = energyLimit(place, xuv, xuvRadius, tide);
+  return {
+    values,
+    model: { kind: "body", ...place, centrifugal, hillRadius: hill, energyLimitedMassRate: limit },
+  };
+}
+
+interface Xuv {
+  flux: number | undefined;
+  efficiency: number | undefined;
+}
+
+function xuvValues(flux: number | undefined): CellResult["values"] {
+  return flux === undefined ? {} : { xuv_flux: measured(flux, "W m^-2") };
+}
+
+function readXuv(cell: OpenCell): Xuv {
+  const xuv = {
+    flux: readQuantityEntry(cell, "xuv_flux"),
+    efficiency: readQuantityEntry(cell, "heating_efficiency"),
+  };
+  const [fluxEntry, efficiencyEntry] = [cell.entry("xuv_flux"), cell.entry("heating_efficiency")];
+  const given = fluxEntry ?? efficiencyEntry;
+  if (given && !(fluxEntry && efficiencyEntry)) {
+    const missing = fluxEntry ? "heating_efficiency" : "xuv_flux";
+    const message = `The energy-limited mass rate needs *${missing}* beside *${given.key}*; it has no default.`;
+    cell.say("remark", "energy_limit_incomplete", message, given);
+  }
+  return xuv;
+}
+
+/** null where the entries do not suffice. */
+function energyLimit(
+  place: { gravitationalParameter: number; radius: number },
+  { flux, efficiency }: Xuv,
+  xuvRadius: number | undefined,
+  tide: number | null,
+): number | null {
+  if (flux === undefined || efficiency === undefined || xuvRadius === undefined || tide === null) return null;
+  return energyLimitedMassRate({
+    ...place,
+    heatingEfficiency: efficiency,
+    xuvFlux: flux,
+    xuvRadius,
+    tidalFactor: tide,
+  });
 }
 
 function readLike(cell: OpenCell): HandbookBody | undefined {
@@ -128,12 +178,12 @@ function readHillRadius(
   return null;
 }
 
-function addTidalFactor(cell: OpenCell, values: CellResult["values"], hill: number, xuvRadius: number): void {
-  if (hill > xuvRadius) {
-    values.tidal_factor = measured(tidalFactor({ hillRadius: hill, xuvRadius }), "1");
-    return;
-  }
+/** 1 without a star; null, with a caution, where the body overflows its Hill sphere. */
+function readTide(cell: OpenCell, hill: number | null, xuvRadius: number): number | null {
+  if (hill === null) return 1;
+  if (hill > xuvRadius) return tidalFactor({ hillRadius: hill, xuvRadius });
   const message =
     "The Hill radius lies below the radius at which the radiation is absorbed: the star takes the gas, and no tidal factor exists.";
   cell.say("caution", "inside_hill_radius", message, cell.entry("xuv_radius") ?? cell.entry("star_distance"));
+  return null;
 }

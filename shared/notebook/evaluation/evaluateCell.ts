@@ -3,21 +3,31 @@ import type { Cell } from "../document";
 import { evaluateBody } from "./evaluateBody";
 import type { CellAnswer } from "./cellAnswer";
 import { evaluateColumn } from "./evaluateColumn";
+import { evaluateCorona } from "./evaluateCorona";
 import { evaluateEscape } from "./evaluateEscape";
 import { evaluateGas } from "./evaluateGas";
+import { evaluateLoss } from "./evaluateLoss";
+import { evaluateNonthermal } from "./evaluateNonthermal";
+import { evaluateSpread } from "./evaluateSpread";
+import { evaluateSweep } from "./evaluateSweep";
 import { evaluateValues } from "./evaluateValues";
 import { locateNotes } from "../language/locateNotes";
 import type { ParsedEntries } from "../language/syntax";
 import type { CellEvaluation, CellResult, CellStatus, Note } from "../result";
 import { openCell, type OpenCell } from "./openCell";
-import type { CellAbove, RecordedSurroundings } from "./surroundings";
+import type { TaskPlan } from "./taskPlan";
+import { usedNames, type CellAbove, type RecordedSurroundings } from "./surroundings";
+import type { TaskAnswer } from "../tasks";
 
 export interface EvaluatedCell extends Pick<
   CellEvaluation,
-  "result" | "understood" | "defaults" | "gases" | "strip"
+  "result" | "understood" | "defaults" | "gases" | "strip" | "convention"
 > {
   /** What the cells below see of it. */
   above: CellAbove;
+  /** Of a sweep or spread that can be computed. */
+  plan: TaskPlan | null;
+  taskAnswer: TaskAnswer | null;
 }
 
 const evaluators: Readonly<Record<Cell["kind"], (cell: OpenCell) => CellAnswer>> = {
@@ -27,18 +37,28 @@ const evaluators: Readonly<Record<Cell["kind"], (cell: OpenCell) => CellAnswer>>
   gas: evaluateGas,
   column: evaluateColumn,
   escape: evaluateEscape,
+  corona: evaluateCorona,
+  nonthermal: evaluateNonthermal,
+  sweep: evaluateSweep,
+  spread: evaluateSpread,
+  loss: evaluateLoss,
 };
 
-/** One cell in its surroundings. Never throws: what cannot be answered becomes a fault of the cell. */
+/**
+ * One cell in its surroundings. Never throws: what cannot be answered becomes a fault of the cell.
+ *
+ * @param wanted  at a point of a sweep or spread, the names of the values that are asked for; null for all there is
+ */
 export function evaluateCell(
   cell: Cell,
   parsed: ParsedEntries,
   surroundings: RecordedSurroundings,
   unitSystem: "SI" | "cgs",
   last: EvaluatedCell | undefined,
+  wanted: ReadonlySet<string> | null = null,
 ): EvaluatedCell {
   const lastModel = last?.above.model ?? null;
-  const open = openCell(cell, parsed, cellSchemas[cell.kind], surroundings, unitSystem, lastModel);
+  const open = openCell(cell, parsed, cellSchemas[cell.kind], surroundings, unitSystem, lastModel, wanted);
   const answer = evaluateSafely(open, cell.kind);
   const values = finiteValues(open, answer.values ?? {});
   const notes = orderNotes(locateNotes(open.notes, open.text, open.entries));
@@ -57,13 +77,19 @@ export function evaluateCell(
     defaults: open.defaults,
     gases: answer.gases ?? [],
     ...(answer.strip ? { strip: answer.strip } : {}),
+    ...(answer.convention ? { convention: answer.convention } : {}),
+    plan: answer.plan ?? null,
+    taskAnswer: answer.taskAnswer ?? null,
     above: {
+      id: cell.id,
       kind: cell.kind,
       name: cell.name,
       values,
       globals: answer.globals ?? {},
       model: answer.model ?? null,
       isFaulty: result.status === "fault",
+      entries: open.entries,
+      uses: usedNames(surroundings.questions),
     },
   };
 }

@@ -41,15 +41,17 @@ export function evaluateColumn(cell: OpenCell): CellAnswer {
 
   const column = solve(cell, input.column);
   if (!column) return { gases };
-  sayWhatColumnMeans(cell, column, gasList!.rest);
+  if (!cell.isDraw) sayWhatColumnMeans(cell, column, gasList!.rest);
   sayWhatColumnLacks(cell, column);
+  const model = { kind: "column", column, body: input.body } as const;
+  if (cell.isDraw) return { gases, values: columnValues(column), model };
   return {
     gases,
     values: columnValues(column),
     tables: levels ? { levels: tabulate(cell, column, levels) } : {},
     profiles: columnProfiles(column),
     strip: columnStrip(cell.name, column),
-    model: { kind: "column", column, body: input.body },
+    model,
   };
 }
 
@@ -72,7 +74,8 @@ function readInput(
     return undefined;
 
   const table = collisionTable(known);
-  sayWhereGasesComeFrom(cell, cell.entry("gases")!, known, eddy.kind === "none" ? null : table);
+  if (!cell.isDraw)
+    sayWhereGasesComeFrom(cell, cell.entry("gases")!, known, eddy.kind === "none" ? null : table);
   const column: ColumnInput = {
     gravitationalParameter: body.gravitationalParameter,
     radius: body.radius,
@@ -126,7 +129,7 @@ function checkBase(cell: OpenCell, body: BodyModel, base: number): boolean {
   }
   const gravity = body.gravitationalParameter / radius / radius;
   if (!Number.isFinite(gravity) || gravity === 0) return true;
-  cell.understand(cell.entry("base")!, `g = ${shown(cell, gravity, "acceleration")}`);
+  if (!cell.isDraw) cell.understand(cell.entry("base")!, `g = ${shown(cell, gravity, "acceleration")}`);
   return true;
 }
 
@@ -163,7 +166,7 @@ function readDensity(
     return undefined;
   }
   if (given !== undefined) {
-    if (temperature !== undefined) {
+    if (temperature !== undefined && !cell.isDraw) {
       const ofDensity = pressureFromNumberDensity({ numberDensity: given, temperature });
       cell.understand(cell.entry("number_density")!, `p = ${shown(cell, ofDensity, "pressure")}`);
     }
@@ -171,7 +174,7 @@ function readDensity(
   }
   if (pressure === undefined || temperature === undefined || cell.entry("number_density")) return undefined;
   const density = numberDensityFromPressure({ pressure, temperature });
-  cell.understand(cell.entry("pressure")!, `n = ${shown(cell, density, "numberDensity")}`);
+  if (!cell.isDraw) cell.understand(cell.entry("pressure")!, `n = ${shown(cell, density, "numberDensity")}`);
   return density;
 }
 

@@ -1,93 +1,69 @@
-import { thermalEscape, type ColumnLevel, type GasEscape, type PhysicsNote } from "../../physics";
+import type { GasEscape, PhysicsNote } from "../../physics";
 import { checkName } from "./checkName";
 import { exobaseValues } from "./columnResults";
+import { crossoverValues, energyLimitValues, limitValues, windValues } from "./escapeLimits";
+import { boundValues, gasValues } from "./escapeValues";
 import type { ColumnModel } from "./models";
-import { requireEntries, type OpenCell } from "./openCell";
-import { readCellEntry, readEntry } from "./readEntries";
+import { requireEntries, sayWhichCentresAct, type OpenCell } from "./openCell";
+import { readCellEntry } from "./readEntries";
+import { criterionWords, readConvention, readGases, type EscapeConvention } from "./readEscape";
 import { measured } from "./resultValue";
-import { changeTo } from "../language/notes";
-import { readGasNames } from "../language/readGasName";
+import { solveEscape, type EscapeSolution } from "./solveEscape";
+import { quantityKinds } from "../language/dimensions";
+import { formatQuantity } from "../language/formatQuantity";
 import type { CellResult } from "../result";
 import type { CellAnswer } from "./cellAnswer";
 
+type Solved = Extract<EscapeSolution, { found: true }>;
+
 export function evaluateEscape(cell: OpenCell): CellAnswer {
   checkName(cell, cell.name);
-  requireEntries(cell, ["coupling"]);
+  requireEntries(cell);
   const source = readCellEntry(cell, "column");
-  const isCouplingSaid = readCoupling(cell);
-  const isCriterionKnown = readCriterion(cell);
-  const gases = source ? readGases(cell, source) : undefined;
-  if (!source || !isCouplingSaid || !isCriterionKnown) return { gases: gases ?? [] };
+  const convention = readConvention(cell, source);
+  const gases = (source && readGases(cell, source)) ?? [];
+  sayWhichCentresAct(cell);
+  if (!source || !convention) return { gases };
 
-  const { exobase } = source.column;
-  if (!exobase.found) {
-    cell.say("fault", `no_exobase_${exobase.reason}`, `No exobase. ${exobase.message}`, cell.entry("column"));
-    return { gases: gases ?? [] };
-  }
-  for (const note of exobase.notes) sayOf(cell, note);
+  const { coupling, criterion } = convention;
+  const convened = { gases, convention: { coupling, criterion: criterionWords(criterion) } };
+  const solution = solveEscape(cell, source, convention);
+  if (!solution.found) return { ...convened, values: valuesWithoutExobase(cell, source, solution) };
+  const { exobase, notes, coupled } = solution;
+  for (const note of [...exobase.notes, ...notes]) sayOf(cell, note);
   sayWhatBandLacks(cell, exobase);
-  const { values, notes } = escapeValues(source, exobase.level, gases ?? []);
-  for (const note of notes) sayOf(cell, note);
   return {
-    gases: gases ?? [],
-    values: { ...exobaseValues(exobase.level, exobase.lower, exobase.upper), ...values },
+    ...convened,
+    values: {
+      ...exobaseValues(exobase.level, exobase.lower, exobase.upper),
+      ...escapeValues(cell, solution, gases, convention),
+    },
+    model: { kind: "escape", source: solution.source, exobase: exobase.level, coupled },
   };
 }
 
-/** The convention changes every rate, so it is written out; what is not computed is not silently taken for what is. */
-function readCoupling(cell: OpenCell): boolean {
-  if (cell.entry("coupling")) return readOnlyChoice(cell, "coupling", "open", openMeans);
-  const { length } = cell.text;
-  const isFreshLine = length === 0 || cell.text.endsWith("\n");
-  const remedy = {
-    label: "Write coupling = open",
-    range: { from: length, to: length },
-    replacement: `${isFreshLine ? "" : "\n"}coupling = open`,
-  };
-  cell.say(
-    "fault",
-    "missing_coupling",
-    `The entry *coupling* is missing. Write coupling = open: ${openMeans}.`,
-    undefined,
-    remedy,
-  );
-  return false;
-}
+/** Why there is no exobase, where the gas is too loosely bound to have one and flows off as a wind. */
+const windReasons: readonly string[] = ["runaway", "base_unbound", "turn"];
 
-const openMeans =
-  "the column is solved without a flux and the Jeans flux evaluated after, so that what diffusion can supply does not limit it";
-
-function readCriterion(cell: OpenCell): boolean {
-  if (cell.entry("criterion")) {
-    return readOnlyChoice(
-      cell,
-      "criterion",
-      "bulk",
-      "the mean free path of the mixture equals its scale height",
-    );
-  }
-  cell.actByDefault("criterion");
-  return true;
-}
-
-/** An entry that has one choice so far; anything else is told what that choice means. */
-function readOnlyChoice(cell: OpenCell, key: string, choice: string, meaning: string): boolean {
-  const { node, valueRange } = cell.entry(key)!;
-  if (node.type === "broken") return false;
-  if (node.type === "name" && node.path === choice) return true;
-  const message = `The ${key} computed here is *${choice}*: ${meaning}. Write ${key} = ${choice}.`;
-  cell.say("fault", "choice", message, valueRange, changeTo(valueRange, choice));
-  return false;
-}
-
-/** Gases to answer for, in the order written; undefined if the list has a fault. */
-function readGases(cell: OpenCell, { column }: ColumnModel): string[] | undefined {
-  const all = column.input.gases.map(({ formula }) => formula);
-  if (cell.entry("gases")) {
-    return readEntry(cell, "gases", (node) => readGasNames(node, all))?.map(({ formula }) => formula);
-  }
-  cell.actByDefault("gases", { text: `gases = ${all.join(", ")}` });
-  return all;
+/** What can be said where no exobase exists: the fault, and the mass rates that need none. */
+function valuesWithoutExobase(
+  cell: OpenCell,
+  source: ColumnModel,
+  { reason, message }: { reason: string; message: string },
+): CellResult["values"] {
+  const isWind = windReasons.includes(reason);
+  const { column } = source;
+  const { temperature } = column.levelAt(column.topAltitude);
+  const winds = windValues(cell, source, temperature);
+  const wind = winds.wind_mass_rate?.value;
+  const shown = (value: number, kind: "temperature" | "massRate") =>
+    formatQuantity(value, quantityKinds[kind].dimension, { unitSystem: cell.unitSystem, digits: 3 });
+  const instead =
+    isWind && typeof wind === "number"
+      ? ` An isothermal wind from the base at ${shown(temperature, "temperature")} would carry ${shown(wind, "massRate")}.`
+      : "";
+  cell.say("fault", `no_exobase_${reason}`, `No exobase. ${message}${instead}`, cell.entry("column"));
+  return { ...(isWind ? { regime: { value: "wind" } } : {}), ...energyLimitValues(source), ...winds };
 }
 
 function sayOf(cell: OpenCell, { level, code, message }: PhysicsNote): void {
@@ -112,46 +88,40 @@ function sayWhatBandLacks(
 }
 
 function escapeValues(
-  { column, body }: ColumnModel,
-  level: ColumnLevel,
+  cell: OpenCell,
+  { source, exobase, escape, leaving }: Solved,
   gases: readonly string[],
-): { values: CellResult["values"]; notes: PhysicsNote[] } {
-  const all = column.input.gases;
-  const escape = thermalEscape({
-    gravitationalParameter: body.gravitationalParameter,
-    radius: level.radius,
-    temperature: level.temperature,
-    meanMass: level.meanMass,
-    hillRadius: body.hillRadius,
-    gases: gases.map((formula) => {
-      const index = all.findIndex((gas) => gas.formula === formula);
-      return { formula, mass: all[index].mass, logNumberDensity: level.logNumberDensities[index] };
-    }),
-  });
+  { coupling, corrections }: EscapeConvention,
+): CellResult["values"] {
+  const { level } = exobase;
+  for (const note of escape.notes) sayOf(cell, note);
   const values: CellResult["values"] = {
     "exobase.escape_speed": measured(escape.escapeSpeed, "m s^-1"),
     bulk_escape_parameter: measured(escape.bulkEscapeParameter, "1"),
     regime: { value: escape.regime },
   };
-  for (const gas of escape.gases) {
-    const index = all.findIndex(({ formula }) => formula === gas.formula);
-    Object.assign(values, gasValues(gas, level.numberDensities[index]));
+  const isWind = escape.regime === "wind";
+  const asked = gases.map((formula) => leaving.find((gas) => gas.formula === formula)!);
+  const limits = isWind ? {} : limitValues(cell, source, level, asked, coupling);
+  for (const leavingGas of asked) {
+    const { formula, index } = leavingGas;
+    const gas = escape.gases[index];
+    const density = level.numberDensities[index];
+    Object.assign(values, isWind ? boundValues(gas, density) : gasValues(gas, density, leavingGas));
+    Object.assign(values, limits[formula]);
+    if (!isWind) sayOfGas(cell, gas, corrections[formula]);
   }
-  return { values, notes: [...escape.notes, ...escape.gases.flatMap(({ notes }) => notes)] };
+  return {
+    ...values,
+    ...energyLimitValues(source),
+    ...(isWind ? {} : crossoverValues(cell, source, leaving)),
+    ...windValues(cell, source, level.temperature),
+  };
 }
 
-function gasValues(gas: GasEscape, numberDensity: number): CellResult["values"] {
-  const { formula } = gas;
-  return {
-    [`${formula}.number_density`]: measured(numberDensity === 0 ? null : numberDensity, "m^-3"),
-    [`${formula}.escape_parameter`]: measured(gas.escapeParameter, "1"),
-    [`${formula}.thermal_speed`]: measured(gas.thermalSpeed, "m s^-1"),
-    [`${formula}.effusion_velocity`]: measured(gas.effusionVelocity, "m s^-1"),
-    [`${formula}.log10_effusion_velocity`]: measured(gas.log10EffusionVelocity, "1"),
-    [`${formula}.jeans_flux`]: measured(gas.jeansFlux, "m^-2 s^-1"),
-    [`${formula}.log10_jeans_flux`]: measured(gas.log10JeansFlux, "1"),
-    [`${formula}.rate`]: measured(gas.rate, "s^-1"),
-    [`${formula}.log10_rate`]: measured(gas.log10Rate, "1"),
-    [`${formula}.mass_rate`]: measured(gas.massRate, "kg s^-1"),
-  };
+/** A gas whose departure from the Jeans rate is given is not told of published ones. */
+function sayOfGas(cell: OpenCell, { notes }: GasEscape, factor: number | undefined): void {
+  for (const note of notes) {
+    if (factor === undefined || note.code !== "jeans_correction_range") sayOf(cell, note);
+  }
 }

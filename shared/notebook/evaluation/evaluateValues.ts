@@ -20,14 +20,19 @@ export function evaluateValues(cell: OpenCell): CellAnswer {
     const evaluated = evaluateExpression(entry.node, scope);
     cell.notes.push(...evaluated.notes);
     if (!isFree) continue;
-    globals[entry.key] = evaluated.ok ? evaluated.quantity : null;
-    if (!evaluated.ok) continue;
-    const { quantity } = evaluated;
+    const quantity = evaluated.ok ? asItActs(cell, entry.key, evaluated.quantity) : null;
+    globals[entry.key] = quantity;
+    if (!quantity) continue;
     values[entry.key] = measured(quantity.value, siUnitText(quantity.dimension));
-    cell.understand(entry, understoodText(entry.node, quantity, cell));
+    if (!cell.isDraw) cell.understand(entry, understoodText(entry.node, quantity, cell));
   }
   sayWhichCentresAct(cell);
   return { values, globals };
+}
+
+/** As written, or as a sweep has it. */
+function asItActs({ surroundings }: OpenCell, key: string, { value, ...rest }: Quantity): Quantity {
+  return { ...rest, value: surroundings.replaced?.(key) ?? value };
 }
 
 /** The cells above, and the entries of this cell that stand above the one being read. */
@@ -48,5 +53,6 @@ function withEntriesAbove(cell: OpenCell, globals: Readonly<Record<string, Quant
       return above;
     },
     names: () => [...Object.keys(globals), ...surroundings.names()],
+    draw: surroundings.draw,
   };
 }

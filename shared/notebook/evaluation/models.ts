@@ -1,5 +1,12 @@
 /** What a cell hands to the cells below it, besides its values. Bare numbers are SI. */
-import type { Column, CollisionParameter, ColumnInput } from "../../physics";
+import type {
+  Column,
+  CollisionParameter,
+  ColumnInput,
+  ColumnLevel,
+  CoupledInput,
+  CoupledOutcome,
+} from "../../physics";
 
 export interface BodyModel {
   kind: "body";
@@ -7,6 +14,8 @@ export interface BodyModel {
   radius: number;
   centrifugal: ColumnInput["centrifugal"];
   hillRadius: number | null;
+  /** null where flux or efficiency is not given, or where no tidal factor exists. */
+  energyLimitedMassRate: number | null;
 }
 
 /** What a gas cell states; null where the handbook goes on to hold. */
@@ -26,4 +35,14 @@ export interface ColumnModel {
   body: BodyModel;
 }
 
-export type CellModel = BodyModel | GasModel | ColumnModel;
+export interface EscapeModel {
+  kind: "escape";
+  /** The column that the gases leave from, with their fluxes where they are coupled. */
+  source: ColumnModel;
+  /** The column's level at the exobase. */
+  exobase: ColumnLevel;
+  /** What was solved, where the flux is coupled; kept to be used again. */
+  coupled: { input: CoupledInput; outcome: CoupledOutcome } | null;
+}
+
+export type CellModel = BodyModel | GasModel | ColumnModel | EscapeModel;

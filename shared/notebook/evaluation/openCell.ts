@@ -18,6 +18,8 @@ export interface OpenCell {
   readonly surroundings: RecordedSurroundings;
   /** What the cell handed on when it was last evaluated; to be used again only where it is sure to be the same. */
   readonly lastModel: CellModel | null;
+  /** One of many points of a sweep or spread: only wanted values, models and notes are asked for. */
+  readonly isDraw: boolean;
   /** In the order written; of a key that stands twice, the first. */
   readonly entries: readonly Entry[];
   readonly notes: Note[];
@@ -25,6 +27,8 @@ export interface OpenCell {
   readonly understood: ReadonlyMap<string, Understood>;
   readonly defaults: CellEvaluation["defaults"];
   entry(key: string): Entry | undefined;
+  /** Whether anyone asks for a value; what is costly and not wanted may be left out. */
+  isWanted(name: string): boolean;
   /** Adds a note; at an entry's value, a range, or with no place on the cell as a whole. */
   say(level: Note["level"], code: string, message: string, at?: Entry | TextRange, remedy?: Remedy): void;
   understand(entry: Entry, text: string | null): void;
@@ -40,6 +44,7 @@ export function openCell(
   surroundings: RecordedSurroundings,
   unitSystem: "SI" | "cgs",
   lastModel: CellModel | null,
+  wanted: ReadonlySet<string> | null,
 ): OpenCell {
   const notes: Note[] = [...syntaxNotes];
   const understood = new Map<string, Understood>();
@@ -55,6 +60,8 @@ export function openCell(
     unitSystem,
     surroundings,
     lastModel,
+    isDraw: wanted !== null,
+    isWanted: (name) => wanted === null || wanted.has(name),
     entries: [...byKey.values()],
     notes,
     understood,
@@ -114,12 +121,17 @@ export function requireEntries(cell: OpenCell, without: readonly string[] = []):
 export function sayWhichCentresAct(cell: OpenCell): void {
   const uncertain = cell.entries.filter(({ node }) => holdsUncertainty(node));
   if (uncertain.length === 0) return;
-  const keys = inWords(
-    uncertain.map(({ key }) => `*${key}*`),
+  const message = saysWhichCentresAct(uncertain.map(({ key }) => key));
+  cell.say("remark", "acts_by_centre", message, uncertain[0]);
+}
+
+export function saysWhichCentresAct(keys: readonly string[]): string {
+  const words = inWords(
+    keys.map((key) => `*${key}*`),
     "and",
   );
-  const verb = uncertain.length === 1 ? "acts by its centre" : "act by their centres";
-  cell.say("remark", "acts_by_centre", `${keys} ${verb}; results carry no ±.`, uncertain[0]);
+  const verb = keys.length === 1 ? "acts by its centre" : "act by their centres";
+  return `${words} ${verb}; results carry no ±.`;
 }
 
 /** Whether an expression holds an uncertain quantity of its own. */
@@ -141,6 +153,7 @@ export function holdsUncertainty(node: ValueNode): boolean {
       return node.items.some((item) => holdsUncertainty(item.value));
     case "number":
     case "name":
+    case "variation":
     case "broken":
       return false;
   }

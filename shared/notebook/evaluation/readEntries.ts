@@ -32,14 +32,14 @@ export function readQuantityEntry(cell: OpenCell, key: string): number | undefin
   const quantity = readEntry(cell, key, (node) => readQuantity(node, expected, cell.surroundings));
   if (quantity === undefined) return undefined;
   const entry = cell.entry(key)!;
-  cell.understand(entry, understoodText(entry.node, quantity, cell));
+  if (!cell.isDraw) cell.understand(entry, understoodText(entry.node, quantity, cell));
   return quantity.value;
 }
 
 /** Shows the number of an entry that takes a profile, where it is one number for all altitudes. */
 export function understandConstant(cell: OpenCell, key: string): void {
   const entry = cell.entry(key);
-  if (!entry) return;
+  if (!entry || cell.isDraw) return;
   const evaluated = evaluateExpression(entry.node, cell.surroundings);
   if (evaluated.ok) cell.understand(entry, understoodText(entry.node, evaluated.quantity, cell));
 }

@@ -1,14 +1,18 @@
 /** What a cell sees of the notebook: the cells above it, and which names stand below. */
 import type { CellKind } from "../document";
 import type { Quantity } from "../language/quantity";
-import type { Unavailable } from "../language/scope";
+import type { Scope, Unavailable } from "../language/scope";
+import type { Entry } from "../language/syntax";
 import type { ResultValue } from "../result";
+import type { TaskAnswer } from "../tasks";
 import type { CellModel, GasModel } from "./models";
 import { dimensionOfUnit } from "./resultUnits";
 import { sameValue } from "./sameValue";
+import { traceResults, type Trace } from "./traceResults";
 
 /** A cell that has been evaluated, as those below see it. */
 export interface CellAbove {
+  id: string;
   kind: CellKind;
   name: string;
   values: Readonly<Record<string, ResultValue>>;
@@ -16,6 +20,9 @@ export interface CellAbove {
   globals: Readonly<Record<string, Quantity | null>>;
   model: CellModel | null;
   isFaulty: boolean;
+  /** Its entries as read, and the names above that it used. */
+  entries: readonly Entry[];
+  uses: readonly string[];
 }
 
 export type FoundCell =
@@ -33,6 +40,19 @@ export interface Surroundings {
   gas(formula: string): GasModel | null;
   /** In words, where a name is already defined above; null if it is free. */
   definedAbove(name: string): string | null;
+  /** Whether a name is that of an entry of a `values` cell above; "yes" or null. */
+  valuesEntry(name: string): "yes" | null;
+  /** What results above rest on; their names with spaces between. */
+  trace(names: string): Trace;
+  /** The answer of a sweep or spread, by the key of its task, if it has been computed. */
+  taskAnswer(key: string): TaskAnswer | undefined;
+}
+
+/** What acts on a cell in place of what is written, at one point of a sweep or one draw of a spread. */
+export interface Replacements {
+  draw?: Scope["draw"];
+  /** Value in SI of a `values` entry; undefined where what is written holds. */
+  replaced?(key: string): number | undefined;
 }
 
 /** Names that the notebook defines, each with the place of its first definition. */
@@ -44,7 +64,7 @@ export interface NotebookAbove {
   /** First definition of each cell name. */
   byName: ReadonlyMap<string, CellAbove>;
   /** First definition of each `values` entry, with the name of its cell. */
-  globals: ReadonlyMap<string, { cell: string; quantity: Quantity | null }>;
+  globals: ReadonlyMap<string, { cell: CellAbove; quantity: Quantity | null }>;
   gases: ReadonlyMap<string, GasModel>;
 }
 
@@ -65,12 +85,17 @@ export function addCell(above: NotebookAbove, cell: CellAbove): NotebookAbove {
     if (cell.model?.kind === "gas") gases.set(cell.model.formula, cell.model);
   }
   for (const [name, quantity] of Object.entries(cell.globals)) {
-    if (!isTaken(name)) globals.set(name, { cell: cell.name, quantity });
+    if (!isTaken(name)) globals.set(name, { cell, quantity });
   }
   return { cells: [...above.cells, cell], byName, globals, gases };
 }
 
-export function surroundingsOf(above: NotebookAbove, places: NamePlaces, place: number): Surroundings {
+export function surroundingsOf(
+  above: NotebookAbove,
+  places: NamePlaces,
+  place: number,
+  taskAnswer: Surroundings["taskAnswer"],
+): Surroundings {
   const isBelow = (name: string) => (places.get(name) ?? -1) > place;
   return {
     lookup(path) {
@@ -78,13 +103,13 @@ export function surroundingsOf(above: NotebookAbove, places: NamePlaces, place: 
       if (global) {
         return (
           global.quantity ?? {
-            unavailable: `*${path}* has a fault in cell *${global.cell}*; put that right first.`,
+            unavailable: `*${path}* has a fault in cell *${global.cell.name}*; put that right first.`,
           }
         );
       }
       const [name = "", ...rest] = path.split(".");
       const cell = above.byName.get(name);
-      if (cell && rest.length === 0) return `a ${cell.kind} cell`;
+      if (cell && rest.length === 0) return kindInWords(cell.kind);
       if (cell) return resultOf(cell, rest.join("."), path);
       if (isBelow(name)) {
         return {
@@ -109,17 +134,29 @@ export function surroundingsOf(above: NotebookAbove, places: NamePlaces, place: 
     gas: (formula) => above.gases.get(formula) ?? null,
     definedAbove(name) {
       const cell = above.byName.get(name);
-      if (cell) return `a ${cell.kind} cell`;
+      if (cell) return kindInWords(cell.kind);
       const global = above.globals.get(name);
-      return global ? `an entry of the values cell ${global.cell}`.trimEnd() : null;
+      return global ? `an entry of the values cell ${global.cell.name}`.trimEnd() : null;
     },
+    valuesEntry: (name) => (above.globals.has(name) ? "yes" : null),
+    trace: (names) => traceResults(above, names.split(" ")),
+    taskAnswer,
   };
+}
+
+function kindInWords(kind: CellKind): string {
+  return `${/^[aeiou]/.test(kind) ? "an" : "a"} ${kind} cell`;
 }
 
 function resultOf(cell: CellAbove, name: string, path: string): Quantity | Unavailable | string | undefined {
   const result = Object.hasOwn(cell.values, name) ? cell.values[name] : undefined;
   if (!result) {
+    if (cell.kind === "escape" && cell.isFaulty && !Object.hasOwn(cell.values, "exobase.altitude")) {
+      return { unavailable: `*${cell.name}* has no exobase, so there is no *${path}*.` };
+    }
     const hasNone = Object.keys(cell.values).length === 0;
+    if (hasNone && cell.kind === "spread" && !cell.isFaulty)
+      return { unavailable: `*${cell.name}* is still to be computed.` };
     if (hasNone && cell.isFaulty)
       return { unavailable: `*${cell.name}* has no results because of a fault; put that right first.` };
     return undefined;
@@ -127,7 +164,7 @@ function resultOf(cell: CellAbove, name: string, path: string): Quantity | Unava
   if (typeof result.value === "string") return result.value;
   if (result.value === null) {
     return {
-      unavailable: `*${path}* is below 1e-300 and has no value; use *${twinOf(cell, name)}* instead.`,
+      unavailable: `*${path}* lies outside 1e-300 to 1e300 and has no value; use *${twinOf(cell, name)}* instead.`,
     };
   }
   return { value: result.value, dimension: dimensionOfUnit(result.unit ?? "1") };
@@ -148,7 +185,7 @@ interface Question {
   answer: unknown;
 }
 
-export interface RecordedSurroundings extends Surroundings {
+export interface RecordedSurroundings extends Surroundings, Replacements {
   readonly questions: readonly Question[];
 }
 
@@ -169,6 +206,9 @@ export function recordQuestions(surroundings: Surroundings): RecordedSurrounding
     cellsOfKind: asking("cellsOfKind", surroundings.cellsOfKind as (kind: string) => readonly string[]),
     gas: asking("gas", surroundings.gas),
     definedAbove: asking("definedAbove", surroundings.definedAbove),
+    valuesEntry: asking("valuesEntry", surroundings.valuesEntry),
+    trace: asking("trace", surroundings.trace),
+    taskAnswer: asking("taskAnswer", surroundings.taskAnswer),
     get questions() {
       return [...questions.values()];
     },

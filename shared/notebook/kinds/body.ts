@@ -95,9 +95,31 @@ export const bodySchema: CellSchema = {
       form: "quantity",
       dimension: "length",
       bounds: { above: 0 },
-      description: "Radius at which X-rays and extreme ultraviolet are absorbed; acts in the tidal factor.",
+      description:
+        "Radius at which X-rays and extreme ultraviolet are absorbed; acts in the tidal factor and the energy limit.",
       default: { text: "xuv_radius = radius", meaning: "the body's own radius" },
       example: "xuv_radius = 5200 km",
+    },
+    {
+      key: "xuv_flux",
+      needed: false,
+      form: "quantity",
+      dimension: "energyFlux",
+      bounds: { atLeast: 0 },
+      description:
+        "X-rays and extreme ultraviolet at the body, on an area that faces the star; gives the energy limit with heating_efficiency.",
+      default: null,
+      example: "xuv_flux = 6.4 mW/m^2",
+    },
+    {
+      key: "heating_efficiency",
+      needed: false,
+      form: "quantity",
+      dimension: "number",
+      bounds: { atLeast: 0, atMost: 1 },
+      description: "Share of the absorbed XUV energy that goes into lifting gas.",
+      default: null,
+      example: "heating_efficiency = 15 %",
     },
   ],
 };

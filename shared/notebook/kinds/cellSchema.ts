@@ -17,10 +17,29 @@ export interface EntrySchema {
   oneOf?: readonly string[];
   /**
    * quantity: one number with a unit. profile: a quantity, or a call such as bates(…). gases: a list of gases with
-   * fractions. gasNames: a list of formulas. pairs: a list of gases with binary(…). lengths: a list of altitudes.
-   * cell: the name of a cell above. choice: one of `choices`. handbook: handbook(Name).
+   * fractions. gasName: a formula. gasNames: a list of formulas. factors: a list of gases, each with a number.
+   * pairs: a list of gases with binary(…). lengths: a list of altitudes. samples: a quantity, or points(…) against
+   * altitude. history: points(…) against age. ion: an ion such as O2+. variation: a name from one value to another in
+   * steps. results: names of results. cell: the name of a cell above. choice: one of
+   * `choices`. handbook: handbook(Name).
    */
-  form: "quantity" | "profile" | "gases" | "gasNames" | "pairs" | "lengths" | "cell" | "choice" | "handbook";
+  form:
+    | "quantity"
+    | "profile"
+    | "gases"
+    | "gasName"
+    | "gasNames"
+    | "factors"
+    | "pairs"
+    | "lengths"
+    | "samples"
+    | "history"
+    | "ion"
+    | "variation"
+    | "results"
+    | "cell"
+    | "choice"
+    | "handbook";
   /** Kind of the quantity, or of each number in a list or profile. */
   dimension: QuantityName | null;
   bounds?: Bounds;
@@ -38,7 +57,7 @@ export interface EntrySchema {
 export interface CellSchema {
   kind: CellKind;
   /** Where the kind stands in the menu. */
-  group: "write" | "set up" | "answer";
+  group: "write" | "set up" | "answer" | "explore";
   /** One line of sense. */
   description: string;
   /** What the name of such a cell is. */

@@ -286,6 +286,12 @@ function evaluate(node: ValueNode, scope: Scope): Quantity {
       return evaluateUncertain(node, scope, evaluate);
     case "list":
       return fail("not_a_quantity", node.range, "One quantity is needed here; this is a list.");
+    case "variation":
+      return fail(
+        "not_a_quantity",
+        node.range,
+        "One quantity is needed here; this varies one, as only *vary* and *against* of a sweep do.",
+      );
     case "broken":
       throw new ExpressionFault([]);
   }

@@ -11,7 +11,7 @@ import type { UncertainNode, UnitNode, ValueNode } from "./syntax";
 type Evaluate = (node: ValueNode, scope: Scope) => Quantity;
 
 /** Whether it is written with numbers alone, so that the unit at the end is its unit too. */
-function isBareNumber(node: ValueNode): boolean {
+export function isBareNumber(node: ValueNode): boolean {
   switch (node.type) {
     case "number":
       return true;
@@ -32,7 +32,7 @@ const isPercentage = (unit: UnitNode): boolean =>
   unit.factors.length === 1 && unit.factors[0].symbol === "%" && unit.factors[0].exponent === 1;
 
 /** The unit at the end of an expression, a sign before it aside. */
-function unitAtEnd(node: ValueNode): UnitNode | null {
+export function unitAtEnd(node: ValueNode): UnitNode | null {
   if (node.type === "negative") return unitAtEnd(node.operand);
   return node.type === "measured" ? node.unit : null;
 }
@@ -109,6 +109,12 @@ function withinFactor(node: UncertainNode, scope: Scope, evaluate: Evaluate): [Q
 export function evaluateUncertain(node: UncertainNode, scope: Scope, evaluate: Evaluate): Quantity {
   const forms = { plus_minus: plusMinus, between, factor: withinFactor };
   const [centre, uncertainty] = forms[node.form](node, scope, evaluate);
-  const value = scope.draw ? scope.draw(node.path, uncertainty) : centre.value;
+  const value = scope.draw ? scope.draw(node.path, uncertainty, centre.dimension) : centre.value;
+  if (value === null)
+    fail(
+      "nothing_possible",
+      node.range,
+      "No part of this uncertain value lies where it is physically possible.",
+    );
   return { value, dimension: centre.dimension, uncertainty };
 }

@@ -5,6 +5,7 @@ declare module "*/cells.generated.js" {
 }
 
 declare module "*/cells.generated.terms.js" {
+  export const Charge: number;
   export const Close: number;
   export const Comma: number;
   export const Join: number;

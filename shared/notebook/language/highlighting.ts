@@ -8,7 +8,7 @@ export const cellHighlighting = styleTags({
   "Name/...": tags.variableName,
   "UnitName/...": tags.unit,
   Number: tags.number,
-  "Between And Within Factor": tags.keyword,
+  "Between And Within Factor From To In Steps": tags.keyword,
   "Plus Minus Times Over Per Join Caret Superscript": tags.arithmeticOperator,
   "Open Close": tags.paren,
   Comma: tags.separator,

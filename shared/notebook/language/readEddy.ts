@@ -64,8 +64,12 @@ export function readEddy(node: ValueNode, scope: Scope): Reading<EddyProfile> {
       scope,
     );
     if (!points.ok) return points;
-    const { altitudes, values } = points.value;
-    return { ok: true, value: { kind: "points", altitudes, coefficients: values }, notes: points.notes };
+    const { places, values } = points.value;
+    return {
+      ok: true,
+      value: { kind: "points", altitudes: places, coefficients: values },
+      notes: points.notes,
+    };
   }
   if (node.type === "call" && !(functionNames as readonly string[]).includes(node.name)) {
     const nearest = nearestName(node.name, ["power", "points"]);

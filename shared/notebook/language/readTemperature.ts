@@ -63,8 +63,12 @@ export function readTemperature(node: ValueNode, scope: Scope): Reading<Temperat
       scope,
     );
     if (!points.ok) return points;
-    const { altitudes, values } = points.value;
-    return { ok: true, value: { kind: "points", altitudes, temperatures: values }, notes: points.notes };
+    const { places, values } = points.value;
+    return {
+      ok: true,
+      value: { kind: "points", altitudes: places, temperatures: values },
+      notes: points.notes,
+    };
   }
   if (node.type === "call" && !(functionNames as readonly string[]).includes(node.name)) {
     const nearest = nearestName(node.name, ["bates", "points"]);

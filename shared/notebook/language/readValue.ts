@@ -51,6 +51,10 @@ const punctuation = new Set([
   "And",
   "Within",
   "Factor",
+  "From",
+  "To",
+  "In",
+  "Steps",
   "=",
   ":",
 ]);
@@ -77,7 +81,8 @@ function uniquePath(conversion: Conversion, path: string): string {
 }
 
 function convertName(conversion: Conversion, node: SyntaxNode): NameNode {
-  return { type: "name", path: plainDigits(textOf(conversion, node)), range: rangeOf(conversion, node) };
+  const path = plainDigits(textOf(conversion, node)).replace("⁺", "+");
+  return { type: "name", path, range: rangeOf(conversion, node) };
 }
 
 function unitExponent(conversion: Conversion, node: SyntaxNode): number {
@@ -250,6 +255,10 @@ function convert(conversion: Conversion, node: SyntaxNode, path: string, depth: 
         path: name,
         range,
       };
+    }
+    case "Variation": {
+      const [subject, first, last, steps] = parts.map(inside);
+      return { type: "variation", subject, first, last, steps, range };
     }
     default:
       conversion.notes.push(

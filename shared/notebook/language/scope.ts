@@ -1,3 +1,4 @@
+import type { Dimension } from "./dimensions";
 import type { Quantity, Uncertainty } from "./quantity";
 
 /** A name that exists but has no value to give; the reason is a whole sentence. */
@@ -11,6 +12,9 @@ export interface Scope {
   lookup(path: string): Quantity | Unavailable | string | undefined;
   /** Every name that `lookup` knows, for suggestions. */
   names(): readonly string[];
-  /** Where present, gives an uncertain entry its value in SI instead of the centre. `path` names it within its cell. */
-  draw?(path: string, uncertainty: Uncertainty): number;
+  /**
+   * Where present, gives an uncertain entry its value in SI instead of the centre; null where no part of it is
+   * possible. `path` names it within its cell.
+   */
+  draw?: ((path: string, uncertainty: Uncertainty, dimension: Dimension) => number | null) | undefined;
 }

@@ -32,6 +32,7 @@ export type ValueNode =
   | PowerNode
   | CallNode
   | UncertainNode
+  | VariationNode
   | ListNode
   | BrokenNode;
 
@@ -118,6 +119,16 @@ export interface UncertainNode {
   second: ValueNode;
   /** Names this draw within its cell: the entry's key, then argument or gas: `temperature.exosphere`. */
   path: string;
+  range: TextRange;
+}
+
+/** `T_quiet from 180 K to 350 K in 40 steps`. */
+export interface VariationNode {
+  type: "variation";
+  subject: ValueNode;
+  first: ValueNode;
+  last: ValueNode;
+  steps: ValueNode;
   range: TextRange;
 }
 

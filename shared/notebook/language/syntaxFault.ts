@@ -17,6 +17,10 @@ const marked = (text: string): string => (text.includes("*") ? text : `*${quoted
 
 const lastWord = (text: string): string => /[\p{L}\p{N}_.₀-₉%]+$/u.exec(text)?.[0] ?? text.slice(-1);
 
+/** Words of a sweep, and how it is written. */
+const variationWords = new Set(["from", "to", "in", "steps"]);
+const variationForm = "What is varied is written T_quiet from 180 K to 350 K in 40 steps.";
+
 /** Characters that people write and that mean nothing here. */
 const strangers: Readonly<Record<string, string>> = {
   "[": "Lists take no square brackets; write the items with commas between.",
@@ -91,7 +95,8 @@ function unfinished(place: Place): Note {
     return fault("unfinished", last, "The upper end is missing: between 180 and 350 K.");
   if (/\bwithin$/.test(before))
     return fault("unfinished", last, "A factor is missing: 2.5e5 /cm^3 within factor 2.");
-  return fault("unfinished", last, `The entry breaks off after ${marked(lastWord(before))}.`);
+  const end = `The entry breaks off after ${marked(lastWord(before))}.`;
+  return fault("unfinished", last, /\sfrom\s/.test(before) ? `${end} ${variationForm}` : end);
 }
 
 /** `bates(base = 140 K exosphere = 240 K)`, or a second `=` in an entry. */
@@ -145,6 +150,13 @@ function sideBySide(place: Place, found: string, range: TextRange): Note {
       range,
       `*${found}* belongs to an uncertain value: between 180 and 350 K, or 2.5e5 /cm^3 within factor 2.`,
     );
+  if (first === "steps") {
+    const end = before.length + place.shift;
+    const remedy = { label: "Put a comma", range: { from: end, to: end }, replacement: "," };
+    return fault("missing_comma", range, `A comma is missing before *${found}*.`, remedy);
+  }
+  if (variationWords.has(found) || /\sfrom\s/.test(before))
+    return fault("unexpected", range, `*${quoted(found)}* can't stand here. ${variationForm}`);
   if (/^[ \t]*=/.test(text.slice(at + found.length))) {
     const end = before.length + place.shift;
     const remedy = { label: "Put a comma", range: { from: end, to: end }, replacement: "," };

@@ -1,6 +1,7 @@
 /** What the grammar can't say by itself: where an entry ends, and which signs belong to a unit. */
 import { ContextTracker, ExternalTokenizer, type InputStream } from "@lezer/lr";
 import {
+  Charge,
   Close,
   Comma,
   Join,
@@ -107,4 +108,22 @@ export const unitSigns = new ExternalTokenizer((input) => {
   const isUnit = isReservedUnit(unitWordAt(input, at));
   if (isSlash) input.acceptToken(isUnit ? Per : Over, 1);
   else if (isUnit) input.acceptToken(Join, 1);
+});
+
+/** `+`, and the raised one that comes with pasted formulas. */
+const plusSigns = new Set([43, 0x207a]);
+const hash = 35;
+/** What may follow an ion: a comma, a closing bracket, a colon, a remark. */
+const endsItem = new Set([44, 41, 58, hash]);
+
+const isSubscript = (code: number): boolean => code >= 0x2080 && code <= 0x2089;
+
+/** `O2+`: the plus sign stands right behind the name and joins it to nothing. */
+export const ionCharge = new ExternalTokenizer((input) => {
+  const before = input.peek(-1);
+  if (!plusSigns.has(input.next) || !(isNameCharacter(before) || isSubscript(before))) return;
+  let at = 1;
+  while (isSpace(input.peek(at))) at += 1;
+  const code = input.peek(at);
+  if (code < 0 || isLineEnd(code) || endsItem.has(code)) input.acceptToken(Charge, 1);
 });

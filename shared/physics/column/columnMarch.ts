@@ -16,7 +16,7 @@ import {
 import { logarithm } from "../numerics/elementary";
 import { findRoot } from "../numerics/findRoot";
 import { growthAfter, rememberStep, shrinkAfter, type StepMemory } from "../numerics/stepControl";
-import { emptyPath, makeRoom, nodeState, type ColumnPath } from "./columnPath";
+import { clearPath, emptyPath, makeRoom, nodeState, type ColumnPath } from "./columnPath";
 import { altitudeOf, type ColumnProblem } from "./columnProblem";
 import { bindColumn, columnSlope, type BaseFluxes } from "./columnSlope";
 import { fractions, setComposition } from "./composition";
@@ -52,10 +52,14 @@ export interface MarchStart {
   state: Float64Array;
   direction: 1 | -1;
   tolerance: number;
+  /** A path that is no longer needed, of the same column and fluxes, to be written anew. */
+  path?: ColumnPath;
+  /** Length of the first step, m, if one is known that suits. */
+  firstStep?: number;
 }
 
 /** First step, in scale heights. */
-const firstStep = 0.3;
+const usualFirstStep = 0.3;
 /** Largest change within a step: of ln p, and of ln X of a gas that counts. */
 const largestFall = 4;
 const largestSeparation = 3;
@@ -75,8 +79,10 @@ export function beginMarch({
   state,
   direction,
   tolerance,
+  path = emptyPath(problem, fluxes),
+  firstStep,
 }: MarchStart): ColumnMarch {
-  const path = emptyPath(problem, fluxes);
+  clearPath(path);
   path.positions[0] = height;
   path.states.set(state);
   const law = lawAt(problem, height, state, direction);
@@ -85,7 +91,7 @@ export function beginMarch({
   columnSlope(height, state, slope);
   setComposition(state, state.length);
   const scaleHeight = 1 / Math.abs(meanSlope(slope, state.length));
-  const step = firstStep * scaleHeight;
+  const step = firstStep ?? usualFirstStep * scaleHeight;
   return { path, tolerance, direction, scaleHeight, law, step, memory: { step: 0, error: 1 }, slope };
 }
 
@@ -137,7 +143,7 @@ function takeAcceptableStep(
   room: number,
 ) {
   const size = path.problem.masses.length;
-  let proposed = Math.min(wished, stepCap(size, direction));
+  let proposed = Math.min(wished, stepCap(start, k1, size, direction));
   for (let rejections = 0; ; rejections += 1) {
     const step = room <= stretch * proposed ? room : proposed;
     const error = takeStep(columnSlope, size, position, direction * step) / tolerance;
@@ -168,14 +174,20 @@ function record({ path, law, slope }: ColumnMarch, reached: number): void {
   }
 }
 
-/** The longest step from `start` within which no gas changes its part in the whole by too much. */
-function stepCap(size: number, direction: 1 | -1): number {
-  const logPressure = setComposition(start, size);
-  const fall = meanSlope(k1, size);
+/**
+ * The longest step within which no gas changes its part in the whole by too much.
+ *
+ * @param state  ln p of each gas where the step begins
+ * @param slope  d ln p/dh of each gas there  [m⁻¹]
+ * @returns      [m]
+ */
+export function stepCap(state: Float64Array, slope: Float64Array, size: number, direction: 1 | -1): number {
+  const logPressure = setComposition(state, size);
+  const fall = meanSlope(slope, size);
   let cap = largestFall / Math.abs(fall);
   for (let i = 0; i < size; i += 1) {
-    const separation = k1[i] - fall;
-    const logFraction = start[i] - logPressure;
+    const separation = slope[i] - fall;
+    const logFraction = state[i] - logPressure;
     if (logFraction > countingLogFraction) {
       cap = Math.min(cap, largestSeparation / Math.abs(separation));
     } else if (direction * separation > 0) {

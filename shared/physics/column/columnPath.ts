@@ -14,11 +14,13 @@ import type { StepLaw } from "./stepLaw";
 /**
  * A march through a column, kept step by step so that the state between steps can be had at any time later:
  * positions, states, the stages that the dense output rests on, and the law that held along each step. It owns
- * its arrays.
+ * its arrays. Two marches that parted at an exobase are joined to one by `joinPaths`.
  */
 export interface ColumnPath {
   readonly problem: ColumnProblem;
   readonly fluxes: BaseFluxes | null;
+  /** Of a joined path: so many first steps were marched downward with the fluxes, the rest upward without; else 0. */
+  readonly descent: number;
   /** Number of steps; there is one position and one state more. */
   steps: number;
   /** Geopotential heights h, m, in the order of the march. */
@@ -38,6 +40,7 @@ export function emptyPath(problem: ColumnProblem, fluxes: BaseFluxes | null): Co
   return {
     problem,
     fluxes,
+    descent: 0,
     steps: 0,
     positions: new Float64Array(firstCapacity + 1),
     states: new Float64Array((firstCapacity + 1) * size),
@@ -46,6 +49,13 @@ export function emptyPath(problem: ColumnProblem, fluxes: BaseFluxes | null): Co
     dense: new Float64Array(firstCapacity * denseRows * size),
     isDense: new Uint8Array(firstCapacity),
   };
+}
+
+/** Makes a path one without steps, in the room that it has. */
+export function clearPath(path: ColumnPath): void {
+  path.steps = 0;
+  path.laws.length = 0;
+  path.isDense.fill(0);
 }
 
 /** Steps that a path has room for at first. */
@@ -77,6 +87,11 @@ export function pathTemperature({ problem, laws }: ColumnPath, step: number, hei
   return temperatureOf(problem.temperature, height, altitude, laws[step].temperaturePiece);
 }
 
+/** Makes the column, the fluxes and the law of a step those that `columnSlope` works on. */
+export function bindStep({ problem, fluxes, descent, laws }: ColumnPath, step: number): void {
+  bindColumn(problem, descent > 0 && step >= descent ? null : fluxes, laws[step]);
+}
+
 /** Index of the step that contains a height, for a path that was marched upward. */
 export function stepAt({ positions, steps }: ColumnPath, height: number): number {
   let low = 0;
@@ -95,22 +110,36 @@ export function nodeState({ states, problem }: ColumnPath, node: number, out: Fl
   for (let i = 0; i < size; i += 1) out[i] = states[node * size + i];
 }
 
+/** Writes d ln p/dh of each gas at a position, as it is on the step above it, on the last one below. */
+export function nodeSlope(path: ColumnPath, node: number, out: Float64Array): void {
+  const { stages, steps, descent, problem } = path;
+  const size = problem.masses.length;
+  const isKeptFirst = node >= descent && node < steps;
+  const place =
+    ((isKeptFirst ? node : Math.min(node + 1, steps)) * keptStages - (isKeptFirst ? 0 : 1)) * size;
+  for (let i = 0; i < size; i += 1) out[i] = stages[place + i];
+}
+
 /** Writes ln p of each gas at a height within a step, to the accuracy of the march. */
 export function stateWithin(path: ColumnPath, step: number, height: number, out: Float64Array): void {
   const size = path.problem.masses.length;
-  const position = path.positions[step];
-  const length = path.positions[step + 1] - position;
-  if (path.isDense[step] === 0) makeDense(path, step, size, position, length);
+  const isDownward = step < path.descent;
+  const origin = isDownward ? step + 1 : step;
+  const position = path.positions[origin];
+  const length = path.positions[isDownward ? step : step + 1] - position;
+  if (path.isDense[step] === 0) makeDense(path, step, origin, position, length);
   const place = step * denseRows * size;
-  interpolateStep(path.dense, place, size, path.states, step * size, (height - position) / length, out);
+  interpolateStep(path.dense, place, size, path.states, origin * size, (height - position) / length, out);
 }
 
-function makeDense(path: ColumnPath, step: number, size: number, position: number, length: number): void {
+function makeDense(path: ColumnPath, step: number, origin: number, position: number, length: number): void {
+  const size = path.problem.masses.length;
+  const target = origin === step ? step + 1 : step;
   for (let i = 0; i < size; i += 1) {
-    start[i] = path.states[step * size + i];
-    end[i] = path.states[(step + 1) * size + i];
+    start[i] = path.states[origin * size + i];
+    end[i] = path.states[target * size + i];
   }
-  bindColumn(path.problem, path.fluxes, path.laws[step]);
+  bindStep(path, step);
   restoreStages(size, path.stages, step * keptStages * size);
   denseCoefficients(columnSlope, size, position, length, path.dense, step * denseRows * size);
   path.isDense[step] = 1;

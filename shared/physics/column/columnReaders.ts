@@ -3,16 +3,25 @@ import { maximumDimension } from "../numerics/dormandPrince";
 import type { Column, ColumnLevel, ColumnProfiles } from "../types";
 import { emptyLevel, fillLevel } from "./columnLevel";
 import { stateWithin, stepAt, type ColumnPath } from "./columnPath";
-import { heightOf } from "./columnProblem";
+import { altitudeOf, heightOf } from "./columnProblem";
 
-/** Reads a path that was marched upward at any altitude between its base and a top. */
+/**
+ * Reads a path that was marched upward at any altitude between its base and a top. A column that set its own top can
+ * also be read further up, as far as an exobase by another criterion made it go.
+ */
 export function columnReaders(path: ColumnPath, topAltitude: number): Pick<Column, "levelAt" | "profilesAt"> {
   const { problem } = path;
   const { input } = problem;
   const gases = input.gases.length;
 
+  const highest = () =>
+    input.top === "auto"
+      ? Math.max(topAltitude, altitudeOf(problem, path.positions[path.steps]))
+      : topAltitude;
+
   const read = (altitude: number, level: ColumnLevel) => {
-    if (!(altitude >= input.baseAltitude && altitude <= topAltitude)) {
+    const isInside = altitude <= topAltitude || altitude <= highest();
+    if (!(altitude >= input.baseAltitude && isInside)) {
       const requirement = `within the column, ${input.baseAltitude} to ${topAltitude} m`;
       throw new PhysicsDomainError("altitude", altitude, requirement);
     }

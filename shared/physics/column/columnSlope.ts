@@ -1,9 +1,9 @@
 import { boltzmann } from "../constants/codata2022";
-import { maximumDimension } from "../numerics/dormandPrince";
 import { exponential, logarithm } from "../numerics/elementary";
 import { pieceSlope, pieceValue } from "../numerics/piecewiseCubic";
 import { solveSymmetric } from "../numerics/solveSymmetric";
 import type { ColumnProblem } from "./columnProblem";
+import { maximumGases } from "./composition";
 import type { StepLaw } from "./stepLaw";
 
 /**
@@ -40,27 +40,53 @@ let temperaturePiece = 0;
 let eddyPiece = 0;
 let count = 0;
 let hasEddy = false;
+let isDragOnly = false;
 
-const pairCount = (maximumDimension * (maximumDimension - 1)) / 2;
-const masses = new Float64Array(maximumDimension);
-const thermalFactors = new Float64Array(maximumDimension);
-const fractions = new Float64Array(maximumDimension);
-const forces = new Float64Array(maximumDimension);
-const resistances = new Float64Array(maximumDimension);
+const pairCount = (maximumGases * (maximumGases - 1)) / 2;
+const masses = new Float64Array(maximumGases);
+const thermalFactors = new Float64Array(maximumGases);
+const fractions = new Float64Array(maximumGases);
+const forces = new Float64Array(maximumGases);
+const resistances = new Float64Array(maximumGases);
 const frictions = new Float64Array(pairCount);
 const inverseCoefficients = new Float64Array(pairCount);
 const exponentGroups = new Int32Array(pairCount);
 const powers = new Float64Array(pairCount);
-const active = new Int32Array(maximumDimension);
-const matrix = new Float64Array(maximumDimension * maximumDimension);
-const unknowns = new Float64Array(maximumDimension);
+const active = new Int32Array(maximumGases);
+const matrix = new Float64Array(maximumGases * maximumGases);
+const unknowns = new Float64Array(maximumGases);
 
-/** T and d ln T/dh, as `setTemperature` left them, and the T that `frictions` belong to. */
-const thermal = new Float64Array(3);
+/** T and d ln T/dh, as `setTemperature` left them, the T that `frictions` belong to, κ and g₀/kT. */
+const thermal = new Float64Array(5);
 const evaluations = new Float64Array(1);
 
-/** Makes a column the one that `columnSlope` works on. */
-export function bindColumn(problem: ColumnProblem, fluxes: BaseFluxes | null, law: StepLaw): void {
+/**
+ * What `columnSlope` worked out when it was last called on a column with fluxes: Xᵢ, sᵢ, Sᵢ and 1/bᵢⱼ (lower triangle
+ * row by row); T [K], d ln T/dh [m⁻¹], κ [m⁻¹ s⁻¹] and g₀/kT [kg⁻¹ m⁻¹].
+ */
+export const slopeParts = {
+  fractions,
+  forces,
+  resistances,
+  frictions,
+  temperature: () => thermal[0],
+  warming: () => thermal[1],
+  kappa: () => thermal[3],
+  weight: () => thermal[4],
+} as const;
+
+/**
+ * Makes a column the one that `columnSlope` works on.
+ *
+ * @param isOnlyDrag  whether the fluxes act on each other's gases alone, not on their own
+ */
+export function bindColumn(
+  problem: ColumnProblem,
+  fluxes: BaseFluxes | null,
+  law: StepLaw,
+  isOnlyDrag = false,
+): void {
+  isDragOnly = isOnlyDrag;
   isCapped = law.isCapped;
   temperaturePiece = law.temperaturePiece;
   eddyPiece = law.eddyPiece;
@@ -110,6 +136,7 @@ export function columnSlope(height: number, state: Float64Array, slope: Float64A
 
   const gravity = gravityOverBoltzmann * (1 - centrifugalFactor * radius * radius * radius);
   const weight = gravity / temperature;
+  thermal[4] = weight;
   if (!hasEddy && boundFluxes === null) {
     for (let i = 0; i < count; i += 1) {
       slope[i] = -masses[i] * weight - (thermalFactors[i] - meanFactor) * warming;
@@ -123,8 +150,13 @@ export function columnSlope(height: number, state: Float64Array, slope: Float64A
   setFrictions(temperature);
   setResistances();
   if (boundFluxes !== null) addFluxes(boundFluxes);
-  if (hasEddy) separate(eddyTimesDensity(peak, sum, temperature, height, radius), dominant, slope);
-  else slope.set(forces);
+  if (hasEddy) {
+    thermal[3] = eddyTimesDensity(peak, sum, temperature, height, radius);
+    separate(thermal[3], dominant, slope);
+  } else {
+    thermal[3] = 0;
+    for (let i = 0; i < count; i += 1) slope[i] = forces[i];
+  }
   const fall = meanMass * weight;
   for (let i = 0; i < count; i += 1) slope[i] -= fall;
 }
@@ -178,17 +210,13 @@ function setResistances(): void {
 
 /** The drag of the fluxes on each other's gases, and of every gas on its own. */
 function addFluxes(fluxes: BaseFluxes): void {
-  let pair = 0;
   for (let i = 0; i < count; i += 1) {
-    for (let j = 0; j < i; j += 1) {
-      const friction = frictions[pair];
-      pair += 1;
-      forces[i] += fluxes[j] * friction;
-      forces[j] += fluxes[i] * friction;
-    }
-  }
-  for (let i = 0; i < count; i += 1) {
-    if (fluxes[i] !== 0) forces[i] -= (fluxes[i] / fractions[i]) * resistances[i];
+    const flux = fluxes[i];
+    if (flux === 0) continue;
+    const firstPair = (i * (i - 1)) / 2;
+    for (let j = 0; j < i; j += 1) forces[j] += flux * frictions[firstPair + j];
+    for (let j = i + 1; j < count; j += 1) forces[j] += flux * frictions[(j * (j - 1)) / 2 + i];
+    if (!isDragOnly) forces[i] -= (flux / fractions[i]) * resistances[i];
   }
 }
 
@@ -219,7 +247,7 @@ function separate(kappa: number, dominant: number, slope: Float64Array): void {
   for (let i = 0; i < count; i += 1) {
     const fraction = fractions[i];
     if (i === dominant || fraction <= traceLimit) continue;
-    const row = size * maximumDimension;
+    const row = size * maximumGases;
     const firstPair = (i * (i - 1)) / 2;
     for (let a = 0; a < size; a += 1) matrix[row + a] = -(1 + kappa * frictions[firstPair + active[a]]);
     matrix[row + size] = (1 - fraction + kappa * resistances[i]) / fraction;
@@ -227,7 +255,7 @@ function separate(kappa: number, dominant: number, slope: Float64Array): void {
     active[size] = i;
     size += 1;
   }
-  solveSymmetric(matrix, maximumDimension, size, unknowns);
+  solveSymmetric(matrix, maximumGases, size, unknowns);
 
   let dominantSlope = 0;
   for (let a = 0; a < size; a += 1) dominantSlope -= unknowns[a];

@@ -1,8 +1,10 @@
-import { maximumDimension } from "../numerics/dormandPrince";
 import { exponential, logarithm } from "../numerics/elementary";
 
+/** The largest number of gases in a column. */
+export const maximumGases = 32;
+
 /** Mole fractions of the state that `setComposition` was last given. */
-export const fractions = new Float64Array(maximumDimension);
+export const fractions = new Float64Array(maximumGases);
 
 /**
  * Works out the mole fractions of a state, into `fractions`.

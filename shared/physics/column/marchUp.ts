@@ -1,19 +1,23 @@
-import { escapeParameter } from "../escape/escapeParameter";
-import { findKnudsenBand, smallestBoundParameter, type KnudsenBand } from "../exobase/findExobase";
-import { addKnudsen, findLargestKnudsen, type KnudsenAlong } from "../exobase/knudsenAlong";
+import { exobaseNumber } from "../exobase/exobaseNumber";
+import { findExobaseBand, smallestBoundParameter, type ExobaseBand } from "../exobase/findExobase";
+import { addNumber, findLargest, type NumberAlong } from "../exobase/numberAlong";
 import { maximumDimension } from "../numerics/dormandPrince";
 import { logarithm, power } from "../numerics/elementary";
 import { findRoot, rootOf } from "../numerics/findRoot";
+import { boundParameter } from "./boundParameter";
 import { advance, beginMarch, heightOfMarch, type ColumnMarch } from "./columnMarch";
-import { nodeState, pathTemperature, stateWithin, type ColumnPath } from "./columnPath";
-import { altitudeOf, heightOf, smallestTemperatureAbove, type ColumnProblem } from "./columnProblem";
-import { fractions, setComposition } from "./composition";
+import { nodeState, stateWithin, type ColumnPath } from "./columnPath";
+import { altitudeOf, heightOf, type ColumnProblem } from "./columnProblem";
+import { setComposition } from "./composition";
 import { largestCentrifugalShare } from "./requireColumnInput";
 
 /** A march from the base to the top, without flux. */
 export interface UpwardMarch {
-  along: KnudsenAlong;
-  band: KnudsenBand;
+  march: ColumnMarch;
+  /** The Knudsen number. */
+  along: NumberAlong;
+  /** By the bulk criterion. */
+  band: ExobaseBand;
   /** Geopotential height of the top, m. */
   top: number;
   /** Whether Kn fell where the escape parameter of the mean mass was below 2. */
@@ -29,22 +33,46 @@ const farEnough = logarithm(10.5);
 /** A column without a given top has at least so many scale heights, or twice its base's distance from the centre. */
 const smallestExtent = 3;
 /** ln of 1e-280 Pa: below it numbers lose their meaning, and a column ends. */
-const smallestLogPressure = logarithm(1e-280);
+export const smallestLogPressure = logarithm(1e-280);
 
 /** Marches up to the given top, or to where the exobase and its band have been passed. */
 export function marchUp(problem: ColumnProblem, tolerance: number): UpwardMarch {
-  const state = problem.baseLogPressures;
-  const march = beginMarch({ problem, fluxes: null, height: 0, state, direction: 1, tolerance });
-  const along: KnudsenAlong = { path: march.path, values: [], slopes: [] };
-  addKnudsen(along, march.slope);
+  const { march, along } = setOut(problem, 0, problem.baseLogPressures, tolerance);
   const { top } = problem.input;
-  return top === "auto" ? marchToOwnTop(march, along) : marchToGivenTop(march, along, top);
+  if (top === "auto") return marchToOwnTop(march, along, march.scaleHeight, null);
+  return marchToGivenTop(march, along, heightOf(top, problem.input.radius, problem.baseRadius));
 }
 
-function marchToGivenTop(march: ColumnMarch, along: KnudsenAlong, topAltitude: number): UpwardMarch {
-  const { problem } = march.path;
-  const { radius } = problem.input;
-  const limit = heightOf(topAltitude, radius, problem.baseRadius);
+/**
+ * Marches up from an exobase to the given top, or to where `marchUp` would end; a little in any case.
+ *
+ * @param height           h  [m]  geopotential height of the exobase above the base
+ * @param state            ln p of each present gas there  [ln Pa]
+ * @param baseScaleHeight  of the whole gas at the base, in h  [m]
+ */
+export function marchOnFromExobase(
+  problem: ColumnProblem,
+  height: number,
+  state: Float64Array,
+  baseScaleHeight: number,
+  tolerance: number,
+): UpwardMarch {
+  const { march, along } = setOut(problem, height, state, tolerance);
+  const { top, radius } = problem.input;
+  if (top === "auto") return marchToOwnTop(march, along, baseScaleHeight, height);
+  const least = Math.min(height + march.scaleHeight / 10, farthestHeight(problem));
+  return marchToGivenTop(march, along, Math.max(heightOf(top, radius, problem.baseRadius), least));
+}
+
+function setOut(problem: ColumnProblem, height: number, state: Float64Array, tolerance: number) {
+  const march = beginMarch({ problem, fluxes: null, height, state, direction: 1, tolerance });
+  const number = exobaseNumber(problem, { kind: "bulk" });
+  const along: NumberAlong = { path: march.path, number, values: [], slopes: [] };
+  addNumber(along, march.law, march.slope);
+  return { march, along };
+}
+
+function marchToGivenTop(march: ColumnMarch, along: NumberAlong, limit: number): UpwardMarch {
   let isRunaway = false;
   let isThin = false;
   while (heightOfMarch(march) < limit && !isThin) {
@@ -52,14 +80,19 @@ function marchToGivenTop(march: ColumnMarch, along: KnudsenAlong, topAltitude: n
     isRunaway ||= runsAway(along);
   }
   const top = isThin ? thinHeight(march.path) : limit;
-  return { along, band: findKnudsenBand(along), top, isRunaway, isCutShort: isThin };
+  return { march, along, band: findExobaseBand(along, along), top, isRunaway, isCutShort: isThin };
 }
 
-function marchToOwnTop(march: ColumnMarch, along: KnudsenAlong): UpwardMarch {
+function marchToOwnTop(
+  march: ColumnMarch,
+  along: NumberAlong,
+  baseScaleHeight: number,
+  knownExobase: number | null,
+): UpwardMarch {
   const { path } = march;
   const { problem } = path;
   const limit = farthestHeight(problem);
-  const extent = Math.min(smallestExtent * march.scaleHeight, problem.baseRadius / 2, limit);
+  const extent = Math.min(smallestExtent * baseScaleHeight, problem.baseRadius / 2, limit);
   let isRunaway = false;
   let isThin = false;
   while (heightOfMarch(march) < limit && !isThin) {
@@ -68,24 +101,45 @@ function marchToOwnTop(march: ColumnMarch, along: KnudsenAlong): UpwardMarch {
     const isFar = along.values[path.steps] >= farEnough;
     if ((isRunaway || isFar) && heightOfMarch(march) >= extent) break;
   }
-  const band = findKnudsenBand(along);
-  const wanted = Math.min(limit, wantedTop(along, band, extent, isRunaway));
+  const band = findExobaseBand(along, along);
+  const wanted = Math.min(
+    limit,
+    wantedTop(along, { ...band, exobase: knownExobase ?? band.exobase }, extent, isRunaway),
+  );
   while (heightOfMarch(march) < wanted && !isThin) isThin = marchOn(march, along, wanted);
   const top = isThin ? Math.min(wanted, thinHeight(path)) : wanted;
   const isBandWhole = band.exobase !== null && band.upper !== null;
-  return { along, band: isBandWhole ? band : findKnudsenBand(along), top, isRunaway, isCutShort: false };
+  const wholeBand = isBandWhole ? band : findExobaseBand(along, along);
+  return { march, along, band: wholeBand, top, isRunaway, isCutShort: false };
+}
+
+/**
+ * Goes on, beyond the top of a column that set its own, until `isFarEnough`; or until the gas is too thin, runs away
+ * or has no height left.
+ *
+ * @param isFarEnough  asked before the first step and after each
+ * @returns            whether the gas runs away
+ */
+export function marchFurther({ march, along }: UpwardMarch, isFarEnough: () => boolean): boolean {
+  const limit = farthestHeight(march.path.problem);
+  let isThin = false;
+  while (!isThin && heightOfMarch(march) < limit && !isFarEnough()) {
+    if (runsAway(along)) return true;
+    isThin = marchOn(march, along, limit);
+  }
+  return false;
 }
 
 /** One step; whether the gas is now too thin to go on. */
-function marchOn(march: ColumnMarch, along: KnudsenAlong, limit: number): boolean {
+function marchOn(march: ColumnMarch, along: NumberAlong, limit: number): boolean {
   advance(march, limit);
-  return addKnudsen(along, march.slope) < smallestLogPressure;
+  return addNumber(along, march.law, march.slope) < smallestLogPressure;
 }
 
 /** The top of a column that sets its own; it depends on the gas alone, not on the steps. */
 function wantedTop(
-  along: KnudsenAlong,
-  { exobase, upper }: KnudsenBand,
+  along: NumberAlong,
+  { exobase, upper }: ExobaseBand,
   extent: number,
   isRunaway: boolean,
 ): number {
@@ -97,34 +151,21 @@ function wantedTop(
     const top = heightOf(altitude + (topOverExobase - 1) * reach, radius, problem.baseRadius);
     return Math.max(extent, top, upper ?? 0);
   }
-  const summit = isRunaway ? findLargestKnudsen(along, heightOfLast(along.path)).height : 0;
+  const summit = isRunaway ? findLargest(along, heightOfLast(along.path)).height : 0;
   return Math.max(extent, summit, upper ?? 0);
 }
 
 /** Whether, where the march stands, Kn falls and the gas is unbound. */
-function runsAway({ path, slopes }: KnudsenAlong): boolean {
+function runsAway({ path, slopes }: NumberAlong): boolean {
   return slopes[path.steps] < 0 && smallestEscapeParameter(path, path.steps) < smallestBoundParameter;
 }
 
-/** GMm̄/(kTr) at a position of a path, T the lowest temperature from there up. */
+/** See `boundParameter`; at a position of a path. */
 export function smallestEscapeParameter(path: ColumnPath, node: number): number {
-  const { problem, laws, positions } = path;
-  const step = Math.min(node, path.steps - 1);
-  const height = positions[node];
   nodeState(path, node, state);
-  setComposition(state, problem.masses.length);
-  let meanMass = 0;
-  for (let i = 0; i < problem.masses.length; i += 1) meanMass += fractions[i] * problem.masses[i];
-  return escapeParameter({
-    gravitationalParameter: problem.input.gravitationalParameter,
-    particleMass: meanMass,
-    temperature: smallestTemperatureAbove(
-      problem.temperature,
-      pathTemperature(path, step, height),
-      laws[step].temperaturePiece,
-    ),
-    radius: problem.input.radius + altitudeOf(problem, height),
-  });
+  setComposition(state, path.problem.masses.length);
+  const { temperaturePiece } = path.laws[Math.min(node, path.steps - 1)];
+  return boundParameter(path.problem, path.positions[node], temperaturePiece);
 }
 
 const state = new Float64Array(maximumDimension);
@@ -147,7 +188,7 @@ function heightOfLast(path: ColumnPath): number {
 }
 
 /** How far up a column without a given top may reach: nearly to infinity, or to where gravity is used up. */
-function farthestHeight({ baseRadius, centrifugalFactor }: ColumnProblem): number {
+export function farthestHeight({ baseRadius, centrifugalFactor }: ColumnProblem): number {
   if (centrifugalFactor === 0) return baseRadius * (1 - 1e-6);
   const radius = power(largestCentrifugalShare / centrifugalFactor, 1 / 3);
   return Math.min(baseRadius * (1 - 1e-6), baseRadius - (baseRadius * baseRadius) / radius);

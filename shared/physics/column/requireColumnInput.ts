@@ -6,9 +6,9 @@ import {
   requireNonNegative,
   requirePositive,
 } from "../guards";
-import { maximumDimension } from "../numerics/dormandPrince";
 import { cosine } from "../numerics/elementary";
 import type { ColumnInput, EddyProfile, TemperatureProfile } from "../types";
+import { maximumGases } from "./composition";
 
 /** How far the mole fractions may be from adding up to 1: rounding, not a forgotten gas. */
 export const fractionSumTolerance = 1e-9;
@@ -31,8 +31,8 @@ export function requireColumnInput(input: ColumnInput): void {
 }
 
 function requireGases({ gases, collisionParameters }: ColumnInput): void {
-  if (gases.length < 1 || gases.length > maximumDimension) {
-    throw new PhysicsDomainError("number of gases", gases.length, `between 1 and ${maximumDimension}`);
+  if (gases.length < 1 || gases.length > maximumGases) {
+    throw new PhysicsDomainError("number of gases", gases.length, `between 1 and ${maximumGases}`);
   }
   let sum = 0;
   for (const gas of gases) {

@@ -1,4 +1,5 @@
 import { PhysicsDomainError } from "../errors";
+import { exobaseBy } from "../exobase/exobaseBy";
 import { exobaseOutcome } from "../exobase/findExobase";
 import type { Column, ColumnInput } from "../types";
 import { columnNotes } from "./columnNotes";
@@ -28,23 +29,30 @@ export const defaultTolerance = 1e-10;
  * @source   [ChapmanCowling1970], section 18.2; [BanksKockarts1973], chapter 15
  */
 export function solveColumn(input: ColumnInput, tolerance = defaultTolerance): Column {
-  if (!(tolerance >= 1e-13 && tolerance <= 1e-2)) {
-    throw new PhysicsDomainError("tolerance", tolerance, "between 1e-13 and 1e-2");
-  }
+  requireTolerance(tolerance);
   const before = slopeEvaluations();
   const problem = columnProblem(input);
   const march = marchUp(problem, tolerance);
   const { path } = march.along;
-  const exobase = exobaseOutcome({ ...march, baseEscapeParameter: smallestEscapeParameter(path, 0) });
+  const baseEscapeParameter = smallestEscapeParameter(path, 0);
+  const exobase = exobaseOutcome({ ...march, baseEscapeParameter });
   const homopauses = findHomopauses(path, march.top);
   const topAltitude = input.top === "auto" || march.isCutShort ? altitudeOf(problem, march.top) : input.top;
   return {
     input,
     topAltitude,
     exobase,
+    exobaseBy: (criterion) =>
+      criterion.kind === "bulk" ? exobase : exobaseBy(march, criterion, baseEscapeParameter),
     homopauses: homopauses.map(({ outcome }) => outcome),
     ...columnReaders(path, topAltitude),
     notes: columnNotes(input, topAltitude, homopauses, march.isCutShort),
     evaluations: slopeEvaluations() - before,
   };
+}
+
+/** Refuses a tolerance that no march can keep to, or that means nothing. */
+export function requireTolerance(tolerance: number): void {
+  if (tolerance >= 1e-13 && tolerance <= 1e-2) return;
+  throw new PhysicsDomainError("tolerance", tolerance, "between 1e-13 and 1e-2");
 }

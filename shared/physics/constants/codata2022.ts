@@ -47,10 +47,20 @@ export const elementaryCharge: PhysicalConstant = {
   source: "CODATA2022",
 };
 
+export const electronMass: PhysicalConstant = {
+  symbol: "m_e",
+  name: "electron mass",
+  value: 9.1093837139e-31,
+  unit: "kg",
+  uncertainty: 0.0000000028e-31,
+  source: "CODATA2022",
+};
+
 export const codata2022: readonly PhysicalConstant[] = [
   boltzmann,
   avogadro,
   gravitationalConstant,
   atomicMass,
   elementaryCharge,
+  electronMass,
 ];

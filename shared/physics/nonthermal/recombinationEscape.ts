@@ -16,6 +16,8 @@ export interface Ionosphere {
     radii: ArrayLike<number>;
     numberDensities: ArrayLike<number>;
     temperatures: ArrayLike<number>;
+    /** Radii of the temperatures where they are sampled elsewhere than the densities; constant beyond their ends. */
+    temperatureRadii?: ArrayLike<number>;
   };
 }
 
@@ -40,7 +42,7 @@ const pieces = 4;
  *   F = 4πr_c² ½ ∫_{r_c}^{top} α(T_e) n_e n_i dr × Σ branching × (fragments above the escape energy)
  *
  * Densities are interpolated by a monotone cubic in their logarithm, temperatures by one as they are; the top is where
- * the first of the profiles ends.
+ * the first of the density profiles ends.
  *
  * @param source.ion                      see `recombiningIons`
  * @param source.gravitationalParameter   GM   [m³ s⁻²]  above zero
@@ -75,7 +77,8 @@ export function recombinationEscape({
   for (let i = 0; i < electrons.temperatures.length; i += 1) {
     requirePositive("electron temperature", electrons.temperatures[i]);
   }
-  const temperatureCurve = freeEndedCubic(electrons.radii, electrons.temperatures);
+  const temperatureRadii = electrons.temperatureRadii ?? electrons.radii;
+  const temperatureCurve = freeEndedCubic(temperatureRadii, electrons.temperatures);
 
   const lowest = Math.max(ions.radii[0], electrons.radii[0]);
   const from = Math.max(exobaseRadius, lowest);
@@ -86,7 +89,7 @@ export function recombinationEscape({
     const logPairs = cubicValue(ionCurve, radius) + cubicValue(electronCurve, radius);
     return recombinationCoefficient(ion, cubicValue(temperatureCurve, radius)) * exponential(logPairs);
   };
-  const knots = knotsBetween(from, to, [ions.radii, electrons.radii]);
+  const knots = knotsBetween(from, to, [ions.radii, electrons.radii, temperatureRadii]);
   let columnRate = 0;
   for (let i = 1; i < knots.length; i += 1) {
     const width = (knots[i] - knots[i - 1]) / pieces;

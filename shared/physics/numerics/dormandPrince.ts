@@ -9,7 +9,7 @@ import * as t from "./dormandPrinceTableau";
  */
 
 /** The largest number of equations. */
-export const maximumDimension = 32;
+export const maximumDimension = 64;
 
 /** Writes dy/dx at (position, state) to `slope`. */
 export type Slope = (position: number, state: Float64Array, slope: Float64Array) => void;

@@ -84,9 +84,10 @@ export function rootOf(quantity: string, outcome: RootOutcome): number {
   throw new PhysicsDomainError(quantity, (a + b) / 2, `a root that the search can reach (${outcome.reason})`);
 }
 
-const iterationLimit = 100;
 /** After so many steps the bracket should have halved. */
 const patience = 4;
+/** At worst every second round of so many halves the bracket; from 1 to two units in the last place that takes 51. */
+const iterationLimit = 2 * patience * 52;
 /** Two units in the last place. */
 const roundingWidth = 4.5e-16;
 

@@ -9,6 +9,7 @@ import { ConflictPanel } from "./conflict/ConflictPanel";
 import { JoinedMessage } from "./conflict/JoinedMessage";
 import { useNotebookDraft } from "./draft/useNotebookDraft";
 import { useEvaluation } from "./evaluation/useEvaluation";
+import { useLongTasks } from "./evaluation/useLongTasks";
 import { useNotebookNotes } from "./evaluation/useNotebookNotes";
 import { Article } from "./page/Article";
 import { MoreMenu } from "./page/MoreMenu";
@@ -43,6 +44,7 @@ export function NotebookDesk({ notebook, person }: NotebookDeskProps) {
   );
 
   const live = useEvaluation(notebook.id, document);
+  useLongTasks(notebook.id, live);
   const notes = useNotebookNotes(document, live);
   const { commands, newCellId } = useCellCommands(draft.document, edit);
   const isEditable = canEdit && merge === null;

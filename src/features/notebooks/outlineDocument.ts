@@ -29,7 +29,7 @@ const outline: readonly OutlineCell[] = [
       "eddy           = 1e6 cm^2/s",
     ].join("\n"),
   },
-  { kind: "escape", name: "leak", text: "column   = air\ncoupling = open" },
+  { kind: "escape", name: "leak", text: "column = air" },
 ];
 
 /** A document to begin from, every cell with an id of its own. */

@@ -175,16 +175,16 @@ describe("a fault stands on the very characters", () => {
       entries.temperature,
     ],
     [
-      "a coupling that is not computed",
-      [ilmara, column(), ["escape", "leak", "column = dayside\ncoupling = coupled"]],
+      "a coupling that is none",
+      [ilmara, column(), ["escape", "leak", "column = dayside\ncoupling = closed"]],
       "choice",
-      "coupled",
+      "closed",
     ],
     [
-      "a criterion that is not computed",
-      [ilmara, column(), ["escape", "leak", "column = dayside\ncoupling = open\ncriterion = simple"]],
+      "a criterion that is none",
+      [ilmara, column(), ["escape", "leak", "column = dayside\ncoupling = open\ncriterion = depth"]],
       "choice",
-      "simple",
+      "depth",
     ],
     [
       "a gas that the column does not hold",
@@ -277,17 +277,6 @@ describe("a fault stands on the very characters", () => {
     for (const key of keys) expect(missing.join("\n")).toContain(`*${key}*`);
     expect(missing).toHaveLength(keys.length);
     expect(values).toEqual({});
-  });
-
-  it("asks for the coupling in plain words and offers to write it", () => {
-    const { note } = noteOf([ilmara, column(), ["escape", "leak", "column = dayside"]], "missing_coupling");
-    expect(note).toMatchObject({
-      level: "fault",
-      remedy: { label: "Write coupling = open", replacement: "\ncoupling = open" },
-    });
-    const { range, replacement } = note.remedy!;
-    const text = `${"column = dayside".slice(0, range.from)}${replacement}${"column = dayside".slice(range.to)}`;
-    expect(resultOf(ilmara, column(), ["escape", "leak", text]).status).not.toBe("fault");
   });
 
   it("says of a name that stands further down that it does", () => {
@@ -434,7 +423,19 @@ describe("whatever is written", { timeout: 60_000 }, () => {
           ["body", "ilmara", bodyWritten],
           column(changes),
           leak,
+          ["escape", "fed", "column = dayside"],
           ["values", "v", "x = leak.H.rate"],
+          ["corona", "halo", "escape = leak\ngas = H\nsatellites = 0.5\nlevels = 3000 km"],
+          [
+            "nonthermal",
+            "hot",
+            "escape = leak\nion = O2+\nion_density = 1e4 /cm^3\nelectron_density = 1e4 /cm^3\nelectron_temperature = 1000 K",
+          ],
+          [
+            "loss",
+            "lost",
+            "body = ilmara\nrate = leak.H.rate\ngas = H\nbegin = 1 Gyr\nend = 4 Gyr\nnow = 4 Gyr",
+          ],
         ];
         const { evaluation } = evaluateNotebook(notebookOf(cells));
         for (const { result, understood, strip } of evaluation.cells) {
@@ -463,7 +464,7 @@ describe("whatever is written", { timeout: 60_000 }, () => {
   it("any text at all gets notes inside it", () => {
     fc.assert(
       fc.property(
-        fc.constantFrom("values", "body", "gas", "column", "escape"),
+        fc.constantFrom("values", "body", "gas", "column", "escape", "corona", "nonthermal", "loss"),
         fc.string({ unit: "binary", maxLength: 60 }),
         (kind, text) => {
           const { notes } = resultOf([kind as "values", "H", text]);

@@ -1,6 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { notebookDocumentSchema, type NotebookDocument } from "../../../shared/notebook/document";
+import { cellSchemas } from "../../../shared/notebook/cellSchemas";
+import { cellKinds, notebookDocumentSchema, type NotebookDocument } from "../../../shared/notebook/document";
 import { readNotebookFile, writeNotebookFile } from "../../../shared/notebook/notebookFile";
 
 function countedIds(): () => string {
@@ -25,6 +26,20 @@ function notesOf(text: string) {
 const head = "# Ilmara\n\n```notebook\nformat = 1\n```\n";
 
 describe("a notebook file", () => {
+  it("holds a cell of every kind, with every entry that it may have", () => {
+    const cells = cellKinds.map((kind, place) => ({
+      id: `cell-${place + 1}`,
+      kind,
+      name: kind === "gas" ? "H" : kind,
+      text: cellSchemas[kind].entries.map(({ example }) => example).join("\n") || "x = 1",
+    }));
+    const document = documentOf(`${head}\n`);
+    const file = writeNotebookFile({ ...document, cells });
+    for (const kind of cellKinds.filter((one) => one !== "prose")) expect(file).toContain(`\`\`\`${kind} `);
+    expect(read(file).notes).toEqual([]);
+    expect(documentOf(file).cells).toEqual(cells);
+  });
+
   it("holds title, settings, prose and cells as a person would write them", () => {
     const document: NotebookDocument = {
       format: 1,

@@ -8,18 +8,20 @@ import type { ResultRow } from "../../../shared/notebook/result";
 import jeansCases from "../../fixtures/jeansCases.json";
 import standard from "../../fixtures/standardAtmosphere1976.json";
 import "../../toBeCloseToRelative";
-import { numberIn, resultOf, type WrittenCell } from "./evaluateCells";
+import { numberIn, resultOf } from "./evaluateCells";
+import { notebookWithExobaseAt, type radiiKm } from "./notebookWithExobaseAt";
 
-function evaluateFile(name: string) {
+function documentOf(name: string) {
   const file = path.join(import.meta.dirname, "../../fixtures/notebooks", name);
   let count = 0;
   const reading = readNotebookFile(readFileSync(file, "utf8"), () => String((count += 1)));
   if (!reading.ok) throw new Error(reading.notes.map(({ message }) => message).join("\n"));
-  return evaluateNotebook(reading.document).evaluation.cells.map(({ result }) => result);
+  return reading.document;
 }
 
 describe("the U.S. Standard Atmosphere 1976 through a notebook, from its row at 150 km", () => {
-  const cells = evaluateFile("standard-atmosphere.md");
+  const { evaluation } = evaluateNotebook(documentOf("standard-atmosphere.md"));
+  const cells = evaluation.cells.map(({ result }) => result);
   const column = cells.find(({ kind }) => kind === "column")!;
   const levelAt = (altitudeKm: number): ResultRow => {
     const row = column.tables.levels.find(({ altitude }) => altitude === altitudeKm * 1000);
@@ -60,52 +62,32 @@ describe("the U.S. Standard Atmosphere 1976 through a notebook, from its row at 
   });
 });
 
-/** Constants of the program that computed the cases. */
-const { boltzmann, atomicMass, massesU, gravitationalParametersKm3S2 } = jeansCases.inputs;
+describe("the exobase of the U.S. Standard Atmosphere 1976 through a notebook", () => {
+  /** With d = 3.65 Å, and so much hydrogen at 150 km; the file has none. */
+  const withHydrogen = (atBase: number, criterion: string) => {
+    const document = documentOf("standard-atmosphere.md");
+    const cells = document.cells.map((cell) => {
+      const text = cell.text.replace("He: 2.106e13 /m^3", `He: 2.106e13 /m^3, H: ${atBase} /m^3`);
+      if (cell.kind === "gas") return { ...cell, text: `${text}\ncross_section = pi * (3.65 angstrom)^2` };
+      return { ...cell, text: cell.kind === "escape" ? `${text}\ncriterion = ${criterion}` : text };
+    });
+    const { evaluation } = evaluateNotebook({ ...document, cells });
+    return evaluation.cells.map(({ result }) => result);
+  };
+  // The standard's own hydrogen flows; here it stands, and is made to meet the standard's 500 km row.
+  const wanted = standard.rows.find(({ altitudeKm }) => altitudeKm === 500)!.numberDensity.H!;
+  const tried = withHydrogen(1e11, "bulk").find(({ kind }) => kind === "column")!;
+  const got = tried.tables.levels.find(({ altitude }) => altitude === 500e3)!["H.number_density"] as number;
 
-/** Radii that the altitudes of the cases count from, km. */
-const radiiKm = { Earth: 6371.0084, Mars: 3389.5 } as const;
-
-/**
- * A notebook whose exobase lies where a case wants it: isothermal CO2 (d = 3.763 Å, stated) with traces, without
- * mixing. Then n = n_b exp(Λ_b − Λ), Λ = GMm/kTr, and l = H gives n = mg/(√2 σ kT) at the exobase.
- */
-function notebookWithExobaseAt(place: {
-  body: keyof typeof radiiKm;
-  radiusKm: number;
-  temperature: number;
-  hydrogenAtExobase?: number;
-}): WrittenCell[] {
-  const { body, radiusKm, temperature } = place;
-  const gm = gravitationalParametersKm3S2[body] * 1e9;
-  const kT = boltzmann * temperature;
-  const base = radiusKm * 1e3 - 60e3;
-  const rise = (massU: number) => ((gm * massU * atomicMass) / kT) * (1 / base - 1 / (radiusKm * 1e3));
-  const crossSection = Math.PI * 3.763e-10 ** 2;
-  const mass = massesU.CO2 * atomicMass;
-  const atExobase = (mass * gm) / (radiusKm * 1e3) ** 2 / (Math.SQRT2 * crossSection * kT);
-  const co2 = atExobase * Math.exp(rise(massesU.CO2));
-  const trace = (formula: keyof typeof massesU) =>
-    formula === "H" && place.hydrogenAtExobase
-      ? place.hydrogenAtExobase * Math.exp(rise(massesU.H))
-      : atExobase * 1e-9 * Math.exp(rise(massesU[formula]));
-  const traces = (["H", "D", "He", "O", "H2", "HD"] as const).map((gas) => `${gas}: ${trace(gas)} /m^3`);
-  const masses = Object.entries(massesU).map(([formula, massU]): WrittenCell => [
-    "gas",
-    formula,
-    `mass = ${massU} u\nthermal_diffusion = 0${formula === "CO2" ? `\ncross_section = ${crossSection} m^2` : ""}`,
-  ]);
-  return [
-    ["body", "planet", `gm = ${gm} m^3/s^2\nradius = ${radiiKm[body]} km`],
-    ...masses,
-    [
-      "column",
-      "air",
-      `body = planet\nbase = ${base / 1e3 - radiiKm[body]} km\ngases = CO2: ${co2} /m^3, ${traces.join(", ")}\ntemperature = ${temperature} K`,
-    ],
-    ["escape", "leak", "column = air\ncoupling = open"],
-  ];
-}
+  // Recomputed from the standard's column with the pressure scale height.
+  it.each([
+    ["bulk", 491.2],
+    ["simple", 465.5],
+  ])("lies by the criterion %s at %d km within 0.5 km", (criterion, altitudeKm) => {
+    const result = withHydrogen((1e11 * wanted) / got, criterion).at(-1)!;
+    expect(Math.abs(numberIn(result, "exobase.altitude") / 1e3 - altitudeKm)).toBeLessThan(0.5);
+  });
+});
 
 describe("escape parameters and effusion velocities of Earth and Mars through a notebook", () => {
   const cases = jeansCases.rows.filter(({ body }) => body === "Earth" || body === "Mars");

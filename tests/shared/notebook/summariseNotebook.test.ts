@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import { engineVersion } from "../../../shared/notebook/engine";
 import { evaluateNotebook } from "../../../shared/notebook/evaluateNotebook";
 import { stripOf, summariseNotebook } from "../../../shared/notebook/summariseNotebook";
 import { notebookSummarySchema } from "../../../shared/notebook/summary";
@@ -99,6 +100,18 @@ describe("the headline", () => {
     expect(summarise(low).summary.headline.map(({ value }) => value)).toEqual(["none"]);
   });
 
+  it("names the criterion and the coupling that a number rests on", () => {
+    const [body, values, column] = cells;
+    const noteOf = (text: string, name: string) =>
+      plain(summarise([body, values, column, ["escape", "leak", text]], [name]).summary.headline[0].note);
+    const exobase = "leak.exobase.altitude";
+    expect(noteOf("column = dayside\ncriterion = unit_depth", exobase)).toMatch(/^unit depth; Kn 0.1/);
+    expect(noteOf("column = dayside\ncriterion = gas\ngas = O", exobase)).toMatch(/^l = H of O; Kn 0.1/);
+    expect(noteOf("column = dayside", "leak.H.rate")).toBe("Jeans, coupled column");
+    expect(noteOf("column = dayside\ncoupling = open", "leak.H.rate")).toBe("Jeans, open column");
+    expect(noteOf("column = dayside", "leak.wind_mass_rate")).toBe("isothermal wind");
+  });
+
   it("is empty without an escape cell", () => {
     expect(summarise(cells.slice(0, 3)).summary.headline).toEqual([]);
   });
@@ -107,7 +120,7 @@ describe("the headline", () => {
 describe("the summary", () => {
   it("counts notes by level and names the bodies", () => {
     const { summary } = summarise([...cells, ["values", "more", "x = 1 kg + 1 m"]]);
-    expect(summary).toMatchObject({ faults: 1, bodies: ["ilmara"], engine: "1.0.0" });
+    expect(summary).toMatchObject({ faults: 1, bodies: ["ilmara"], engine: engineVersion });
     expect(summary.cautions + summary.remarks).toBeGreaterThan(0);
   });
 

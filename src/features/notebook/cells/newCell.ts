@@ -10,6 +10,11 @@ const names: Record<CellKind, string> = {
   gas: "",
   column: "air",
   escape: "leak",
+  corona: "halo",
+  nonthermal: "hot",
+  sweep: "across",
+  spread: "sure",
+  loss: "lost",
 };
 
 /** A cell to be inserted at a place: the needed entries as an example gives them, with the cells above that it most likely rests on. */

@@ -12,7 +12,7 @@ import type { EntrySchema } from "../../../../shared/notebook/kinds/cellSchema";
 import { quantityKinds } from "../../../../shared/notebook/language/dimensions";
 import { constantNames, functionNames } from "../../../../shared/notebook/language/reservedWord";
 import { unitsForCompletion } from "../../../../shared/notebook/language/units";
-import { handbookBodies, handbookGases } from "../../../../shared/physics";
+import { handbookBodies, handbookGases, recombiningIons } from "../../../../shared/physics";
 
 export interface CompletionSurroundings {
   kind: CellKind;
@@ -121,9 +121,24 @@ function valuesFor(
         ...gases(cells),
         ...quantities(names, ownName),
       ];
+    case "gasName":
     case "gasNames":
+    case "factors":
     case "pairs":
       return gases(cells);
+    case "ion":
+      return recombiningIons.map(({ formula: label }) => ({ label, detail: "ion" }));
+    case "samples":
+      return [{ label: "points(", detail: "altitude: value, …" }, ...quantities(names, ownName)];
+    case "history":
+      return [{ label: "points(", detail: "age: light, …" }];
+    case "results":
+      return quantities(names, ownName);
+    case "variation":
+      return [
+        ...quantities(names, ownName),
+        ...["from", "to", "in", "steps", "logarithmic"].map((label) => ({ label, detail: "word" })),
+      ];
     case "profile":
       return [...profiles(schema), ...quantities(names, ownName)];
     default:

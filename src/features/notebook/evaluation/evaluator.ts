@@ -2,7 +2,7 @@ import { wrap, type Remote } from "comlink";
 import type { EvaluationService } from "./evaluationService";
 
 /** The service as the page sees it: every call answers later. */
-export type Evaluator = Pick<Remote<EvaluationService>, "evaluate" | "headlineOf">;
+export type Evaluator = Pick<Remote<EvaluationService>, "evaluate" | "headlineOf" | "supply">;
 
 let running: Evaluator | null = null;
 

@@ -1,7 +1,8 @@
-import { useEffect, useMemo, useRef, useState } from "react";
+import { useCallback, useEffect, useMemo, useRef, useState } from "react";
 import type { NotebookDocument } from "../../../../shared/notebook/document";
 import type { CellEvaluation } from "../../../../shared/notebook/result";
 import type { HeadlineItem } from "../../../../shared/notebook/summary";
+import type { LongTask, TaskAnswer } from "../../../../shared/notebook/tasks";
 import { createLatestRunner } from "./createLatestRunner";
 import type { EvaluationAnswer } from "./evaluationService";
 import { workerEvaluator, type Evaluator } from "./evaluator";
@@ -16,6 +17,8 @@ interface Evaluated {
   document: NotebookDocument;
   cells: ReadonlyMap<string, CellEvaluation>;
   headline: HeadlineItem[];
+  /** Sweeps and spreads that are still to be computed; see `useLongTasks`. */
+  tasks: LongTask[];
 }
 
 export interface LiveEvaluation {
@@ -25,6 +28,8 @@ export interface LiveEvaluation {
   late: ReadonlySet<string>;
   /** Why nothing could be computed. */
   failure: string | null;
+  /** Takes the answer of a sweep or spread, and evaluates anew with it. */
+  supply: (answer: TaskAnswer) => void;
 }
 
 const none: ReadonlySet<string> = new Set();
@@ -72,12 +77,25 @@ export function useEvaluation(
     [document, notebookKey, evaluator],
   );
 
+  const documentRef = useRef(document);
+  useEffect(function rememberText() {
+    documentRef.current = document;
+  });
+  const supply = useCallback(
+    (answer: TaskAnswer) => {
+      // The worker takes messages in order: the answer is there before the evaluation that is to use it.
+      void evaluator().supply(answer);
+      runnerRef.current?.offer(documentRef.current);
+    },
+    [evaluator],
+  );
+
   const isLate = useIsLate(document, evaluated?.document ?? null);
   const late = useMemo(
     () => (isLate ? staleCells(document, evaluated?.document ?? null, evaluated?.cells ?? new Map()) : none),
     [isLate, document, evaluated],
   );
-  return { evaluated, late, failure };
+  return { evaluated, late, failure, supply };
 }
 
 let nextMount = 0;
@@ -88,7 +106,7 @@ function withAnswer(last: Evaluated | null, answer: EvaluationAnswer, document: 
     const evaluation = typeof cell === "string" ? last?.cells.get(cell) : cell;
     if (evaluation) cells.set(evaluation.id, evaluation);
   }
-  return { engine: answer.engine, document, cells, headline: answer.headline };
+  return { engine: answer.engine, document, cells, headline: answer.headline, tasks: answer.tasks };
 }
 
 /** True once what is written has gone without an answer for a while. */

@@ -23,8 +23,14 @@ export function slowColumn(input: ColumnInput, top: number, steps: number): numb
 
 const moved = (y: number[], slope: number[], step: number) => y.map((value, i) => value + step * slope[i]);
 
-/** d ln nᵢ/dz. */
-export function gradient(input: ColumnInput, z: number, y: number[]): number[] {
+/** d ln nᵢ/dz, where each gas flows up at a global rate Fᵢ, s⁻¹, if rates are given. */
+export function gradient(
+  input: ColumnInput,
+  z: number,
+  y: number[],
+  rates: readonly number[] = [],
+): number[] {
+  const flux = (i: number) => (rates[i] ?? 0) / (4 * Math.PI * (input.radius + z) ** 2);
   const n = y.map(Math.exp);
   const total = n.reduce((a, b) => a + b, 0);
   const x = n.map((value) => value / total);
@@ -49,7 +55,11 @@ export function gradient(input: ColumnInput, z: number, y: number[]): number[] {
       if (j !== i) row[i] += (x[j] * eddy * total) / b(i, j);
     });
     const weight = ((gas.mass - meanMass) * gravity) / (boltzmann.value * temperature);
-    row.push(-x[i] * weight - x[i] * (gas.thermalDiffusionFactor - meanFactor) * lapse);
+    let drag = 0;
+    gases.forEach((_, j) => {
+      if (j !== i) drag += (x[i] * flux(j) - x[j] * flux(i)) / b(i, j);
+    });
+    row.push(-x[i] * weight - x[i] * (gas.thermalDiffusionFactor - meanFactor) * lapse + drag);
     return row;
   });
   const dx = eliminate(rows);

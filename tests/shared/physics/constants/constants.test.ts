@@ -5,6 +5,7 @@ import {
   avogadro,
   boltzmann,
   codata2022,
+  electronMass,
   elementaryCharge,
   gravitationalConstant,
 } from "../../../../shared/physics/constants/codata2022";
@@ -43,6 +44,11 @@ describe("constants", () => {
     expect(julianYear.value).toBe(365.25 * 86400);
     for (const { uncertainty } of [boltzmann, avogadro, elementaryCharge, ...iau])
       expect(uncertainty).toBe(0);
+  });
+
+  it("give the electron its share of the dalton", () => {
+    // Relative atomic mass of the electron, CODATA 2022, from memory: 5.485799090441e-4.
+    expect(electronMass.value / atomicMass.value).toBeCloseToRelative(5.485799090441e-4, 1e-9);
   });
 
   it("agree with the molar mass constant", () => {

@@ -1,7 +1,7 @@
 import { describe, expect, it } from "vitest";
 
 import { solveColumn } from "../../../../shared/physics/column/solveColumn";
-import type { Column, ColumnInput } from "../../../../shared/physics/types";
+import type { Column, ColumnInput, ColumnLevel, ExobaseCriterion } from "../../../../shared/physics/types";
 import "../../../toBeCloseToRelative";
 import { altitudesBetween, baseGravity, geopotential, sampleColumn } from "../column/sampleColumns";
 
@@ -182,5 +182,111 @@ describe("a column without an exobase", () => {
       expect(column.levelAt(altitude).knudsen).toBeGreaterThan(0);
     }
     expect(column.exobase.found || column.exobase.message).toMatch(/^The .*\.$/);
+  });
+});
+
+describe("an exobase by another criterion", () => {
+  const column = solveColumn(sampleColumn());
+  const by = (criterion: ExobaseCriterion, of = column) => {
+    const outcome = of.exobaseBy(criterion);
+    if (!outcome.found) throw new Error(`No exobase: ${outcome.message}`);
+    return outcome;
+  };
+  const area = (of: Column, i: number, j: number) =>
+    Math.PI * ((of.input.gases[i].collisionDiameter + of.input.gases[j].collisionDiameter) / 2) ** 2;
+
+  it("is the column's own by the bulk criterion", () => {
+    expect(column.exobaseBy({ kind: "bulk" })).toBe(column.exobase);
+  });
+
+  it("lies lower without √2, where l/H of the bulk is 1/√2", () => {
+    const simple = by({ kind: "simple" });
+    expect(simple.level.knudsen).toBeCloseToRelative(1 / Math.SQRT2, 1e-12);
+    expect(simple.level.altitude).toBeLessThan(foundIn(column).level.altitude);
+  });
+
+  it.each(["CO2", "O", "H"])(
+    "is where the mean free path of %s in the mixture is its scale height",
+    (formula) => {
+      const { level } = by({ kind: "gas", formula });
+      const gas = column.input.gases.findIndex((candidate) => candidate.formula === formula);
+      const collisions = column.input.gases.reduce(
+        (sum, { mass }, j) =>
+          sum +
+          level.numberDensities[j] *
+            area(column, gas, j) *
+            Math.sqrt(1 + column.input.gases[gas].mass / mass),
+        0,
+      );
+      expect(1 / collisions).toBeCloseToRelative(level.scaleHeights[gas], 1e-12);
+    },
+  );
+
+  it("lies higher for a lighter gas", () => {
+    const altitudes = ["CO2", "O2", "H2", "H"].map((formula) => by({ kind: "gas", formula }).level.altitude);
+    expect(altitudes).toEqual([...altitudes].sort((a, b) => a - b));
+  });
+
+  it("is where a particle on its way out collides once, by unit depth", () => {
+    const cold = solveColumn(
+      sampleColumn({ fractions: { CO2: 0.9, O: 0.1 }, temperature: { kind: "constant", temperature: 150 } }),
+    );
+    const { level } = by({ kind: "unit_depth" }, cold);
+    // Isothermal and without mixing above: the depth by Simpson's rule along the column itself.
+    const [parts, reach] = [2000, level.altitude + 900e3];
+    const high = solveColumn({ ...cold.input, eddy: { kind: "none" }, top: 1300e3, ...startAt(level) });
+    const step = (reach - level.altitude) / parts;
+    let depth = 0;
+    for (let k = 0; k <= parts; k += 1) {
+      const weight = k === 0 || k === parts ? 1 : k % 2 === 1 ? 4 : 2;
+      const { numberDensities } = high.levelAt(level.altitude + k * step);
+      depth += (weight * step * numberDensities.reduce((sum, n, i) => sum + n * area(cold, i, i), 0)) / 3;
+    }
+    expect(depth).toBeCloseToRelative(1, 1e-5);
+
+    function startAt({ altitude, numberDensity, moleFractions }: ColumnLevel): Partial<ColumnInput> {
+      const gases = cold.input.gases.map((gas, i) => ({ ...gas, moleFraction: moleFractions[i] }));
+      return { gases, baseAltitude: altitude, baseNumberDensity: numberDensity };
+    }
+  });
+
+  it("has the band of the bulk all the same", () => {
+    for (const criterion of [{ kind: "gas", formula: "CO2" }, { kind: "unit_depth" }] as ExobaseCriterion[]) {
+      const { lower, upper } = by(criterion);
+      expect([lower, upper]).toEqual([foundIn(column).lower, foundIn(column).upper]);
+    }
+  });
+
+  it("is found above Kn = 10 as well, where the criterion has it there", () => {
+    const pure = solveColumn(
+      sampleColumn({
+        fractions: { CO2: 1, H: 1e-20 },
+        temperature: { kind: "constant", temperature: 200 },
+        eddy: { kind: "none" },
+      }),
+    );
+    const { level } = by({ kind: "gas", formula: "H" }, pure);
+    // l_H/H_H over l/H: √2 (2·3.8/(3.8 + 2.05))² / √(1 + 1/44) · 1/44
+    const ratio = (Math.SQRT2 * (7.6 / 5.85) ** 2) / Math.sqrt(45 / 44) / 44;
+    expect(level.knudsen).toBeCloseToRelative(1 / ratio, 1e-9);
+    expect(level.knudsen).toBeGreaterThan(10);
+  });
+
+  it("is told by its name where there is none", () => {
+    const low = solveColumn(sampleColumn({ top: 150e3 })).exobaseBy({ kind: "gas", formula: "H" });
+    expect(low).toMatchObject({ found: false, reason: "top_below_exobase" });
+    expect(low.found || low.message).toMatch(
+      /^The mean free path of H over its scale height is still below 1/,
+    );
+    const deep = solveColumn(sampleColumn({ baseNumberDensity: 1e12 })).exobaseBy({ kind: "unit_depth" });
+    expect(deep).toMatchObject({ found: false, reason: "base_above_exobase" });
+    expect(deep.found || deep.message).toMatch(/^The inverse of the collisional depth/);
+  });
+
+  it("leaves the column as it was", () => {
+    const fresh = solveColumn(sampleColumn());
+    const before = fresh.levelAt(fresh.topAltitude);
+    fresh.exobaseBy({ kind: "gas", formula: "H" });
+    expect(fresh.levelAt(fresh.topAltitude)).toEqual(before);
   });
 });

@@ -1,3 +1,4 @@
+import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
@@ -55,9 +56,26 @@ describe("findRoot", () => {
     expect(outcome.converged && outcome.root).toBeCloseTo(1 / 3, 10);
   });
 
+  it("closes in on a jump however lopsided, and on a root however flat", () => {
+    const share = fc.double({ min: 0.001, max: 0.999, noNaN: true });
+    const exponent = fc.integer({ min: -30, max: 30 });
+    const flatness = fc.constantFrom(1, 3, 9, 31);
+    fc.assert(
+      fc.property(share, exponent, flatness, (root, ratio, flat) => {
+        const jump = (x: number) => (x < root ? -1 : 10 ** ratio);
+        const curve = (x: number) => (x - root) ** flat * (x < root ? 1 : 10 ** ratio);
+        for (const f of [jump, curve]) {
+          const outcome = findRoot(f, 0, 1, { value: 0, bracket: 1e-12 });
+          expect(outcome.converged && outcome.root).toBeCloseTo(root, 8);
+        }
+      }),
+      { seed: 11, numRuns: 2000 },
+    );
+  });
+
   it("says that it did not get there", () => {
-    const outcome = findRoot((x) => (x < 1e-9 ? -1 : 2), 0, 1e300, { value: 0, bracket: 0 });
-    expect(outcome).toMatchObject({ converged: false, reason: "too_many_iterations", iterations: 100 });
+    const outcome = findRoot((x) => (x < 1e-300 ? -1 : 2), 0, 1e300, { value: 0, bracket: 0 });
+    expect(outcome).toMatchObject({ converged: false, reason: "too_many_iterations", iterations: 416 });
   });
 });
 

@@ -1,0 +1,12 @@
+/** Entry of a thread that computes parts of a task: a document and its task first, then ranges in, parts out. */
+import { parentPort, workerData } from "node:worker_threads";
+import type { NotebookDocument } from "../../shared/notebook/document";
+import { taskRunner } from "../../shared/notebook/runTask";
+import type { LongTask } from "../../shared/notebook/tasks";
+
+const { document, task } = workerData as { document: NotebookDocument; task: LongTask };
+const run = taskRunner(document, task);
+
+parentPort?.on("message", ({ from, to }: { from: number; to: number }) => {
+  parentPort?.postMessage(run(from, to));
+});

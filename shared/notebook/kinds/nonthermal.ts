@@ -1,0 +1,83 @@
+import type { CellSchema } from "./cellSchema";
+
+/** Atoms that recombination above the exobase sets free, and ions that the stellar wind picks up. */
+export const nonthermalSchema: CellSchema = {
+  kind: "nonthermal",
+  group: "answer",
+  description: "fast atoms of recombination, and pickup ions",
+  naming: "name",
+  takesAnyKey: false,
+  entries: [
+    {
+      key: "escape",
+      needed: true,
+      form: "cell",
+      dimension: null,
+      names: "escape",
+      description: "The exobase that the atoms leave from: the name of an escape cell above.",
+      default: null,
+      example: "escape = leak",
+    },
+    {
+      key: "ion",
+      needed: true,
+      form: "ion",
+      dimension: null,
+      description: "The ion, by its formula with a plus sign.",
+      default: null,
+      example: "ion = O2+",
+    },
+    {
+      key: "ion_density",
+      needed: true,
+      form: "samples",
+      dimension: "numberDensity",
+      bounds: { above: 0 },
+      description:
+        "Number density of the ion above the exobase: points(…), or one value up to the column's top.",
+      default: null,
+      example: "ion_density = points(200 km: 8e3 /cm^3, 300 km: 900 /cm^3, 450 km: 60 /cm^3)",
+    },
+    {
+      key: "electron_density",
+      needed: true,
+      form: "samples",
+      dimension: "numberDensity",
+      bounds: { above: 0 },
+      description: "Number density of electrons: points(…), or one value up to the column's top.",
+      default: null,
+      example: "electron_density = points(200 km: 1e4 /cm^3, 300 km: 1.5e3 /cm^3, 450 km: 200 /cm^3)",
+    },
+    {
+      key: "electron_temperature",
+      needed: true,
+      form: "samples",
+      dimension: "temperature",
+      bounds: { above: 0 },
+      description: "Temperature of the electrons: one value, or points(…).",
+      default: null,
+      example: "electron_temperature = points(200 km: 1200 K, 300 km: 2400 K)",
+    },
+    {
+      key: "flow_speed",
+      needed: false,
+      form: "quantity",
+      dimension: "speed",
+      bounds: { above: 0 },
+      description: "Speed of the wind that picks the ion up; gives its largest energy.",
+      default: null,
+      example: "flow_speed = 400 km/s",
+    },
+    {
+      key: "magnetic_field",
+      needed: false,
+      form: "quantity",
+      dimension: "magneticField",
+      bounds: { above: 0 },
+      description:
+        "Magnetic field in that wind, at right angles to it; gives the gyroradius with flow_speed.",
+      default: null,
+      example: "magnetic_field = 3 nT",
+    },
+  ],
+};

@@ -1,0 +1,4 @@
+import { expose } from "comlink";
+import { createTaskService } from "./taskService";
+
+expose(createTaskService());

@@ -1,0 +1,67 @@
+import { wrap } from "comlink";
+import type { NotebookDocument } from "../../../../shared/notebook/document";
+import { poolTask, type TaskProgress } from "../../../../shared/notebook/poolTask";
+import type { LongTask, TaskAnswer } from "../../../../shared/notebook/tasks";
+import type { TaskService } from "./taskService";
+
+/** The service as the pool sees it: every call answers later. */
+export type RemoteTaskService = {
+  [Call in keyof TaskService]: (
+    ...args: Parameters<TaskService[Call]>
+  ) => Promise<ReturnType<TaskService[Call]>>;
+};
+
+interface TaskWatch {
+  onProgress: (progress: TaskProgress) => void;
+  /** Asked between parts, every fifth of a second or so. */
+  isStopped: () => boolean;
+}
+
+export interface TaskPool {
+  /** The answer; partial where it was stopped; null where nothing was done at all. One task after the other. */
+  run(document: NotebookDocument, task: LongTask, watch: TaskWatch): Promise<TaskAnswer | null>;
+}
+
+/** Workers beside the page and its evaluation. */
+const mostWorkers = 8;
+
+export function createTaskPool(startWorker: () => RemoteTaskService, size: number): TaskPool {
+  let services: RemoteTaskService[] | null = null;
+  let last: Promise<unknown> = Promise.resolve();
+
+  async function run(
+    document: NotebookDocument,
+    task: LongTask,
+    { onProgress, isStopped }: TaskWatch,
+  ): Promise<TaskAnswer | null> {
+    if (isStopped()) return null;
+    services ??= Array.from({ length: size }, startWorker);
+    await Promise.all(services.map((service) => service.open(document, task)));
+    const now = () => performance.now();
+    const parts = await poolTask({ task, workers: services, now, onProgress, isStopped });
+    return parts.length === 0 ? null : services[0]!.finish(document, task, parts);
+  }
+
+  return {
+    run(document, task, watch) {
+      const answer = last.then(() => run(document, task, watch));
+      last = answer.catch(() => undefined);
+      return answer;
+    },
+  };
+}
+
+let running: TaskPool | null = null;
+
+/** The one pool of this page; its workers start when first needed. */
+export function workerTaskPool(): TaskPool {
+  const size = Math.min(mostWorkers, Math.max(1, navigator.hardwareConcurrency - 1));
+  running ??= createTaskPool(startTaskWorker, size);
+  return running;
+}
+
+function startTaskWorker(): RemoteTaskService {
+  return wrap<TaskService>(
+    new Worker(new URL("./task.worker.ts", import.meta.url), { type: "module", name: "task" }),
+  );
+}
