@@ -1,10 +1,9 @@
 import { useRef } from "react";
 import type { CellEvaluation, Note } from "../../../../shared/notebook/result";
-import { EscapeTable } from "../../../ui/tables/EscapeTable";
-import { LevelsTable } from "../../../ui/tables/LevelsTable";
 import { ValueList } from "../../../ui/tables/ValueList";
+import type { AnswerProps } from "./answers/answerProps";
+import { answers } from "./answers/answers";
 import type { CellViewProps } from "./CellView";
-import { ColumnFigures } from "./ColumnFigures";
 import { Computing } from "./Computing";
 
 interface CellResultsProps extends CellViewProps {
@@ -44,40 +43,8 @@ function isAnswered({ result }: CellEvaluation): boolean {
   );
 }
 
-function Answer({
-  evaluation,
-  columnGases,
-  notes,
-  unitSystem,
-  figureNumber,
-  tableNumber,
-  isNear,
-  onRemedy,
-}: CellResultsProps & { evaluation: CellEvaluation }) {
-  const { result, gases } = evaluation;
-  switch (result.kind) {
-    case "column":
-      return (
-        <>
-          {isNear && <ColumnFigures evaluation={evaluation} unitSystem={unitSystem} number={figureNumber} />}
-          {(result.tables.levels?.length ?? 0) > 0 && (
-            <LevelsTable result={result} gases={gases} unitSystem={unitSystem} number={tableNumber} />
-          )}
-        </>
-      );
-    case "escape":
-      return (
-        <EscapeTable
-          result={result}
-          gases={gases}
-          columnGases={columnGases}
-          unitSystem={unitSystem}
-          number={tableNumber}
-          notes={notes}
-          onRemedy={onRemedy}
-        />
-      );
-    default:
-      return <ValueList result={result} unitSystem={unitSystem} />;
-  }
+function Answer(props: AnswerProps) {
+  const { result } = props.evaluation;
+  const OwnAnswer = answers[result.kind];
+  return OwnAnswer ? <OwnAnswer {...props} /> : <ValueList result={result} unitSystem={props.unitSystem} />;
 }

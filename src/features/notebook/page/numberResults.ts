@@ -1,5 +1,6 @@
 import type { NotebookDocument } from "../../../../shared/notebook/document";
 import type { CellEvaluation } from "../../../../shared/notebook/result";
+import { countResults } from "../cells/answers/answers";
 
 /** Numbers of a cell's first figure and first table. */
 export interface ResultNumbers {
@@ -7,7 +8,7 @@ export interface ResultNumbers {
   table: number;
 }
 
-/** A column has two figures, and a table where levels were asked for; an escape cell has one table. */
+/** Figures and tables are numbered down the notebook, each in a row of its own. */
 export function numberResults(
   document: NotebookDocument,
   answers: ReadonlyMap<string, CellEvaluation> | undefined,
@@ -17,9 +18,9 @@ export function numberResults(
   let table = 1;
   for (const cell of document.cells) {
     numbers.set(cell.id, { figure, table });
-    const tables = answers?.get(cell.id)?.result.tables;
-    if (cell.kind === "column") figure += 2;
-    if (cell.kind === "escape" || (tables?.levels?.length ?? 0) > 0) table += 1;
+    const own = countResults({ kind: cell.kind, tables: answers?.get(cell.id)?.result.tables ?? {} });
+    figure += own.figures;
+    table += own.tables;
   }
   return numbers;
 }

@@ -1,0 +1,20 @@
+import type { CellEvaluation, Note } from "../../../../../shared/notebook/result";
+import type { UnitSystem } from "../../../../lib/format";
+import type { LetteredNote } from "../../../../ui/tables/tableProps";
+
+/** What the answer of a cell of any kind is drawn from. */
+export interface AnswerProps {
+  /** The last answer that there was. */
+  evaluation: CellEvaluation;
+  /** Gases of the column that an escape cell rests on. */
+  columnGases: readonly string[] | undefined;
+  notes: readonly LetteredNote[];
+  unitSystem: UnitSystem;
+  /** Numbers of the first figure and of the first table of this cell. */
+  figureNumber: number;
+  tableNumber: number;
+  /** Figures are made when the cell first comes near the screen. */
+  isNear: boolean;
+  /** null where the notebook can only be read. */
+  onRemedy: ((note: Note) => void) | undefined;
+}
