@@ -5,6 +5,8 @@ import { promisify } from "node:util";
 import type { Browser } from "playwright-core";
 import { afterAll, beforeAll, expect, it } from "vitest";
 import type { ResultDocument } from "../../shared/notebook/result";
+import type { FigureDrawing } from "../../src/ui/plots/exportFigure";
+import { curvePath } from "../../src/ui/plots/moveCurves";
 import { launchBrowser, openPage, signInAs, startServer, type RunningServer } from "./harness";
 import {
   entryLine,
@@ -61,6 +63,33 @@ it("A researcher changes the exospheric temperature, sees every answer move, and
   expect(await entryLine(page, "T_quiet").innerText()).toContain("520 ± 45 K");
   expect(foreign).toEqual([]);
   expect(complaints).toEqual([]);
+  await context.close();
+});
+
+it("Curves that follow a key are written where the figure library draws them", async () => {
+  const { page, context } = await openPage(browser);
+  await signInAs(page, server.origin, "Tamsin Orevale");
+  await openNotebook(page, ilmara);
+  await seeFirstFigure(page);
+  const drawn = await page
+    .locator(".js-plotly-plot")
+    .first()
+    .evaluate((graph) => {
+      const { data, layout } = graph as unknown as FigureDrawing;
+      const paths = [...graph.querySelectorAll(".scatterlayer .js-line")].map((path) =>
+        path.getAttribute("d")!,
+      );
+      return { data, layout, paths };
+    });
+  const ends = (path: string): number[] => {
+    const points = path.slice(1).split("L");
+    return [points[0]!, points.at(-1)!].flatMap((point) => point.split(",").map(Number));
+  };
+  expect(drawn.paths.length).toBeGreaterThan(8);
+  drawn.paths.forEach((path, i) => {
+    const written = ends(curvePath(drawn.data[i] as Parameters<typeof curvePath>[0], drawn.layout));
+    ends(path).forEach((pixel, k) => expect(Math.abs(pixel - written[k]!)).toBeLessThan(0.6));
+  });
   await context.close();
 });
 

@@ -68,7 +68,7 @@ async function scrollTo(page: Page, part: Locator): Promise<void> {
 
 /** Scrolls to the first figure, which is drawn only where it is seen. */
 export async function seeFirstFigure(page: Page): Promise<void> {
-  await page.locator("figure").first().scrollIntoViewIfNeeded({ timeout: 20_000 });
+  await scrollTo(page, page.locator("figure").first());
   await page.locator(".js-plotly-plot").first().waitFor({ timeout: 30_000 });
 }
 

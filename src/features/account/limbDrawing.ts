@@ -25,7 +25,7 @@ export interface Limb {
 }
 
 /** Exobase of Ilmara's dayside, and the altitude of Kn = 0.1 below it, in km. */
-export const exobase = 246;
+export const exobase = 245;
 const firstFree = 188;
 const dotsTop = 640;
 

@@ -1,3 +1,4 @@
+import { memo, useDeferredValue } from "react";
 import { displayScale, formatNumber, kilometreScale, type UnitSystem } from "../../lib/format";
 import { plainText } from "../../lib/richText";
 import type { CsvColumn } from "./figureCsv";
@@ -13,8 +14,12 @@ const rowsTold = 12;
 
 const unitOf = (head: string): string => /\(([^)]*)\)/.exec(head)?.[1] ?? "1";
 
-/** The curves as a short table, for those who do not see the figure. */
-export function FigureTable({ label, columns, unitSystem }: FigureTableProps) {
+/** The curves as a short table, for those who do not see the figure; it comes after what is seen. */
+export function FigureTable(props: FigureTableProps) {
+  return <Table {...useDeferredValue(props)} />;
+}
+
+const Table = memo(function Table({ label, columns, unitSystem }: FigureTableProps) {
   const count = columns[0]?.values.length ?? 0;
   const told = Math.min(rowsTold, count);
   const rows = Array.from({ length: told }, (_, i) => Math.round((i * (count - 1)) / Math.max(1, told - 1)));
@@ -47,4 +52,4 @@ export function FigureTable({ label, columns, unitSystem }: FigureTableProps) {
       </table>
     </div>
   );
-}
+});

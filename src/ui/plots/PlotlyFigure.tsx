@@ -1,12 +1,12 @@
 import type { Layout } from "plotly.js";
-import { lazy, Suspense, useEffect, useState } from "react";
+import { lazy, Suspense, useEffect, useMemo, useState } from "react";
 import { fetchPart } from "../../lib/fetchPart";
 import { Message } from "../Message";
 import { PartBoundary } from "../PartBoundary";
 import type { FigureDrawing } from "./exportFigure";
 import type { FigureZoom } from "./figureLayout";
 import { isPagePrinting } from "./useFigureInks";
-import { useInTurn } from "./useInTurn";
+import { useDrawn } from "./useDrawn";
 
 /** The figure library is large: it is fetched once, after the page has been painted. */
 const Plot = lazy(async () => {
@@ -58,11 +58,19 @@ function zoomOf(event: RelayoutEvent, layout: Partial<Layout>): FigureZoom | nul
   return isZoom ? { x: range("xaxis"), y: range("yaxis") } : null;
 }
 
+/** A copy for the figure library, which writes into what it draws. */
+function useOwn({ data, layout }: FigureDrawing): FigureDrawing {
+  return useMemo(
+    () => ({ data: data.map((trace) => ({ ...trace })), layout: { ...layout } }),
+    [data, layout],
+  );
+}
+
 /** Drag to draw closer, double press to go back; touch scrolls the page instead. */
 export function PlotlyFigure({ plot, onZoom, onNamePress }: PlotlyFigureProps) {
   const isPainted = useAfterFirstPaint();
-  const inTurn = useInTurn(plot);
-  const { data, layout } = isPagePrinting() ? plot : inTurn;
+  const { drawn, holdGraph } = useDrawn(plot);
+  const { data, layout } = useOwn(isPagePrinting() ? plot : drawn);
   const place = <div style={{ width: layout.width, height: layout.height }} />;
   if (!isPainted) return place;
   const unfetched = (
@@ -80,6 +88,7 @@ export function PlotlyFigure({ plot, onZoom, onNamePress }: PlotlyFigureProps) {
           layout={layout}
           config={config}
           style={{ width: layout.width, height: layout.height }}
+          onInitialized={holdGraph}
           onRelayout={(event: RelayoutEvent) => {
             const zoom = zoomOf(event, layout);
             if (zoom) onZoom(zoom);

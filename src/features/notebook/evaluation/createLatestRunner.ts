@@ -2,6 +2,8 @@ interface LatestRunnerOptions<Input, Output> {
   run: (input: Input) => Promise<Output>;
   onResult: (output: Output, input: Input) => void;
   onFailure: (error: unknown, input: Input) => void;
+  /** How long the work itself took, ms; the whole wait where it is left out. */
+  tookOf?: (output: Output) => number;
   /** Duration of one run, ms, from which the next waits until inputs have rested. */
   slowFrom?: number;
   /** That rest, ms. */
@@ -16,6 +18,7 @@ export function createLatestRunner<Input, Output>({
   run,
   onResult,
   onFailure,
+  tookOf,
   slowFrom = 100,
   rest = 600,
 }: LatestRunnerOptions<Input, Output>) {
@@ -32,13 +35,15 @@ export function createLatestRunner<Input, Output>({
     next = null;
     isRunning = true;
     const begun = performance.now();
+    let took: number | undefined;
     try {
       const output = await run(input);
+      took = tookOf?.(output);
       if (!isStopped) onResult(output, input);
     } catch (error) {
       if (!isStopped) onFailure(error, input);
     }
-    wasSlow = performance.now() - begun > slowFrom;
+    wasSlow = (took ?? performance.now() - begun) > slowFrom;
     isRunning = false;
     if (next !== null) schedule();
   }

@@ -1,4 +1,4 @@
-import { useCallback, useEffect, useMemo, useRef, useState } from "react";
+import { useCallback, useEffect, useLayoutEffect, useMemo, useRef, useState } from "react";
 import type { NotebookDocument } from "../../../../shared/notebook/document";
 import type { CellEvaluation } from "../../../../shared/notebook/result";
 import type { HeadlineItem } from "../../../../shared/notebook/summary";
@@ -13,8 +13,9 @@ const lateAfter = 100;
 
 interface Evaluated {
   engine: string;
-  /** The text that was computed. */
+  /** What was computed, and the text of each of its cells by id. */
   document: NotebookDocument;
+  texts: ReadonlyMap<string, string>;
   cells: ReadonlyMap<string, CellEvaluation>;
   headline: HeadlineItem[];
   /** Sweeps and spreads that are still to be computed; see `useLongTasks`. */
@@ -46,7 +47,8 @@ export function useEvaluation(
     null,
   );
 
-  useEffect(
+  // Both before the page is painted, so that the worker computes while it is.
+  useLayoutEffect(
     function runEvaluations() {
       const service = evaluator();
       // A fresh memory in the worker for each mount: it sends every cell once, whatever it sent before.
@@ -59,6 +61,8 @@ export function useEvaluation(
           setEvaluated(last);
           setFailure(null);
         },
+        // In the worker: an answer that waited for a busy page was not slow to compute.
+        tookOf: ({ took }) => took,
         onFailure: (error) => setFailure(error instanceof Error ? error.message : String(error)),
       });
       runnerRef.current = runner;
@@ -70,7 +74,7 @@ export function useEvaluation(
     [notebookKey, evaluator],
   );
 
-  useEffect(
+  useLayoutEffect(
     function evaluateText() {
       runnerRef.current?.offer(document);
     },
@@ -106,7 +110,8 @@ function withAnswer(last: Evaluated | null, answer: EvaluationAnswer, document: 
     const evaluation = typeof cell === "string" ? last?.cells.get(cell) : cell;
     if (evaluation) cells.set(evaluation.id, evaluation);
   }
-  return { engine: answer.engine, document, cells, headline: answer.headline, tasks: answer.tasks };
+  const texts = new Map(document.cells.map(({ id, text }) => [id, text]));
+  return { engine: answer.engine, document, texts, cells, headline: answer.headline, tasks: answer.tasks };
 }
 
 /** True once what is written has gone without an answer for a while. */

@@ -1,3 +1,4 @@
+import { useDeferredValue } from "react";
 import type { NotebookDocument } from "../../../../shared/notebook/document";
 import type { DocumentEdit } from "../../../../shared/notebook/editDocument";
 import type { UnitSystem } from "../../../lib/format";
@@ -40,7 +41,9 @@ export function Article({
   commands,
   children,
 }: ArticleProps) {
-  const { evaluated, late, failure } = live;
+  const { late, failure } = live;
+  // Figures follow a key first; what stands round the sheet comes right after them.
+  const evaluated = useDeferredValue(live.evaluated);
   const columnId = useColumnInView(document, evaluated?.cells);
   const strip = columnId === null ? null : (evaluated?.cells.get(columnId)?.strip ?? null);
 

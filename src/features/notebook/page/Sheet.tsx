@@ -1,4 +1,4 @@
-import { Fragment, useCallback, useMemo } from "react";
+import { Fragment, useCallback, useDeferredValue, useMemo } from "react";
 import type { Cell, NotebookDocument } from "../../../../shared/notebook/document";
 import type { CellEvaluation } from "../../../../shared/notebook/result";
 import type { UnitSystem } from "../../../lib/format";
@@ -24,15 +24,13 @@ interface SheetProps {
 
 /** The cells, set like an article, with a caret between each two where another may be put. */
 export function Sheet({ document, live, notesOf, unitSystem, isEditable, newCellId, commands }: SheetProps) {
-  const { evaluated, late } = live;
+  const { late } = live;
+  // Columns, which have the figures, follow a key first; the other cells come right after them.
+  const evaluated = useDeferredValue(live.evaluated);
   const surroundings = useNotebookNames(document, evaluated?.cells);
   const cellIds = useMemo(() => document.cells.map((cell) => cell.id), [document.cells]);
   const { drag, begin } = useCellDrag(cellIds, commands);
   const numbers = useMemo(() => numberResults(document, evaluated?.cells), [document, evaluated]);
-  const readTexts = useMemo(
-    () => new Map(evaluated?.document.cells.map((cell) => [cell.id, cell.text])),
-    [evaluated],
-  );
   const handleDragStart = useCallback((id: string, event: React.PointerEvent) => begin(id, event), [begin]);
   const columnGases = (evaluation: CellEvaluation | undefined) => gasesOfColumn(evaluation, evaluated?.cells);
 
@@ -42,14 +40,15 @@ export function Sheet({ document, live, notesOf, unitSystem, isEditable, newCell
         <InsertCell index={0} afterId={null} place="at the top" isLast={false} commands={commands} />
       )}
       {document.cells.map((cell, index) => {
-        const evaluation = evaluated?.cells.get(cell.id);
+        const answered = cell.kind === "column" ? live.evaluated : evaluated;
+        const evaluation = answered?.cells.get(cell.id);
         return (
           <Fragment key={cell.id}>
             {drag?.gap === index && <DropLine />}
             <CellView
               cell={cell}
               evaluation={evaluation}
-              readText={readTexts.get(cell.id)}
+              readText={answered?.texts.get(cell.id)}
               columnGases={columnGases(evaluation)}
               notes={notesOf(cell.id)}
               isLate={late.has(cell.id)}

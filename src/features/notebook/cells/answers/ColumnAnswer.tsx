@@ -1,14 +1,17 @@
+import { memo, useDeferredValue } from "react";
 import { LevelsTable } from "../../../../ui/tables/LevelsTable";
 import { ColumnFigures } from "../ColumnFigures";
 import type { AnswerProps } from "./answerProps";
 
+const Levels = memo(LevelsTable);
+
 export function ColumnAnswer({ evaluation, unitSystem, figureNumber, tableNumber, isNear }: AnswerProps) {
-  const { result, gases } = evaluation;
+  const { result, gases } = useDeferredValue(evaluation);
   return (
     <>
       {isNear && <ColumnFigures evaluation={evaluation} unitSystem={unitSystem} number={figureNumber} />}
       {(result.tables.levels?.length ?? 0) > 0 && (
-        <LevelsTable result={result} gases={gases} unitSystem={unitSystem} number={tableNumber} />
+        <Levels result={result} gases={gases} unitSystem={unitSystem} number={tableNumber} />
       )}
     </>
   );
