@@ -25,6 +25,8 @@ export function createLatestRunner<Input, Output>({
   let next: { input: Input } | null = null;
   let isRunning = false;
   let isStopped = false;
+  /** The first run computes everything, by code that no one has run yet: it says nothing of the next. */
+  let isFirst = true;
   let wasSlow = false;
   let timer: ReturnType<typeof setTimeout> | null = null;
 
@@ -43,7 +45,8 @@ export function createLatestRunner<Input, Output>({
     } catch (error) {
       if (!isStopped) onFailure(error, input);
     }
-    wasSlow = (took ?? performance.now() - begun) > slowFrom;
+    wasSlow = !isFirst && (took ?? performance.now() - begun) > slowFrom;
+    isFirst = false;
     isRunning = false;
     if (next !== null) schedule();
   }

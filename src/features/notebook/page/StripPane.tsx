@@ -1,3 +1,4 @@
+import { memo } from "react";
 import type { UnitSystem } from "../../../lib/format";
 import type { Strip } from "../../../../shared/notebook/summary";
 import { AltitudeStrip } from "../../../ui/strip/AltitudeStrip";
@@ -12,7 +13,7 @@ interface StripPaneProps {
 }
 
 /** The altitude strip of the column in view: at the left edge, or lying under the bar where the page is narrow. */
-export function StripPane({ strip, unitSystem, isVoid }: StripPaneProps) {
+export const StripPane = memo(function StripPane({ strip, unitSystem, isVoid }: StripPaneProps) {
   const isLying = useMediaQuery("(max-width: 999.98px)");
   if (!strip) return isLying ? null : <div className="strip-pane" />;
   return (
@@ -29,4 +30,4 @@ export function StripPane({ strip, unitSystem, isVoid }: StripPaneProps) {
       )}
     </aside>
   );
-}
+});

@@ -31,15 +31,40 @@ describe("createLatestRunner", () => {
 
   it("waits for a rest once work has been slow", async () => {
     const { runner, run } = aRunner((input) => (input === "slow" ? 300 : 10));
+    runner.offer("a");
+    await vi.advanceTimersByTimeAsync(10);
     runner.offer("slow");
     await vi.advanceTimersByTimeAsync(300);
     runner.offer("b");
     await vi.advanceTimersByTimeAsync(500);
     runner.offer("c");
     await vi.advanceTimersByTimeAsync(599);
-    expect(run).toHaveBeenCalledTimes(1);
+    expect(run).toHaveBeenCalledTimes(2);
     await vi.advanceTimersByTimeAsync(1);
-    expect(run.mock.calls.flat()).toEqual(["slow", "c"]);
+    expect(run.mock.calls.flat()).toEqual(["a", "slow", "c"]);
+  });
+
+  it("does not take the first run, which computes everything, for slow", async () => {
+    const { runner, run } = aRunner((input) => (input === "first" ? 300 : 10));
+    runner.offer("first");
+    await vi.advanceTimersByTimeAsync(300);
+    runner.offer("b");
+    expect(run.mock.calls.flat()).toEqual(["first", "b"]);
+  });
+
+  it("goes by the time that the work itself took, where it is known", async () => {
+    const run = vi.fn((input: string) => new Promise<string>((done) => setTimeout(() => done(input), 300)));
+    const runner = createLatestRunner<string, string>({
+      run,
+      onResult: () => {},
+      onFailure: () => {},
+      tookOf: () => 5,
+    });
+    for (const input of ["a", "b", "c"]) {
+      runner.offer(input);
+      await vi.advanceTimersByTimeAsync(300);
+    }
+    expect(run.mock.calls.flat()).toEqual(["a", "b", "c"]);
   });
 
   it("goes on after a failure", async () => {
