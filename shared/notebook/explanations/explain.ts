@@ -5,7 +5,14 @@ import { shortCitation } from "../evaluation/shortCitation";
 import { namesIn } from "../evaluation/traceResults";
 import type { CellEvaluation, Note, ResultRow, ResultSpread } from "../result";
 import { conventionSentences, type ExplainedPlace } from "./conventions";
-import { cellNamed, entryOf, explainedNotebook, placeNamed, type ExplainedCell, type ExplainedNotebook } from "./explainedNotebook";
+import {
+  cellNamed,
+  entryOf,
+  explainedNotebook,
+  placeNamed,
+  type ExplainedCell,
+  type ExplainedNotebook,
+} from "./explainedNotebook";
 import { findRecord, withSubject, type FoundRecord } from "./explanations";
 import type { ExplanationRecord } from "./record";
 import {
@@ -18,7 +25,6 @@ import {
   type Origin,
   type PlaceInRow,
 } from "./resolveInput";
-
 
 /** A number of the notebook: a result by its name, or one in a table, by table and column with the row that it is in. */
 export interface ResultPlace {
@@ -96,8 +102,11 @@ function explainResult(
 /** The gas or ion of the whole cell. */
 function subjectOf(cell: ExplainedCell): string | null {
   const ion = entryOf(cell, "ion");
-  if (cell.cell.kind === "nonthermal" && ion) return cell.cell.text.slice(ion.valueRange.from, ion.valueRange.to);
-  return cell.cell.kind === "escape" || cell.cell.kind === "column" ? null : (cell.evaluation.gases[0] ?? null);
+  if (cell.cell.kind === "nonthermal" && ion)
+    return cell.cell.text.slice(ion.valueRange.from, ion.valueRange.to);
+  return cell.cell.kind === "escape" || cell.cell.kind === "column"
+    ? null
+    : (cell.evaluation.gases[0] ?? null);
 }
 
 type NumberParts = Pick<Explanation, "value" | "log10" | "unit" | "spread">;
@@ -141,7 +150,7 @@ function described(
     symbol: isLogarithm ? `\\log_{10} ${record.symbol}` : record.symbol,
     formula,
     inputs: resolved.map(({ input }) => input),
-    origins: distinct(resolved.flatMap(({ origins }) => origins)),
+    origins: elsewhere(distinct(resolved.flatMap(({ origins }) => origins)), cell),
     restsOn: conventionSentences(record.conventions, place),
     holdsFor: record.validity,
     notes: notesOn(record, place),
@@ -157,7 +166,10 @@ function formulaOf({ formula, forms }: ExplanationRecord, cell: ExplainedCell): 
 }
 
 /** Notes of the cell that say whether the result holds here; of those that name a gas, the ones that name its own. */
-function notesOn({ notes: codes = [] }: ExplanationRecord, { cell, gas }: ExplainedPlace): Explanation["notes"] {
+function notesOn(
+  { notes: codes = [] }: ExplanationRecord,
+  { cell, gas }: ExplainedPlace,
+): Explanation["notes"] {
   const { gases, result } = cell.evaluation;
   return result.notes
     .filter(({ code }) => codes.includes(code))
@@ -180,6 +192,11 @@ function distinct(origins: readonly Origin[]): Origin[] {
   return all.filter(
     ({ cellId, name }) => !all.some((other) => other.cellId === cellId && other.name.startsWith(`${name}.`)),
   );
+}
+
+/** That a result comes from its own cell needs no words, but for the entries there. */
+function elsewhere(origins: readonly Origin[], { cell }: ExplainedCell): Origin[] {
+  return origins.filter(({ cellId, name }) => cellId !== cell.id || name !== cell.name);
 }
 
 /** An entry of a `values` cell: what is written, and the values of the names in it. */

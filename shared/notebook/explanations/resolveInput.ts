@@ -1,5 +1,6 @@
 /** Values that went into a result as they acted, and where each comes from. */
 import { findBody, findGas, type HandbookBody } from "../../physics";
+import type { CellKind } from "../document";
 import { shortCitation } from "../evaluation/shortCitation";
 import { namesIn } from "../evaluation/traceResults";
 import type { Entry } from "../language/syntax";
@@ -100,7 +101,7 @@ export function twinOf(values: Readonly<Record<string, ResultValue>>, name: stri
   return typeof twin === "number" ? twin : null;
 }
 
-/** A result, with the entry of the same name that states it, if one does. */
+/** A result, with the entry that states it, if one does; else with what its cell is made of. */
 function fromResult(
   notebook: ExplainedNotebook,
   at: ExplainedCell,
@@ -114,20 +115,31 @@ function fromResult(
     typeof value === "string"
       ? textInput(described, name, value.replace(/_/g, " "))
       : { ...numberInput(described, name, value, unit), log10: twinOf(values, name) };
-  const stated = statingEntry(at, name);
-  const written = stated ? fromEntry(notebook, at, described, stated) : null;
-  const origins = written?.origins ?? [{ cellId: at.cell.id, name: at.cell.name, text: null, remark: null }];
-  return { input, origins };
+  return { input, origins: statedBy(notebook, at, described, name)?.origins ?? originsOfCell(notebook, at) };
 }
 
-/** Key of the entry that a result of a body or the base of a column repeats, or that gives it by the handbook. */
-function statingEntry(at: ExplainedCell, name: string): string | null {
-  const has = (key: string) => entryOf(at, key) !== undefined;
-  if (at.cell.kind === "column") return name === "base.altitude" ? "base" : null;
-  if (at.cell.kind !== "body") return null;
-  if (name === "mass" || name === "gm") return ["mass", "gm", "like"].find(has) ?? null;
-  if (name === "radius") return ["radius", "like"].find(has) ?? null;
-  return name === "xuv_flux" && has(name) ? name : null;
+/** The entry that a result of a body or the base of a column repeats, or the handbook. */
+function statedBy(
+  notebook: ExplainedNotebook,
+  at: ExplainedCell,
+  described: Described,
+  name: string,
+): ResolvedInput | null {
+  const keys = statingKeys[at.cell.kind]?.[name] ?? [];
+  const written = keys.find((key) => entryOf(at, key));
+  if (written !== undefined) return fromEntry(notebook, at, described, written);
+  return fromHandbookBody(at, described, name);
+}
+
+const statingKeys: Readonly<Partial<Record<CellKind, Readonly<Record<string, readonly string[]>>>>> = {
+  body: { mass: ["mass", "gm"], gm: ["mass", "gm"], radius: ["radius"], xuv_flux: ["xuv_flux"] },
+  column: { "base.altitude": ["base"] },
+};
+
+/** The cell itself and those that it uses: a result of it comes from all of them. */
+export function originsOfCell(notebook: ExplainedNotebook, at: ExplainedCell): Origin[] {
+  const used = at.evaluation.uses.flatMap((path) => cellNamed(notebook, path) ?? []);
+  return [at, ...used].map(({ cell }) => ({ cellId: cell.id, name: cell.name, text: null, remark: null }));
 }
 
 function fromEntry(
@@ -163,7 +175,7 @@ function writtenInput(
   }
   const understood = at.evaluation.understood.find(({ entry }) => entry === written.key)?.text;
   const text = shortened(entryText(at, written));
-  return textInput(described, written.key, understood === undefined ? text : `${text}, ${understood}`);
+  return textInput(described, written.key, understood === undefined ? text : `${text} (${understood})`);
 }
 
 /** Long lists are not set out in full. */
@@ -218,7 +230,8 @@ function byDefault(
 
 /** Entries of a body that the handbook knows, by their keys there. */
 const handbookKeys: Readonly<Record<string, { key: keyof HandbookBody["sources"]; unit: string }>> = {
-  like: { key: "gravitationalParameter", unit: "m^3 s^-2" },
+  gm: { key: "gravitationalParameter", unit: "m^3 s^-2" },
+  mass: { key: "gravitationalParameter", unit: "m^3 s^-2" },
   radius: { key: "radius", unit: "m" },
   star_distance: { key: "starDistance", unit: "m" },
   star_mass: { key: "starMass", unit: "kg" },
@@ -258,7 +271,7 @@ function gasMass(notebook: ExplainedNotebook, described: Described, formula: str
 }
 
 function fromRow(
-  { row, cell, table }: PlaceInRow,
+  { notebook, row, cell, table }: PlaceInRow,
   described: Described,
   column: string,
 ): ResolvedInput | null {
@@ -269,7 +282,7 @@ function fromRow(
     typeof value === "string"
       ? textInput(described, column, value)
       : numberInput(described, column, value, unit);
-  return { input, origins: [{ cellId: cell.cell.id, name: cell.cell.name, text: null, remark: null }] };
+  return { input, origins: originsOfCell(notebook, cell) };
 }
 
 /** Units of the columns of tables, by table and by the last word of the column. */
