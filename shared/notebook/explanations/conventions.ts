@@ -1,6 +1,12 @@
 /** What a result rests on besides its formula: a choice of the notebook, or an assumption of the model, in a sentence. */
 import { waterPerParticle } from "../../physics";
-import { entryOf, entryText, relatedCell, type ExplainedCell, type ExplainedNotebook } from "./explainedNotebook";
+import {
+  entryOf,
+  entryText,
+  relatedCell,
+  type ExplainedCell,
+  type ExplainedNotebook,
+} from "./explainedNotebook";
 
 /** The result that is explained. */
 export interface ExplainedPlace {
@@ -34,7 +40,9 @@ function criterion(place: ExplainedPlace): string | null {
     word === "gas"
       ? `where the mean free path of ${gas ? entryText(escape, gas) : "one gas"} is the scale height of that gas`
       : criteria[word];
-  return where === undefined ? null : `Exobase ${where} (*criterion = ${word}*${byDefault(escape, "criterion")}).`;
+  return where === undefined
+    ? null
+    : `Exobase ${where} (*criterion = ${word}*${byDefault(escape, "criterion")}).`;
 }
 
 function coupling(place: ExplainedPlace): string | null {
@@ -51,7 +59,7 @@ function coupling(place: ExplainedPlace): string | null {
 function correction(place: ExplainedPlace): string | null {
   const escape = related(place, "escape");
   const written = escape && entryOf(escape, "correction");
-  if (!escape || !written) return "No factor on the Jeans rate.";
+  if (!escape || !written) return "No factor on the Jeans rate, c = 1.";
   return `Rates with the factors of *correction = ${entryText(escape, written)}*; a gas that is not named has none.`;
 }
 
@@ -77,7 +85,9 @@ function eddyMixing(place: ExplainedPlace): string | null {
 function limitLevel({ cell, gas }: ExplainedPlace): string {
   const atBase = cell.evaluation.result.notes.find(({ code }) => code === "limits_at_base");
   const isAtBase = gas !== null && (atBase?.message.split(/[^A-Za-z0-9]+/).includes(gas) ?? false);
-  const level = isAtBase ? "the base of the column, for want of a homopause" : `the homopause of ${gas ?? "the gas"}`;
+  const level = isAtBase
+    ? "the base of the column, for want of a homopause"
+    : `the homopause of ${gas ?? "the gas"}`;
   return `Taken at ${level}, and referred to the area of the exobase.`;
 }
 
@@ -93,7 +103,8 @@ function satellites({ cell }: ExplainedPlace): string {
 }
 
 function xuvLaw({ cell }: ExplainedPlace): string {
-  if (entryOf(cell, "history")) return "XUV light by the history that is written, as a power between its points.";
+  if (entryOf(cell, "history"))
+    return "XUV light by the history that is written, as a power between its points.";
   const { defaults } = cell.evaluation;
   const standard = defaults.find(({ key }) => key === "xuv_exponent");
   return standard

@@ -22,14 +22,15 @@ const level = {
 
 const jeans = {
   sources: ["Jeans1925", "ChamberlainHunten1987"],
-  validity: `Maxwellian gases, as long as λ of the mean mass is ${escapeRegimeBounds.jeans} or more; down to ${escapeRegimeBounds.jeans_estimate} it is an estimate, from ${escapeRegimeBounds.transition} to ${escapeRegimeBounds.jeans_estimate} the order of magnitude. A gas with λ below ${looselyBound} leaves faster or slower by tens of percent; one whose drift passes ${largestDrift} of its thermal speed is no longer near rest.`,
+  validity: `gases near rest: λ of the mean mass ${escapeRegimeBounds.jeans} or more, down to ${escapeRegimeBounds.jeans_estimate} as an estimate, down to ${escapeRegimeBounds.transition} in order of magnitude; λ of the gas itself above ${looselyBound}, its drift below ${largestDrift} of its thermal speed.`,
   notes: ["jeans_estimate", "escape_transition", "escape_wind", "jeans_correction_range", "fast_drift"],
 } as const;
 
 const diffusion = {
   sources: ["Hunten1973", "Blanc1908"],
   conventions: ["limitLevel", "eddyMixing"],
-  validity: "a light trace gas that diffuses up through the rest, in a column that does not change with time.",
+  validity:
+    "a light trace gas that diffuses up through the rest, in a column that does not change with time.",
   notes: ["above_diffusion_limit", "supply_limited", "estimated_collisions", "limits_at_base"],
 } as const;
 
@@ -254,7 +255,8 @@ const gasExplanations: readonly ExplanationRecord[] = [
     name: "GAS.jeans_flux",
     words: "Jeans flux of GAS",
     symbol: "\\Phi",
-    formula: "\\Phi = n_\\mathrm{c} w = \\frac{n_\\mathrm{c} v_\\mathrm{p}}{2\\sqrt\\pi}\\,(1 + \\lambda)\\, e^{-\\lambda}",
+    formula:
+      "\\Phi = n_\\mathrm{c} w = \\frac{n_\\mathrm{c} v_\\mathrm{p}}{2\\sqrt\\pi}\\,(1 + \\lambda)\\, e^{-\\lambda}",
     with: [
       result("n_\\mathrm{c}", "number density at the exobase", "GAS.number_density"),
       result("v_\\mathrm{p}", "thermal speed", "GAS.thermal_speed"),
@@ -313,7 +315,8 @@ const gasExplanations: readonly ExplanationRecord[] = [
     name: "GAS.supply_fraction",
     words: "Rate of GAS over what diffusion can supply",
     symbol: "F / F_\\mathrm{lim}",
-    formula: "\\frac{F}{F_\\mathrm{lim}}, \\qquad F_\\mathrm{lim} = 4\\pi r_\\mathrm{c}^2\\, \\Phi_\\mathrm{lim}",
+    formula:
+      "\\frac{F}{F_\\mathrm{lim}}, \\qquad F_\\mathrm{lim} = 4\\pi r_\\mathrm{c}^2\\, \\Phi_\\mathrm{lim}",
     with: [
       result("F", "rate", "GAS.rate"),
       result("\\Phi_\\mathrm{lim}", "diffusion limit", "GAS.diffusion_limit"),
@@ -352,15 +355,15 @@ const limitExplanations: readonly ExplanationRecord[] = [
     physics: "limits/crossoverMass.ts#crossoverMass",
     conventions: ["crossoverGases", "coupling", "correction"],
     sources: ["HuntenPepinWalker1987"],
-    validity: "a light gas that flows up through heavier ones; those heavier than the crossover mass stay behind.",
+    validity:
+      "a light gas that flows up through heavier ones; those heavier than the crossover mass stay behind.",
   },
   {
     id: "energy_limited_mass_rate",
     name: "energy_limited_mass_rate",
     words: "Energy-limited mass rate",
     symbol: "\\dot M",
-    formula:
-      "\\dot M = \\frac{\\varepsilon\\, \\pi R_\\mathrm{XUV}^2 R\\, F_\\mathrm{XUV}}{GM\\, K}",
+    formula: "\\dot M = \\frac{\\varepsilon\\, \\pi R_\\mathrm{XUV}^2 R\\, F_\\mathrm{XUV}}{GM\\, K}",
     with: [
       entry("\\varepsilon", "heating efficiency", "heating_efficiency", "body"),
       entry("R_\\mathrm{XUV}", "radius where the radiation is absorbed", "xuv_radius", "body"),
@@ -372,7 +375,8 @@ const limitExplanations: readonly ExplanationRecord[] = [
     physics: "limits/energyLimitedMassRate.ts#energyLimitedMassRate",
     conventions: ["withoutTide"],
     sources: ["Watson1981", "Erkaev2007"],
-    validity: "an upper bound: all of the heat lifts gas, as far as the efficiency says, and none is conducted down.",
+    validity:
+      "an upper bound: all of the heat lifts gas, as far as the efficiency says, and none is conducted down.",
   },
   {
     id: "wind_mass_rate",

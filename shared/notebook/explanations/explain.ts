@@ -209,7 +209,7 @@ function explainWritten(notebook: ExplainedNotebook, cell: ExplainedCell, name: 
     const parts = found && resultNumber(found.cell, found.name);
     if (!found || !parts || typeof parts.value === "string") return [];
     const { value, log10, unit } = parts;
-    return [{ symbol: "", words: path, name: found.name, value, log10, unit, text: null }];
+    return [{ symbol: "", words: path, name: found.name, value, log10, unit, text: null, understood: null }];
   });
   return {
     ...number,

@@ -31,6 +31,8 @@ export interface ExplainedInput {
   name: string;
   /** What is written, where it is no bare number. */
   text: string | null;
+  /** How it was understood, where that adds something: "1.242×10¹¹ m". */
+  understood: string | null;
 }
 
 /** A place that a value comes from. */
@@ -80,11 +82,16 @@ export function resolveInput(place: PlaceInRow, wanted: RecordInput): ResolvedIn
 }
 
 function numberInput(described: Described, name: string, value: number | null, unit: string): ExplainedInput {
-  return { ...described, name, value, log10: null, unit, text: null };
+  return { ...described, name, value, log10: null, unit, text: null, understood: null };
 }
 
-function textInput(described: Described, name: string, text: string): ExplainedInput {
-  return { ...described, name, value: null, log10: null, unit: "1", text };
+function textInput(
+  described: Described,
+  name: string,
+  text: string,
+  understood: string | null = null,
+): ExplainedInput {
+  return { ...described, name, value: null, log10: null, unit: "1", text, understood };
 }
 
 /** "J K⁻¹" as results carry units: "J K^-1". */
@@ -136,10 +143,10 @@ const statingKeys: Readonly<Partial<Record<CellKind, Readonly<Record<string, rea
   column: { "base.altitude": ["base"] },
 };
 
-/** The cell itself and those that it uses: a result of it comes from all of them. */
-export function originsOfCell(notebook: ExplainedNotebook, at: ExplainedCell): Origin[] {
-  const used = at.evaluation.uses.flatMap((path) => cellNamed(notebook, path) ?? []);
-  return [at, ...used].map(({ cell }) => ({ cellId: cell.id, name: cell.name, text: null, remark: null }));
+/** The cell itself and all that it uses: a result of it comes from all of them. */
+function originsOfCell(notebook: ExplainedNotebook, at: ExplainedCell): Origin[] {
+  const { id, name } = at.cell;
+  return [{ cellId: id, name, text: null, remark: null }, ...originsOfNames(notebook, at.evaluation.uses)];
 }
 
 function fromEntry(
@@ -173,9 +180,8 @@ function writtenInput(
         log10: twinOf(values, named.name),
       };
   }
-  const understood = at.evaluation.understood.find(({ entry }) => entry === written.key)?.text;
-  const text = shortened(entryText(at, written));
-  return textInput(described, written.key, understood === undefined ? text : `${text} (${understood})`);
+  const understood = at.evaluation.understood.find(({ entry }) => entry === written.key)?.text ?? null;
+  return textInput(described, written.key, shortened(entryText(at, written)), understood);
 }
 
 /** Long lists are not set out in full. */
@@ -195,16 +201,18 @@ export function originOf(at: ExplainedCell, written: Entry): Origin {
   };
 }
 
-/** Of the names that an expression uses: cells, and entries of `values` cells. */
-export function originsWithin(notebook: ExplainedNotebook, written: Entry): Origin[] {
-  return [...new Set(namesIn(written.node))].flatMap((path): Origin[] => {
+/** Of the names that an expression uses. */
+export function originsWithin(notebook: ExplainedNotebook, { node }: Entry): Origin[] {
+  return originsOfNames(notebook, namesIn(node));
+}
+
+/** Of cells, of results, and of entries of `values` cells. */
+function originsOfNames(notebook: ExplainedNotebook, names: readonly string[]): Origin[] {
+  return [...new Set(names)].flatMap((path): Origin[] => {
     const found = placeNamed(notebook, path);
-    if (!found) {
-      const whole = cellNamed(notebook, path);
-      return whole ? [{ cellId: whole.cell.id, name: path, text: null, remark: null }] : [];
-    }
-    const { cell, name } = found;
-    const entry = cell.cell.kind === "values" ? entryOf(cell, name) : undefined;
+    const cell = found?.cell ?? cellNamed(notebook, path);
+    if (!cell) return [];
+    const entry = found && cell.cell.kind === "values" ? entryOf(cell, found.name) : undefined;
     return [entry ? originOf(cell, entry) : { cellId: cell.cell.id, name: path, text: null, remark: null }];
   });
 }

@@ -1,6 +1,6 @@
 import { useEffect, useId, useRef, useState, type PropsWithChildren, type RefObject } from "react";
 import type { Explanation, ResultPlace } from "../../../../shared/notebook/explanations/explain";
-import type { UnitSystem } from "../../../lib/format";
+import { formatKilometres, unitSpace, type UnitSystem } from "../../../lib/format";
 import { formatMessage } from "../../../lib/formatMessage";
 import { Rich } from "../../../lib/Rich";
 import { StateMark } from "../../../ui/StateMark";
@@ -76,17 +76,22 @@ export function ExplainPanel({
       <div className="explain-head">
         <h3 id={titleId}>
           <span className="explain-name">
-            {explanation?.name ?? `${place.cell}.${place.name}`.replace(/^\./, "")}
+            {explanation ? (explanation.name ?? explanation.cell) : placeName(place)}
           </span>
           {explanation && (
             <span className="explain-words">
-              <Rich text={formatMessage(explanation.words)} />
+              <Rich text={formatMessage(explanation.words + rowWords(place))} />
             </span>
           )}
         </h3>
         {explanation?.name != null && <CopyWord words="copy the name" text={explanation.name} />}
         <TextButton onClick={onClose}>close</TextButton>
       </div>
+      {isLate && (
+        <p className="explain-late" role="status">
+          Computing
+        </p>
+      )}
       {explanation ? (
         <div className="explain-body" data-late={isLate || undefined} inert={isLate}>
           <Explained explanation={explanation} unitSystem={unitSystem} />
@@ -100,6 +105,14 @@ export function ExplainPanel({
     </div>
   );
 }
+
+const placeName = ({ cell, name }: ResultPlace): string => (cell === "" ? name : `${cell}.${name}`);
+
+/** Which row of a table; rows of levels are told by their altitude. */
+const rowWords = ({ row }: ResultPlace): string =>
+  row?.column === "altitude" && typeof row.value === "number"
+    ? ` at ${formatKilometres(row.value)}${unitSpace}km`
+    : "";
 
 function Explained({ explanation, unitSystem }: { explanation: Explanation; unitSystem: UnitSystem }) {
   const { formula, inputs, origins, restsOn, holdsFor, notes, sources } = explanation;
@@ -137,6 +150,7 @@ function Explained({ explanation, unitSystem }: { explanation: Explanation; unit
                   ) : (
                     <code>{input.text}</code>
                   )}
+                  {input.understood !== null && ` (${input.understood})`}
                   {input.symbol !== "" && <small>{input.words}</small>}
                 </li>
               ))}

@@ -32,7 +32,7 @@ export function useHanging(
     if (!desk.current || !number) return;
     const at = number.getBoundingClientRect();
     if (at.width === 0) return;
-    const next = hangingAt(at, desk.current.getBoundingClientRect(), sheetLeft(number));
+    const next = hangingAt(at, blockBottom(number), desk.current.getBoundingClientRect(), sheetLeft(number));
     setHanging((before) => (before && isSame(before, next) ? before : next));
   }, [desk, findNumber]);
 
@@ -58,7 +58,11 @@ export function useHanging(
 const sheetLeft = (number: HTMLElement): number =>
   number.closest(".sheet-body, .sheet-head")?.getBoundingClientRect().left ?? 0;
 
-function hangingAt(number: DOMRect, desk: DOMRect, sheet: number): Hanging {
+/** A number of the headline has a line under it, which is left free. */
+const blockBottom = (number: HTMLElement): number =>
+  (number.closest(".headline > div") ?? number).getBoundingClientRect().bottom;
+
+function hangingAt(number: DOMRect, bottom: number, desk: DOMRect, sheet: number): Hanging {
   const centre = number.left + number.width / 2 - desk.left;
   const gap = desk.width < narrow ? 12 : 24;
   const width = Math.min(desk.width < narrow ? Infinity : widest, desk.width - 2 * gap);
@@ -67,7 +71,7 @@ function hangingAt(number: DOMRect, desk: DOMRect, sheet: number): Hanging {
   const left = Math.min(Math.max(least, centre - overhang), Math.max(gap, most));
   return {
     left: Math.round(left),
-    top: Math.round(number.bottom - desk.top + drop),
+    top: Math.round(bottom - desk.top + drop),
     width: Math.round(width),
     line: Math.round(Math.min(Math.max(centre - left, 10), width - 10)),
   };

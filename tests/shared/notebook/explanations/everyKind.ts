@@ -7,7 +7,11 @@ import { notebookOf, type WrittenCell } from "../evaluateCells";
 const star = "star_distance = 0.83 au\nstar_mass = 0.86 solar_mass";
 
 export const everyKind: readonly WrittenCell[] = [
-  ["values", "given", "T_quiet = 420 ± 45 K  # two occultations\nwarm = 2 * T_quiet\nage = 4.1 Gyr"],
+  [
+    "values",
+    "given",
+    "T_quiet = 420 ± 45 K  # two occultations\nwarm = 2 * T_quiet\nmix = 1e6 cm^2/s\nage = 4.1 Gyr",
+  ],
   [
     "body",
     "ilmara",
@@ -22,7 +26,7 @@ base = 80 km
 pressure = 0.42 Pa
 gases = CO2: rest, N2: 2.7 %, O: 0.8 %, H2: 15 ppm, H: 1.2 ppm
 temperature = bates(base = 165 K, exosphere = T_quiet, shape = 0.022 /km)
-eddy = 1e6 cm^2/s
+eddy = mix
 top = 2500 km
 levels = 80 km, 120 km, 240 km`,
   ],
@@ -49,7 +53,11 @@ magnetic_field = 3 nT`,
     "by_table",
     "body = ilmara\nrate = 1e26 /s\ngas = O\nbegin = 0.1 Gyr\nend = age\nnow = age\nhistory = points(0.1 Gyr: 90, 1 Gyr: 6.2, 4.6 Gyr: 1)",
   ],
-  ["sweep", "warmer", "vary = T_quiet from 380 K to 440 K in 2 steps\nwatch = leak.H.rate"],
+  [
+    "sweep",
+    "warmer",
+    "vary = T_quiet from 380 K to 440 K in 2 steps\nagainst = mix from 1e6 cm^2/s to 2e6 cm^2/s in 1 steps\nwatch = leak.H.rate",
+  ],
   ["spread", "sure", "watch = leak.H.rate, leak.exobase.altitude\nsamples = 64"],
 ];
 
@@ -59,7 +67,7 @@ export const coldAndCoupled: readonly WrittenCell[] = [
   [
     "column",
     "cold",
-    "body = like_mars\nbase = 100 km\nnumber_density = 1e12 /cm^3\ngases = CO2: rest, H: 10 ppm\ntemperature = 160 K",
+    "body = like_mars\nbase = 100 km\nnumber_density = 1e12 /cm^3\ngases = CO2: rest, H: 10 ppm\ntemperature = 70 K",
   ],
   ["escape", "held", "column = cold\ncriterion = gas\ngas = CO2"],
 ];
