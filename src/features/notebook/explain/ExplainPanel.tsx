@@ -84,7 +84,9 @@ export function ExplainPanel({
             </span>
           )}
         </h3>
-        {explanation?.name != null && <CopyWord words="copy the name" text={explanation.name} />}
+        {explanation && explanation.name !== null && (
+          <CopyWord words="copy the name" text={explanation.name} />
+        )}
         <TextButton onClick={onClose}>close</TextButton>
       </div>
       {isLate && (

@@ -3,6 +3,7 @@ import type { Explanation } from "../../../../shared/notebook/explanations/expla
 import type { ExplainedInput } from "../../../../shared/notebook/explanations/resolveInput";
 import {
   formatFixed,
+  formatNumber,
   formatQuantity,
   formatUnit,
   quantityRich,
@@ -27,7 +28,12 @@ function set(
   digits = 3,
 ): RichText {
   const scale = resultScale(lastWord(name), unit, unitSystem, value ?? 0);
-  return quantityRich(formatQuantity({ value, log10, unit }, unitSystem, { scale, digits }));
+  const quantity = formatQuantity({ value, log10, unit }, unitSystem, { scale, digits });
+  // Masses and constants are small without being beyond sight: their digits mean something.
+  const isPlain = value !== null && log10 === null;
+  return quantityRich(
+    isPlain ? { ...quantity, number: formatNumber(value * scale.factor, digits) } : quantity,
+  );
 }
 
 export function explainedValue(explanation: Explanation, unitSystem: UnitSystem): RichText {

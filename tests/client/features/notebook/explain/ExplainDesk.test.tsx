@@ -29,7 +29,8 @@ const written = aNotebook({ cells });
 function liveOf(document: NotebookDocument, late: readonly string[] = []) {
   const { evaluation } = evaluateNotebook(document);
   const byId = new Map(evaluation.cells.map((cell) => [cell.id, cell]));
-  const evaluated = { engine: evaluation.engine, document, cells: byId, headline: [], tasks: [] };
+  const texts = new Map(document.cells.map(({ id, text }) => [id, text]));
+  const evaluated = { engine: evaluation.engine, document, cells: byId, headline: [], tasks: [], texts };
   return { evaluated, late: new Set(late) };
 }
 
@@ -126,6 +127,14 @@ describe("a number that explains itself", () => {
     fireEvent.click(screen.getByRole("button", { name: /^Explain H\.jeans_flux: / }));
     expect(within(panel()).getByRole("heading").textContent).toBe("leak.H.jeans_fluxJeans flux of H");
     expect(gravity().getAttribute("aria-expanded")).toBe("false");
+  });
+
+  it("sets small masses and constants with their digits", () => {
+    render(<Page document={written} />);
+    fireEvent.click(screen.getByRole("button", { name: /^Explain H\.escape_parameter: / }));
+    // Wang et al. (2012) for the mass of the atom, 1.00782503 u; CODATA 2022 for k
+    expect(row("With")!.textContent).toMatch(/1\.674\s?×\s?10−27\skg\s?mass of one particle/);
+    expect(row("With")!.textContent).toMatch(/1\.381\s?×\s?10−23\sJ\sK−1\s?Boltzmann constant/);
   });
 
   it("tells the level that a number of a table is at", () => {
