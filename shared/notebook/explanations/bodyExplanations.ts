@@ -16,7 +16,8 @@ export const bodyExplanations: readonly ExplanationRecord[] = [
     physics: "conversion/massFromGravitationalParameter.ts#massFromGravitationalParameter",
     conventions: [],
     sources: ["CODATA2022"],
-    validity: "a mass from GM is known to 2 parts in 10⁵ at best, as G is; a mass that is written stands as it is.",
+    validity:
+      "a mass from GM is known to 2 parts in 10⁵ at best, as G is; a mass that is written stands as it is.",
   },
   {
     id: "body_gm",
@@ -28,7 +29,8 @@ export const bodyExplanations: readonly ExplanationRecord[] = [
     physics: "conversion/gravitationalParameterFromMass.ts#gravitationalParameterFromMass",
     conventions: [],
     sources: ["CODATA2022"],
-    validity: "a GM from the mass is known to 2 parts in 10⁵ at best, as G is; a GM that is written stands as it is.",
+    validity:
+      "a GM from the mass is known to 2 parts in 10⁵ at best, as G is; a GM that is written stands as it is.",
   },
   {
     id: "body_radius",
@@ -99,7 +101,8 @@ export const bodyExplanations: readonly ExplanationRecord[] = [
     name: "tidal_factor",
     words: "Tidal factor",
     symbol: "K",
-    formula: "K = 1 - \\frac{3}{2\\xi} + \\frac{1}{2\\xi^3}, \\qquad \\xi = \\frac{r_\\mathrm{H}}{R_\\mathrm{XUV}}",
+    formula:
+      "K = 1 - \\frac{3}{2\\xi} + \\frac{1}{2\\xi^3}, \\qquad \\xi = \\frac{r_\\mathrm{H}}{R_\\mathrm{XUV}}",
     with: [
       result("r_\\mathrm{H}", "Hill radius", "hill_radius"),
       entry("R_\\mathrm{XUV}", "radius where the radiation is absorbed", "xuv_radius"),

@@ -117,11 +117,7 @@ export const columnExplanations: readonly ExplanationRecord[] = [
         points: "T(z) = \\text{monotone cubic through the points}",
       },
     },
-    with: [
-      row("z", "altitude", "altitude"),
-      entry("T(z)", "temperature as written", "temperature"),
-      radius,
-    ],
+    with: [row("z", "altitude", "altitude"), entry("T(z)", "temperature as written", "temperature"), radius],
     physics: "temperature/temperatureCurve.ts#temperatureCurve",
     conventions: [],
     sources: ["Bates1959", "FritschCarlson1980"],

@@ -1,7 +1,12 @@
 import { entry, result, row, type ExplanationRecord } from "./record";
 
 const radius = result("r_\\mathrm{c}", "radius of the exobase", "exobase.radius", "escape");
-const lambda = result("\\lambda_\\mathrm{c}", "escape parameter at the exobase", "GAS.escape_parameter", "escape");
+const lambda = result(
+  "\\lambda_\\mathrm{c}",
+  "escape parameter at the exobase",
+  "GAS.escape_parameter",
+  "escape",
+);
 const exobaseDensity = result("n_\\mathrm{c}", "number density at the exobase", "exobase.number_density");
 const here = row("r", "distance from the centre", "radius");
 const satellites = entry("s", "share of the satellite orbits that is filled", "satellites");
@@ -113,7 +118,12 @@ export const coronaExplanations: readonly ExplanationRecord[] = [
     words: "Column of GAS along the limb",
     symbol: "N",
     formula: "N = 2 \\int_0^\\infty n\\, dx, \\qquad r'^2 = r^2 + x^2",
-    with: [row("n", "number density at the tangent point", "number_density"), here, exobaseDensity, satellites],
+    with: [
+      row("n", "number density at the tangent point", "number_density"),
+      here,
+      exobaseDensity,
+      satellites,
+    ],
     physics: "corona/coronaColumn.ts#limbColumn",
   },
   {

@@ -30,7 +30,11 @@ export interface FoundRecord {
 }
 
 const subjects = /GAS|ION|RESULT/;
-const patterns: Readonly<Record<string, string>> = { GAS: "([A-Z][A-Za-z0-9]*)", ION: "([^.]+\\+)", RESULT: "(.+)" };
+const patterns: Readonly<Record<string, string>> = {
+  GAS: "([A-Z][A-Za-z0-9]*)",
+  ION: "([^.]+\\+)",
+  RESULT: "(.+)",
+};
 
 /** @param name of a result, with or without `log10_`, or table and column */
 export function findRecord(kind: CellKind, name: string): FoundRecord | null {

@@ -20,8 +20,7 @@ const loss = {
   validity: `a rate that follows the XUV light. Its power law, with exponent ${solarXuvExponent}, rests on stars like the Sun from ${billions(solarXuvAges.youngest)} to ${billions(solarXuvAges.oldest)} billion years of age.`,
   notes: ["xuv_extrapolated", "history_extrapolated"],
 } as const;
-const xuv =
-  "\\mathrm{XUV} \\propto t^{-\\beta}, \\ \\text{constant before}\\ t_\\mathrm{sat}";
+const xuv = "\\mathrm{XUV} \\propto t^{-\\beta}, \\ \\text{constant before}\\ t_\\mathrm{sat}";
 const table = "\\mathrm{XUV}(t)\\ \\text{by the history}";
 
 /** Results of a loss cell, and the columns of its table `history`. */

@@ -10,7 +10,8 @@ const ion = entry("m", "ion, lighter than its gas by an electron", "ion");
 const pickup = {
   conventions: ["singlyCharged"],
   sources: ["CatlingKasting2017"],
-  validity: "an ion that is born at rest, with flow and field at right angles and the same all along its path.",
+  validity:
+    "an ion that is born at rest, with flow and field at right angles and the same all along its path.",
 } as const;
 
 const recombination = {

@@ -50,8 +50,6 @@ export interface ExplanationRecord {
   notes?: readonly string[];
 }
 
-
-
 export const result = (symbol: string, words: string, name: string, of?: RelatedKind): RecordInput => ({
   symbol,
   words,

@@ -7,7 +7,8 @@ const quantile = {
   physics: "spread/sampleQuantile.ts#sampleQuantile",
   conventions: ["draws", "faultedDraws"],
   sources: ["HyndmanFan1996", "Owen1995"],
-  validity: "the uncertain entries as they are written, each drawn by itself; what the models leave out is not in it.",
+  validity:
+    "the uncertain entries as they are written, each drawn by itself; what the models leave out is not in it.",
   notes: ["few_draws", "beyond_magnitude", "cut_at_bounds"],
 } as const;
 
