@@ -108,7 +108,7 @@ function namesOf({ cell, entry }: Place): string[] {
   return entry ? written : [...new Set([...cell.uses, ...written])];
 }
 
-function namesIn(node: ValueNode): string[] {
+export function namesIn(node: ValueNode): string[] {
   return partsOf(node).flatMap((part) => (part.type === "name" ? [part.path] : []));
 }
 

@@ -12,6 +12,7 @@ import { requirePositive } from "../guards";
  * @assumes the body alone: no star, no rotation
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [ChamberlainHunten1987]
+ * @explained exobase_escape_speed, surface_escape_speed
  */
 export function escapeSpeed({
   gravitationalParameter,

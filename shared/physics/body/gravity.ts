@@ -12,6 +12,7 @@ import { requirePositive } from "../guards";
  * @assumes all mass inside r
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [ChamberlainHunten1987]
+ * @explained surface_gravity
  */
 export function gravity({
   gravitationalParameter,

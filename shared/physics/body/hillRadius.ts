@@ -14,6 +14,7 @@ import { power } from "../numerics/elementary";
  * @assumes a circular orbit and a body much lighter than its star
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [HamiltonBurns1992], [Erkaev2007]
+ * @explained hill_radius
  */
 export function hillRadius({
   gravitationalParameter,

@@ -12,6 +12,7 @@ import { requirePositive } from "../guards";
  *
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [CODATA2022] for G
+ * @explained mean_density
  */
 export function meanDensity({
   gravitationalParameter,

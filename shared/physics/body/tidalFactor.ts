@@ -13,6 +13,7 @@ import { requirePositive } from "../guards";
  * @assumes a body much lighter than its star
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Erkaev2007]
+ * @explained tidal_factor
  */
 export function tidalFactor({ hillRadius, xuvRadius }: { hillRadius: number; xuvRadius: number }): number {
   requirePositive("Hill radius", hillRadius);

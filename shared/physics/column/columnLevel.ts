@@ -44,6 +44,11 @@ export function emptyLevel(gases: number): ColumnLevel {
  * @param law     that holds at the height
  * @param height  h  [m]  geopotential height above the base
  * @param state   ln p of each present gas  [ln Pa]
+ *
+ * @explained level_mass_density, level_number_density, level_mean_mass, level_scale_height, level_mean_free_path,
+ *            level_knudsen, level_gas_number_density, level_gas_scale_height, exobase_radius, exobase_temperature,
+ *            exobase_number_density, exobase_gravity, exobase_scale_height, exobase_mean_free_path,
+ *            gas_number_density, corona_exobase_number_density
  */
 export function fillLevel(
   level: ColumnLevel,

@@ -280,7 +280,11 @@ function pairs({ collisionParameters }: ColumnInput, present: readonly number[])
   };
 }
 
-/** g, the centrifugal term taken off where the column asks for it, m s⁻². */
+/**
+ * g, the centrifugal term taken off where the column asks for it, m s⁻².
+ *
+ * @explained level_gravity
+ */
 export function gravityAt({ input, baseRadius, centrifugalFactor }: ColumnProblem, height: number): number {
   const radius = (baseRadius * baseRadius) / (baseRadius - height);
   const attraction = input.gravitationalParameter / (radius * radius);

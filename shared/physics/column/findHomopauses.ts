@@ -24,6 +24,7 @@ export interface Homopause {
  * @param top   geopotential height up to which is looked, m
  *
  * @source [Blanc1908]
+ * @explained homopause_altitude
  */
 export function findHomopauses(path: ColumnPath, top: number): Homopause[] {
   const { input, present, eddy } = path.problem;

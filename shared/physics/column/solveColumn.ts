@@ -27,6 +27,7 @@ export const defaultTolerance = 1e-10;
  * @valid    up to the exobase; above it the profile is the hydrostatic continuation
  * @throws   PhysicsDomainError if an input breaks a bound, or if an altitude outside the column is asked for
  * @source   [ChapmanCowling1970], section 18.2; [BanksKockarts1973], chapter 15
+ * @explained level_pressure, level_gas_mole_fraction
  */
 export function solveColumn(input: ColumnInput, tolerance = defaultTolerance): Column {
   requireTolerance(tolerance);

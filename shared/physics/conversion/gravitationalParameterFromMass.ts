@@ -11,6 +11,7 @@ import { requirePositive } from "../guards";
  *
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [CODATA2022] for G
+ * @explained body_gm
  */
 export function gravitationalParameterFromMass(mass: number): number {
   requirePositive("mass", mass);

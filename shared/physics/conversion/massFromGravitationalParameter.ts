@@ -11,6 +11,7 @@ import { requirePositive } from "../guards";
  *
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [CODATA2022] for G
+ * @explained body_mass
  */
 export function massFromGravitationalParameter(gravitationalParameter: number): number {
   requirePositive("gravitational parameter", gravitationalParameter);

@@ -12,6 +12,7 @@ import { requirePositive, requireNonNegative } from "../guards";
  *
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [CODATA2022] for k
+ * @explained base_number_density
  */
 export function numberDensityFromPressure({
   pressure,

@@ -22,6 +22,7 @@ export interface CoronaColumn {
  * @assumes as `partitionFunctions`
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Chamberlain1963]; [TakahasiMori1974] for the integral
+ * @explained corona_limb_column
  */
 export function limbColumn(corona: Corona, tangentRadius: number): CoronaColumn {
   const square = tangentRadius * tangentRadius;
@@ -42,6 +43,7 @@ export function limbColumn(corona: Corona, tangentRadius: number): CoronaColumn 
  * @assumes as `partitionFunctions`
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Chamberlain1963]; [TakahasiMori1974] for the integral
+ * @explained corona_overhead_column
  */
 export function overheadColumn(corona: Corona, radius: number): CoronaColumn {
   const end = Math.max(0, corona.reach - radius);

@@ -44,6 +44,7 @@ export interface CoronaDensity {
  * @assumes as `partitionFunctions`
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Chamberlain1963], [ChamberlainHunten1987]
+ * @explained corona_number_density
  */
 export function coronaDensity(corona: Corona, radius: number): CoronaDensity {
   const { logExobaseNumberDensity } = corona;

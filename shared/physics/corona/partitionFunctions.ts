@@ -49,6 +49,7 @@ export interface PartitionFunctions {
  *          satellite orbits, which never cross it, filled as if they did
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Chamberlain1963], [ChamberlainHunten1987]
+ * @explained corona_ballistic, corona_satellite, corona_escaping
  */
 export function partitionFunctions({
   exobaseEscapeParameter,

@@ -23,6 +23,7 @@ export interface ExobaseParticle {
  * @valid   `escapeRegimeBounds`
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Jeans1925], [ChamberlainHunten1987]
+ * @explained effusion_velocity
  */
 export function effusionVelocity({ temperature, particleMass, escapeParameter }: ExobaseParticle): number {
   requireNonNegative("escape parameter", escapeParameter);

@@ -14,6 +14,7 @@ import { requirePositive } from "../guards";
  *
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [ChamberlainHunten1987]
+ * @explained bulk_escape_parameter, escape_parameter
  */
 export function escapeParameter({
   gravitationalParameter,

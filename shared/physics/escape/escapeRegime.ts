@@ -23,6 +23,7 @@ export const escapeRegimeBounds = { jeans: 6, jeans_estimate: 3, transition: 2 }
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Volkov2011] for 6, 3 and the transition; [Parker1958] for 2, where the sonic point of an isothermal
  *          wind, r_s = λr/2, comes to lie inside; [Opik1963] sets blow-off at 1.5
+ * @explained escape_regime
  */
 export function escapeRegime(bulkEscapeParameter: number): { regime: EscapeRegime; notes: PhysicsNote[] } {
   requirePositive("escape parameter of the mean mass", bulkEscapeParameter);

@@ -21,6 +21,7 @@ export interface ExobaseGas extends ExobaseParticle {
  * @valid   `escapeRegimeBounds`
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Jeans1925], [ChamberlainHunten1987]
+ * @explained jeans_flux
  */
 export function jeansFlux({ numberDensity, ...particle }: ExobaseGas): number {
   requireNonNegative("number density", numberDensity);

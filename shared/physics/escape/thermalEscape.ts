@@ -70,6 +70,7 @@ export interface ThermalEscape {
  * @valid   `escapeRegimeBounds`, `looselyBound`, `largestDrift`, exobase within half the Hill radius; outside, a note
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Jeans1925], [ChamberlainHunten1987]; the notes name theirs
+ * @explained escape_rate, mass_rate
  */
 export function thermalEscape(exobase: ThermalEscapeInput): ThermalEscape {
   const { gravitationalParameter, radius, temperature, meanMass, hillRadius, gases } = exobase;

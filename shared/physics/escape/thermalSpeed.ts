@@ -12,6 +12,7 @@ import { requirePositive } from "../guards";
  *
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [ChamberlainHunten1987]
+ * @explained thermal_speed
  */
 export function thermalSpeed({
   temperature,

@@ -35,6 +35,7 @@ export interface ExobaseNumber {
  * Makes the number of a criterion ready for a column.
  *
  * @throws  PhysicsDomainError if the criterion is of a gas that the column has not
+ * @explained exobase_altitude
  */
 export function exobaseNumber(problem: ColumnProblem, criterion: ExobaseCriterion): ExobaseNumber {
   const { crossSections } = problem;

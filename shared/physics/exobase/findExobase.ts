@@ -29,6 +29,8 @@ export interface ExobaseBand {
  *
  * @param along  the number of the criterion
  * @param bulk   the Knudsen number; the same for the bulk criterion
+ *
+ * @explained exobase_lower, exobase_upper
  */
 export function findExobaseBand(along: NumberAlong, bulk: NumberAlong): ExobaseBand {
   const first = risingThrough(bulk, bandEnd)[0] ?? Infinity;

@@ -27,6 +27,7 @@ export interface OutflowingGas {
  * @assumes an isothermal gas, the light one flowing out and the heavy one a trace in it
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [HuntenPepinWalker1987]
+ * @explained crossover_mass
  */
 export function crossoverMass(gas: OutflowingGas): number {
   const { particleMass, temperature, flux, collisionParameter, gravity, moleFraction } = gas;

@@ -13,6 +13,7 @@ import { magnitude } from "../numerics/magnitude";
  * @assumes nothing is supplied from below meanwhile
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Hunten1973]
+ * @explained depletion_time
  */
 export function depletionTime({ logParticles, log10Rate }: { logParticles: number; log10Rate: number }): {
   time: number | null;

@@ -41,6 +41,7 @@ export type DiffusionLimit =
  * @assumes the gas is no sink or source between r_h and the exobase, and its mixing ratio does not fall off by then
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Hunten1973]; [Blanc1908] for D
+ * @explained diffusion_limit
  */
 export function diffusionLimit(place: DiffusionLimitPlace): DiffusionLimit {
   const { numberDensity, temperature, temperatureGradient, gravity, moleFraction } = place;

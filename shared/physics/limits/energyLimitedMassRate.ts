@@ -26,6 +26,7 @@ export interface HeatedBody {
  * @assumes all the energy spent is spent on lifting the gas to the edge of the Hill sphere
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Watson1981], [Erkaev2007]
+ * @explained energy_limited_mass_rate
  */
 export function energyLimitedMassRate(body: HeatedBody): number {
   const { heatingEfficiency, xuvFlux, xuvRadius, radius, gravitationalParameter, tidalFactor } = body;

@@ -45,6 +45,7 @@ export interface IsothermalWind {
  * @valid   λ of 2 or more; below, the base lies beyond r_s, the wind starts faster than sound, and a caution says so
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Parker1958]; [Cranmer2004] for the solution by W
+ * @explained wind_mass_rate
  */
 export function isothermalWind(base: WindBase): IsothermalWind {
   const { radius, temperature, particleMass, massDensity } = base;

@@ -15,6 +15,7 @@ import { magnitude } from "../numerics/magnitude";
  *
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Hunten1973]
+ * @explained supply_fraction
  */
 export function supplyFraction({
   log10Rate,

@@ -29,6 +29,7 @@ export interface LossSpan {
  * @throws  PhysicsDomainError if an input breaks a bound above, or if the loss from age 0 on has no end (βx ≥ 1 and no
  *          saturation)
  * @source  [Ribas2005]
+ * @explained lost_particles, lost_mass
  */
 export function equivalentTime({ history, exponent, begin, end, now }: LossSpan): number {
   requireFinite("exponent of the rate with XUV", exponent);

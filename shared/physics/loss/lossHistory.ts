@@ -26,6 +26,7 @@ export interface LossHistory {
  * @assumes as `equivalentTime`
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Ribas2005]
+ * @explained history_lost
  */
 export function lossHistory({ rate, ...span }: LossSpan & { rate: number }, points: number): LossHistory {
   requireNonNegative("present rate", rate);

@@ -16,6 +16,7 @@ import { logXuvAt, type XuvHistory, xuvPieces } from "./xuvHistory";
  * @assumes the law of the Sun and its like; a star of other mass has another
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Ribas2005]
+ * @explained history_rate
  */
 export function relativeXuv(history: XuvHistory, age: number, now: number): number {
   requireNonNegative("age", age);

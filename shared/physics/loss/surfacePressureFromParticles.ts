@@ -15,6 +15,7 @@ import { requireNonNegative, requirePositive } from "../guards";
  * @assumes an atmosphere much thinner than the body is wide
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [CatlingKasting2017]
+ * @explained lost_surface_pressure
  */
 export function surfacePressureFromParticles({
   particles,

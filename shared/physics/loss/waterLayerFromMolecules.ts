@@ -19,6 +19,7 @@ export const waterMass = findGas("H2O")!.mass;
  * @assumes a layer much thinner than the body is wide
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [CatlingKasting2017]
+ * @explained water_layer
  */
 export function waterLayerFromMolecules({
   molecules,

@@ -47,6 +47,7 @@ export interface FragmentYield {
  *          it flies up
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [FoxHac1997]; each channel's own, in `recombiningIons`
+ * @explained channel_escapes
  */
 export function escapingFragments({
   ion,

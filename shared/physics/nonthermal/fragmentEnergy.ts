@@ -13,6 +13,7 @@ import { requireNonNegative, requirePositive } from "../guards";
  * @assumes an ion and an electron nearly at rest
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [FoxHac1997]
+ * @explained channel_energy
  */
 export function fragmentEnergy({
   energy,

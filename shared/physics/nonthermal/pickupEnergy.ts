@@ -12,6 +12,7 @@ import { requireNonNegative, requirePositive } from "../guards";
  * @assumes an ion born at rest, uniform flow and field, speeds far below that of light
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [CatlingKasting2017]
+ * @explained pickup_energy
  */
 export function pickupEnergy({ mass, flowSpeed }: { mass: number; flowSpeed: number }): number {
   requirePositive("mass of the ion", mass);

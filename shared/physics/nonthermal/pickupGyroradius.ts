@@ -14,6 +14,7 @@ import { requirePositive } from "../guards";
  * @assumes an ion born at rest, uniform flow and field, speeds far below that of light
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [CatlingKasting2017]
+ * @explained pickup_gyroradius
  */
 export function pickupGyroradius({
   mass,

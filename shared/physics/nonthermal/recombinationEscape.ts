@@ -56,6 +56,7 @@ const pieces = 4;
  *          profiles hold all around the body
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [FoxHac1997]; each ion's own, in `recombiningIons`
+ * @explained recombination_escape_rate
  */
 export function recombinationEscape({
   ion,

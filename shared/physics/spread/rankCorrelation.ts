@@ -9,6 +9,7 @@ import { PhysicsDomainError } from "../errors";
  *
  * @throws  PhysicsDomainError if the lengths differ
  * @source  [Spearman1904]
+ * @explained spread_rank_correlation
  */
 export function rankCorrelation(one: ArrayLike<number>, other: ArrayLike<number>): number | null {
   if (one.length !== other.length) {

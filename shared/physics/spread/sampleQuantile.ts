@@ -10,6 +10,7 @@ import { PhysicsDomainError } from "../errors";
  *
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [HyndmanFan1996], definition 5
+ * @explained spread_median, spread_lower, spread_upper, spread_q2_5, spread_q97_5
  */
 export function sampleQuantile(sorted: ArrayLike<number>, probability: number): number {
   const { length } = sorted;

@@ -23,6 +23,8 @@ export interface ScrambledSobol {
  * @assumes that the hash is as good as chance; the tests look at means, variances and pairs
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Owen1995], [JoeKuo2008]
+ * @explained spread_median_error, spread_lower_error, spread_upper_error, spread_q2_5_error, spread_q97_5_error,
+ *            spread_draws
  */
 export function scrambledSobol(dimensions: number, seed: number): ScrambledSobol {
   requireNonNegative("seed", seed);

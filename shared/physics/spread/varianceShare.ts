@@ -49,6 +49,7 @@ const drawsForLine = 16;
  * @throws  PhysicsDomainError if lengths differ or a bound above is broken
  * @source  [Sobol1993] for S; [Plischke2013] for estimates from given draws in bins; lines instead of means, and
  *          products across groups, are ours
+ * @explained spread_variance_share
  */
 export function varianceShare(
   coordinates: ArrayLike<number>,

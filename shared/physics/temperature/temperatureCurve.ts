@@ -24,6 +24,7 @@ export interface TemperatureCurve {
  * @assumes a Bates profile is asked above its z₀; below, it falls off exponentially and may pass through zero
  * @throws  PhysicsDomainError if an input breaks a bound above
  * @source  [Bates1959], [FritschCarlson1980]
+ * @explained level_temperature
  */
 export function temperatureCurve(profile: TemperatureProfile, radius: number): TemperatureCurve {
   requirePositive("radius", radius);

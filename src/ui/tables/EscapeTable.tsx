@@ -2,6 +2,7 @@ import type { CellResult } from "../../../shared/notebook/result";
 import { formatKilometres, formatFixed, formatQuantity, quantityRich, unitSpace } from "../../lib/format";
 import { gasStyle } from "../../lib/gasStyle";
 import { Rich } from "../../lib/Rich";
+import { plainText } from "../../lib/richText";
 import { useElementSize } from "../../lib/useElementSize";
 import { GasMark } from "../plots/GasMark";
 import {
@@ -13,6 +14,7 @@ import {
   shownColumns,
   type EscapeColumn,
 } from "./escapeColumns";
+import { ExplainNumber } from "./ExplainNumber";
 import { noteTarget } from "./noteTarget";
 import { TableFrame } from "./TableFrame";
 import { TableNotes } from "./TableNotes";
@@ -116,9 +118,16 @@ export function EscapeTable({
   const cell = (gas: string, { key }: EscapeColumn) => {
     const answer = escapeAnswer(result, gas, key);
     const full = answer === null ? undefined : `${answer.value ?? `10^${answer.log10}`} ${answer.unit}`;
+    const text = escapeNumber(answer, key, scales.get(key)!, isTurned ? 2 : 3);
     return (
       <td key={`${gas}${key}`} title={full?.replace(/ 1$/, "")}>
-        <Rich text={escapeNumber(answer, key, scales.get(key)!, isTurned ? 2 : 3)} />
+        {answer === null ? (
+          <Rich text={text} />
+        ) : (
+          <ExplainNumber place={{ cell: result.name, name: `${gas}.${key}` }} spoken={plainText(text)}>
+            <Rich text={text} />
+          </ExplainNumber>
+        )}
         <Letters notes={at(gas, key)} />
       </td>
     );

@@ -2,7 +2,8 @@ import type { ResultRow } from "../../../shared/notebook/result";
 import { displayScale, formatKilometres, formatNumber, formatUnit, type UnitSystem } from "../../lib/format";
 import { gasStyle } from "../../lib/gasStyle";
 import { Rich } from "../../lib/Rich";
-import type { RichText } from "../../lib/richText";
+import { plainText, type RichText } from "../../lib/richText";
+import { ExplainNumber } from "./ExplainNumber";
 import { TableFrame } from "./TableFrame";
 import type { LevelsTableProps } from "./tableProps";
 import { tableText } from "./tableText";
@@ -100,19 +101,30 @@ export function LevelsTable({ result, gases, unitSystem, number, caption }: Leve
           </tr>
         </thead>
         <tbody>
-          {rows.map((row) => (
-            <tr key={String(row.altitude)}>
-              <th scope="row">{formatKilometres(numberOf(row.altitude) ?? 0)}</th>
-              {columns.map(({ key, unit }) => {
-                const value = numberOf(row[key]);
-                return (
-                  <td key={key} title={value === null ? undefined : `${value} ${unit}`.replace(/ 1$/, "")}>
-                    <Rich text={value === null ? ["–"] : formatNumber(value * scales.get(key)!.factor)} />
-                  </td>
-                );
-              })}
-            </tr>
-          ))}
+          {rows.map((level) => {
+            const altitude = numberOf(level.altitude) ?? 0;
+            return (
+              <tr key={String(level.altitude)}>
+                <th scope="row">{formatKilometres(altitude)}</th>
+                {columns.map(({ key, unit }) => {
+                  const value = numberOf(level[key]);
+                  if (value === null) return <td key={key}>–</td>;
+                  const text = formatNumber(value * scales.get(key)!.factor);
+                  const row = { column: "altitude", value: altitude };
+                  return (
+                    <td key={key} title={`${value} ${unit}`.replace(/ 1$/, "")}>
+                      <ExplainNumber
+                        place={{ cell: result.name, name: `levels.${key}`, row }}
+                        spoken={plainText(text)}
+                      >
+                        <Rich text={text} />
+                      </ExplainNumber>
+                    </td>
+                  );
+                })}
+              </tr>
+            );
+          })}
         </tbody>
       </table>
     </TableFrame>

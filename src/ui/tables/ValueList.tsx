@@ -8,7 +8,8 @@ import {
   type UnitSystem,
 } from "../../lib/format";
 import { Rich } from "../../lib/Rich";
-import type { RichText } from "../../lib/richText";
+import { plainText, type RichText } from "../../lib/richText";
+import { ExplainNumber } from "./ExplainNumber";
 import "./tables.css";
 import type { ValueListProps } from "./tableProps";
 import { valueLabel, valueLabels } from "./valueLabels";
@@ -35,6 +36,7 @@ export function ValueList({ result, unitSystem, names }: ValueListProps) {
       {shown.map((name) => {
         const { value, unit } = result.values[name]!;
         const isNumber = typeof value === "number";
+        const text = shownValue(result, name, unitSystem);
         return (
           <div key={name}>
             <dt>{valueLabel(name)}</dt>
@@ -45,7 +47,9 @@ export function ValueList({ result, unitSystem, names }: ValueListProps) {
                   : undefined
               }
             >
-              <Rich text={shownValue(result, name, unitSystem)} />
+              <ExplainNumber place={{ cell: result.name, name }} spoken={plainText(text)}>
+                <Rich text={text} />
+              </ExplainNumber>
             </dd>
           </div>
         );

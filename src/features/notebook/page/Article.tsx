@@ -7,6 +7,7 @@ import { Message } from "../../../ui/Message";
 import type { CellCommands } from "../cells/useCellCommands";
 import type { LiveEvaluation } from "../evaluation/useEvaluation";
 import type { NotebookNotes } from "../evaluation/useNotebookNotes";
+import { ExplainDesk } from "../explain/ExplainDesk";
 import { EmptySheet } from "./EmptySheet";
 import { Headline } from "./Headline";
 import { NotesList } from "./NotesList";
@@ -48,38 +49,40 @@ export function Article({
   const strip = columnId === null ? null : (evaluated?.cells.get(columnId)?.strip ?? null);
 
   return (
-    <div className="notebook-grid">
-      <StripPane strip={strip} unitSystem={unitSystem} isVoid={columnId !== null && late.has(columnId)} />
-      <main id="page" className="notebook-sheet" tabIndex={-1}>
-        <SheetHead document={document} kicker={kicker} edit={edit}>
-          {evaluated && (
-            <Headline items={evaluated.headline} unitSystem={unitSystem} isLate={late.size > 0} />
-          )}
-        </SheetHead>
-        <aside className="margin" aria-label="Margin">
-          <NotesList notes={notes.listed} />
-        </aside>
-        <div className="sheet-body">
-          {failure && (
-            <Message state="fault" live="assertive">
-              The notebook could not be computed: {failure} What is written is safe; change it, or load the
-              page again.
-            </Message>
-          )}
-          {children}
-          {document.cells.length === 0 && <EmptySheet commands={edit && commands} />}
-          <Sheet
-            document={document}
-            live={live}
-            notesOf={notes.of}
-            unitSystem={unitSystem}
-            isEditable={edit !== null}
-            newCellId={newCellId}
-            commands={commands}
-          />
-          <CautionFooter className="pt-64 pb-64" />
-        </div>
-      </main>
-    </div>
+    <ExplainDesk document={document} live={live} unitSystem={unitSystem}>
+      <div className="notebook-grid">
+        <StripPane strip={strip} unitSystem={unitSystem} isVoid={columnId !== null && late.has(columnId)} />
+        <main id="page" className="notebook-sheet" tabIndex={-1}>
+          <SheetHead document={document} kicker={kicker} edit={edit}>
+            {evaluated && (
+              <Headline items={evaluated.headline} unitSystem={unitSystem} isLate={late.size > 0} />
+            )}
+          </SheetHead>
+          <aside className="margin" aria-label="Margin">
+            <NotesList notes={notes.listed} />
+          </aside>
+          <div className="sheet-body">
+            {failure && (
+              <Message state="fault" live="assertive">
+                The notebook could not be computed: {failure} What is written is safe; change it, or load the
+                page again.
+              </Message>
+            )}
+            {children}
+            {document.cells.length === 0 && <EmptySheet commands={edit && commands} />}
+            <Sheet
+              document={document}
+              live={live}
+              notesOf={notes.of}
+              unitSystem={unitSystem}
+              isEditable={edit !== null}
+              newCellId={newCellId}
+              commands={commands}
+            />
+            <CautionFooter className="pt-64 pb-64" />
+          </div>
+        </main>
+      </div>
+    </ExplainDesk>
   );
 }

@@ -1,6 +1,13 @@
 import type { HeadlineItem } from "../../../../shared/notebook/summary";
-import { formatQuantity, kilometreScale, type UnitSystem } from "../../../lib/format";
+import {
+  formatQuantity,
+  kilometreScale,
+  quantityText,
+  type FormattedQuantity,
+  type UnitSystem,
+} from "../../../lib/format";
 import { Rich } from "../../../lib/Rich";
+import { ExplainNumber } from "../../../ui/tables/ExplainNumber";
 
 interface HeadlineProps {
   items: readonly HeadlineItem[];
@@ -18,7 +25,7 @@ export function Headline({ items, unitSystem, isLate }: HeadlineProps) {
         <div key={item.name}>
           <dt>{item.label}</dt>
           <dd className="headline-number">
-            <HeadlineNumber item={item} unitSystem={unitSystem} />
+            <ExplainedNumber item={item} unitSystem={unitSystem} />
           </dd>
           <dd className="headline-note">{item.note}</dd>
         </div>
@@ -27,15 +34,27 @@ export function Headline({ items, unitSystem, isLate }: HeadlineProps) {
   );
 }
 
-/** A number of the headline with its unit, set smaller. */
-export function HeadlineNumber({ item, unitSystem }: { item: HeadlineItem; unitSystem: UnitSystem }) {
-  if (typeof item.value === "string") return item.value;
-  const isAltitude = item.unit === "m";
-  const { number, unit } = formatQuantity(
-    { value: item.value, log10: item.log10, unit: item.unit },
-    unitSystem,
-    isAltitude ? { scale: kilometreScale } : { digits: 2 },
+interface HeadlineNumberProps {
+  item: HeadlineItem;
+  unitSystem: UnitSystem;
+}
+
+function ExplainedNumber({ item, unitSystem }: HeadlineNumberProps) {
+  const number = <HeadlineNumber item={item} unitSystem={unitSystem} />;
+  if (typeof item.value === "string") return number;
+  const cut = item.name.indexOf(".");
+  const place = { cell: item.name.slice(0, Math.max(0, cut)), name: item.name.slice(cut + 1) };
+  return (
+    <ExplainNumber place={place} spoken={quantityText(headlineQuantity(item, item.value, unitSystem))}>
+      {number}
+    </ExplainNumber>
   );
+}
+
+/** A number of the headline with its unit, set smaller. */
+export function HeadlineNumber({ item, unitSystem }: HeadlineNumberProps) {
+  if (typeof item.value === "string") return item.value;
+  const { number, unit } = headlineQuantity(item, item.value, unitSystem);
   return (
     <>
       <Rich text={number} />{" "}
@@ -46,4 +65,13 @@ export function HeadlineNumber({ item, unitSystem }: { item: HeadlineItem; unitS
       )}
     </>
   );
+}
+
+function headlineQuantity(
+  { log10, unit }: HeadlineItem,
+  value: number | null,
+  unitSystem: UnitSystem,
+): FormattedQuantity {
+  const manner = unit === "m" ? { scale: kilometreScale } : { digits: 2 };
+  return formatQuantity({ value, log10, unit }, unitSystem, manner);
 }

@@ -10,6 +10,7 @@ const keys: readonly (readonly [string, string])[] = [
     "Ctrl Z, Ctrl Shift Z",
     "take back, do again: in a text what was written, elsewhere what was done to cells",
   ],
+  ["Enter, arrows", "on a number: what it is and where it comes from; from one number to the next"],
   ["Ctrl Space", "what may be written here"],
 ];
 
