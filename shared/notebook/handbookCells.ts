@@ -32,7 +32,12 @@ export function referringBodyCell({ name }: HandbookBody): HandbookCell {
 export function writtenBodyCell(body: HandbookBody): HandbookCell {
   const { sources } = body;
   const solarMass = nominalSolarGravitationalParameter.value / gravitationalConstant.value;
-  const entry = (key: string, value: number | undefined, unit: string, source?: Provenance): WrittenEntry[] =>
+  const entry = (
+    key: string,
+    value: number | undefined,
+    unit: string,
+    source?: Provenance,
+  ): WrittenEntry[] =>
     value === undefined ? [] : [{ key, value: `${plainNumber(value)} ${unit}`, remark: remarkOf(source) }];
   const over = (value: number | undefined, unit: number) => (value === undefined ? undefined : value / unit);
   return {
@@ -169,7 +174,5 @@ function written(entries: readonly WrittenEntry[]): string {
   });
   const short = lines.filter(({ text }) => !text.includes("\n"));
   const width = Math.max(0, ...short.map(({ text }) => text.length));
-  return lines
-    .map(({ text, remark }) => (remark ? `${text.padEnd(width)}  # ${remark}` : text))
-    .join("\n");
+  return lines.map(({ text, remark }) => (remark ? `${text.padEnd(width)}  # ${remark}` : text)).join("\n");
 }

@@ -39,13 +39,18 @@ describe("cells of the handbook", () => {
     for (const constant of [...codata2022, ...iau]) expect(faultsOf(constantCell(constant))).toEqual([]);
   });
 
-  it.each(handbookBodies.map(({ name }) => name))("give %s the same numbers written out as by name", (name) => {
-    const body = findBody(name)!;
-    const [byName, byNumber] = [referringBodyCell, writtenBodyCell].map((write) => resultOf(written(write(body))));
-    expect(Object.keys(byNumber!.values)).toEqual(Object.keys(byName!.values));
-    for (const key of Object.keys(byName!.values))
-      expect(numberIn(byNumber!, key) / numberIn(byName!, key)).toBeCloseTo(1, 12);
-  });
+  it.each(handbookBodies.map(({ name }) => name))(
+    "give %s the same numbers written out as by name",
+    (name) => {
+      const body = findBody(name)!;
+      const [byName, byNumber] = [referringBodyCell, writtenBodyCell].map((write) =>
+        resultOf(written(write(body))),
+      );
+      expect(Object.keys(byNumber!.values)).toEqual(Object.keys(byName!.values));
+      for (const key of Object.keys(byName!.values))
+        expect(numberIn(byNumber!, key) / numberIn(byName!, key)).toBeCloseTo(1, 12);
+    },
+  );
 
   it("leave a column as it is, and say that they act in it", () => {
     const column: WrittenCell = [
@@ -59,7 +64,9 @@ describe("cells of the handbook", () => {
     const overridden = resultOf(mars, ...gases, column);
     for (const key of ["top.altitude", "base.number_density"])
       expect(numberIn(overridden, key) / numberIn(plain, key)).toBeCloseTo(1, 9);
-    const acting = overridden.notes.filter(({ code }) => code === "gas_cell_acts").map(({ message }) => message);
+    const acting = overridden.notes
+      .filter(({ code }) => code === "gas_cell_acts")
+      .map(({ message }) => message);
     expect(acting).toHaveLength(2);
     expect(acting[0]).toContain("from the gas cell *CO2*");
     expect(plain.notes.some(({ code }) => code === "gas_cell_acts")).toBe(false);

@@ -1,0 +1,12 @@
+import { useQuery } from "@tanstack/react-query";
+import { Outlet } from "react-router-dom";
+import { sessionQuery } from "../lib/session";
+import { Opening } from "../ui/Opening";
+import { SessionGate } from "./SessionGate";
+
+/** Lets everyone through to pages that are open to strangers; for who is signed in the session is kept as elsewhere. */
+export function OpenGate() {
+  const session = useQuery(sessionQuery);
+  if (session.isPending) return <Opening what="Tenuity" />;
+  return session.data?.user ? <SessionGate /> : <Outlet />;
+}
