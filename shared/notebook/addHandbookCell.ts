@@ -13,12 +13,14 @@ export type AddedCell =
 /**
  * The document with a cell of the handbook put in. A name that is taken gets a number; a gas is named by its formula,
  * so of `choices` the first whose gas has no cell yet is taken.
+ *
+ * @param place  in words, or the index that the cell is to have
  */
 export function addHandbookCell(
   document: NotebookDocument,
   choices: readonly HandbookCell[],
   id: string,
-  place: CellPlace,
+  place: CellPlace | number,
 ): AddedCell {
   const taken = takenNames(document);
   const chosen = choices.find(({ kind, name }) => kind !== "gas" || !taken.has(name));
@@ -34,14 +36,19 @@ export function addHandbookCell(
     chosen.kind === "values"
       ? { ...chosen, id, name: freeName(chosen.name, taken), text: withFreeKeys(chosen.text, taken) }
       : { ...chosen, id, name: chosen.kind === "gas" ? chosen.name : freeName(chosen.name, taken) };
-  const firstColumn = document.cells.findIndex(({ kind }) => kind === "column");
-  const index = place === "aboveColumns" && firstColumn >= 0 ? firstColumn : document.cells.length;
+  const index = indexOf(document, place);
   return {
     ok: true,
     document: editDocument(document, { type: "insertCell", index, cell }).document,
     cell,
     index,
   };
+}
+
+function indexOf({ cells }: NotebookDocument, place: CellPlace | number): number {
+  if (typeof place === "number") return place;
+  const firstColumn = cells.findIndex(({ kind }) => kind === "column");
+  return place === "aboveColumns" && firstColumn >= 0 ? firstColumn : cells.length;
 }
 
 /** Names of cells, and of the entries of values cells, which are known everywhere. */

@@ -29,7 +29,7 @@ describe("units of the handbook", () => {
 describe("numbers of the handbook", () => {
   it("carry their uncertainty in the last two digits, as CODATA prints them", () => {
     // CODATA 2022: G = 6.674 30(15)e-11, m_u = 1.660 539 068 92(52)e-27, m_e = 9.109 383 7139(28)e-31.
-    expect(shown(6.6743e-11, { uncertainty: 0.00015e-11 })).toBe("6.67430(15) × 10^⁻¹¹".replace("^", ""));
+    expect(shown(6.6743e-11, { uncertainty: 0.00015e-11 })).toBe("6.67430(15) × 10⁻¹¹");
     expect(shown(1.66053906892e-27, { uncertainty: 0.00000000052e-27 })).toContain("1.66053906892(52)");
     expect(shown(9.1093837139e-31, { uncertainty: 0.0000000028e-31 })).toContain("9.1093837139(28)");
   });
