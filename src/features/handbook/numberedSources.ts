@@ -21,7 +21,7 @@ export function sourceUses(section: HandbookSection, numbers: ReadonlyMap<string
   for (const sourcing of sourcingsOf(section)) {
     const uses = found.get(sourcing.source) ?? new Set<string>();
     found.set(sourcing.source, uses);
-    const words = useWords(sourcing);
+    const words = wordsOf(sourcing);
     if (words) uses.add(words);
   }
   return [...found]
@@ -39,6 +39,6 @@ const markWords: Record<NonNullable<Sourcing["mark"]>, string> = {
   "by analogy": "by analogy",
 };
 
-function useWords({ mark, note }: Sourcing): string {
+function wordsOf({ mark, note }: Sourcing): string {
   return [note, mark && markWords[mark]].filter((word) => word !== undefined).join(", ");
 }
