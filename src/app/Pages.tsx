@@ -3,6 +3,7 @@ import { Navigate, Route, Routes } from "react-router-dom";
 import { Opening } from "../ui/Opening";
 import { HouseLayout } from "./HouseLayout";
 import { NotFoundPage } from "./NotFoundPage";
+import { OpenGate } from "./OpenGate";
 import { SessionGate } from "./SessionGate";
 import { useNewPage } from "./useNewPage";
 
@@ -10,6 +11,7 @@ const AccountRoute = lazy(() => import("./AccountRoute"));
 const CreateAccountRoute = lazy(() => import("./CreateAccountRoute"));
 const GroupRoute = lazy(() => import("./GroupRoute"));
 const GroupsRoute = lazy(() => import("./GroupsRoute"));
+const HandbookRoute = lazy(() => import("./HandbookRoute"));
 const NotebookPage = lazy(() =>
   import("../features/notebook/NotebookPage").then((file) => ({ default: file.NotebookPage })),
 );
@@ -25,6 +27,11 @@ export function Pages() {
     <Suspense fallback={<Opening what="the page" />}>
       <Routes>
         <Route path="/accounts/new" element={<CreateAccountRoute />} />
+        <Route element={<OpenGate />}>
+          <Route element={<HouseLayout />}>
+            <Route path="/handbook" element={<HandbookRoute />} />
+          </Route>
+        </Route>
         <Route element={<SessionGate />}>
           <Route path="/notebooks/:notebookId/*" element={<NotebookPage />} />
           <Route element={<HouseLayout />}>

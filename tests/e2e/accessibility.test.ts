@@ -36,10 +36,13 @@ describe.each(["light", "dark"] as const)("by %s", (colorScheme) => {
   describe.each([1440, 390])("%i pixels wide", (width) => {
     const viewport = { width, height: 900 };
 
-    it("the sign-in page meets WCAG 2.2 AA", async () => {
+    it("the pages that are open to everyone meet WCAG 2.2 AA", async () => {
       const { page, context } = await openPage(browser, { colorScheme, viewport });
       await page.goto(server.origin);
       await page.getByRole("heading", { name: "Sign in" }).waitFor();
+      expect(await violations(page)).toEqual([]);
+      await page.getByRole("link", { name: /Handbook/ }).click();
+      await page.getByRole("heading", { name: "Handbook", level: 1 }).waitFor();
       expect(await violations(page)).toEqual([]);
       await context.close();
     });
@@ -66,6 +69,12 @@ describe.each(["light", "dark"] as const)("by %s", (colorScheme) => {
       await page.goto(`${server.origin}/account`);
       await page.getByRole("heading", { level: 1 }).waitFor();
       await look("account");
+      await page.goto(`${server.origin}/handbook?pairs=all`);
+      await page.getByRole("heading", { name: "Handbook", level: 1 }).waitFor();
+      await look("handbook");
+      await page.getByRole("button", { name: "Put into a notebook: Mars" }).click();
+      await page.getByRole("dialog").waitFor();
+      await look("putting into a notebook");
       await page.goto(`${server.origin}/nowhere`);
       await page.getByRole("heading", { level: 1 }).waitFor();
       await look("not found");

@@ -12,6 +12,8 @@ export interface CollisionRow {
    * from another pair. `fitted`: a law fitted here to a printed table of D.
    */
   basis: "measured" | "estimated" | "fitted";
+  /** Temperatures that the law was found for, K, where they are known. */
+  validTemperatures?: { from: number; to: number };
   provenance: Provenance;
 }
 
@@ -22,7 +24,14 @@ const row = (
   exponent: number,
   basis: CollisionRow["basis"],
   provenance: Provenance,
-): CollisionRow => ({ gases: [first, second], coefficient, exponent, basis, provenance });
+): CollisionRow => ({
+  gases: [first, second],
+  coefficient,
+  exponent,
+  basis,
+  ...(provenance === crc && { validTemperatures: crcTemperatures }),
+  provenance,
+});
 
 const masonMarrero: Provenance = {
   source: "Pavlov2019",
@@ -47,6 +56,7 @@ const crc: Provenance = {
   mark: "secondary",
   note: "fitted to the D printed for 101,325 Pa, within 200 to 673 K",
 };
+const crcTemperatures = { from: 200, to: 673 };
 
 /**
  * What is published for each pair. The first `measured` row of a pair is its default (`collisionParameter`); the

@@ -90,10 +90,15 @@ export function SignInPage({ demo, onSignedIn, ended }: SignInPageProps) {
           <p className="pt-8 type-label text-ink3">Demonstration accounts of an invented group.</p>
         </section>
       )}
-      <p className="pt-28 type-label">
+      <p className="flex flex-wrap gap-x-18 gap-y-6 pt-28 type-label">
         <Link to="/accounts/new" className="no-underline hover:underline">
           Create an account
         </Link>
+        {!ended && (
+          <Link to="/handbook" className="no-underline hover:underline">
+            Handbook, open to everyone
+          </Link>
+        )}
       </p>
     </SignInFrame>
   );

@@ -9,6 +9,7 @@ import { Message } from "../../ui/Message";
 import { Opening } from "../../ui/Opening";
 import { Page } from "../../ui/Page";
 import { ProblemPage } from "../../ui/ProblemPage";
+import { SearchField } from "../../ui/SearchField";
 import { TextButton } from "../../ui/TextButton";
 import { WordMenu } from "../../ui/WordMenu";
 import type { Beginning } from "./NewNotebookDialog";
@@ -16,7 +17,6 @@ import { NoNotebooks } from "./NoNotebooks";
 import { NotebookLine } from "./NotebookLine";
 import { NotebookShelf } from "./NotebookShelf";
 import { notebooksQuery } from "./notebooksQueries";
-import { SearchField } from "./SearchField";
 import { useFileDrop } from "./useFileDrop";
 import { useListFilters, type ListOrder, type ListPlace } from "./useListFilters";
 import "./notebooks.css";
@@ -66,7 +66,9 @@ export function NotebooksPage({ groups }: { groups: readonly GroupSummary[] }) {
       <div className="flex flex-wrap items-center justify-between gap-x-18 gap-y-18 pt-28 wide:pt-44">
         <h1 className="type-display">Notebooks</h1>
         <div data-print="never" className="flex w-full items-center gap-16 wide:w-auto">
-          {!isBare && <SearchField value={filters.q} onChange={handleSearch} />}
+          {!isBare && (
+            <SearchField label="Search titles and owners" value={filters.q} onChange={handleSearch} />
+          )}
           {!isBare && (
             <Button tone="main" onClick={() => openNew("outline")}>
               New notebook

@@ -1,4 +1,5 @@
-import { useEffect, useId, useRef, useState, type PropsWithChildren, type ReactNode } from "react";
+import { useId, useState, type PropsWithChildren, type ReactNode } from "react";
+import { ScrollBox } from "./ScrollBox";
 import "./tables.css";
 
 interface TableFrameProps {
@@ -41,32 +42,6 @@ export function TableFrame({ number, caption, text, notes, children }: PropsWith
       {notes}
       <AllDigits text={text} />
     </section>
-  );
-}
-
-/** A table wider than its page can be drawn past, by hand or, then, by key. */
-function ScrollBox({ label, children }: PropsWithChildren<{ label: string }>) {
-  const ref = useRef<HTMLDivElement>(null);
-  const [isWide, setIsWide] = useState(false);
-  useEffect(() => {
-    const box = ref.current;
-    if (!box || typeof ResizeObserver === "undefined") return undefined;
-    // Asked after layout, so that no key that changes a number waits for one.
-    const observer = new ResizeObserver(() => setIsWide(box.scrollWidth > box.clientWidth + 1));
-    observer.observe(box);
-    if (box.firstElementChild) observer.observe(box.firstElementChild);
-    return () => observer.disconnect();
-  }, []);
-  return (
-    <div
-      ref={ref}
-      className="table-scroll"
-      role={isWide ? "region" : undefined}
-      aria-label={isWide ? label : undefined}
-      tabIndex={isWide ? 0 : undefined}
-    >
-      {children}
-    </div>
   );
 }
 

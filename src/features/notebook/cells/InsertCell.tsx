@@ -1,5 +1,5 @@
 import { DropdownMenu } from "radix-ui";
-import { memo, useRef, useState } from "react";
+import { lazy, memo, Suspense, useRef, useState } from "react";
 import { cellSchemas } from "../../../../shared/notebook/cellSchemas";
 import { cellKinds, type CellKind } from "../../../../shared/notebook/document";
 import type { CellCommands } from "./useCellCommands";
@@ -9,6 +9,10 @@ const groups = [...new Set(cellKinds.map((kind) => cellSchemas[kind].group))].ma
   words,
   kinds: cellKinds.filter((kind: CellKind) => cellSchemas[kind].group === words),
 }));
+
+const HandbookChooser = lazy(() =>
+  import("./HandbookChooser").then((file) => ({ default: file.HandbookChooser })),
+);
 
 interface InsertCellProps {
   /** Place of the new cell. */
@@ -33,11 +37,11 @@ export const InsertCell = memo(function InsertCell({
   isLast,
   commands,
 }: InsertCellProps) {
-  const [isOpen, setOpen] = useState(false);
+  const [open, setOpen] = useState<"menu" | "handbook" | null>(null);
   const caret = useRef<HTMLButtonElement>(null);
 
   const handleClose = () => {
-    setOpen(false);
+    setOpen(null);
     requestAnimationFrame(() => {
       // A cell just inserted has taken the focus to itself.
       if (document.activeElement === document.body) caret.current?.focus({ preventScroll: true });
@@ -46,8 +50,13 @@ export const InsertCell = memo(function InsertCell({
 
   return (
     <div className="insert" data-last={isLast || undefined} data-print="never">
-      {isOpen ? (
-        <KindMenu place={place} onClose={handleClose} onKind={(kind) => commands.insert(kind, index)} />
+      {open === "menu" ? (
+        <KindMenu
+          place={place}
+          onClose={handleClose}
+          onKind={(kind) => commands.insert(kind, index)}
+          onHandbook={() => setOpen("handbook")}
+        />
       ) : (
         <button
           ref={caret}
@@ -57,10 +66,21 @@ export const InsertCell = memo(function InsertCell({
           aria-label={`Insert a cell ${place}`}
           aria-haspopup="menu"
           aria-expanded={false}
-          onClick={() => setOpen(true)}
+          onClick={() => setOpen("menu")}
         >
           <CaretFace />
         </button>
+      )}
+      {open === "handbook" && (
+        <Suspense>
+          <HandbookChooser
+            onClose={handleClose}
+            onChoose={(choices) => {
+              commands.insertFromHandbook(choices, index);
+              handleClose();
+            }}
+          />
+        </Suspense>
       )}
     </div>
   );
@@ -70,11 +90,13 @@ interface KindMenuProps {
   place: string;
   onClose: () => void;
   onKind: (kind: CellKind) => void;
+  onHandbook: () => void;
 }
 
-function KindMenu({ place, onClose, onKind }: KindMenuProps) {
+function KindMenu({ place, onClose, onKind, onHandbook }: KindMenuProps) {
+  const hasMovedOn = useRef(false);
   return (
-    <DropdownMenu.Root modal={false} open onOpenChange={(open) => open || onClose()}>
+    <DropdownMenu.Root modal={false} open onOpenChange={(open) => open || hasMovedOn.current || onClose()}>
       <DropdownMenu.Trigger className="insert-caret" aria-label={`Insert a cell ${place}`}>
         <CaretFace />
       </DropdownMenu.Trigger>
@@ -105,6 +127,21 @@ function KindMenu({ place, onClose, onKind }: KindMenuProps) {
               </div>
             </DropdownMenu.Group>
           ))}
+          <DropdownMenu.Group className="insert-group">
+            <DropdownMenu.Label className="insert-group-words">take over</DropdownMenu.Label>
+            <DropdownMenu.Item
+              className="insert-kind"
+              textValue="handbook"
+              onSelect={() => {
+                // The menu closes after this; what takes its place must not be closed with it.
+                hasMovedOn.current = true;
+                onHandbook();
+              }}
+            >
+              <b>handbook</b>
+              <span>a body, gas, pair or constant, with its sources</span>
+            </DropdownMenu.Item>
+          </DropdownMenu.Group>
         </DropdownMenu.Content>
       </DropdownMenu.Portal>
     </DropdownMenu.Root>

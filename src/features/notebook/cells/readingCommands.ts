@@ -7,6 +7,7 @@ export const readingCommands: CellCommands = {
   write: nothing,
   replace: nothing,
   insert: nothing,
+  insertFromHandbook: nothing,
   remove: nothing,
   rename: nothing,
   move: nothing,

@@ -1,6 +1,8 @@
 import { useEffect, useRef, useState } from "react";
+import { addHandbookCell } from "../../../../shared/notebook/addHandbookCell";
 import type { CellKind, NotebookDocument } from "../../../../shared/notebook/document";
 import type { DocumentEdit } from "../../../../shared/notebook/editDocument";
+import type { HandbookCell } from "../../../../shared/notebook/handbookCells";
 import type { TextRange } from "../../../../shared/notebook/result";
 import { useNotify, type Notice } from "../../../ui/Notices";
 import { cellTitle } from "./cellTitle";
@@ -58,6 +60,16 @@ function createCellCommands(now: () => Surroundings, onNewCell: (id: string) => 
       const cell = newCell(kind, now().document, index);
       now().edit({ type: "insertCell", index, cell }, `${cellTitle(cell)} inserted`);
       onNewCell(cell.id);
+    },
+    /** Puts a row of the handbook in, written as a cell: the first of `choices` that the notebook has room for. */
+    insertFromHandbook(choices: readonly HandbookCell[], index: number): void {
+      const added = addHandbookCell(now().document, choices, crypto.randomUUID(), index);
+      if (!added.ok) {
+        now().notify({ state: "fault", text: added.message });
+        return;
+      }
+      now().edit({ type: "insertCell", index, cell: added.cell }, `${cellTitle(added.cell)} inserted`);
+      onNewCell(added.cell.id);
     },
     remove(id: string): void {
       const cell = cellOf(id);

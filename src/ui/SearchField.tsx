@@ -1,7 +1,9 @@
 import { useEffect, useState } from "react";
-import { Field } from "../../ui/Field";
+import { Field } from "./Field";
 
 interface SearchFieldProps {
+  /** What it looks in: "Search titles and owners". */
+  label: string;
   value: string;
   onChange: (value: string) => void;
 }
@@ -9,8 +11,8 @@ interface SearchFieldProps {
 /** How long typing must rest before the list is asked for, ms. */
 const rest = 220;
 
-/** Looks in titles and owners’ names, once typing rests. */
-export function SearchField({ value, onChange }: SearchFieldProps) {
+/** A word to look for, asked once typing rests. */
+export function SearchField({ label, value, onChange }: SearchFieldProps) {
   const [text, setText] = useState(value);
   const [shown, setShown] = useState(value);
   if (value !== shown) {
@@ -33,10 +35,10 @@ export function SearchField({ value, onChange }: SearchFieldProps) {
 
   return (
     <Field
-      label="Search titles and owners"
+      label={label}
       labelHidden
       type="search"
-      placeholder="Search titles and owners"
+      placeholder={label}
       autoComplete="off"
       maxLength={200}
       value={text}

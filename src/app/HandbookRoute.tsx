@@ -1,0 +1,1 @@
+export { HandbookPage as default } from "../features/handbook/HandbookPage";
