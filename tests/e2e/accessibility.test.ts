@@ -82,6 +82,9 @@ describe.each(["light", "dark"] as const)("by %s", (colorScheme) => {
       await openNotebook(page, /Escape of hydrogen from Ilmara/);
       await seeFirstFigure(page);
       await look("notebook");
+      await page.goto(`${page.url()}/compare?older=1&newer=draft`);
+      await seeFirstFigure(page);
+      await look("two states compared");
       for (const [name, list] of Object.entries(found)) expect(list, name).toEqual([]);
       await context.close();
     });

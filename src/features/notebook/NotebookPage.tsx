@@ -1,10 +1,12 @@
 import { useQuery } from "@tanstack/react-query";
-import { useMemo } from "react";
+import { lazy, Suspense, useMemo } from "react";
 import { Route, Routes, useParams } from "react-router-dom";
 import type { NotebookResponse } from "../../../shared/schemas/notebooks";
 import { useAccount } from "../../lib/session";
 import { ApiError } from "../../lib/ApiError";
+import { fetchPart } from "../../lib/fetchPart";
 import { CautionFooter } from "../../ui/CautionFooter";
+import { Opening } from "../../ui/Opening";
 import { ProblemPage } from "../../ui/ProblemPage";
 import { NotebookDesk } from "./NotebookDesk";
 import { notebookQuery } from "./notebookQueries";
@@ -14,7 +16,12 @@ import { KeptVersion } from "./versions/KeptVersion";
 import { VersionList } from "./versions/VersionList";
 import "./notebook.css";
 
-/** A notebook, the list of its versions, or one of them, as the rest of the address says. */
+const ComparePage = lazy(async () => {
+  const file = await fetchPart(() => import("./compare/ComparePage"));
+  return { default: file.ComparePage };
+});
+
+/** A notebook, the list of its versions, one of them, or two compared, as the rest of the address says. */
 export function NotebookPage() {
   const { notebookId = "" } = useParams();
   const account = useAccount();
@@ -32,6 +39,14 @@ export function NotebookPage() {
     <Routes>
       <Route index element={<NotebookDesk key={notebookId} notebook={notebook.data} person={person} />} />
       <Route path="versions" element={<VersionList notebook={notebook.data} />} />
+      <Route
+        path="compare"
+        element={
+          <Suspense fallback={<Opening what="the comparison" />}>
+            <ComparePage notebook={notebook.data} />
+          </Suspense>
+        }
+      />
       <Route path="versions/:number" element={<VersionAt notebook={notebook.data} />} />
       <Route path="*" element={<NotebookProblem error={noSuchPage} />} />
     </Routes>

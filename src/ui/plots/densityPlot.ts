@@ -1,4 +1,4 @@
-import type { Data, Layout, Shape } from "plotly.js";
+import type { Annotation, Data, Layout, Shape } from "plotly.js";
 import type { Strip } from "../../../shared/notebook/summary";
 import { formatKilometres, formatUnit, type UnitSystem } from "../../lib/format";
 import type { GasStyle } from "../../lib/gasStyle";
@@ -45,7 +45,7 @@ export interface DensityPlot {
 type FigureDash = NonNullable<NonNullable<Shape["line"]>["dash"]>;
 
 /** A list of lengths, which the library takes though its types name only a few patterns. */
-const dashList = (dash: string): FigureDash =>
+export const dashList = (dash: string): FigureDash =>
   (dash === "" ? "solid" : dash.replace(/ /g, "px,").concat("px")) as FigureDash;
 
 function gasTraces({ curves, styles, inks, hidden }: DensityPlotInput): Data[] {
@@ -88,12 +88,12 @@ const nameWidth = (gas: string): number =>
     4,
   );
 
-function namePlaces(
-  input: DensityPlotInput,
+/** Where the names of gases stand beside their curves. */
+export function namePlaces(
+  { room, curves }: Pick<DensityPlotInput, "room" | "curves">,
   scale: PanelScale,
   obstacles: readonly Box[],
 ): Map<string, PlacedName> {
-  const { room, curves } = input;
   const frame: Box = { left: 4, right: room.panel - 2, top: 4, bottom: room.tall - 6 };
   const placed = curves.map(({ gas, below, above }) => ({
     key: gas,
@@ -123,20 +123,71 @@ function homopauseTicks({ strip, inks }: DensityPlotInput): Partial<Shape>[] {
     }));
 }
 
-function temperatureRange({ profiles, strip }: DensityPlotInput): [number, number] {
-  const values = drawnRows(profiles, strip).map((row) => profiles.temperature![row]!);
-  const [low, high] = [Math.min(...values), Math.max(...values)];
+/** Names at their places, those that found one, in the order of the curves. */
+export function gasNames(
+  { styles, inks, hidden }: Pick<DensityPlotInput, "styles" | "inks" | "hidden">,
+  curves: readonly GasCurve[],
+  places: ReadonlyMap<string, PlacedName>,
+  scale: PanelScale,
+): Partial<Annotation>[] {
+  const { sans } = figureFonts();
+  return curves.flatMap(({ gas }) => {
+    const place = places.get(gas);
+    if (!place) return [];
+    const { x, y, anchor } = place;
+    const at = {
+      x: scale.decade(x),
+      y: scale.km(y),
+      xanchor: anchor === "start" ? "left" : "right",
+    } as const;
+    return {
+      ...note(
+        `<span style="font-weight:650">${figureText(styles.get(gas)!.name)}</span>`,
+        { ...at, yanchor: "middle" },
+        { family: sans, size: 14.5, color: inks[gas]! },
+      ),
+      captureevents: true,
+      opacity: hidden.has(gas) ? 0.4 : 1,
+    };
+  });
+}
+
+/** The axes of the temperature beside the densities, for temperatures from `low` to `high`. */
+export function temperaturePanel(
+  { room, inks }: Pick<DensityPlotInput, "room" | "inks">,
+  altitudes: [number, number],
+  [low, high]: readonly [number, number],
+): Partial<Layout> {
+  const total = room.panel + room.gap + room.second;
   const margin = Math.max(0.12 * (high - low), 0.04 * high);
-  return [Math.max(0, low - margin), high + margin];
+  return {
+    xaxis2: {
+      ...plainAxis(inks, "temperature, K", room.second, [Math.max(0, low - margin), high + margin]),
+      domain: [(room.panel + room.gap) / total, 1],
+      anchor: "y2",
+      fixedrange: true,
+    },
+    yaxis2: {
+      ...altitudeAxis(inks, room, altitudes),
+      title: { text: "" },
+      anchor: "x2",
+      matches: "y",
+      showticklabels: false,
+    },
+  };
+}
+
+function temperatureEnds({ profiles, strip }: DensityPlotInput): [number, number] {
+  const values = drawnRows(profiles, strip).map((row) => profiles.temperature![row]!);
+  return [Math.min(...values), Math.max(...values)];
 }
 
 /** Number density of each gas against altitude, and the temperature it rests on. */
 export function densityPlot(input: DensityPlotInput): DensityPlot {
-  const { profiles, strip, room, inks, curves, styles, hidden, zoom, unitSystem } = input;
+  const { profiles, strip, room, inks, curves, zoom, unitSystem } = input;
   const altitudes: [number, number] = zoom?.y ?? [strip.base / 1000, strip.top / 1000];
   const decades = zoom?.x ?? densityDecades(curves);
   const scale = panelScale(room, decades, altitudes);
-  const { sans } = figureFonts();
   const panels: ("x" | "x2")[] = room.second > 0 ? ["x", "x2"] : ["x"];
   const lettering = exobaseNotes(strip, room, inks, scale, "right");
   const homopauseBoxes = strip.homopauses.map(({ altitude }): Box => {
@@ -145,46 +196,11 @@ export function densityPlot(input: DensityPlotInput): DensityPlot {
   });
   const places = namePlaces(input, scale, [...lettering.boxes, ...homopauseBoxes]);
   const named = curves.map(({ gas }) => gas).filter((gas) => places.has(gas));
-  const names = named.map((gas) => {
-    const { x, y, anchor } = places.get(gas)!;
-    const place = {
-      x: scale.decade(x),
-      y: scale.km(y),
-      xanchor: anchor === "start" ? "left" : "right",
-    } as const;
-    return {
-      ...note(
-        `<span style="font-weight:650">${figureText(styles.get(gas)!.name)}</span>`,
-        { ...place, yanchor: "middle" },
-        { family: sans, size: 14.5, color: inks[gas]! },
-      ),
-      captureevents: true,
-      opacity: hidden.has(gas) ? 0.4 : 1,
-    };
-  });
   const exobaseLines =
     strip.exobase === null
       ? []
       : panels.map((panel) => acrossLine(panel, strip.exobase! / 1000, inks.ink!, 1.4));
   const total = room.panel + room.gap + room.second;
-  const second: Partial<Layout> =
-    room.second > 0
-      ? {
-          xaxis2: {
-            ...plainAxis(inks, "temperature, K", room.second, temperatureRange(input)),
-            domain: [(room.panel + room.gap) / total, 1],
-            anchor: "y2",
-            fixedrange: true,
-          },
-          yaxis2: {
-            ...altitudeAxis(inks, room, altitudes),
-            title: { text: "" },
-            anchor: "x2",
-            matches: "y",
-            showticklabels: false,
-          },
-        }
-      : {};
   const temperature = { ...temperatureTrace(input), yaxis: "y2" } as Data;
   const unit = figureText(formatUnit(densityUnit(unitSystem).unit));
   return {
@@ -197,9 +213,9 @@ export function densityPlot(input: DensityPlotInput): DensityPlot {
         anchor: "y",
       },
       yaxis: { ...axis(inks, "altitude, km"), ...altitudeAxis(inks, room, altitudes), anchor: "x" },
-      ...second,
+      ...(room.second > 0 && temperaturePanel(input, altitudes, temperatureEnds(input))),
       shapes: [...knudsenBand(profiles, panels, inks.ink!, 0.3), ...exobaseLines, ...homopauseTicks(input)],
-      annotations: [...names, ...lettering.notes],
+      annotations: [...gasNames(input, curves, places, scale), ...lettering.notes],
     },
     named,
     unnamed: curves.map(({ gas }) => gas).filter((gas) => !places.has(gas)),

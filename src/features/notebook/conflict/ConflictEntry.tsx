@@ -1,5 +1,6 @@
 import type { Conflict, Side } from "../draft/mergeDocuments";
-import { differingPart } from "./differingPart";
+import { entryValue } from "./entryValue";
+import { MarkedText } from "./MarkedText";
 
 interface ConflictEntryProps {
   conflict: Conflict;
@@ -41,8 +42,8 @@ interface SideButtonProps {
 }
 
 function SideButton({ conflict, of, owner, isStanding, onChoose }: SideButtonProps) {
-  const text = valueOf(conflict[of], conflict.label);
-  const opposite = valueOf(conflict[of === "mine" ? "theirs" : "mine"], conflict.label);
+  const text = entryValue(conflict[of], conflict.label);
+  const opposite = entryValue(conflict[of === "mine" ? "theirs" : "mine"], conflict.label);
   return (
     <button
       type="button"
@@ -55,28 +56,9 @@ function SideButton({ conflict, of, owner, isStanding, onChoose }: SideButtonPro
       {text === null ? (
         <i className="conflict-nothing">{conflict.label === "cell" ? "removed" : "no such entry"}</i>
       ) : (
-        <Marked text={text} other={opposite ?? ""} />
+        <MarkedText text={text} other={opposite ?? ""} />
       )}
       <span className="conflict-standing">{isStanding ? `${owner} stands` : "take this one"}</span>
     </button>
   );
-}
-
-/** What differs from the other state, washed. */
-function Marked({ text, other }: { text: string; other: string }) {
-  const { before, part, after } = differingPart(text, other);
-  return (
-    <code className="conflict-text">
-      {before}
-      {part !== "" && <mark>{part}</mark>}
-      {after}
-    </code>
-  );
-}
-
-/** The name stands on the spine, so what is written after it suffices. */
-function valueOf(text: string | null, label: string): string | null {
-  if (text === null) return null;
-  const [head, ...rest] = text.split("=");
-  return head?.trim() === label ? rest.join("=").trim() : text;
 }

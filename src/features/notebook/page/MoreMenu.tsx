@@ -67,6 +67,9 @@ export function MoreMenu({
           </>
         )}
         <MenuLink to={`/notebooks/${notebook.id}/versions`}>Versions</MenuLink>
+        {notebook.lastVersion !== null && (
+          <MenuLink to={`/notebooks/${notebook.id}/compare`}>Compare</MenuLink>
+        )}
         <MenuItem onSelect={() => void downloadNotebook(document)}>Export as Markdown</MenuItem>
         <MenuItem onSelect={() => setTimeout(() => window.print(), 50)}>Print</MenuItem>
         {headline && <MenuItem onSelect={() => setShown("headline")}>Headline</MenuItem>}

@@ -84,6 +84,12 @@ function VersionLine({ notebook, version }: { notebook: NotebookResponse; versio
         <Link to={address} aria-label={`Open version ${version.number}`}>
           Open
         </Link>
+        <Link
+          to={`/notebooks/${notebook.id}/compare?older=${version.number}&newer=draft`}
+          aria-label={`Compare version ${version.number} with the draft`}
+        >
+          Compare
+        </Link>
         {notebook.abilities.restoreVersion && <RestoreVersion notebook={notebook} number={version.number} />}
       </span>
     </li>
