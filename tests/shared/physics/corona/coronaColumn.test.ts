@@ -5,6 +5,7 @@ import { limbColumn, overheadColumn } from "../../../../shared/physics/corona/co
 import { type Corona, coronaDensity } from "../../../../shared/physics/corona/coronaDensity";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import exact from "../../../fixtures/coronaPartition.json";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -41,10 +42,24 @@ describe.each([
 ])("$name", ({ name, column, log, logSatellites }) => {
   it.each(exact.columns)("at λ_c = $exobaseEscapeParameter, r = $radius r_c is mpmath's", (row) => {
     const free = column({ ...corona, ...row }, row.radius);
-    expect(Math.abs(free.log10Column * Math.LN10 - row[log])).toBeLessThan(1e-10);
+    expect(free.log10Column * Math.LN10).toAgreeWith({
+      what: `logarithm of the ${name}, ballistic and escaping`,
+      unit: "1",
+      published: row[log],
+      within: { absolute: 1e-10 },
+      source: "MPMath",
+      mark: "computed independently",
+    });
     const full = column({ ...corona, ...row, satelliteFraction: 1 }, row.radius);
     const all = row[log] + Math.log1p(Math.exp(row[logSatellites] - row[log]));
-    expect(Math.abs(full.log10Column * Math.LN10 - all)).toBeLessThan(1e-10);
+    expect(full.log10Column * Math.LN10).toAgreeWith({
+      what: `logarithm of the ${name}, with satellites`,
+      unit: "1",
+      published: all,
+      within: { absolute: 1e-10 },
+      source: "MPMath",
+      mark: "computed independently",
+    });
   });
 
   it("adds up the density along the line", () => {
