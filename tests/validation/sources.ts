@@ -41,7 +41,9 @@ const sourcesOfChecks: Readonly<Record<string, string>> = {
   SaltelliSobol1995:
     "A. Saltelli and I. M. Sobol (1995), About the use of rank transformation in sensitivity analysis of model output, Reliab. Eng. Syst. Saf. 50, 225–239.",
   SeparateProgram:
-    "A separate program in double precision, run before this code existed; its inputs and numbers are in tests/fixtures.",
+    "A separate program in double precision, run before this code existed; its inputs and numbers are in the tests and in tests/fixtures.",
+  Strobel2009:
+    "D. F. Strobel (2009), Titan's hydrodynamically escaping atmosphere: escape rates and the structure of the exobase region, Icarus 202, 632–641.",
   Strobel2010:
     "D. F. Strobel (2010), Molecular hydrogen in Titan's atmosphere: implications of the measured tropospheric and thermospheric mole fractions, Icarus 208, 878–886.",
   Textbook: "As widely printed in textbooks.",

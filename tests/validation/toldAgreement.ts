@@ -40,6 +40,12 @@ export function writeNumber(value: number, digits = 6): string {
   return text.replace("e+", "e").replace(/^-/, "−");
 }
 
+/** A number as its source prints it; what has more digits than print, a computed one, in six. */
+export function writePublished(value: number): string {
+  const asPrinted = Number(value.toPrecision(12));
+  return writeNumber(value, asPrinted === value ? 12 : 6);
+}
+
 /** Below this, ours and the outside number are told to be the same unless the tolerance is as small. */
 const hardlyAny = 1e-12;
 

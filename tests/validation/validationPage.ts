@@ -1,7 +1,15 @@
 /** The text of `docs/validation.md`, from what the tests compared. */
 import { type Agreement, isCompared, isRange, type Section, sections } from "./agreement";
 import { citation } from "./sources";
-import { collapse, type ToldAgreement, writeDeviation, writeNumber, writeTolerance } from "./toldAgreement";
+import { testedLaws } from "./testedLaws";
+import {
+  collapse,
+  type ToldAgreement,
+  writeDeviation,
+  writeNumber,
+  writePublished,
+  writeTolerance,
+} from "./toldAgreement";
 
 const headings: Record<Exclude<Section, "magnitude">, string> = {
   constants: "Constants",
@@ -43,7 +51,7 @@ Each row is a check that a test asserts.
   _computed_, by another program or by hand, from a formula or inputs of the source.
 
 Laws, limits and identities that need no outside number (conservation, closed forms, symmetry, monotonicity,
-independence of steps) are tests as well, and are listed in the second table.
+independence of steps) are tests as well; "Laws and limits" says which file holds them.
 `;
 
 const magnitudes = `## Orders of magnitude
@@ -54,18 +62,23 @@ published numbers come from models with chemistry, heating and measured profiles
 ratios show what a first look is worth, good and bad alike.
 `;
 
+const lawsHead = `## Laws and limits
+
+What must hold whatever the numbers are. Each of these is a test; the file is under \`tests/shared\`.
+`;
+
 /** Rows in the order of their files and tests, with the section of each. */
 export interface SectionedAgreement {
   section: Section;
   row: Agreement;
 }
 
-export function validationPage(agreements: readonly SectionedAgreement[], laws: string): string {
+export function validationPage(agreements: readonly SectionedAgreement[]): string {
   const parts = [introduction];
   for (const section of sections) {
     const rows = agreements.filter((one) => one.section === section).map(({ row }) => row);
     if (rows.length === 0) continue;
-    if (section === "magnitude") parts.push(laws, magnitudes, magnitudeTable(rows));
+    if (section === "magnitude") parts.push(lawsHead, lawsTable(), magnitudes, magnitudeTable(rows));
     else parts.push(`## ${headings[section]}\n`, checkTable(rows));
   }
   const keys = [...new Set(agreements.map(({ row }) => row.source))].sort();
@@ -81,6 +94,12 @@ function table(head: readonly string[], rows: readonly (readonly string[])[]): s
     `| ${cells.map((text) => text.replace(/\|/g, "\\|")).join(" | ")} |`;
   return `${[line(head), line(head.map(() => "---")), ...rows.map(line)].join("\n")}\n`;
 }
+
+const lawsTable = (): string =>
+  table(
+    ["law", "file"],
+    testedLaws.map(({ law, file }) => [law, `\`${file}\``]),
+  );
 
 const unitOf = ({ unit }: Agreement): string => (unit === "1" ? "" : unit);
 
@@ -101,7 +120,7 @@ function checkRow({ worst, count }: ToldAgreement): string[] {
     worst.what,
     String(count),
     unitOf(worst),
-    isRange(worst) || isCompared(worst) ? "" : writeNumber(worst.published),
+    isRange(worst) || isCompared(worst) ? "" : writePublished(worst.published),
     writeNumber(worst.ours),
     isRange(worst) || isCompared(worst) ? "" : writeDeviation(worst),
     isCompared(worst) ? "" : writeTolerance(worst),

@@ -1,27 +1,17 @@
 /** Numbers from outside, reached as a user reaches them: by what is written in a notebook. */
-import { readFileSync } from "node:fs";
-import path from "node:path";
 import { describe, expect, it } from "vitest";
 import { evaluateNotebook } from "../../../shared/notebook/evaluateNotebook";
-import { readNotebookFile } from "../../../shared/notebook/notebookFile";
 import type { ResultRow } from "../../../shared/notebook/result";
 import jeansCases from "../../fixtures/jeansCases.json";
 import standard from "../../fixtures/standardAtmosphere1976.json";
 import "../../toAgreeWith";
 import "../../toBeCloseToRelative";
 import { numberIn, resultOf } from "./evaluateCells";
+import { fixtureNotebook } from "./fixtureNotebook";
 import { notebookWithExobaseAt, type radiiKm } from "./notebookWithExobaseAt";
 
-function documentOf(name: string) {
-  const file = path.join(import.meta.dirname, "../../fixtures/notebooks", name);
-  let count = 0;
-  const reading = readNotebookFile(readFileSync(file, "utf8"), () => String((count += 1)));
-  if (!reading.ok) throw new Error(reading.notes.map(({ message }) => message).join("\n"));
-  return reading.document;
-}
-
 describe("the U.S. Standard Atmosphere 1976 through a notebook, from its row at 150 km", () => {
-  const { evaluation } = evaluateNotebook(documentOf("standard-atmosphere.md"));
+  const { evaluation } = evaluateNotebook(fixtureNotebook("standard-atmosphere.md"));
   const cells = evaluation.cells.map(({ result }) => result);
   const column = cells.find(({ kind }) => kind === "column")!;
   const levelAt = (altitudeKm: number): ResultRow => {
@@ -94,7 +84,7 @@ describe("the U.S. Standard Atmosphere 1976 through a notebook, from its row at 
 describe("the exobase of the U.S. Standard Atmosphere 1976 through a notebook", () => {
   /** With d = 3.65 Å, and so much hydrogen at 150 km; the file has none. */
   const withHydrogen = (atBase: number, criterion: string) => {
-    const document = documentOf("standard-atmosphere.md");
+    const document = fixtureNotebook("standard-atmosphere.md");
     const cells = document.cells.map((cell) => {
       const text = cell.text.replace("He: 2.106e13 /m^3", `He: 2.106e13 /m^3, H: ${atBase} /m^3`);
       if (cell.kind === "gas") return { ...cell, text: `${text}\ncross_section = pi * (3.65 angstrom)^2` };
