@@ -60,7 +60,7 @@ const atmospheres: Record<string, Beside[]> = {
       unit: "km",
       published: 2900,
       source: "Young2018",
-      why: "Pressure at the ground and warm layer are from memory; a kelvin more or less over the 1700 km above moves the exobase by tens of kilometres.",
+      why: "Pressure at the ground and warm layer are from memory; a kelvin more above 700 km alone moves the exobase by 16 km.",
       ours: ofLeak("exobase.radius", 1e3),
     },
     {
@@ -76,7 +76,7 @@ const atmospheres: Record<string, Beside[]> = {
       unit: "s⁻¹",
       published: [4e25, 8e25],
       source: "Young2018",
-      why: "Supply through N2 holds the rate, so that little depends on the exobase; no chemistry takes methane away on its way up here.",
+      why: "Two thirds of what diffusion through N2 can supply, so that little depends on the exobase; no chemistry takes methane away on its way up here.",
       ours: ofLeak("CH4.rate"),
     },
   ],
@@ -86,7 +86,7 @@ const atmospheres: Record<string, Beside[]> = {
       unit: "km",
       published: 870,
       source: "Krasnopolsky1993",
-      why: "The published model has its own cross section and counts N and N2 as a temperature profile has them; one of 102 K throughout reaches a little higher.",
+      why: "The height rests on the collision diameters, which the publication and the handbook need not share, and on one temperature for all altitudes.",
       ours: ofLeak("exobase.altitude", 1e3),
     },
     {
@@ -104,7 +104,7 @@ const atmospheres: Record<string, Beside[]> = {
       unit: "km",
       published: [2700, 3000],
       source: "Koskinen2013",
-      why: "Pressure and temperature at the base and the rise to 455 K are guesses from memory; every scale height of the lower thermosphere is 40 to 200 km.",
+      why: "Pressure and temperature at the base and the rise to 455 K are guesses from memory.",
       ours: ofLeak("exobase.altitude", 1e3),
     },
     {
