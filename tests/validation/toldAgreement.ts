@@ -56,7 +56,7 @@ export function writeDeviation(row: SingleNumber & { ours: number }): string {
   const allowed = (within.relative ?? 0) + (within.absolute ?? 0) / Math.abs(published || 1);
   if (Math.abs(deviation) < hardlyAny && allowed > 10 * hardlyAny) return `below ${hardlyAny}`;
   const sign = deviation < 0 ? "−" : "+";
-  return `${sign}${Number(Math.abs(deviation).toPrecision(2)).toExponential()}`;
+  return `${sign}${Number(Math.abs(deviation).toPrecision(2)).toExponential().replace("e+", "e")}`;
 }
 
 export function writeTolerance(row: (SingleNumber | NumberRange) & { ours: number }): string {
