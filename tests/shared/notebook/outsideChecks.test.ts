@@ -1,26 +1,17 @@
 /** Numbers from outside, reached as a user reaches them: by what is written in a notebook. */
-import { readFileSync } from "node:fs";
-import path from "node:path";
 import { describe, expect, it } from "vitest";
 import { evaluateNotebook } from "../../../shared/notebook/evaluateNotebook";
-import { readNotebookFile } from "../../../shared/notebook/notebookFile";
 import type { ResultRow } from "../../../shared/notebook/result";
 import jeansCases from "../../fixtures/jeansCases.json";
 import standard from "../../fixtures/standardAtmosphere1976.json";
+import "../../toAgreeWith";
 import "../../toBeCloseToRelative";
 import { numberIn, resultOf } from "./evaluateCells";
+import { fixtureNotebook } from "./fixtureNotebook";
 import { notebookWithExobaseAt, type radiiKm } from "./notebookWithExobaseAt";
 
-function documentOf(name: string) {
-  const file = path.join(import.meta.dirname, "../../fixtures/notebooks", name);
-  let count = 0;
-  const reading = readNotebookFile(readFileSync(file, "utf8"), () => String((count += 1)));
-  if (!reading.ok) throw new Error(reading.notes.map(({ message }) => message).join("\n"));
-  return reading.document;
-}
-
 describe("the U.S. Standard Atmosphere 1976 through a notebook, from its row at 150 km", () => {
-  const { evaluation } = evaluateNotebook(documentOf("standard-atmosphere.md"));
+  const { evaluation } = evaluateNotebook(fixtureNotebook("standard-atmosphere.md"));
   const cells = evaluation.cells.map(({ result }) => result);
   const column = cells.find(({ kind }) => kind === "column")!;
   const levelAt = (altitudeKm: number): ResultRow => {
@@ -38,17 +29,38 @@ describe("the U.S. Standard Atmosphere 1976 through a notebook, from its row at 
     ),
   )("has $gas at $altitudeKm km within 0.2 %", ({ altitudeKm, gas, n }) => {
     if (n === null) return;
-    expect(levelAt(altitudeKm)[`${gas}.number_density`]).toBeCloseToRelative(n, 2e-3);
+    expect(levelAt(altitudeKm)[`${gas}.number_density`]).toAgreeWith({
+      what: `number density of ${gas} in the 1976 standard, 150 to 1000 km`,
+      unit: "m⁻³",
+      published: n,
+      within: { relative: 2e-3 },
+      source: "Minzner1976",
+      mark: "published",
+    });
   });
 
   it.each(rows)("has the temperature at $altitudeKm km within 0.01 K", ({ altitudeKm, temperature }) => {
-    expect(Math.abs((levelAt(altitudeKm).temperature as number) - temperature)).toBeLessThan(0.01);
+    expect(levelAt(altitudeKm).temperature).toAgreeWith({
+      what: "temperature of the 1976 standard, 150 to 1000 km",
+      unit: "K",
+      published: temperature,
+      within: { absolute: 0.01 },
+      source: "Minzner1976",
+      mark: "published",
+    });
   });
 
   it.each(rows.filter(({ gravity }) => gravity !== null))(
     "has gravity at $altitudeKm km within 1e-4",
     ({ altitudeKm, gravity }) => {
-      expect(levelAt(altitudeKm).gravity).toBeCloseToRelative(gravity as number, 1e-4);
+      expect(levelAt(altitudeKm).gravity).toAgreeWith({
+        what: "gravity of the 1976 standard, 150 to 1000 km",
+        unit: "m s⁻²",
+        published: gravity!,
+        within: { relative: 1e-4 },
+        source: "Minzner1976",
+        mark: "published",
+      });
     },
   );
 
@@ -58,14 +70,21 @@ describe("the U.S. Standard Atmosphere 1976 through a notebook, from its row at 
       ({ pressureScaleHeightKm, altitudeKm }) => pressureScaleHeightKm !== null && altitudeKm <= 300,
     ),
   )("has the scale height at $altitudeKm km within 5e-4", ({ altitudeKm, pressureScaleHeightKm }) => {
-    expect(levelAt(altitudeKm).scale_height).toBeCloseToRelative(pressureScaleHeightKm! * 1000, 5e-4);
+    expect(levelAt(altitudeKm).scale_height).toAgreeWith({
+      what: "pressure scale height of the 1976 standard, 150 to 300 km",
+      unit: "m",
+      published: pressureScaleHeightKm! * 1000,
+      within: { relative: 5e-4 },
+      source: "Minzner1976",
+      mark: "published",
+    });
   });
 });
 
 describe("the exobase of the U.S. Standard Atmosphere 1976 through a notebook", () => {
   /** With d = 3.65 Å, and so much hydrogen at 150 km; the file has none. */
   const withHydrogen = (atBase: number, criterion: string) => {
-    const document = documentOf("standard-atmosphere.md");
+    const document = fixtureNotebook("standard-atmosphere.md");
     const cells = document.cells.map((cell) => {
       const text = cell.text.replace("He: 2.106e13 /m^3", `He: 2.106e13 /m^3, H: ${atBase} /m^3`);
       if (cell.kind === "gas") return { ...cell, text: `${text}\ncross_section = pi * (3.65 angstrom)^2` };
@@ -85,7 +104,14 @@ describe("the exobase of the U.S. Standard Atmosphere 1976 through a notebook", 
     ["simple", 465.5],
   ])("lies by the criterion %s at %d km within 0.5 km", (criterion, altitudeKm) => {
     const result = withHydrogen((1e11 * wanted) / got, criterion).at(-1)!;
-    expect(Math.abs(numberIn(result, "exobase.altitude") / 1e3 - altitudeKm)).toBeLessThan(0.5);
+    expect(numberIn(result, "exobase.altitude") / 1e3).toAgreeWith({
+      what: `exobase of the 1976 standard by the criterion ${criterion}, d = 3.65 Å`,
+      unit: "km",
+      published: altitudeKm,
+      within: { absolute: 0.5 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 });
 
@@ -96,18 +122,53 @@ describe("escape parameters and effusion velocities of Earth and Mars through a 
     const body = row.body as keyof typeof radiiKm;
     const result = resultOf(...notebookWithExobaseAt({ ...row, body }));
     expect(numberIn(result, "exobase.radius")).toBeCloseToRelative(row.radiusKm * 1e3, 1e-7);
-    expect(numberIn(result, "exobase.escape_speed")).toBeCloseToRelative(row.escapeSpeed, 1e-4);
-    expect(numberIn(result, `${row.gas}.escape_parameter`)).toBeCloseToRelative(row.escapeParameter, 1e-4);
-    expect(numberIn(result, `${row.gas}.thermal_speed`)).toBeCloseToRelative(row.thermalSpeed, 1e-4);
-    expect(numberIn(result, `${row.gas}.effusion_velocity`)).toBeCloseToRelative(row.effusionVelocity, 1e-4);
+    expect(numberIn(result, "exobase.escape_speed")).toAgreeWith({
+      what: "escape speed at exobases of the Earth and Mars",
+      unit: "m s⁻¹",
+      published: row.escapeSpeed,
+      within: { relative: 1e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
+    expect(numberIn(result, `${row.gas}.escape_parameter`)).toAgreeWith({
+      what: "escape parameters of gases at the Earth and Mars",
+      unit: "1",
+      published: row.escapeParameter,
+      within: { relative: 1e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
+    expect(numberIn(result, `${row.gas}.thermal_speed`)).toAgreeWith({
+      what: "thermal speeds of gases at the Earth and Mars",
+      unit: "m s⁻¹",
+      published: row.thermalSpeed,
+      within: { relative: 1e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
+    expect(numberIn(result, `${row.gas}.effusion_velocity`)).toAgreeWith({
+      what: "effusion velocities of gases at the Earth and Mars",
+      unit: "m s⁻¹",
+      published: row.effusionVelocity,
+      within: { relative: 1e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
-  // Anderson and Hord (1971): 350 K, 3e4 cm⁻³ at 250 km, 1.8e8 cm⁻² s⁻¹; the published number from memory.
+  // Anderson and Hord (1971): 350 K, 3e4 cm⁻³ at 250 km, 1.8e8 cm⁻² s⁻¹.
   it("give the Martian flux of 1969 within 5 %", () => {
     const place = { body: "Mars", radiusKm: 3639.5, temperature: 350, hydrogenAtExobase: 3e10 } as const;
     const result = resultOf(...notebookWithExobaseAt(place));
     expect(numberIn(result, "H.number_density")).toBeCloseToRelative(3e10, 1e-4);
-    expect(numberIn(result, "H.jeans_flux")).toBeCloseToRelative(1.8e12, 0.05);
+    expect(numberIn(result, "H.jeans_flux")).toAgreeWith({
+      what: "Jeans flux of H from Mars in 1969: 350 K, 3e4 cm⁻³ at 250 km",
+      unit: "m⁻² s⁻¹",
+      published: 1.8e12,
+      within: { relative: 0.05 },
+      source: "AndersonHord1971",
+      mark: "from memory",
+    });
   });
 
   // Levine et al. (1978): 170 K and 1.8e6 cm⁻³ give the same flux.
@@ -119,6 +180,13 @@ describe("escape parameters and effusion velocities of Earth and Mars through a 
         ),
         "H.jeans_flux",
       );
-    expect(flux(170, 1.8e12)).toBeCloseToRelative(flux(350, 3e10), 0.04);
+    expect(flux(170, 1.8e12) / flux(350, 3e10)).toAgreeWith({
+      what: "Jeans flux of H from Mars at 170 K, 1.8e6 cm⁻³ over that of 1969",
+      unit: "1",
+      published: 1,
+      within: { relative: 0.04 },
+      source: "Levine1978",
+      mark: "published",
+    });
   });
 });

@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 import { evaluateCells, numberIn, resultOf, type WrittenCell } from "../evaluateCells";
 
@@ -13,7 +14,14 @@ describe("the tidal factor", () => {
     [4, 0.6328125],
   ])("is at ξ = %d %d", (ratio, expected) => {
     const near = body(`${star}\nxuv_radius = far.hill_radius / ${ratio}`);
-    expect(numberIn(resultOf(body(star, "far"), near), "tidal_factor")).toBeCloseToRelative(expected, 1e-12);
+    expect(numberIn(resultOf(body(star, "far"), near), "tidal_factor")).toAgreeWith({
+      what: `tidal factor at ξ = ${ratio}`,
+      unit: "1",
+      published: expected,
+      within: { relative: 1e-12 },
+      source: "Erkaev2007",
+      mark: "computed independently",
+    });
   });
 
   it("does not exist where the body overflows its Hill sphere", () => {

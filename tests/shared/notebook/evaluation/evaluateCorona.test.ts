@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 import { evaluateCells, numberIn, resultOf, type WrittenCell } from "../evaluateCells";
 import {
@@ -77,9 +78,30 @@ describe("a corona", () => {
     "agrees with the table of partition functions in row $row",
     ({ row, ballistic, satellite, escaping, barometric }) => {
       const level = halo.tables.levels[row];
-      expect(level.ballistic).toBeCloseToRelative(ballistic * barometric * density, 1e-6);
-      expect(level.satellite).toBeCloseToRelative(satellite * barometric * density, 1e-6);
-      expect(level.escaping).toBeCloseToRelative(escaping * barometric * density, 1e-6);
+      expect((level.ballistic as number) / density).toAgreeWith({
+        what: "ballistic density of a corona, λ_c = 3",
+        unit: "n_c",
+        published: ballistic * barometric,
+        within: { relative: 1e-6 },
+        source: "SeparateProgram",
+        mark: "computed independently",
+      });
+      expect((level.satellite as number) / density).toAgreeWith({
+        what: "satellite density of a corona, λ_c = 3",
+        unit: "n_c",
+        published: satellite * barometric,
+        within: { relative: 1e-6 },
+        source: "SeparateProgram",
+        mark: "computed independently",
+      });
+      expect((level.escaping as number) / density).toAgreeWith({
+        what: "escaping density of a corona, λ_c = 3",
+        unit: "n_c",
+        published: escaping * barometric,
+        within: { relative: 1e-6 },
+        source: "SeparateProgram",
+        mark: "computed independently",
+      });
       const sum = (level.ballistic as number) + (level.satellite as number) + (level.escaping as number);
       expect(level.number_density).toBeCloseToRelative(sum, 1e-12);
     },
@@ -89,10 +111,14 @@ describe("a corona", () => {
   it("begins with ½(1 + P) of the column's density, and says so", () => {
     const [level] = halo.tables.levels;
     const share = 0.9441948874526437;
-    expect((level.ballistic as number) + (level.escaping as number)).toBeCloseToRelative(
-      share * density,
-      1e-6,
-    );
+    expect(((level.ballistic as number) + (level.escaping as number)) / density).toAgreeWith({
+      what: "share ½(1 + P) of the column's density at the exobase, λ_c = 3",
+      unit: "1",
+      published: share,
+      within: { relative: 1e-6 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
     expect(level.satellite).toBe(0);
     const step = halo.notes.find(({ code }) => code === "corona_step");
     expect(step?.message).toContain("0.9442 of the column's density");

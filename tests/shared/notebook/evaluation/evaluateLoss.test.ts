@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 import { evaluateCells, numberIn, resultOf, type WrittenCell } from "../evaluateCells";
 
@@ -28,14 +29,35 @@ describe("published numbers of losses", () => {
   // Arithmetic: 4πR² × 1000 kg/m³ × 1 m on 3389.5 km is 1.443714e17 kg.
   it("a layer of water of 1 m on a sphere of 3389.5 km is 1.443714e17 kg", () => {
     const result = answer({ ...steady, gas: "H2O", rate: "1.443714e17 kg / 18.015 u / 1 Gyr" });
-    expect(numberIn(result, "mass")).toBeCloseToRelative(1.443714e17, 1e-4);
-    expect(numberIn(result, "water_layer")).toBeCloseToRelative(1, 1e-4);
+    expect(numberIn(result, "mass")).toAgreeWith({
+      what: "mass of 1 m of water on a sphere of 3389.5 km",
+      unit: "kg",
+      published: 1.443714e17,
+      within: { relative: 1e-4 },
+      source: "Arithmetic",
+      mark: "computed independently",
+    });
+    expect(numberIn(result, "water_layer")).toAgreeWith({
+      what: "water layer of 1.443714e17 kg on a sphere of 3389.5 km",
+      unit: "m",
+      published: 1,
+      within: { relative: 1e-4 },
+      source: "Arithmetic",
+      mark: "computed independently",
+    });
   });
 
   // Arithmetic, two atoms a molecule: 0.472024 m.
   it("1e8 cm⁻² s⁻¹ of H for 1 Gyr make 0.472 m of water", () => {
     const result = answer({ ...steady, rate: "1e8 /(cm^2 s) * 4 * pi * (3389.5 km)^2" });
-    expect(numberIn(result, "water_layer")).toBeCloseToRelative(0.472024, 1e-4);
+    expect(numberIn(result, "water_layer")).toAgreeWith({
+      what: "water layer of 1e8 H cm⁻² s⁻¹ for 1 Gyr on a sphere of 3389.5 km",
+      unit: "m",
+      published: 0.472024,
+      within: { relative: 1e-4 },
+      source: "Arithmetic",
+      mark: "computed independently",
+    });
     expect(numberIn(result, "particles")).toBeCloseToRelative(
       1e12 * 4 * Math.PI * 3389.5e3 ** 2 * 3.15576e16,
       1e-12,
@@ -49,7 +71,14 @@ describe("published numbers of losses", () => {
       gas: "CO2",
       rate: "26825 kg/m^2 / 44.009 u / 1 Gyr * 4 * pi * (3389.5 km)^2",
     });
-    expect(numberIn(result, "surface_pressure")).toBeCloseToRelative(1e5, 1e-4);
+    expect(numberIn(result, "surface_pressure")).toAgreeWith({
+      what: "surface pressure of 26,825 kg/m² of CO2, g = 3.7279 m/s²",
+      unit: "Pa",
+      published: 1e5,
+      within: { relative: 1e-4 },
+      source: "Arithmetic",
+      mark: "computed independently",
+    });
     expect(result.values).not.toHaveProperty("water_layer");
     expect(result.notes.map(({ code }) => code)).toContain("no_water_layer");
   });
@@ -60,7 +89,14 @@ describe("published numbers of losses", () => {
     [2.06, 2.5],
   ])("the light of the Sun at %d Gyr was %d times today's", (age, times) => {
     const [first] = answer({ begin: `${age} Gyr` }).tables.history;
-    expect((first.rate as number) / 1e27).toBeCloseToRelative(times, 0.07);
+    expect((first.rate as number) / 1e27).toAgreeWith({
+      what: `the Sun's XUV at ${age} Gyr over today's`,
+      unit: "1",
+      published: times,
+      within: { relative: 0.07 },
+      source: "Ribas2005",
+      mark: "published",
+    });
   });
 });
 

@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 import { evaluateCells, numberIn, resultOf, type WrittenCell } from "../evaluateCells";
 import { notebookWithExobaseAt, radiiKm } from "../notebookWithExobaseAt";
@@ -34,7 +35,14 @@ describe("recombination above an exobase", () => {
       "O(1D) + O(1S)",
     ]);
     [6.99, 5.02, 3.06, 0.84].forEach((energy, row) =>
-      expect(channels[row].energy).toBeCloseToRelative(energy * electronvolt, 1e-12),
+      expect((channels[row].energy as number) / electronvolt).toAgreeWith({
+        what: "energies of the recombination channels of O2+",
+        unit: "eV",
+        published: energy,
+        within: { relative: 1e-12 },
+        source: "FoxHac1997",
+        mark: "secondary",
+      }),
     );
     expect(channels.map(({ branching }) => branching)).toEqual([0.22, 0.42, 0.31, 0.05]);
     expect(channels.map(({ escapes }) => escapes)).toEqual([2, 2, 0, 0]);
@@ -47,10 +55,24 @@ describe("recombination above an exobase", () => {
       const { message } = resultOf(...cells, hot()).notes.find(({ code }) => code === "escape_energy")!;
       return /O needs ([\d.]+).eV and gets ([\d.]+).eV at most/.exec(message)!.slice(1).map(Number);
     };
-    expect(told(mars)[0]).toBeCloseToRelative(1.978, 5e-4);
+    expect(told(mars)[0]).toAgreeWith({
+      what: "escape energy of O above Mars, at 200 km, as told",
+      unit: "eV",
+      published: 1.978,
+      within: { relative: 5e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
     expect(told(mars)[1]).toBe(3.495);
     const earth = notebookWithExobaseAt({ body: "Earth", radiusKm: 6871.0084, temperature: 1000 });
-    expect(told(earth)[0]).toBeCloseToRelative(9.617, 5e-4);
+    expect(told(earth)[0]).toAgreeWith({
+      what: "escape energy of O above the Earth, at 500 km, as told",
+      unit: "eV",
+      published: 9.617,
+      within: { relative: 5e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
     const cells = [
       ...earth,
       hot({
@@ -67,7 +89,14 @@ describe("recombination above an exobase", () => {
     const alpha = 1.953e-13 * (300 / 1000) ** 0.7;
     const rate = 2 * Math.PI * radius ** 2 * alpha * 1e10 * 2e10 * 200e3 * 0.64 * 2;
     const result = answer();
-    expect(numberIn(result, "O2+.escape_rate")).toBeCloseToRelative(rate, 1e-6);
+    expect(numberIn(result, "O2+.escape_rate")).toAgreeWith({
+      what: "hot O from constant profiles above Mars, α of Mehr and Biondi (1969)",
+      unit: "s⁻¹",
+      published: rate,
+      within: { relative: 1e-6 },
+      source: "Arithmetic",
+      mark: "computed independently",
+    });
     expect(result.values["O2+.escape_rate"].unit).toBe("s^-1");
     const mixed = answer({
       ion_density: "1e4 /cm^3",

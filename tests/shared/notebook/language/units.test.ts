@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { findUnit, isReservedUnit, unitsForCompletion } from "../../../../shared/notebook/language/units";
-import "../../../toBeCloseToRelative";
+import "../../../toAgreeWith";
 import { quantityOf } from "./evaluated";
 
 const siBrochure = "BIPM, The International System of Units, 9th edition (2019, updated 2022)";
@@ -82,10 +82,27 @@ describe("units", () => {
   });
 
   it("gives the nominal GM back as the IAU states it", () => {
-    // IAU 2015 resolution B3: (GM)_E, (GM)_J, (GM)_S
-    expect(quantityOf("G * 1 earth_mass").value).toBeCloseToRelative(3.986004e14, 2e-16);
-    expect(quantityOf("G * 1 jupiter_mass").value).toBeCloseToRelative(1.2668653e17, 2e-16);
-    expect(quantityOf("G * 1 solar_mass").value).toBeCloseToRelative(1.3271244e20, 2e-16);
+    const nominal = {
+      unit: "m³ s⁻²",
+      within: { relative: 2e-16 },
+      source: "IAU2015B3",
+      mark: "published",
+    } as const;
+    expect(quantityOf("G * 1 earth_mass").value).toAgreeWith({
+      ...nominal,
+      what: "nominal GM of the Earth, as G × earth_mass",
+      published: 3.986004e14,
+    });
+    expect(quantityOf("G * 1 jupiter_mass").value).toAgreeWith({
+      ...nominal,
+      what: "nominal GM of Jupiter, as G × jupiter_mass",
+      published: 1.2668653e17,
+    });
+    expect(quantityOf("G * 1 solar_mass").value).toAgreeWith({
+      ...nominal,
+      what: "nominal GM of the Sun, as G × solar_mass",
+      published: 1.3271244e20,
+    });
   });
 
   it("takes every SI prefix, and a unit of its own before a prefixed one", () => {

@@ -2,6 +2,7 @@ import { describe, expect, it } from "vitest";
 import type { Note } from "../../../../shared/notebook/result";
 import { numberIn, resultOf, type WrittenCell } from "../evaluateCells";
 import { answerInParts, completed, completedLast, numberOf, planet, rowsOf } from "./taskNotebooks";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const spread = (text: string): WrittenCell => ["spread", "sure", text];
@@ -10,7 +11,7 @@ const codes = ({ notes }: { notes: Note[] }) => notes.map(({ code }) => code);
 describe("a spread", () => {
   it("has the quantiles of a normal entry, within its own standard errors", () => {
     const result = completedLast(["values", "given", "x = 240 ± 30 K"], spread("watch = x"));
-    // Abramowitz and Stegun (1964), table 26.5: 16 % lie beyond 0.99446, 2.5 % beyond 1.95996 standard deviations
+    // 16 % lie beyond 0.99446, 2.5 % beyond 1.95996 standard deviations
     const expected = {
       median: 240,
       lower: 240 - 29.8337,
@@ -21,7 +22,14 @@ describe("a spread", () => {
     for (const [name, quantile] of Object.entries(expected)) {
       const error = numberIn(result, `x.${name}_error`);
       expect(error).toBeLessThan(0.3);
-      expect(Math.abs(numberIn(result, `x.${name}`) - quantile)).toBeLessThan(4 * error + 0.005);
+      expect(numberIn(result, `x.${name}`)).toAgreeWith({
+        what: `${name} of 240 ± 30 K over 4096 draws, within four of its own standard errors`,
+        unit: "K",
+        published: quantile,
+        within: { absolute: 4 * error + 0.005 },
+        source: "AbramowitzStegun1964",
+        mark: "published",
+      });
     }
     expect(result.values["x.median"].unit).toBe("K");
     expect(result.values.draws.value).toBe(4096);

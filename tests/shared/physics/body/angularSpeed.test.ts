@@ -3,14 +3,22 @@ import { describe, expect, it } from "vitest";
 
 import { angularSpeed } from "../../../../shared/physics/body/angularSpeed";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
 
 describe("angularSpeed", () => {
   it("of the Earth is 7.292115e-5 rad/s", () => {
-    // Nominal angular speed of the Earth (IERS), from memory; against the stars 86164.0989 s.
-    expect(angularSpeed({ rotationPeriod: 86164.0989 })).toBeCloseToRelative(7.292115e-5, 1e-7);
+    // Against the stars 86164.0989 s.
+    expect(angularSpeed({ rotationPeriod: 86164.0989 })).toAgreeWith({
+      what: "angular speed of the Earth",
+      unit: "rad s⁻¹",
+      published: 7.292115e-5,
+      within: { relative: 1e-7 },
+      source: "IERS",
+      mark: "from memory",
+    });
   });
 
   it("turns through a full circle in one period", () => {

@@ -5,6 +5,7 @@ import { escapeSpeed } from "../../../../shared/physics/body/escapeSpeed";
 import { gravity } from "../../../../shared/physics/body/gravity";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { findBody } from "../../../../shared/physics/handbook/handbookBodies";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -13,7 +14,7 @@ const mass = fc.double({ min: 1e8, max: 1e18, noNaN: true });
 
 describe("escapeSpeed", () => {
   it.each([
-    // NSSDC fact sheets, km/s, at the mean radius; from memory.
+    // km/s, at the mean radius.
     ["Earth", 11.19],
     ["Mars", 5.03],
     ["Venus", 10.36],
@@ -21,13 +22,27 @@ describe("escapeSpeed", () => {
   ])("of %s is %s km/s", (name, speedKm) => {
     const body = findBody(name);
     if (!body) throw new Error(`no ${name} in the handbook`);
-    expect(escapeSpeed(body) / 1e3).toBeCloseTo(speedKm, 2);
+    expect(escapeSpeed(body) / 1e3).toAgreeWith({
+      what: `escape speed of ${name} at the mean radius`,
+      unit: "km s⁻¹",
+      published: speedKm,
+      within: { absolute: 0.005 },
+      source: "NSSDC",
+      mark: "from memory",
+    });
   });
 
   it("at 500 km above the Earth is 10771.4 m/s", () => {
-    // Computed independently from GM = 398600.4355 km³ s⁻² and r = 6871.0084 km.
+    // From GM = 398600.4355 km³ s⁻² and r = 6871.0084 km.
     const place = { gravitationalParameter: 3.9860043550702266e14, radius: 6871008.4 };
-    expect(escapeSpeed(place)).toBeCloseToRelative(10771.4, 1e-5);
+    expect(escapeSpeed(place)).toAgreeWith({
+      what: "escape speed 500 km above the Earth",
+      unit: "m s⁻¹",
+      published: 10771.4,
+      within: { relative: 1e-5 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("is the speed at which kinetic energy equals the work of climbing out", () => {

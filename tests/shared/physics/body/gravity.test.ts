@@ -3,6 +3,7 @@ import { describe, expect, it } from "vitest";
 
 import { gravity } from "../../../../shared/physics/body/gravity";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -11,7 +12,7 @@ const standardEarth = 9.80665 * standardRadius ** 2;
 
 describe("gravity", () => {
   it.each([
-    // U.S. Standard Atmosphere 1976: altitude in km, g in m/s², to the digits printed.
+    // Altitude in km, g in m/s², to the digits printed.
     [86, 9.5466],
     [120, 9.4466],
     [150, 9.3597],
@@ -20,7 +21,14 @@ describe("gravity", () => {
     [1000, 7.3218],
   ])("at %s km is that of the 1976 standard", (altitudeKm, printed) => {
     const radius = standardRadius + altitudeKm * 1e3;
-    expect(gravity({ gravitationalParameter: standardEarth, radius })).toBeCloseToRelative(printed, 1e-5);
+    expect(gravity({ gravitationalParameter: standardEarth, radius })).toAgreeWith({
+      what: "gravity of the 1976 standard, 86 to 1000 km",
+      unit: "m s⁻²",
+      published: printed,
+      within: { relative: 1e-5 },
+      source: "USSA1976",
+      mark: "published",
+    });
   });
 
   it("is the slope of the potential −GM/r", () => {

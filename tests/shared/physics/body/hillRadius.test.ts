@@ -10,6 +10,7 @@ import {
   nominalSolarGravitationalParameter,
 } from "../../../../shared/physics/constants/iau";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -22,19 +23,33 @@ const earth = {
 
 describe("hillRadius", () => {
   it("of the Earth is 1.496 million km", () => {
-    // From memory, as often quoted (0.01 au).
-    expect(hillRadius(earth)).toBeCloseToRelative(1.496e9, 1e-3);
+    // As often quoted (0.01 au).
+    expect(hillRadius(earth)).toAgreeWith({
+      what: "Hill radius of the Earth",
+      unit: "m",
+      published: 1.496e9,
+      within: { relative: 1e-3 },
+      source: "Textbook",
+      mark: "from memory",
+    });
   });
 
   it("of a close-in giant is 4.1952 of its radii", () => {
-    // Computed independently for 0.682 and 1.359 Jupiters, 0.04707 au, 1.119 Suns; it does not say which GM it took
-    // for the two, and older values of their ratio differ by 1 part in 10⁴, a third of which reaches the radius.
+    // 0.682 and 1.359 Jupiters, 0.04707 au, 1.119 Suns; the program does not say which GM it
+    // took for the two, and older values of their ratio differ by 1 part in 10⁴, a third of which reaches the radius.
     const radius = hillRadius({
       gravitationalParameter: 0.682 * nominalJupiterGravitationalParameter.value,
       starGravitationalParameter: 1.119 * nominalSolarGravitationalParameter.value,
       starDistance: 0.04707 * astronomicalUnit.value,
     });
-    expect(radius / (1.359 * nominalJupiterRadius.value)).toBeCloseToRelative(4.1952, 4e-5);
+    expect(radius / (1.359 * nominalJupiterRadius.value)).toAgreeWith({
+      what: "Hill radius of a close-in giant over its radius",
+      unit: "1",
+      published: 4.1952,
+      within: { relative: 4e-5 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("balances the star's tide: GM/r² = 3 GM★ r/a³", () => {

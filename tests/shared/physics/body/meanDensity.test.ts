@@ -4,15 +4,22 @@ import { describe, expect, it } from "vitest";
 import { meanDensity } from "../../../../shared/physics/body/meanDensity";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { gravitationalConstant } from "../../../../shared/physics/constants/codata2022";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
 
 describe("meanDensity", () => {
   it("of the Earth is 5513 kg/m³", () => {
-    // NSSDC Earth fact sheet, from memory.
     const earth = { gravitationalParameter: 3.986004e14, radius: 6.371e6 };
-    expect(meanDensity(earth)).toBeCloseToRelative(5513, 2e-4);
+    expect(meanDensity(earth)).toAgreeWith({
+      what: "mean density of the Earth from GM = 3.986004e14 m³ s⁻²",
+      unit: "kg m⁻³",
+      published: 5513,
+      within: { relative: 2e-4 },
+      source: "NSSDC",
+      mark: "from memory",
+    });
   });
 
   it("times the volume is the mass", () => {

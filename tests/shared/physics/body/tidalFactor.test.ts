@@ -3,6 +3,7 @@ import { describe, expect, it } from "vitest";
 
 import { tidalFactor } from "../../../../shared/physics/body/tidalFactor";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -17,7 +18,14 @@ describe("tidalFactor", () => {
     [10, 0.8505],
     [20, 0.9250625],
   ])("at ξ = %s is %s", (xi, factor) => {
-    expect(tidalFactor({ hillRadius: xi * 7e7, xuvRadius: 7e7 })).toBeCloseToRelative(factor, 1e-12);
+    expect(tidalFactor({ hillRadius: xi * 7e7, xuvRadius: 7e7 })).toAgreeWith({
+      what: "tidal factor K(ξ), ξ from 1.5 to 20",
+      unit: "1",
+      published: factor,
+      within: { relative: 1e-12 },
+      source: "Erkaev2007",
+      mark: "computed independently",
+    });
   });
 
   it("is the climb to the Hill radius over the climb to infinity, in the star's tide", () => {

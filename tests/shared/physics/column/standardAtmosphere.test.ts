@@ -6,6 +6,7 @@ import { altitudeOf, columnProblem, heightOf } from "../../../../shared/physics/
 import { solveColumn } from "../../../../shared/physics/column/solveColumn";
 import type { CollisionParameter, ColumnInput } from "../../../../shared/physics/types";
 import standard from "../../../fixtures/standardAtmosphere1976.json";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 /**
@@ -78,20 +79,41 @@ describe("the standard atmosphere above 150 km, from its row at 150 km", () => {
       .filter(({ n }) => n !== null),
   )("has $gas at $altitudeKm km as printed, within 0.2 %", ({ gas, altitudeKm, n }) => {
     const level = column.levelAt(altitudeKm * km);
-    expect(level.numberDensities[heavies.indexOf(gas)]).toBeCloseToRelative(n as number, 2e-3);
+    expect(level.numberDensities[heavies.indexOf(gas)]).toAgreeWith({
+      what: `number density of ${gas}, 150 to 1000 km`,
+      unit: "m⁻³",
+      published: n as number,
+      within: { relative: 2e-3 },
+      source: "Minzner1976",
+      mark: "published",
+    });
   });
 
   it.each(above150)(
     "has the printed temperature within 0.01 K at $altitudeKm km",
     ({ altitudeKm, temperature }) => {
-      expect(Math.abs(column.levelAt(altitudeKm * km).temperature - temperature)).toBeLessThan(0.01);
+      expect(column.levelAt(altitudeKm * km).temperature).toAgreeWith({
+        what: "temperature, 150 to 1000 km",
+        unit: "K",
+        published: temperature,
+        within: { absolute: 0.01 },
+        source: "Minzner1976",
+        mark: "published",
+      });
     },
   );
 
   it.each(above150.filter((row) => row.gravity !== null))(
     "has the printed gravity within 1e-4 at $altitudeKm km",
     ({ altitudeKm, gravity }) => {
-      expect(column.levelAt(altitudeKm * km).gravity).toBeCloseToRelative(gravity as number, 1e-4);
+      expect(column.levelAt(altitudeKm * km).gravity).toAgreeWith({
+        what: "gravity, 150 to 1000 km",
+        unit: "m s⁻²",
+        published: gravity as number,
+        within: { relative: 1e-4 },
+        source: "Minzner1976",
+        mark: "published",
+      });
     },
   );
 
@@ -100,7 +122,14 @@ describe("the standard atmosphere above 150 km, from its row at 150 km", () => {
     "has the printed pressure scale height within 5e-4 at $altitudeKm km",
     ({ altitudeKm, pressureScaleHeightKm }) => {
       const { scaleHeight } = column.levelAt(altitudeKm * km);
-      expect(scaleHeight).toBeCloseToRelative((pressureScaleHeightKm as number) * km, 5e-4);
+      expect(scaleHeight).toAgreeWith({
+        what: "pressure scale height, 150 to 300 km",
+        unit: "m",
+        published: (pressureScaleHeightKm as number) * km,
+        within: { relative: 5e-4 },
+        source: "Minzner1976",
+        mark: "published",
+      });
     },
   );
 
@@ -109,10 +138,14 @@ describe("the standard atmosphere above 150 km, from its row at 150 km", () => {
     "has the printed mean free path within its rounding at $altitudeKm km",
     ({ altitudeKm, meanFreePath }) => {
       const rounding = (meanFreePath as number) < 100 ? 0.016 : 0.021;
-      expect(column.levelAt(altitudeKm * km).meanFreePath).toBeCloseToRelative(
-        meanFreePath as number,
-        rounding,
-      );
+      expect(column.levelAt(altitudeKm * km).meanFreePath).toAgreeWith({
+        what: "mean free path, d = 3.65 Å, 150 to 300 km, printed to two or three digits",
+        unit: "m",
+        published: meanFreePath as number,
+        within: { relative: rounding },
+        source: "Minzner1976",
+        mark: "published",
+      });
     },
   );
 });
@@ -149,7 +182,14 @@ describe("hydrogen of the standard atmosphere", () => {
       const state = stateAt(altitudeKm);
       const row = rowAt(altitudeKm);
       const n = Math.exp(state[hydrogen]) / (1.380649e-23 * row.temperature);
-      expect(n).toBeCloseToRelative(row.numberDensity.H as number, 5e-3);
+      expect(n).toAgreeWith({
+        what: "number density of H with the flux of the standard, 200 to 1000 km",
+        unit: "m⁻³",
+        published: row.numberDensity.H as number,
+        within: { relative: 5e-3 },
+        source: "Minzner1976",
+        mark: "published",
+      });
     },
   );
 
@@ -161,7 +201,14 @@ describe("hydrogen of the standard atmosphere", () => {
         (sum, gas, i) => sum + (pressures[i] / total) * (gas.mass / atomicMass.value),
         0,
       );
-      expect(molarMass).toBeCloseToRelative(rowAt(altitudeKm).meanMolarMass, 2e-3);
+      expect(molarMass).toAgreeWith({
+        what: "mean molar mass with hydrogen, at 500 and 1000 km",
+        unit: "kg kmol⁻¹",
+        published: rowAt(altitudeKm).meanMolarMass,
+        within: { relative: 2e-3 },
+        source: "Minzner1976",
+        mark: "published",
+      });
     }
   });
 });
@@ -176,7 +223,15 @@ describe("the exobase of the standard atmosphere", () => {
     expect(column.exobase.found).toBe(true);
     if (!column.exobase.found) return;
     const { altitude, knudsen, scaleHeight, meanFreePath } = column.exobase.level;
-    expect(Math.abs(altitude / km - recomputed.exobaseKm)).toBeLessThan(0.5);
+    expect(altitude / km).toAgreeWith({
+      what: "exobase of the 1976 standard, √2 and d = 3.65 Å",
+      unit: "km",
+      published: recomputed.exobaseKm,
+      within: { absolute: 0.5 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+      section: "exobase",
+    });
     expect(knudsen).toBeCloseToRelative(1, 1e-12);
     expect(meanFreePath).toBeCloseToRelative(scaleHeight, 1e-12);
   });
@@ -236,6 +291,13 @@ describe("the homopause by the standard's own D and K", () => {
     ["Ar", 100, ["N2", "O", "O2"], 28.3],
   ] as const)("of %s lies where it was recomputed, within 0.1 km", (gas, baseKm, background, molarMass) => {
     const altitude = homopauseKm(gas, baseKm, background, molarMass);
-    expect(Math.abs(altitude - recomputed.homopauseKm[gas])).toBeLessThan(0.1);
+    expect(altitude).toAgreeWith({
+      what: `homopause of ${gas} by D and K of the 1976 standard`,
+      unit: "km",
+      published: recomputed.homopauseKm[gas],
+      within: { absolute: 0.1 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 });

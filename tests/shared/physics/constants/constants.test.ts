@@ -19,6 +19,7 @@ import {
   nominalSolarIrradiance,
   nominalSolarLuminosity,
 } from "../../../../shared/physics/constants/iau";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 describe("constants", () => {
@@ -37,31 +38,92 @@ describe("constants", () => {
   });
 
   it("are exact where the SI and the IAU fix them", () => {
-    expect(boltzmann.value).toBe(1.380649e-23);
-    expect(avogadro.value).toBe(6.02214076e23);
-    expect(elementaryCharge.value).toBe(1.602176634e-19);
-    expect(astronomicalUnit.value).toBe(149597870700);
+    expect(boltzmann.value).toAgreeWith({
+      what: "Boltzmann constant",
+      unit: "J K⁻¹",
+      published: 1.380649e-23,
+      within: { relative: 0 },
+      source: "CODATA2022",
+      mark: "published",
+    });
+    expect(avogadro.value).toAgreeWith({
+      what: "Avogadro constant",
+      unit: "mol⁻¹",
+      published: 6.02214076e23,
+      within: { relative: 0 },
+      source: "CODATA2022",
+      mark: "published",
+    });
+    expect(elementaryCharge.value).toAgreeWith({
+      what: "elementary charge",
+      unit: "C",
+      published: 1.602176634e-19,
+      within: { relative: 0 },
+      source: "CODATA2022",
+      mark: "published",
+    });
+    expect(astronomicalUnit.value).toAgreeWith({
+      what: "astronomical unit",
+      unit: "m",
+      published: 149597870700,
+      within: { relative: 0 },
+      source: "IAU2012B2",
+      mark: "published",
+    });
     expect(julianYear.value).toBe(365.25 * 86400);
     for (const { uncertainty } of [boltzmann, avogadro, elementaryCharge, ...iau])
       expect(uncertainty).toBe(0);
   });
 
   it("give the electron its share of the dalton", () => {
-    // Relative atomic mass of the electron, CODATA 2022, from memory: 5.485799090441e-4.
-    expect(electronMass.value / atomicMass.value).toBeCloseToRelative(5.485799090441e-4, 1e-9);
+    expect(electronMass.value / atomicMass.value).toAgreeWith({
+      what: "relative atomic mass of the electron",
+      unit: "1",
+      published: 5.485799090441e-4,
+      within: { relative: 1e-9 },
+      source: "CODATA2022",
+      mark: "from memory",
+    });
   });
 
   it("agree with the molar mass constant", () => {
-    // CODATA 2022, from memory: 1.00000000105(31)e-3 kg/mol.
-    expect(atomicMass.value * avogadro.value).toBeCloseToRelative(1.00000000105e-3, 5e-12);
+    expect(atomicMass.value * avogadro.value).toAgreeWith({
+      what: "molar mass constant, 1.00000000105(31)e-3",
+      unit: "kg mol⁻¹",
+      published: 1.00000000105e-3,
+      within: { relative: 5e-12 },
+      source: "CODATA2022",
+      mark: "from memory",
+    });
   });
 
   it("give the known masses of the Sun, the Earth and Jupiter", () => {
-    // 1.9884e30, 5.9722e24 and 1.8981e27 kg: from memory, to the digits written.
+    // To the digits written.
     const mass = (gm: number) => gm / gravitationalConstant.value;
-    expect(mass(nominalSolarGravitationalParameter.value)).toBeCloseToRelative(1.9884e30, 3e-5);
-    expect(mass(nominalEarthGravitationalParameter.value)).toBeCloseToRelative(5.9722e24, 3e-5);
-    expect(mass(nominalJupiterGravitationalParameter.value)).toBeCloseToRelative(1.8981e27, 3e-5);
+    expect(mass(nominalSolarGravitationalParameter.value)).toAgreeWith({
+      what: "mass of the Sun",
+      unit: "kg",
+      published: 1.9884e30,
+      within: { relative: 3e-5 },
+      source: "NSSDC",
+      mark: "from memory",
+    });
+    expect(mass(nominalEarthGravitationalParameter.value)).toAgreeWith({
+      what: "mass of the Earth",
+      unit: "kg",
+      published: 5.9722e24,
+      within: { relative: 3e-5 },
+      source: "NSSDC",
+      mark: "from memory",
+    });
+    expect(mass(nominalJupiterGravitationalParameter.value)).toAgreeWith({
+      what: "mass of Jupiter",
+      unit: "kg",
+      published: 1.8981e27,
+      within: { relative: 3e-5 },
+      source: "NSSDC",
+      mark: "from memory",
+    });
   });
 
   it("make the solar irradiance that of the luminosity at 1 au", () => {

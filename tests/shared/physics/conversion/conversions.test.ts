@@ -10,6 +10,7 @@ import { meanMass } from "../../../../shared/physics/conversion/meanMass";
 import { numberDensityFromPressure } from "../../../../shared/physics/conversion/numberDensityFromPressure";
 import { pressureFromNumberDensity } from "../../../../shared/physics/conversion/pressureFromNumberDensity";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -18,9 +19,15 @@ const isSame = (a: number, b: number) => Math.abs(a - b) <= 4e-16 * Math.abs(b);
 
 describe("numberDensityFromPressure and pressureFromNumberDensity", () => {
   it("give the Loschmidt constant at 273.15 K and 101,325 Pa", () => {
-    // CODATA 2022, from memory: 2.686780111e25 m⁻³.
     const density = numberDensityFromPressure({ pressure: 101325, temperature: 273.15 });
-    expect(density).toBeCloseToRelative(2.686780111e25, 1e-9);
+    expect(density).toAgreeWith({
+      what: "Loschmidt constant at 273.15 K and 101,325 Pa",
+      unit: "m⁻³",
+      published: 2.686780111e25,
+      within: { relative: 1e-9 },
+      source: "CODATA2022",
+      mark: "from memory",
+    });
     expect(pressureFromNumberDensity({ numberDensity: density, temperature: 273.15 })).toBeCloseToRelative(
       101325,
       1e-15,
@@ -28,9 +35,15 @@ describe("numberDensityFromPressure and pressureFromNumberDensity", () => {
   });
 
   it("give one mole in 22.414 litres", () => {
-    // Molar volume of an ideal gas at 273.15 K and 101,325 Pa, CODATA, from memory: 22.41396954e-3 m³.
     const density = numberDensityFromPressure({ pressure: 101325, temperature: 273.15 });
-    expect(6.02214076e23 / density).toBeCloseToRelative(22.41396954e-3, 1e-9);
+    expect(6.02214076e23 / density).toAgreeWith({
+      what: "molar volume at 273.15 K and 101,325 Pa",
+      unit: "m³ mol⁻¹",
+      published: 22.41396954e-3,
+      within: { relative: 1e-9 },
+      source: "CODATA2022",
+      mark: "from memory",
+    });
   });
 
   it("undo each other, and give nothing for nothing", () => {
@@ -69,7 +82,14 @@ describe("meanMass", () => {
       { mass: 39.948, amount: 0.00934 },
       { mass: 44.00995, amount: 0.000314 },
     ];
-    expect(meanMass(air)).toBeCloseToRelative(28.9644, 2e-5);
+    expect(meanMass(air)).toAgreeWith({
+      what: "mean molar mass of air",
+      unit: "kg kmol⁻¹",
+      published: 28.9644,
+      within: { relative: 2e-5 },
+      source: "USSA1976",
+      mark: "published",
+    });
   });
 
   it("is total mass over total number, particle by particle", () => {
@@ -120,8 +140,15 @@ describe("meanMass", () => {
 
 describe("massFromGravitationalParameter and gravitationalParameterFromMass", () => {
   it("give the Earth 5.9722e24 kg", () => {
-    // From memory, to the digits written.
-    expect(massFromGravitationalParameter(3.986004418e14)).toBeCloseToRelative(5.9722e24, 2e-5);
+    // To the digits written.
+    expect(massFromGravitationalParameter(3.986004418e14)).toAgreeWith({
+      what: "mass of the Earth from its GM",
+      unit: "kg",
+      published: 5.9722e24,
+      within: { relative: 2e-5 },
+      source: "NSSDC",
+      mark: "from memory",
+    });
   });
 
   it("give G for one kilogram", () => {
@@ -145,9 +172,23 @@ describe("massFromGravitationalParameter and gravitationalParameterFromMass", ()
 
 describe("crossSectionFromDiameter and diameterFromCrossSection", () => {
   it("give 4.185e-19 m² for 3.65 Å", () => {
-    // The diameter of the U.S. Standard Atmosphere 1976; cross section computed independently.
-    expect(crossSectionFromDiameter(3.65e-10)).toBeCloseToRelative(4.185e-19, 2e-4);
-    expect(diameterFromCrossSection(4.1854e-19)).toBeCloseToRelative(3.65e-10, 1e-4);
+    // The diameter of the U.S. Standard Atmosphere 1976.
+    expect(crossSectionFromDiameter(3.65e-10)).toAgreeWith({
+      what: "cross section of d = 3.65 Å",
+      unit: "m²",
+      published: 4.185e-19,
+      within: { relative: 2e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
+    expect(diameterFromCrossSection(4.1854e-19)).toAgreeWith({
+      what: "diameter of 4.1854e-19 m²",
+      unit: "m",
+      published: 3.65e-10,
+      within: { relative: 1e-4 },
+      source: "USSA1976",
+      mark: "published",
+    });
   });
 
   it("undo each other", () => {

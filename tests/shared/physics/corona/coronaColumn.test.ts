@@ -5,6 +5,7 @@ import { limbColumn, overheadColumn } from "../../../../shared/physics/corona/co
 import { type Corona, coronaDensity } from "../../../../shared/physics/corona/coronaDensity";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import exact from "../../../fixtures/coronaPartition.json";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -31,20 +32,41 @@ function columnBySteps(densityAt: (s: number) => number, scale: number, end: num
 const density = (of: Corona, radius: number): number => coronaDensity(of, radius).numberDensity ?? 0;
 
 describe.each([
-  { name: "limbColumn", column: limbColumn, log: "logLimb", logSatellites: "logLimbSatellites" } as const,
+  {
+    name: "limbColumn",
+    told: "column along the limb",
+    column: limbColumn,
+    log: "logLimb",
+    logSatellites: "logLimbSatellites",
+  } as const,
   {
     name: "overheadColumn",
+    told: "column overhead",
     column: overheadColumn,
     log: "logOverhead",
     logSatellites: "logOverheadSatellites",
   } as const,
-])("$name", ({ name, column, log, logSatellites }) => {
+])("$name", ({ name, told, column, log, logSatellites }) => {
   it.each(exact.columns)("at λ_c = $exobaseEscapeParameter, r = $radius r_c is mpmath's", (row) => {
     const free = column({ ...corona, ...row }, row.radius);
-    expect(Math.abs(free.log10Column * Math.LN10 - row[log])).toBeLessThan(1e-10);
+    expect(free.log10Column * Math.LN10).toAgreeWith({
+      what: `logarithm of the ${told}, ballistic and escaping`,
+      unit: "1",
+      published: row[log],
+      within: { absolute: 1e-10 },
+      source: "MPMath",
+      mark: "computed independently",
+    });
     const full = column({ ...corona, ...row, satelliteFraction: 1 }, row.radius);
     const all = row[log] + Math.log1p(Math.exp(row[logSatellites] - row[log]));
-    expect(Math.abs(full.log10Column * Math.LN10 - all)).toBeLessThan(1e-10);
+    expect(full.log10Column * Math.LN10).toAgreeWith({
+      what: `logarithm of the ${told}, with satellites`,
+      unit: "1",
+      published: all,
+      within: { absolute: 1e-10 },
+      source: "MPMath",
+      mark: "computed independently",
+    });
   });
 
   it("adds up the density along the line", () => {

@@ -5,6 +5,7 @@ import { type Corona, coronaDensity } from "../../../../shared/physics/corona/co
 import { coronaShareAtExobase } from "../../../../shared/physics/corona/coronaShareAtExobase";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import published from "../../../fixtures/chamberlainZeta.json";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 import { maxwellianByOrbit } from "./maxwellianByOrbit";
 
@@ -20,7 +21,14 @@ const corona: Corona = {
 describe("coronaDensity", () => {
   it.each(published.rows)("at λ_c = $exobaseEscapeParameter, r/r_c = $radiusRatio is the table's", (row) => {
     const { numberDensity } = coronaDensity({ ...corona, ...row }, 3.6e6 * row.radiusRatio);
-    expect(numberDensity).toBeCloseToRelative(2e11 * row.densityRatio, 1e-6);
+    expect(numberDensity).toAgreeWith({
+      what: "density of a corona of 2e11 m⁻³ at its exobase",
+      unit: "m⁻³",
+      published: 2e11 * row.densityRatio,
+      within: { relative: 1e-6 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("is the sum over orbits of what rises from the exobase", () => {

@@ -4,6 +4,7 @@ import { describe, expect, it } from "vitest";
 import { coronaShareAtExobase } from "../../../../shared/physics/corona/coronaShareAtExobase";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import published from "../../../fixtures/chamberlainZeta.json";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 import { maxwellianByOrbit } from "./maxwellianByOrbit";
 
@@ -14,7 +15,14 @@ describe("coronaShareAtExobase", () => {
     "of λ_c = $exobaseEscapeParameter is the table's",
     (row) => {
       const share = coronaShareAtExobase(row.exobaseEscapeParameter);
-      expect(share).toBeCloseToRelative(row.densityRatio, 1e-12);
+      expect(share).toAgreeWith({
+        what: "share ½(1 + P) of the column's density at the exobase",
+        unit: "1",
+        published: row.densityRatio,
+        within: { relative: 1e-12 },
+        source: "SeparateProgram",
+        mark: "computed independently",
+      });
     },
   );
 

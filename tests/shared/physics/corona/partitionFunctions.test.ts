@@ -7,6 +7,7 @@ import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { incompleteGamma, scaledUpperGamma } from "../../../../shared/physics/numerics/incompleteGamma";
 import exact from "../../../fixtures/coronaPartition.json";
 import published from "../../../fixtures/chamberlainZeta.json";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 import { maxwellianByOrbit } from "./maxwellianByOrbit";
 
@@ -28,32 +29,110 @@ describe("partitionFunctions", () => {
     const shares = at(row.exobaseEscapeParameter, row.radiusRatio);
     for (const kind of kinds) {
       // The table holds differences from 1 in double precision: below, its last digits are rounding.
-      const allowance = 1e-6 * row[kind] + 2.3e-16;
-      expect(Math.abs(shares[kind] - row[kind]), kind).toBeLessThanOrEqual(allowance);
+      expect(shares[kind]).toAgreeWith({
+        what: `${kind} partition function of Chamberlain (1963), by quadrature over velocities`,
+        unit: "1",
+        published: row[kind],
+        within: { relative: 1e-6, absolute: 2.3e-16 },
+        source: "SeparateProgram",
+        mark: "computed independently",
+      });
     }
     const density = Math.exp(shares.logBallisticDensity) + Math.exp(shares.logEscapingDensity);
-    expect(density).toBeCloseToRelative(row.densityRatio, 1e-6);
+    expect(density).toAgreeWith({
+      what: "density over that of the exobase, without satellites",
+      unit: "1",
+      published: row.densityRatio,
+      within: { relative: 1e-6 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("of λ_c = 7 at twice the exobase's radius are 0.711789, 0.216314 and 0.00926413", () => {
     // Checked there by direct quadrature over velocities; see the fixture.
     const { ballistic, satellite, escaping } = at(7, 2);
-    expect(ballistic).toBeCloseToRelative(0.711789, 1e-6);
-    expect(satellite).toBeCloseToRelative(0.216314, 2e-6);
-    expect(escaping).toBeCloseToRelative(0.00926413, 1e-6);
+    expect(ballistic).toAgreeWith({
+      what: "ballistic partition function, λ_c = 7, r = 2 r_c",
+      unit: "1",
+      published: 0.711789,
+      within: { relative: 1e-6 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
+    expect(satellite).toAgreeWith({
+      what: "satellite partition function, λ_c = 7, r = 2 r_c",
+      unit: "1",
+      published: 0.216314,
+      within: { relative: 2e-6 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
+    expect(escaping).toAgreeWith({
+      what: "escaping partition function, λ_c = 7, r = 2 r_c",
+      unit: "1",
+      published: 0.00926413,
+      within: { relative: 1e-6 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it.each(exact.rows)("hold their digits at λ_c = $exobaseEscapeParameter, r = $radius r_c", (row) => {
     const shares = partitionFunctions({ ...row, exobaseRadius: 1 });
-    expect(shares.ballistic).toBeCloseToRelative(row.ballistic, 1e-13);
-    if (row.satellite > 1e-300) expect(shares.satellite).toBeCloseToRelative(row.satellite, 2e-13);
-    if (row.escaping > 1e-300) expect(shares.escaping).toBeCloseToRelative(row.escaping, 1e-13);
+    expect(shares.ballistic).toAgreeWith({
+      what: "ballistic partition function to its digits",
+      unit: "1",
+      published: row.ballistic,
+      within: { relative: 1e-13 },
+      source: "MPMath",
+      mark: "computed independently",
+    });
+    if (row.satellite > 1e-300)
+      expect(shares.satellite).toAgreeWith({
+        what: "satellite partition function to its digits",
+        unit: "1",
+        published: row.satellite,
+        within: { relative: 2e-13 },
+        source: "MPMath",
+        mark: "computed independently",
+      });
+    if (row.escaping > 1e-300)
+      expect(shares.escaping).toAgreeWith({
+        what: "escaping partition function to its digits",
+        unit: "1",
+        published: row.escaping,
+        within: { relative: 1e-13 },
+        source: "MPMath",
+        mark: "computed independently",
+      });
     // A logarithm of 2000 is good to 2e-13 in itself.
     const allowance = 1e-13 + 4e-16 * row.exobaseEscapeParameter;
-    expect(Math.abs(shares.logBallisticDensity - row.logBallistic)).toBeLessThan(allowance);
-    expect(Math.abs(shares.logEscapingDensity - row.logEscaping)).toBeLessThan(allowance);
+    expect(shares.logBallisticDensity).toAgreeWith({
+      what: "logarithm of the ballistic density",
+      unit: "1",
+      published: row.logBallistic,
+      within: { absolute: allowance },
+      source: "MPMath",
+      mark: "computed independently",
+    });
+    expect(shares.logEscapingDensity).toAgreeWith({
+      what: "logarithm of the escaping density",
+      unit: "1",
+      published: row.logEscaping,
+      within: { absolute: allowance },
+      source: "MPMath",
+      mark: "computed independently",
+    });
     if (row.logSatellite !== null) {
-      expect(Math.abs(shares.logSatelliteDensity - row.logSatellite)).toBeLessThan(allowance);
+      expect(shares.logSatelliteDensity).toAgreeWith({
+        what: "logarithm of the satellite density",
+        unit: "1",
+        published: row.logSatellite,
+        within: { absolute: allowance },
+        source: "MPMath",
+        mark: "computed independently",
+      });
     }
   });
 

@@ -9,6 +9,7 @@ import { log10EffusionVelocity } from "../../../../shared/physics/escape/log10Ef
 import { logEffusionVelocity } from "../../../../shared/physics/escape/logEffusionVelocity";
 import { thermalSpeed } from "../../../../shared/physics/escape/thermalSpeed";
 import { findGas } from "../../../../shared/physics/handbook/handbookGases";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 import { jeansCases } from "./jeansCases";
 
@@ -37,14 +38,18 @@ describe("effusionVelocity", () => {
   it.each(jeansCases)("of $label is that of the independent program", (row) => {
     const gas = { ...row, escapeParameter: escapeParameter(row) };
     // An error of 1e-15 in λ shows as λ times that in w.
-    expect(effusionVelocity(gas)).toBeCloseToRelative(
-      row.effusionVelocity,
-      1e-12 * (1 + row.escapeParameter),
-    );
+    expect(effusionVelocity(gas)).toAgreeWith({
+      what: "effusion velocities of gases at five planets",
+      unit: "m s⁻¹",
+      published: row.effusionVelocity,
+      within: { relative: 1e-12 * (1 + row.escapeParameter) },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("of H at 500 km and 1000 K is 8.1295 m/s", () => {
-    // Computed independently: GM = 398600.4355 km³ s⁻², r = 6871.0084 km, isotope mass.
+    // GM = 398600.4355 km³ s⁻², r = 6871.0084 km, isotope mass.
     const place = {
       gravitationalParameter: 3.9860043550702266e14,
       radius: 6871008.4,
@@ -52,7 +57,14 @@ describe("effusionVelocity", () => {
       particleMass,
     };
     const gas = { ...hydrogen, escapeParameter: escapeParameter(place) };
-    expect(effusionVelocity(gas)).toBeCloseToRelative(8.1295, 1e-5);
+    expect(effusionVelocity(gas)).toAgreeWith({
+      what: "effusion velocity of H at the Earth, 500 km, 1000 K",
+      unit: "m s⁻¹",
+      published: 8.1295,
+      within: { relative: 1e-5 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("agrees with the Maxwellian integral it was derived from", () => {
@@ -96,14 +108,28 @@ describe("effusionVelocity", () => {
 describe("log10EffusionVelocity", () => {
   it.each(jeansCases)("of $label is that of the independent program", (row) => {
     const gas = { ...row, escapeParameter: escapeParameter(row) };
-    expect(Math.abs(log10EffusionVelocity(gas) - Math.log10(row.effusionVelocity))).toBeLessThan(1e-12);
+    expect(log10EffusionVelocity(gas)).toAgreeWith({
+      what: "log₁₀ of effusion velocities of gases at five planets",
+      unit: "1",
+      published: Math.log10(row.effusionVelocity),
+      within: { absolute: 1e-12 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("goes on where the velocity itself is too small for a number", () => {
     const tight = { ...hydrogen, escapeParameter: 2000 };
     expect(effusionVelocity(tight)).toBe(0);
     // By hand: v_p/2√π = 1145.86 m/s, log10 3.05913; log10 2001 = 3.30125; 2000 log10 e = 868.58896.
-    expect(log10EffusionVelocity(tight)).toBeCloseTo(3.05913 + 3.30125 - 868.58896, 4);
+    expect(log10EffusionVelocity(tight)).toAgreeWith({
+      what: "log₁₀ of the effusion velocity of H at λ = 2000, 1000 K",
+      unit: "1",
+      published: 3.05913 + 3.30125 - 868.58896,
+      within: { absolute: 5e-5 },
+      source: "Arithmetic",
+      mark: "computed independently",
+    });
   });
 
   it("is the logarithm of the velocity", () => {

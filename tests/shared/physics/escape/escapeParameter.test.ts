@@ -8,6 +8,7 @@ import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { escapeParameter } from "../../../../shared/physics/escape/escapeParameter";
 import { thermalSpeed } from "../../../../shared/physics/escape/thermalSpeed";
 import { findGas } from "../../../../shared/physics/handbook/handbookGases";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 import { expectSameBoltzmann, jeansCases } from "./jeansCases";
 
@@ -25,23 +26,42 @@ const hydrogen = {
 describe("escapeParameter", () => {
   it.each(jeansCases)("of $label is that of the independent program", (row) => {
     expectSameBoltzmann(boltzmann.value);
-    expect(escapeParameter(row)).toBeCloseToRelative(row.escapeParameter, 1e-12);
+    expect(escapeParameter(row)).toAgreeWith({
+      what: "escape parameters of gases at five planets",
+      unit: "1",
+      published: row.escapeParameter,
+      within: { relative: 1e-12 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("of H at 500 km and 1000 K is 7.0318", () => {
-    expect(escapeParameter(hydrogen)).toBeCloseToRelative(7.0318, 1e-5);
+    expect(escapeParameter(hydrogen)).toAgreeWith({
+      what: "escape parameter of H at the Earth, 500 km, 1000 K",
+      unit: "1",
+      published: 7.0318,
+      within: { relative: 1e-5 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("of H2 at Saturn's exobase lies in the published 260 to 340", () => {
-    // Koskinen et al. (2013), abstract: 2700 to 3000 km above 1 bar, 370 to 540 K.
+    // 2700 to 3000 km above 1 bar, 370 to 540 K.
     const saturn = {
       gravitationalParameter: 3.793120623436167e16,
       radius: 61082e3,
       temperature: 455,
       particleMass: findGas("H2")?.mass ?? NaN,
     };
-    expect(escapeParameter(saturn)).toBeGreaterThan(260);
-    expect(escapeParameter(saturn)).toBeLessThan(340);
+    expect(escapeParameter(saturn)).toAgreeWith({
+      what: "escape parameter of H2 at Saturn's exobase, 455 K",
+      unit: "1",
+      within: { range: [260, 340] },
+      source: "Koskinen2013",
+      mark: "published",
+    });
   });
 
   it("is the square of escape speed over thermal speed, and radius over scale height", () => {

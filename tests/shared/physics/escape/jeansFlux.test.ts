@@ -10,6 +10,7 @@ import { jeansRate } from "../../../../shared/physics/escape/jeansRate";
 import { log10JeansFlux } from "../../../../shared/physics/escape/log10JeansFlux";
 import { findBody } from "../../../../shared/physics/handbook/handbookBodies";
 import { findGas } from "../../../../shared/physics/handbook/handbookGases";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -26,21 +27,49 @@ function atMars(temperature: number, numberDensity: number) {
 
 describe("jeansFlux", () => {
   it("of Mars in 1969 is 1.8e8 cm⁻² s⁻¹", () => {
-    // Anderson and Hord (1971): 350 K and 3e4 cm⁻³ at 250 km; their flux from memory.
-    expect(jeansFlux(atMars(350, 3e10))).toBeCloseToRelative(1.8e12, 0.05);
-    // Computed independently from the same inputs.
-    expect(jeansFlux(atMars(350, 3e10))).toBeCloseToRelative(1.753e12, 1e-3);
+    // 350 K and 3e4 cm⁻³ at 250 km.
+    expect(jeansFlux(atMars(350, 3e10))).toAgreeWith({
+      what: "Jeans flux of H from Mars in 1969: 350 K, 3e4 cm⁻³ at 250 km",
+      unit: "m⁻² s⁻¹",
+      published: 1.8e12,
+      within: { relative: 0.05 },
+      source: "AndersonHord1971",
+      mark: "from memory",
+    });
+    // From the same inputs.
+    expect(jeansFlux(atMars(350, 3e10))).toAgreeWith({
+      what: "Jeans flux of H from Mars in 1969: 350 K, 3e4 cm⁻³ at 250 km",
+      unit: "m⁻² s⁻¹",
+      published: 1.753e12,
+      within: { relative: 1e-3 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("of Mars at solar minimum is the same within 4 %", () => {
-    // Levine et al. (1978): 170 K and 60 times the density; computed independently, 1.813e8 cm⁻² s⁻¹.
+    // 170 K and 60 times the density.
     const minimum = jeansFlux(atMars(170, 1.8e12));
-    expect(minimum).toBeCloseToRelative(1.813e12, 1e-3);
-    expect(minimum).toBeCloseToRelative(jeansFlux(atMars(350, 3e10)), 0.04);
+    expect(minimum).toAgreeWith({
+      what: "Jeans flux of H from Mars at solar minimum: 170 K, 1.8e6 cm⁻³ at 250 km",
+      unit: "m⁻² s⁻¹",
+      published: 1.813e12,
+      within: { relative: 1e-3 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
+    expect(minimum / jeansFlux(atMars(350, 3e10))).toAgreeWith({
+      what: "Jeans flux of H from Mars at solar minimum over that of 1969",
+      unit: "1",
+      published: 1,
+      within: { relative: 0.04 },
+      source: "Levine1978",
+      mark: "published",
+    });
   });
 
   it("of the 1976 standard at 500 km comes within 10 % of its adopted 7.2e7 cm⁻² s⁻¹", () => {
-    // NASA TR R-459: 8.0e4 cm⁻³ at 999.24 K, r₀ 6356.766 km, g₀ 9.80665 m/s².
+    // 8.0e4 cm⁻³ at 999.24 K, r₀ 6356.766 km, g₀ 9.80665 m/s².
     const place = {
       gravitationalParameter: 9.80665 * 6356766 ** 2,
       radius: 6856766,
@@ -48,7 +77,14 @@ describe("jeansFlux", () => {
       particleMass,
     };
     const flux = jeansFlux({ ...hydrogen, temperature: 999.2356, escapeParameter: escapeParameter(place) });
-    expect(flux).toBeCloseToRelative(7.2e11, 0.1);
+    expect(flux).toAgreeWith({
+      what: "Jeans flux of H in the 1976 standard at 500 km, beside the flux adopted there",
+      unit: "m⁻² s⁻¹",
+      published: 7.2e11,
+      within: { relative: 0.1 },
+      source: "Minzner1976",
+      mark: "published",
+    });
   });
 
   it("counts the fast particles of a Maxwellian that cross a plane", () => {
@@ -110,13 +146,27 @@ describe("log10JeansFlux", () => {
   });
 
   it("of Mars in 1969 is 12.244", () => {
-    expect(log10JeansFlux(atMars(350, 3e10))).toBeCloseTo(Math.log10(1.753e12), 3);
+    expect(log10JeansFlux(atMars(350, 3e10))).toAgreeWith({
+      what: "log₁₀ of the Jeans flux of H from Mars in 1969",
+      unit: "1",
+      published: Math.log10(1.753e12),
+      within: { absolute: 5e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("carries what no number holds: a λ of 2000", () => {
     const flux = log10JeansFlux({ ...hydrogen, escapeParameter: 2000 });
     // By hand: log10 8e10 = 10.90309; v_p/2√π = 1145.86 m/s, log10 3.05913; log10 2001 = 3.30125; 868.58896.
-    expect(flux).toBeCloseTo(10.90309 + 3.05913 + 3.30125 - 868.58896, 4);
+    expect(flux).toAgreeWith({
+      what: "log₁₀ of the Jeans flux of 8e10 m⁻³ of H at λ = 2000, 1000 K",
+      unit: "1",
+      published: 10.90309 + 3.05913 + 3.30125 - 868.58896,
+      within: { absolute: 5e-5 },
+      source: "Arithmetic",
+      mark: "computed independently",
+    });
   });
 
   it("refuses a density of zero, which has no logarithm", () => {
@@ -126,17 +176,31 @@ describe("log10JeansFlux", () => {
 
 describe("jeansRate", () => {
   it("of 3 kg/s of H is the Earth's 3.514e8 cm⁻² s⁻¹ at the surface", () => {
-    // Catling and Zahnle (2009) give 3 kg/s; 3.514e8 computed independently from it with the Earth's mean radius.
+    // Catling and Zahnle (2009) give 3 kg/s; with the Earth's mean radius.
     const surface = 6371008.4;
     const flux = jeansFlux(hydrogen);
     const massRate = jeansRate({ ...hydrogen, radius: surface }) * particleMass;
-    expect((flux * 3) / massRate).toBeCloseToRelative(3.514e12, 1e-3);
+    expect((flux * 3) / massRate).toAgreeWith({
+      what: "surface flux of 3 kg/s of H from the Earth",
+      unit: "m⁻² s⁻¹",
+      published: 3.514e12,
+      within: { relative: 1e-3 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("of 2e10 cm⁻² s⁻¹ at Titan's surface is 1.666e28 s⁻¹", () => {
-    // Strobel (2010) gives the flux; the rate computed independently from it with a radius of 2574.73 km.
+    // Strobel (2010) gives the flux; with a radius of 2574.73 km.
     const ratio = jeansRate({ ...hydrogen, radius: 2574730 }) / jeansFlux(hydrogen);
-    expect(ratio * 2e14).toBeCloseToRelative(1.666e28, 1e-3);
+    expect(ratio * 2e14).toAgreeWith({
+      what: "rate of 2e10 H2 cm⁻² s⁻¹ at Titan's surface",
+      unit: "s⁻¹",
+      published: 1.666e28,
+      within: { relative: 1e-3 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("sums the flux over the sphere, band by band", () => {

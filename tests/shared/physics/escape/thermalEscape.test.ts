@@ -8,6 +8,7 @@ import { jeansRate } from "../../../../shared/physics/escape/jeansRate";
 import { log10JeansFlux } from "../../../../shared/physics/escape/log10JeansFlux";
 import { thermalEscape, type ThermalEscapeInput } from "../../../../shared/physics/escape/thermalEscape";
 import { findGas } from "../../../../shared/physics/handbook/handbookGases";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 import { jeansCases } from "./jeansCases";
 
@@ -47,12 +48,39 @@ describe("thermalEscape", () => {
   });
 
   it("of H at the Earth has λ 7.0318, an escape speed of 10771.4 m/s and w 8.1295 m/s", () => {
-    // Computed independently; see tests/fixtures/jeansCases.json.
     const { escapeSpeed, gases } = thermalEscape(earth);
-    expect(escapeSpeed).toBeCloseToRelative(10771.4, 1e-5);
-    expect(gases[0].escapeParameter).toBeCloseToRelative(7.0318, 1e-5);
-    expect(gases[0].effusionVelocity).toBeCloseToRelative(8.1295, 1e-5);
-    expect(gases[0].thermalSpeed).toBeCloseToRelative(4061.996, 1e-6);
+    expect(escapeSpeed).toAgreeWith({
+      what: "escape speed at the Earth, 500 km",
+      unit: "m s⁻¹",
+      published: 10771.4,
+      within: { relative: 1e-5 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
+    expect(gases[0].escapeParameter).toAgreeWith({
+      what: "escape parameter of H at the Earth's exobase, 500 km, 1000 K",
+      unit: "1",
+      published: 7.0318,
+      within: { relative: 1e-5 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
+    expect(gases[0].effusionVelocity).toAgreeWith({
+      what: "effusion velocity of H at the Earth's exobase, 500 km, 1000 K",
+      unit: "m s⁻¹",
+      published: 8.1295,
+      within: { relative: 1e-5 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
+    expect(gases[0].thermalSpeed).toAgreeWith({
+      what: "thermal speed of H at the Earth's exobase, 500 km, 1000 K",
+      unit: "m s⁻¹",
+      published: 4061.996,
+      within: { relative: 1e-6 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it.each(jeansCases)("of $label has the independent program's velocity", (row) => {
@@ -62,8 +90,22 @@ describe("thermalEscape", () => {
       gases: [{ formula: row.gas, mass: row.particleMass, logNumberDensity: 0 }],
     });
     const tolerance = 1e-12 * (1 + row.escapeParameter);
-    expect(gases[0].effusionVelocity).toBeCloseToRelative(row.effusionVelocity, tolerance);
-    expect(gases[0].jeansFlux).toBeCloseToRelative(row.effusionVelocity, tolerance);
+    expect(gases[0].effusionVelocity).toAgreeWith({
+      what: "effusion velocities among all answers of an escape",
+      unit: "m s⁻¹",
+      published: row.effusionVelocity,
+      within: { relative: tolerance },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
+    expect(gases[0].jeansFlux).toAgreeWith({
+      what: "Jeans fluxes of one particle a m³",
+      unit: "m⁻² s⁻¹",
+      published: row.effusionVelocity,
+      within: { relative: tolerance },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("gives null for what no number holds, and its logarithm", () => {

@@ -4,7 +4,7 @@ import { describe, expect, it } from "vitest";
 import { boltzmann } from "../../../../shared/physics/constants/codata2022";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { thermalSpeed } from "../../../../shared/physics/escape/thermalSpeed";
-import "../../../toBeCloseToRelative";
+import "../../../toAgreeWith";
 import { jeansCases } from "./jeansCases";
 
 const seed = 20261201;
@@ -12,12 +12,25 @@ const nitrogen = { temperature: 300, particleMass: 4.6517e-26 };
 
 describe("thermalSpeed", () => {
   it.each(jeansCases)("of $label is that of the independent program", (row) => {
-    expect(thermalSpeed(row)).toBeCloseToRelative(row.thermalSpeed, 1e-12);
+    expect(thermalSpeed(row)).toAgreeWith({
+      what: "thermal speeds of gases at five planets",
+      unit: "m s⁻¹",
+      published: row.thermalSpeed,
+      within: { relative: 1e-12 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("of N2 at 300 K is 422 m/s", () => {
-    // As tabulated in textbooks of gas kinetics, from memory.
-    expect(thermalSpeed(nitrogen)).toBeCloseToRelative(422, 1e-3);
+    expect(thermalSpeed(nitrogen)).toAgreeWith({
+      what: "thermal speed of N2 at 300 K",
+      unit: "m s⁻¹",
+      published: 422,
+      within: { relative: 1e-3 },
+      source: "Textbook",
+      mark: "from memory",
+    });
   });
 
   it("is where a Maxwellian has its maximum", () => {

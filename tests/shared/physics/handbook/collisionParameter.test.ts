@@ -6,6 +6,7 @@ import { collisionParameter } from "../../../../shared/physics/handbook/collisio
 import { collisionRows } from "../../../../shared/physics/handbook/collisionRows";
 import { findGas, handbookGases } from "../../../../shared/physics/handbook/handbookGases";
 import published from "../../../fixtures/collisionParameters.json";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 function gas(formula: string) {
@@ -25,7 +26,14 @@ describe("collisionParameter", () => {
     const { coefficient, exponent, isEstimate } = ofPair(pair);
     expect(isEstimate).toBe(false);
     for (const [temperature, perCentimetre] of Object.entries(values)) {
-      expect(coefficient * Number(temperature) ** exponent).toBeCloseToRelative(perCentimetre * 100, 1e-9);
+      expect(coefficient * Number(temperature) ** exponent).toAgreeWith({
+        what: "first published law b(T) of each pair",
+        unit: "m⁻¹ s⁻¹",
+        published: perCentimetre * 100,
+        within: { relative: 1e-9 },
+        source: "MasonMarrero1970",
+        mark: "computed independently",
+      });
     }
   });
 
@@ -39,7 +47,14 @@ describe("collisionParameter", () => {
       });
       const estimate = collisionParameter(unlisted(first), unlisted(second));
       // The fixture does not state its masses to the last digit: 1 part in 10⁵.
-      expect(estimate.coefficient).toBeCloseToRelative(value * 100, 1e-5);
+      expect(estimate.coefficient).toAgreeWith({
+        what: "estimate b(1 K) of pairs without a measured law",
+        unit: "m⁻¹ s⁻¹",
+        published: value * 100,
+        within: { relative: 1e-5 },
+        source: "BanksKockarts1973",
+        mark: "computed independently",
+      });
       expect(estimate).toMatchObject({ exponent: 0.5, source: "BanksKockarts1973", isEstimate: true });
     },
   );
@@ -63,10 +78,16 @@ describe("collisionParameter", () => {
   });
 
   it("gives the diffusion coefficient of the CRC table", () => {
-    // CRC Handbook, Diffusion in gases: D of Ar in N2 at 293.15 K and 101,325 Pa is 0.190 cm²/s.
     const { coefficient, exponent } = ofPair("Ar-N2");
     const diffusion = (coefficient * 293.15 ** exponent * boltzmann.value * 293.15) / 101325;
-    expect(diffusion).toBeCloseToRelative(0.19e-4, 0.01);
+    expect(diffusion).toAgreeWith({
+      what: "D of Ar in N2 at 293.15 K and 101,325 Pa",
+      unit: "m² s⁻¹",
+      published: 0.19e-4,
+      within: { relative: 0.01 },
+      source: "CRCDiffusion",
+      mark: "published",
+    });
   });
 
   it("does not mind the order of the two gases", () => {

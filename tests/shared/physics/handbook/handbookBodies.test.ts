@@ -4,6 +4,7 @@ import { meanDensity } from "../../../../shared/physics/body/meanDensity";
 import { julianYear } from "../../../../shared/physics/constants/iau";
 import { gravitationalConstant } from "../../../../shared/physics/constants/codata2022";
 import { findBody, handbookBodies } from "../../../../shared/physics/handbook/handbookBodies";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 function body(name: string) {
@@ -23,7 +24,7 @@ describe("handbookBodies", () => {
   });
 
   it.each([
-    // GM in km³ s⁻²: NAIF text kernel gm_de440.
+    // GM in km³ s⁻².
     ["Venus", 324858.592],
     ["Earth", 398600.43550702266],
     ["Mars", 42828.37362069909],
@@ -34,11 +35,18 @@ describe("handbookBodies", () => {
     ["Ceres", 62.62888644],
     ["Eris", 1098.9],
   ])("give %s a GM of %s km³ s⁻²", (name, gmKm3) => {
-    expect(body(name).gravitationalParameter).toBeCloseToRelative(gmKm3 * 1e9, 1e-15);
+    expect(body(name).gravitationalParameter).toAgreeWith({
+      what: "GM of the handbook's bodies",
+      unit: "m³ s⁻²",
+      published: gmKm3 * 1e9,
+      within: { relative: 1e-15 },
+      source: "NaifGM",
+      mark: "published",
+    });
   });
 
   it.each([
-    // Mean densities in kg/m³, NSSDC fact sheets, from memory; half a unit of the last digit of the lightest.
+    // Mean densities in kg/m³; half a unit of the last digit of the lightest.
     ["Mercury", 5429],
     ["Venus", 5243],
     ["Earth", 5513],
@@ -51,11 +59,18 @@ describe("handbookBodies", () => {
     ["Titan", 1881],
     ["Pluto", 1854],
   ])("give %s a density of %s kg/m³", (name, density) => {
-    expect(meanDensity(body(name))).toBeCloseToRelative(density, 2e-3);
+    expect(meanDensity(body(name))).toAgreeWith({
+      what: `mean density of ${name}`,
+      unit: "kg m⁻³",
+      published: density,
+      within: { relative: 2e-3 },
+      source: "NSSDC",
+      mark: "from memory",
+    });
   });
 
   it("keep Kepler's third law with their star", () => {
-    // Periods in days, NSSDC fact sheets, from memory; the elements are averages over decades, so 2 parts in 10³.
+    // Periods in days; the elements are averages over decades, so 2 parts in 10³.
     const periods = {
       Mercury: 87.969,
       Venus: 224.701,
@@ -67,7 +82,14 @@ describe("handbookBodies", () => {
     for (const [name, days] of Object.entries(periods)) {
       const { starDistance = 0, starMass = 0 } = body(name);
       const period = 2 * Math.PI * Math.sqrt(starDistance ** 3 / (gravitationalConstant.value * starMass));
-      expect(period / 86400, name).toBeCloseToRelative(days, 2e-3);
+      expect(period / 86400).toAgreeWith({
+        what: `orbital period of ${name} by Kepler's third law`,
+        unit: "d",
+        published: days,
+        within: { relative: 2e-3 },
+        source: "NSSDC",
+        mark: "from memory",
+      });
     }
     expect(julianYear.value / 86400).toBeCloseToRelative(periods.Earth, 1e-4);
   });

@@ -2,6 +2,8 @@ import { describe, expect, it } from "vitest";
 
 import { atomicMass, avogadro } from "../../../../shared/physics/constants/codata2022";
 import { findGas, handbookGases } from "../../../../shared/physics/handbook/handbookGases";
+import "../../../toAgreeWith";
+import type { Mark } from "../../../validation/agreement";
 import "../../../toBeCloseToRelative";
 
 function gas(formula: string) {
@@ -17,23 +19,29 @@ describe("handbookGases", () => {
     expect(new Set(handbookGases.map(({ name }) => name)).size).toBe(needed.length);
   });
 
-  it.each([
-    // H and D: isotopes ¹H and ²H of AME 2012; the others: sums of conventional atomic weights (Meija et al. 2016;
-    // Ar: Prohaska et al. 2022), with the isotope for H in compounds.
-    ["H", 1.00782503223],
-    ["D", 2.01410177812],
-    ["H2", 2.01565006446],
-    ["HD", 3.02192681035],
+  it.each<[formula: string, massU: number, source?: string, mark?: Mark]>([
+    // H and D: isotopes ¹H and ²H; the others: sums of conventional atomic weights, with the isotope for H in compounds.
+    ["H", 1.00782503223, "Wang2012"],
+    ["D", 2.01410177812, "Wang2012"],
+    ["H2", 2.01565006446, "Wang2012"],
+    ["HD", 3.02192681035, "Wang2012"],
     ["He", 4.002602],
     ["CH4", 16.04230012892],
     ["H2O", 18.01465006446],
     ["N2", 28.014],
     ["O2", 31.998],
-    ["Ar", 39.95],
+    ["Ar", 39.95, "Prohaska2022", "from memory"],
     ["CO2", 44.009],
     ["SO2", 64.058],
-  ])("give %s a mass of %s u", (formula, massU) => {
-    expect(gas(formula).molarMassU).toBeCloseToRelative(massU, 1e-14);
+  ])("give %s a mass of %s u", (formula, massU, source = "Meija2016", mark = "published") => {
+    expect(gas(formula).molarMassU).toAgreeWith({
+      what: "masses of the handbook's gases",
+      unit: "u",
+      published: massU,
+      within: { relative: 1e-14 },
+      source,
+      mark,
+    });
     expect(gas(formula).mass).toBeCloseToRelative(massU * atomicMass.value, 1e-14);
   });
 
@@ -45,7 +53,14 @@ describe("handbookGases", () => {
     ["Ar", 39.948],
     ["He", 4.0026],
   ])("agree with the 1976 standard on %s", (formula, molarMass) => {
-    expect(gas(formula).mass * avogadro.value * 1e3).toBeCloseToRelative(molarMass, 1e-4);
+    expect(gas(formula).mass * avogadro.value * 1e3).toAgreeWith({
+      what: `molar mass of ${formula}, by older atomic weights`,
+      unit: "kg kmol⁻¹",
+      published: molarMass,
+      within: { relative: 1e-4 },
+      source: "USSA1976",
+      mark: "published",
+    });
   });
 
   it.each([
@@ -73,7 +88,14 @@ describe("handbookGases", () => {
     ["Xe", 4.047],
     ["SO2", 4.112],
   ])("give %s a collision diameter of %s Å", (formula, diameterAngstrom) => {
-    expect(gas(formula).collisionDiameter * 1e10).toBeCloseToRelative(diameterAngstrom, 1e-14);
+    expect(gas(formula).collisionDiameter * 1e10).toAgreeWith({
+      what: "collision diameters of the handbook's gases",
+      unit: "Å",
+      published: diameterAngstrom,
+      within: { relative: 1e-14 },
+      source: ["He", "Ne", "Kr", "Xe", "SO2"].includes(formula) ? "Poling2001" : "GRIMech3",
+      mark: "published",
+    });
   });
 
   it("take thermal diffusion from the 1976 standard", () => {

@@ -4,6 +4,7 @@ import { elementaryCharge } from "../../../../shared/physics/constants/codata202
 import { findGas } from "../../../../shared/physics/handbook/handbookGases";
 import { findRecombiningIon, recombiningIons } from "../../../../shared/physics/handbook/recombination";
 import { references } from "../../../../shared/physics/references";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 describe("recombiningIons", () => {
@@ -12,39 +13,59 @@ describe("recombiningIons", () => {
   });
 
   it.each([
-    // eV that the fragments share. O2+: Fox and Hać (1997), secondary. CO+: Rosén et al. (1998), from memory save the
-    // first. N2+: Peterson et al. (1998), 2.25 from memory. NO+: from memory. CO2+: Rosati et al. (2003), secondary.
-    ["O2+", [6.99, 5.02, 3.06, 0.84]],
-    ["CO+", [2.9, 1.64, 0.94]],
-    ["N2+", [5.82, 3.44, 2.25, 1.04]],
-    ["NO+", [2.75, 0.38]],
-    ["CO2+", [8.31, 2.3, 1.26, 0.49]],
-  ])("give the channels of %s their energies", (formula, energiesEv) => {
+    // eV that the fragments share. The first of CO+ was read; 2.25 of N2+ is from memory, and the others read.
+    ["O2+", [6.99, 5.02, 3.06, 0.84], "FoxHac1997", "secondary"],
+    ["CO+", [2.9, 1.64, 0.94], "Rosen1998", "from memory"],
+    ["N2+", [5.82, 3.44, 2.25, 1.04], "Peterson1998", "published"],
+    ["NO+", [2.75, 0.38], "VejbyChristensen1998", "from memory"],
+    ["CO2+", [8.31, 2.3, 1.26, 0.49], "Rosati2003", "secondary"],
+  ] as const)("give the channels of %s their energies", (formula, energiesEv, source, mark) => {
     const channels = findRecombiningIon(formula)!.channels;
     expect(channels).toHaveLength(energiesEv.length);
     channels.forEach(({ energy }, i) => {
-      expect(energy / elementaryCharge.value).toBeCloseToRelative(energiesEv[i], 1e-14);
+      expect(energy / elementaryCharge.value).toAgreeWith({
+        what: `energies of the recombination channels of ${formula}`,
+        unit: "eV",
+        published: energiesEv[i],
+        within: { relative: 1e-14 },
+        source,
+        mark,
+      });
     });
   });
 
   it("put the channels of O2+ apart by what the excited atoms keep", () => {
-    // O(¹D) lies 1.97 eV and O(¹S) 4.19 eV above O(³P): energy levels of the atom, from memory.
+    // O(¹D) lies 1.97 eV and O(¹S) 4.19 eV above O(³P).
     const [ground, one, two, high] = findRecombiningIon("O2+")!.channels.map(
       ({ energy }) => energy / elementaryCharge.value,
     );
-    expect(ground - one).toBeCloseTo(1.97, 1);
-    expect(one - two).toBeCloseTo(1.97, 1);
-    expect(ground - high).toBeCloseTo(1.97 + 4.19, 1);
+    const levels = {
+      unit: "eV",
+      within: { absolute: 0.05 },
+      source: "EnergyLevels",
+      mark: "from memory",
+    } as const;
+    const what = "steps between the channels of O2+, O(¹D) and O(¹S) over O(³P)";
+    expect(ground - one).toAgreeWith({ ...levels, what, published: 1.97 });
+    expect(one - two).toAgreeWith({ ...levels, what, published: 1.97 });
+    expect(ground - high).toAgreeWith({ ...levels, what, published: 1.97 + 4.19 });
   });
 
   it("put the channels of N2+ apart by 2.38 and 3.58 eV, and of NO+ by 2.38 eV", () => {
-    // N(²D) and N(²P) above N(⁴S): energy levels of the atom, from memory.
+    // N(²D) and N(²P) above N(⁴S).
+    const levels = {
+      unit: "eV",
+      within: { absolute: 0.05 },
+      source: "EnergyLevels",
+      mark: "from memory",
+    } as const;
+    const what = "steps between the channels of N2+ and NO+, N(²D) and N(²P) over N(⁴S)";
     const n2 = findRecombiningIon("N2+")!.channels.map(({ energy }) => energy / elementaryCharge.value);
-    expect(n2[0] - n2[1]).toBeCloseTo(2.38, 1);
-    expect(n2[0] - n2[2]).toBeCloseTo(3.58, 1);
-    expect(n2[0] - n2[3]).toBeCloseTo(2 * 2.38, 1);
+    expect(n2[0] - n2[1]).toAgreeWith({ ...levels, what, published: 2.38 });
+    expect(n2[0] - n2[2]).toAgreeWith({ ...levels, what, published: 3.58 });
+    expect(n2[0] - n2[3]).toAgreeWith({ ...levels, what, published: 2 * 2.38 });
     const no = findRecombiningIon("NO+")!.channels.map(({ energy }) => energy / elementaryCharge.value);
-    expect(no[0] - no[1]).toBeCloseTo(2.38, 1);
+    expect(no[0] - no[1]).toAgreeWith({ ...levels, what, published: 2.38 });
   });
 
   it("share every recombination out", () => {
@@ -65,15 +86,28 @@ describe("recombiningIons", () => {
   });
 
   it("give O2+ a mean energy of 4.64 eV by Kella's branchings and 4.90 eV by Petrignani's", () => {
-    // Computed independently.
     const { channels, otherBranchings } = findRecombiningIon("O2+")!;
     const mean = (shares: readonly (number | null)[]) =>
       channels.reduce(
         (sum, { energy }, i) => sum + (energy / elementaryCharge.value) * (shares[i] ?? NaN),
         0,
       );
-    expect(mean(channels.map(({ branching }) => branching))).toBeCloseToRelative(4.637, 2e-3);
-    expect(mean(otherBranchings[0].branchings)).toBeCloseToRelative(4.9, 2e-3);
+    expect(mean(channels.map(({ branching }) => branching))).toAgreeWith({
+      what: "mean energy of O2+ recombination, branchings of Kella et al. (1997)",
+      unit: "eV",
+      published: 4.637,
+      within: { relative: 2e-3 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
+    expect(mean(otherBranchings[0].branchings)).toAgreeWith({
+      what: "mean energy of O2+ recombination, branchings of Petrignani et al. (2005)",
+      unit: "eV",
+      published: 4.9,
+      within: { relative: 2e-3 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("keep every atom of the ion in the products, and know each of them", () => {

@@ -7,6 +7,7 @@ import { collisionParameter } from "../../../../shared/physics/handbook/collisio
 import { findGas } from "../../../../shared/physics/handbook/handbookGases";
 import { columnDiffusionLimit } from "../../../../shared/physics/limits/columnDiffusionLimit";
 import { limitLevel } from "../../../../shared/physics/limits/limitLevel";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 import { eightGases, sampleColumn } from "../column/sampleColumns";
 
@@ -55,7 +56,7 @@ describe("columnDiffusionLimit", () => {
   });
 
   it.each([
-    // b/H_a (1 − m/m_a) at 120 km on Mars, g 3.470 m/s², M 43.34: computed independently, in cm⁻² s⁻¹ over X.
+    // b/H_a (1 − m/m_a) at 120 km on Mars, g 3.470 m/s², M 43.34, in cm⁻² s⁻¹ over X.
     ["H2", 140, 1.118e13],
     ["H2", 200, 1.023e13],
     ["H", 140, 2.026e13],
@@ -77,7 +78,14 @@ describe("columnDiffusionLimit", () => {
     const collisionParameters = gases.map((a) => gases.map((b) => collisionParameter(a, b)));
     const column = solveColumn({ ...mars, gases, collisionParameters });
     const flux = fluxOf(columnDiffusionLimit(column, 1, mars.radius + 120e3));
-    expect(flux / 1e-6).toBeCloseToRelative(fluxCm * 1e4, 1e-3);
+    expect(flux / 1e-6).toAgreeWith({
+      what: `diffusion limit over X of ${formula} on Mars at 120 km, ${temperature} K`,
+      unit: "m⁻² s⁻¹",
+      published: fluxCm * 1e4,
+      within: { relative: 1e-3 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("of a trace gas hardly depends on where the homopause is put", () => {

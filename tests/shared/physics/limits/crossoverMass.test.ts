@@ -7,6 +7,7 @@ import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { columnCrossoverMass } from "../../../../shared/physics/limits/columnCrossoverMass";
 import { crossoverMass } from "../../../../shared/physics/limits/crossoverMass";
 import { limitLevel } from "../../../../shared/physics/limits/limitLevel";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 import { eightGases, sampleColumn } from "../column/sampleColumns";
 
@@ -26,13 +27,20 @@ function hydrogen({ fluxCm = 1e13, temperature = 400, gravity = 9.82 } = {}) {
 
 describe("crossoverMass", () => {
   it.each([
-    // Computed independently from the formula of Hunten, Pepin and Walker (1987), in u.
+    // From the formula of Hunten, Pepin and Walker (1987), in u.
     ["the Earth, 1e13 cm⁻² s⁻¹", {}, 8.8964],
     ["the Earth, 1e14 cm⁻² s⁻¹", { fluxCm: 1e14 }, 79.893],
     ["Mars, 1e13 cm⁻² s⁻¹", { gravity: 3.71 }, 21.888],
     ["the Earth, 5e13 cm⁻² s⁻¹ at 1000 K", { fluxCm: 5e13, temperature: 1000 }, 50.604],
-  ])("of H at %s is the one computed independently", (_, given, massU) => {
-    expect(crossoverMass(hydrogen(given)) / atomicMass.value).toBeCloseToRelative(massU, 2e-5);
+  ])("of H at %s is the one computed independently", (place, given, massU) => {
+    expect(crossoverMass(hydrogen(given)) / atomicMass.value).toAgreeWith({
+      what: `crossover mass of H at ${place}, formula of Hunten, Pepin and Walker (1987)`,
+      unit: "u",
+      published: massU,
+      within: { relative: 2e-5 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it.each([
@@ -40,7 +48,14 @@ describe("crossoverMass", () => {
     [9.82, 1.8999e13],
     [3.71, 7.1777e12],
   ])("at g = %s m/s² is that of O for %s cm⁻² s⁻¹", (gravity, fluxCm) => {
-    expect(crossoverMass(hydrogen({ gravity, fluxCm })) / atomicMass.value).toBeCloseToRelative(15.999, 5e-4);
+    expect(crossoverMass(hydrogen({ gravity, fluxCm })) / atomicMass.value).toAgreeWith({
+      what: `crossover mass at the flux of H that begins to take O along, g = ${gravity} m/s²`,
+      unit: "u",
+      published: 15.999,
+      within: { relative: 5e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("is the mass whose weight the drag of the flow just bears", () => {

@@ -5,18 +5,26 @@ import { julianYear } from "../../../../shared/physics/constants/iau";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { depletionTime } from "../../../../shared/physics/limits/depletionTime";
 import { supplyFraction } from "../../../../shared/physics/limits/supplyFraction";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
 
 describe("depletionTime", () => {
   it("of a metre of water on Mars at 1e8 H cm⁻² s⁻¹ is 2.1 Gyr", () => {
-    // 9.652082e42 atoms of H in 1 m, and 0.472 m in 1 Gyr from 1.44371391e14 m²: both computed independently.
+    // 9.652082e42 atoms of H in 1 m, and 0.472 m in 1 Gyr from 1.44371391e14 m².
     const { time } = depletionTime({
       logParticles: Math.log(9.652082e42),
       log10Rate: Math.log10(1e12 * 1.44371391e14),
     });
-    expect((time ?? NaN) / (1e9 * julianYear.value)).toBeCloseToRelative(1 / 0.472024, 1e-5);
+    expect((time ?? NaN) / (1e9 * julianYear.value)).toAgreeWith({
+      what: "time to lose 1 m of water from Mars at 1e8 H cm⁻² s⁻¹",
+      unit: "Gyr",
+      published: 1 / 0.472024,
+      within: { relative: 1e-5 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("is when a rate that stays has taken all", () => {
@@ -59,9 +67,17 @@ describe("supplyFraction", () => {
   });
 
   it("is 1 for the Earth's hydrogen: 3 kg/s against 2.5e13 × 14.1 ppm of H atoms", () => {
-    // Catling and Zahnle (2009) for the rate, Hunten (1973) for the constant (from memory); 1.79e27 s⁻¹ is 3 kg/s.
+    // 1.79e27 s⁻¹ is 3 kg/s; the constant is that of Hunten (1973), from memory.
     const surface = { diffusionLimit: 2.5e17 * 14.1e-6, exobaseRadius: 6.371e6 };
-    expect(supplyFraction({ ...surface, log10Rate: Math.log10(1.79e27) }).share).toBeCloseToRelative(1, 0.1);
+    const { share } = supplyFraction({ ...surface, log10Rate: Math.log10(1.79e27) });
+    expect(share).toAgreeWith({
+      what: "share of the diffusion limit, 2.5e13 × 14.1 ppm, in the Earth's 3 kg/s of H",
+      unit: "1",
+      published: 1,
+      within: { relative: 0.1 },
+      source: "CatlingZahnle2009",
+      mark: "from memory",
+    });
   });
 
   it("vanishes with the rate, told by its logarithm", () => {

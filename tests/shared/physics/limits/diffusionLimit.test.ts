@@ -4,6 +4,7 @@ import { describe, expect, it } from "vitest";
 import { atomicMass, boltzmann } from "../../../../shared/physics/constants/codata2022";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { diffusionLimit } from "../../../../shared/physics/limits/diffusionLimit";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -34,17 +35,33 @@ const fluxOf = (of: ReturnType<typeof place>): number => {
 
 describe("diffusionLimit", () => {
   it.each([
-    // Computed independently from these b, 208 K, 9.5 m/s² and H_a = 6.284 km, in cm⁻² s⁻¹ for a mixing ratio of 1.
+    // From these b, 208 K, 9.5 m/s² and H_a = 6.284 km, in cm⁻² s⁻¹ for a mixing ratio of 1.
     ["H2", 2.016, 1.462e19, 2.165e13],
     ["H", 1.008, 2.726e19, 4.187e13],
-  ])("of %s at the Earth's homopause is the one computed independently", (_, massU, bCm, fluxCm) => {
-    expect(fluxOf(place({ massU, bCm }))).toBeCloseToRelative(fluxCm * 1e4, 5e-4);
+  ])("of %s at the Earth's homopause is the one computed independently", (formula, massU, bCm, fluxCm) => {
+    expect(fluxOf(place({ massU, bCm }))).toAgreeWith({
+      what: `diffusion limit over X of ${formula} at the Earth's homopause`,
+      unit: "m⁻² s⁻¹",
+      published: fluxCm * 1e4,
+      within: { relative: 5e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("brackets the constant 2.5e13 cm⁻² s⁻¹ that is used for all hydrogen at the Earth", () => {
-    // Hunten (1973); the constant from memory. H2 lies below it, H above.
-    expect(fluxOf(place())).toBeLessThan(2.5e17);
-    expect(fluxOf(place({ massU: 1.008, bCm: 2.726e19 }))).toBeGreaterThan(2.5e17);
+    // H2 lies below it, H above.
+    const constant = { source: "Hunten1973", mark: "from memory", unit: "m⁻² s⁻¹" } as const;
+    expect(fluxOf(place())).toAgreeWith({
+      ...constant,
+      what: "diffusion limit over X of H2 at the Earth, below the constant of all hydrogen",
+      within: { range: [0, 2.5e17] },
+    });
+    expect(fluxOf(place({ massU: 1.008, bCm: 2.726e19 }))).toAgreeWith({
+      ...constant,
+      what: "diffusion limit over X of H at the Earth, above the constant of all hydrogen",
+      within: { range: [2.5e17, Infinity] },
+    });
   });
 
   it("is the flux that just uses up a light gas with height", () => {

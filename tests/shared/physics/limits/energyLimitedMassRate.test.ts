@@ -13,6 +13,7 @@ import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { findBody } from "../../../../shared/physics/handbook/handbookBodies";
 import { findGas } from "../../../../shared/physics/handbook/handbookGases";
 import { energyLimitedMassRate } from "../../../../shared/physics/limits/energyLimitedMassRate";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -28,12 +29,18 @@ const earth = {
 
 describe("energyLimitedMassRate", () => {
   it("of the Earth in 4.64 mW/m² is 1418.55 kg/s", () => {
-    // Computed independently for ε = 0.15 and R_XUV = R.
-    expect(energyLimitedMassRate(earth)).toBeCloseToRelative(1418.55, 1e-5);
+    expect(energyLimitedMassRate(earth)).toAgreeWith({
+      what: "energy-limited rate of the Earth in 4.64 mW/m², ε = 0.15, R_XUV = R",
+      unit: "kg s⁻¹",
+      published: 1418.55,
+      within: { relative: 1e-5 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it.each([
-    // Computed independently, in cm⁻² s⁻¹ of H over the surface, for 100 times 4.64 mW/m² at 1 au.
+    // In cm⁻² s⁻¹ of H over the surface, for 100 times 4.64 mW/m² at 1 au.
     ["Earth", 1, 1.66183e13],
     ["Mars", 1.523679, 3.5443e13],
     ["Venus", 0.723332, 3.7019e13],
@@ -46,11 +53,18 @@ describe("energyLimitedMassRate", () => {
       xuvFlux: 0.464 / distance ** 2,
     });
     const flux = rate / (4 * Math.PI * body.radius ** 2 * findGas("H")!.mass);
-    expect(flux).toBeCloseToRelative(fluxCm * 1e4, 1e-4);
+    expect(flux).toAgreeWith({
+      what: `energy-limited H flux of ${name} at ${distance} au, in 100 times 4.64 mW/m² at 1 au`,
+      unit: "m⁻² s⁻¹",
+      published: fluxCm * 1e4,
+      within: { relative: 1e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("of a hot close-in giant is 3.467e9 g/s", () => {
-    // Computed independently: 0.682 Jupiter masses, 1.359 Jupiter radii, 0.04707 au from 1.119 solar masses,
+    // 0.682 Jupiter masses, 1.359 Jupiter radii, 0.04707 au from 1.119 solar masses,
     // 0.45 W/m², ε = 0.15, R_XUV = R; ξ = 4.1952 and K = 0.64921.
     const body = {
       gravitationalParameter: 0.682 * nominalJupiterGravitationalParameter.value,
@@ -62,7 +76,14 @@ describe("energyLimitedMassRate", () => {
       starDistance: 0.04707 * astronomicalUnit.value,
     });
     const factor = tidalFactor({ hillRadius: hill, xuvRadius: body.radius });
-    expect(factor).toBeCloseToRelative(0.64921, 1e-4);
+    expect(factor).toAgreeWith({
+      what: "tidal factor of a close-in giant, ξ = 4.1952",
+      unit: "1",
+      published: 0.64921,
+      within: { relative: 1e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
     const rate = energyLimitedMassRate({
       ...earth,
       ...body,
@@ -70,7 +91,14 @@ describe("energyLimitedMassRate", () => {
       xuvFlux: 0.45,
       tidalFactor: factor,
     });
-    expect(rate * 1e3).toBeCloseToRelative(3.467e9, 5e-4);
+    expect(rate).toAgreeWith({
+      what: "energy-limited rate of a close-in giant in 0.45 W/m², ε = 0.15",
+      unit: "kg s⁻¹",
+      published: 3.467e6,
+      within: { relative: 5e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("spends the light that meets the disc on lifting the gas", () => {

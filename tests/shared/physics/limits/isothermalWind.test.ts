@@ -4,6 +4,7 @@ import { describe, expect, it } from "vitest";
 import { boltzmann } from "../../../../shared/physics/constants/codata2022";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { isothermalWind } from "../../../../shared/physics/limits/isothermalWind";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -22,7 +23,7 @@ function base(lambda: number) {
 
 describe("isothermalWind", () => {
   it.each([
-    // Mach numbers at the base, computed independently by root finding.
+    // Mach numbers at the base, by root finding.
     [2.5, 0.7779169534493435],
     [3, 0.6016509199581841],
     [4, 0.34895160756385973],
@@ -34,7 +35,14 @@ describe("isothermalWind", () => {
     [30, 9.436040231353984e-11],
   ])("of λ = %s starts at Mach %s", (lambda, mach) => {
     // λ itself is rounded, and moves ln u by 2 − λ/2 times as much… within 1e-13.
-    expect(isothermalWind(base(lambda)).machNumber).toBeCloseToRelative(mach, 1e-12);
+    expect(isothermalWind(base(lambda)).machNumber).toAgreeWith({
+      what: "Mach number at the base of the isothermal wind, λ from 2.5 to 30",
+      unit: "1",
+      published: mach,
+      within: { relative: 1e-12 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("satisfies the equation of motion in steps from the sonic point down", () => {
@@ -63,10 +71,17 @@ describe("isothermalWind", () => {
   });
 
   it("of a corona of 1e6 K around the Sun passes the speed of sound at 5.8 solar radii", () => {
-    // Parker (1958): r_s = GM/2a² with a² = kT/m, m half the mass of H; 5.75 R_S for 1e6 K, from memory.
+    // Parker (1958): r_s = GM/2a² with a² = kT/m, m half the mass of H.
     const sun = { gravitationalParameter: 1.3271244e20, radius: 6.957e8, massDensity: 1e-13 };
     const wind = isothermalWind({ ...sun, temperature: 1e6, particleMass: 0.5 * 1.6735e-27 });
-    expect(wind.sonicRadius / 6.957e8).toBeCloseToRelative(5.78, 0.01);
+    expect(wind.sonicRadius / 6.957e8).toAgreeWith({
+      what: "sonic point of a corona of 1e6 K around the Sun",
+      unit: "solar radii",
+      published: 5.78,
+      within: { relative: 0.01 },
+      source: "Parker1958",
+      mark: "from memory",
+    });
   });
 
   it("starts at the speed of sound where the base is the sonic point", () => {

@@ -6,6 +6,7 @@ import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { equivalentTime, type LossSpan } from "../../../../shared/physics/loss/equivalentTime";
 import { lossHistory } from "../../../../shared/physics/loss/lossHistory";
 import { relativeXuv } from "../../../../shared/physics/loss/relativeXuv";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -53,14 +54,21 @@ describe("equivalentTime", () => {
 
   it("makes 4.3e25 O/s of 1 Gyr at today's rate 9.31 mbar, and several times that with the Sun's past", () => {
     // Lillis et al. (2017): 4.3e25 s⁻¹, 13 mbar over 1 Gyr and 189 mbar over 3 Gyr with x = 2.6 in ionisation. The
-    // rate alone, computed independently, is 9.31 mbar; the growth from 1 to 3 Gyr back is a factor 14.5, and
+    // rate alone is 9.31 mbar; the growth from 1 to 3 Gyr back is a factor 14.5, and
     // here, where the Sun's whole XUV stands for ionising light, of the same order.
     const back = (age: number) =>
       equivalentTime({ ...sunlike, exponent: 2.6, begin: (4.56 - age) * gyr }) / gyr;
-    expect(back(1)).toBeGreaterThan(1.3);
-    expect(back(1)).toBeLessThan(1.7);
-    expect(back(3) / back(1)).toBeGreaterThan(7);
-    expect(back(3) / back(1)).toBeLessThan(29);
+    const lillis = { unit: "1", source: "Lillis2017", mark: "published" } as const;
+    expect(back(1)).toAgreeWith({
+      ...lillis,
+      what: "growth of the O lost from Mars in 1 Gyr by the Sun's past, 13/9.31",
+      within: { range: [1.3, 1.7] },
+    });
+    expect(back(3) / back(1)).toAgreeWith({
+      ...lillis,
+      what: "O lost from Mars in 3 Gyr over that in 1 Gyr, 189/13, to a factor 2",
+      within: { range: [7, 29] },
+    });
   });
 
   it("is the span itself for a rate that never changed", () => {

@@ -5,6 +5,7 @@ import { julianYear } from "../../../../shared/physics/constants/iau";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { relativeXuv } from "../../../../shared/physics/loss/relativeXuv";
 import { solarXuvExponent, type XuvHistory, xuvPieces } from "../../../../shared/physics/loss/xuvHistory";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -14,17 +15,38 @@ const table: XuvHistory = { kind: "table", ages: [0.1 * gyr, gyr, 4.56 * gyr], f
 
 describe("relativeXuv", () => {
   it.each([
-    // Ribas et al. (2005), abstract: 3.5 and 2.5 Gyr ago 6 and 2.5 times today's, from an age of 4.56 Gyr.
+    // From an age of 4.56 Gyr.
     [3.5, 6],
     [2.5, 2.5],
   ])("of the Sun %s Gyr ago is %s", (ago, ratio) => {
-    expect(relativeXuv(sun, (4.56 - ago) * gyr, 4.56 * gyr)).toBeCloseToRelative(ratio, 0.07);
+    expect(relativeXuv(sun, (4.56 - ago) * gyr, 4.56 * gyr)).toAgreeWith({
+      what: `the Sun's XUV ${ago} Gyr ago over today's`,
+      unit: "1",
+      published: ratio,
+      within: { relative: 0.07 },
+      source: "Ribas2005",
+      mark: "published",
+    });
   });
 
   it("is 6.02 and 2.66 by the law as it is printed", () => {
-    // Computed independently from 29.7 τ^−1.23.
-    expect(relativeXuv(sun, 1.06 * gyr, 4.56 * gyr)).toBeCloseToRelative(6.02, 1e-3);
-    expect(relativeXuv(sun, 2.06 * gyr, 4.56 * gyr)).toBeCloseToRelative(2.66, 1e-3);
+    // 29.7 τ^−1.23.
+    expect(relativeXuv(sun, 1.06 * gyr, 4.56 * gyr)).toAgreeWith({
+      what: "the Sun's XUV 3.5 Gyr ago, by the law as printed",
+      unit: "1",
+      published: 6.02,
+      within: { relative: 1e-3 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
+    expect(relativeXuv(sun, 2.06 * gyr, 4.56 * gyr)).toAgreeWith({
+      what: "the Sun's XUV 2.5 Gyr ago, by the law as printed",
+      unit: "1",
+      published: 2.66,
+      within: { relative: 1e-3 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("by a table of the law is the law", () => {

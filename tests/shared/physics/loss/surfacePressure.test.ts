@@ -6,6 +6,7 @@ import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { findGas } from "../../../../shared/physics/handbook/handbookGases";
 import { particlesFromSurfacePressure } from "../../../../shared/physics/loss/particlesFromSurfacePressure";
 import { surfacePressureFromParticles } from "../../../../shared/physics/loss/surfacePressureFromParticles";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -13,15 +14,29 @@ const mars = { gravity: 3.727866, radius: 3389.5e3, particleMass: findGas("CO2")
 
 describe("surfacePressureFromParticles", () => {
   it("of 4.3e25 O/s for 1 Gyr on Mars is 9.31 mbar", () => {
-    // Lillis et al. (2017) give the rate; the pressure computed independently.
+    // Lillis et al. (2017) give the rate.
     const oxygen = { ...mars, particleMass: findGas("O")!.mass, particles: 4.3e25 * 1e9 * julianYear.value };
-    expect(surfacePressureFromParticles(oxygen) / 100).toBeCloseToRelative(9.31, 1e-3);
+    expect(surfacePressureFromParticles(oxygen) / 100).toAgreeWith({
+      what: "surface pressure of 4.3e25 O/s for 1 Gyr on Mars",
+      unit: "mbar",
+      published: 9.31,
+      within: { relative: 1e-3 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("of 6.06e23 C/s for 3.6 Gyr on Mars is 1.3 mbar, as CO2", () => {
-    // Lo et al. (2021): 3e23 to 11e23 C/s, 1.3 mbar of CO2.
+    // Of 3e23 to 11e23 C/s.
     const particles = 6.06e23 * 3.6e9 * julianYear.value;
-    expect(surfacePressureFromParticles({ ...mars, particles }) / 100).toBeCloseToRelative(1.3, 0.1);
+    expect(surfacePressureFromParticles({ ...mars, particles }) / 100).toAgreeWith({
+      what: "surface pressure as CO2 of 6.06e23 C/s for 3.6 Gyr on Mars",
+      unit: "mbar",
+      published: 1.3,
+      within: { relative: 0.1 },
+      source: "Lo2021",
+      mark: "published",
+    });
   });
 
   it("is the weight of what lies on a square metre", () => {
@@ -57,15 +72,29 @@ describe("surfacePressureFromParticles", () => {
 
 describe("particlesFromSurfacePressure", () => {
   it.each([
-    // 1 bar of CO2, computed independently: g, radius, kg/m², molecules.
+    // 1 bar of CO2: g, radius, kg/m², molecules.
     ["Mars", 3.727866, 3389.5e3, 26824.998, 5.299383e43],
     ["Venus", 8.870033, 6051.8e3, 11273.916, 7.099998e43],
     ["the Earth", 9.820224, 6371.0084e3, 10183.0667, 7.107376e43],
-  ])("of 1 bar of CO2 on %s", (_, gravity, radius, column, molecules) => {
+  ])("of 1 bar of CO2 on %s", (planet, gravity, radius, column, molecules) => {
     const particles = particlesFromSurfacePressure({ ...mars, gravity, radius, pressure: 1e5 });
-    expect(particles).toBeCloseToRelative(molecules, 1e-4);
+    expect(particles).toAgreeWith({
+      what: `molecules in 1 bar of CO2 on ${planet}`,
+      unit: "1",
+      published: molecules,
+      within: { relative: 1e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
     const perSquareMetre = (particles * mars.particleMass) / (4 * Math.PI * radius ** 2);
-    expect(perSquareMetre).toBeCloseToRelative(column, 1e-6);
+    expect(perSquareMetre).toAgreeWith({
+      what: `mass of 1 bar of CO2 on ${planet}`,
+      unit: "kg m⁻²",
+      published: column,
+      within: { relative: 1e-6 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("are as many as a column in balance holds overhead", () => {

@@ -6,6 +6,7 @@ import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { moleculesFromWaterLayer } from "../../../../shared/physics/loss/moleculesFromWaterLayer";
 import { waterLayerFromMolecules, waterMass } from "../../../../shared/physics/loss/waterLayerFromMolecules";
 import { waterPerParticle } from "../../../../shared/physics/loss/waterPerParticle";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -13,17 +14,38 @@ const radius = 3389.5e3;
 
 describe("waterLayerFromMolecules", () => {
   it("of 1e8 H cm⁻² s⁻¹ for 1 Gyr is 0.472 m", () => {
-    // Computed independently, 0.472024 m with H2O of 18.0153 u; two atoms of H a molecule.
+    // With H2O of 18.0153 u; two atoms of H a molecule.
     const atoms = 1e12 * 4 * Math.PI * radius ** 2 * 1e9 * julianYear.value;
     const molecules = atoms * (waterPerParticle("H") ?? NaN);
-    expect(waterLayerFromMolecules({ molecules, radius })).toBeCloseToRelative(0.472, 1e-4);
-    expect(waterLayerFromMolecules({ molecules, radius })).toBeCloseToRelative(0.472024, 1e-4);
+    expect(waterLayerFromMolecules({ molecules, radius })).toAgreeWith({
+      what: "water layer of 1e8 H cm⁻² s⁻¹ for 1 Gyr on Mars",
+      unit: "m",
+      published: 0.472,
+      within: { relative: 1e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
+    expect(waterLayerFromMolecules({ molecules, radius })).toAgreeWith({
+      what: "water layer of 1e8 H cm⁻² s⁻¹ for 1 Gyr on Mars, to six digits",
+      unit: "m",
+      published: 0.472024,
+      within: { relative: 1e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("of the Earth's oceans is 2,745 m", () => {
-    // 1.4e21 kg, from memory; 4.67991e46 molecules and 2744.7 m computed independently.
+    // 1.4e21 kg, from memory.
     const depth = waterLayerFromMolecules({ molecules: 4.67991e46, radius: 6371.0084e3 });
-    expect(depth).toBeCloseToRelative(2744.7, 1e-4);
+    expect(depth).toAgreeWith({
+      what: "water layer of 4.67991e46 molecules, the Earth's oceans",
+      unit: "m",
+      published: 2744.7,
+      within: { relative: 1e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("weighs, over its area, what its molecules weigh", () => {
@@ -57,18 +79,31 @@ describe("waterLayerFromMolecules", () => {
 
 describe("moleculesFromWaterLayer", () => {
   it.each([
-    // Computed independently: mass of a layer of 1 m, kg.
+    // Mass of a layer of 1 m, kg.
     ["Mars", 3389.5e3, 1.443714e17],
     ["Venus", 6051.8e3, 4.602343e17],
     ["the Earth", 6371.0084e3, 5.100658e17],
-  ])("of 1 m on %s weigh what is computed independently", (_, size, mass) => {
+  ])("of 1 m on %s weigh what is computed independently", (planet, size, mass) => {
     const molecules = moleculesFromWaterLayer({ depth: 1, radius: size });
-    expect(molecules * waterMass).toBeCloseToRelative(mass, 1e-6);
+    expect(molecules * waterMass).toAgreeWith({
+      what: `mass of 1 m of water on ${planet}`,
+      unit: "kg",
+      published: mass,
+      within: { relative: 1e-6 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("hold 9.652082e42 atoms of H on Mars", () => {
-    // Computed independently.
-    expect(2 * moleculesFromWaterLayer({ depth: 1, radius })).toBeCloseToRelative(9.652082e42, 1e-4);
+    expect(2 * moleculesFromWaterLayer({ depth: 1, radius })).toAgreeWith({
+      what: "atoms of H in 1 m of water on Mars",
+      unit: "1",
+      published: 9.652082e42,
+      within: { relative: 1e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("are none in no layer, and go with the depth", () => {

@@ -10,6 +10,7 @@ import { findRecombiningIon } from "../../../../shared/physics/handbook/recombin
 import { escapeEnergy } from "../../../../shared/physics/nonthermal/escapeEnergy";
 import { escapingFragments } from "../../../../shared/physics/nonthermal/escapingFragments";
 import { fragmentEnergy } from "../../../../shared/physics/nonthermal/fragmentEnergy";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -25,14 +26,21 @@ const positive = fc.double({ min: 1e-3, max: 1e3, noNaN: true });
 
 describe("escapeEnergy", () => {
   it.each([
-    // Computed independently, eV.
+    // eV.
     ["Mars", 200e3, { O: 1.978, C: 1.484, N: 1.732, H: 0.1246, He: 0.495 }],
     ["Venus", 200e3, { O: 8.614, C: 6.463, N: 7.541, H: 0.5428, He: 2.156 }],
     ["Earth", 500e3, { O: 9.617, C: 7.215, N: 8.419, H: 0.606, He: 2.407 }],
   ])("above %s is the one computed independently", (body, altitude, energies) => {
     for (const [formula, energyEv] of Object.entries(energies)) {
       const energy = escapeEnergy({ ...above(body, altitude), particleMass: massOf(formula) });
-      expect(energy / eV, formula).toBeCloseToRelative(energyEv, 1e-3);
+      expect(energy / eV).toAgreeWith({
+        what: `escape energy of ${formula} above ${body}, at ${altitude / 1e3} km`,
+        unit: "eV",
+        published: energyEv,
+        within: { relative: 1e-3 },
+        source: "SeparateProgram",
+        mark: "computed independently",
+      });
     }
   });
 
@@ -64,7 +72,7 @@ describe("escapeEnergy", () => {
 
 describe("fragmentEnergy", () => {
   it.each([
-    // O2+: half of the channel's energy, eV, and the speed, km/s, computed independently.
+    // O2+: half of the channel's energy, eV, and the speed, km/s.
     [6.99, 3.495, 6.493],
     [5.02, 2.51, 5.503],
     [3.06, 1.53, 4.296],
@@ -72,8 +80,22 @@ describe("fragmentEnergy", () => {
   ])("of O from %s eV is %s eV, %s km/s", (totalEv, atomEv, speedKmS) => {
     const mass = massOf("O");
     const energy = fragmentEnergy({ energy: totalEv * eV, mass, otherMass: mass });
-    expect(energy / eV).toBeCloseToRelative(atomEv, 1e-14);
-    expect(Math.sqrt((2 * energy) / mass) / 1e3).toBeCloseToRelative(speedKmS, 2e-4);
+    expect(energy / eV).toAgreeWith({
+      what: "energy of O from a channel of O2+, half of it",
+      unit: "eV",
+      published: atomEv,
+      within: { relative: 1e-14 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
+    expect(Math.sqrt((2 * energy) / mass) / 1e3).toAgreeWith({
+      what: "speed of O from a channel of O2+",
+      unit: "km s⁻¹",
+      published: speedKmS,
+      within: { relative: 2e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("of two gives equal momenta and adds up", () => {
@@ -114,13 +136,26 @@ describe("escapingFragments", () => {
   const onMars = at("Mars", 200e3, "O2+");
 
   it("of O2+ above Mars are both atoms of the first two channels: 0.64 or 0.738 of recombinations", () => {
-    // Computed independently for Kella et al. (1997) and Petrignani et al. (2005).
     const { channels, total, perRecombination } = escapingFragments(onMars);
     expect(channels.map(({ escaping }) => escaping)).toEqual([2, 2, 0, 0]);
-    expect(total).toBeCloseToRelative(2 * 0.64, 1e-12);
+    expect(total).toAgreeWith({
+      what: "atoms that escape from Mars a recombination of O2+",
+      unit: "1",
+      published: 2 * 0.64,
+      within: { relative: 1e-12 },
+      source: "Kella1997",
+      mark: "computed independently",
+    });
     expect(perRecombination).toEqual({ O: total });
     const { branchings } = onMars.ion.otherBranchings[0];
-    expect(escapingFragments({ ...onMars, branchings }).total).toBeCloseToRelative(2 * 0.738, 1e-12);
+    expect(escapingFragments({ ...onMars, branchings }).total).toAgreeWith({
+      what: "atoms that escape from Mars a recombination of O2+",
+      unit: "1",
+      published: 2 * 0.738,
+      within: { relative: 1e-12 },
+      source: "Petrignani2005",
+      mark: "computed independently",
+    });
   });
 
   it.each(["Venus", "Earth"])("of O2+ above %s are none", (body) => {

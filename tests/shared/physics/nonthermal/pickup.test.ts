@@ -6,6 +6,7 @@ import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { findGas } from "../../../../shared/physics/handbook/handbookGases";
 import { pickupEnergy } from "../../../../shared/physics/nonthermal/pickupEnergy";
 import { pickupGyroradius } from "../../../../shared/physics/nonthermal/pickupGyroradius";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -39,7 +40,7 @@ function cycloid({ mass, flowSpeed, magneticField }: typeof ion) {
 
 describe("pickupGyroradius", () => {
   it.each([
-    // Computed independently with masses of the neutral, of H+ that of the proton, km, at 400 km/s.
+    // With masses of the neutral, of H+ that of the proton, km, at 400 km/s.
     ["O", 3, 22103],
     ["O", 5, 13262],
     ["O", 10, 6631],
@@ -47,7 +48,14 @@ describe("pickupGyroradius", () => {
     ["CO2", 3, 60804],
   ])("of %s+ in %s nT is %s km", (formula, fieldNt, radiusKm) => {
     const given = { ...ion, mass: massOf(formula), magneticField: fieldNt * 1e-9 };
-    expect(pickupGyroradius(given) / 1e3).toBeCloseToRelative(radiusKm, 5e-4);
+    expect(pickupGyroradius(given) / 1e3).toAgreeWith({
+      what: `gyroradius of ${formula}+ at 400 km/s in ${fieldNt} nT`,
+      unit: "km",
+      published: radiusKm,
+      within: { relative: 5e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("is half of how far an ion from rest swings across the flow", () => {
@@ -88,7 +96,14 @@ describe("pickupEnergy", () => {
     ["CO2", 145.9],
   ])("of %s+ is %s keV", (formula, energyKev) => {
     const energy = pickupEnergy({ mass: massOf(formula), flowSpeed: 400e3 });
-    expect(energy / charge / 1e3).toBeCloseToRelative(energyKev, 5e-4);
+    expect(energy / charge / 1e3).toAgreeWith({
+      what: `largest pickup energy of ${formula}+ at 400 km/s`,
+      unit: "keV",
+      published: energyKev,
+      within: { relative: 5e-4 },
+      source: "SeparateProgram",
+      mark: "computed independently",
+    });
   });
 
   it("is the most that an ion from rest has on its way", () => {

@@ -9,6 +9,7 @@ import {
   type Ionosphere,
   recombinationEscape,
 } from "../../../../shared/physics/nonthermal/recombinationEscape";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -53,12 +54,25 @@ describe("recombinationCoefficient", () => {
     ["CO2+", 1200, 1.75e-7],
   ])("of %s at %s K is %s cm³ s⁻¹", (formula, temperature, alphaCm3) => {
     const alpha = recombinationCoefficient(findRecombiningIon(formula)!, temperature);
-    expect(alpha * 1e6).toBeCloseToRelative(alphaCm3, 1e-14);
+    expect(alpha * 1e6).toAgreeWith({
+      what: `recombination coefficient of ${formula} at ${temperature} K`,
+      unit: "cm³ s⁻¹",
+      published: alphaCm3,
+      within: { relative: 1e-14 },
+      source: findRecombiningIon(formula)!.rate.provenance.source,
+      mark: "computed independently",
+    });
   });
 
   it("of O2+ is near the 2.0e-7 and 2.4e-7 of others at 300 K, and its pieces nearly meet", () => {
-    // Peverall et al. (2001): 2.4e-7.
-    expect(recombinationCoefficient(o2, 300) * 1e6).toBeCloseToRelative(2.2e-7, 0.15);
+    expect(recombinationCoefficient(o2, 300) * 1e6).toAgreeWith({
+      what: "recombination coefficient of O2+ at 300 K, between 2.0e-7 of others and Peverall's 2.4e-7",
+      unit: "cm³ s⁻¹",
+      published: 2.2e-7,
+      within: { relative: 0.15 },
+      source: "Peverall2001",
+      mark: "published",
+    });
     const [below, above] = [recombinationCoefficient(o2, 1200), recombinationCoefficient(o2, 1200.001)];
     expect(below).toBeCloseToRelative(above, 2e-3);
   });
@@ -107,12 +121,17 @@ describe("recombinationEscape", () => {
   });
 
   it("of an ionosphere like that of Mars is of the order of the rates inferred there", () => {
-    // Lillis et al. (2017): 1.2e25 to 5.5e25 O/s over the whole planet. By day some 1e4 cm⁻³ at 200 km, T_e 2000 K
+    // 1.2e25 to 5.5e25 O/s over the whole planet. By day some 1e4 cm⁻³ at 200 km, T_e 2000 K
     // (order of magnitude, from memory), here all around.
     const rate =
       recombinationEscape({ ...source, ionosphere: ionosphere({ temperature: 2000 }) }).rate ?? NaN;
-    expect(rate).toBeGreaterThan(1.2e25 / 10);
-    expect(rate).toBeLessThan(5.5e25 * 10);
+    expect(rate).toAgreeWith({
+      what: "hot O from an ionosphere like that of Mars, to a factor 10 of 1.2e25 to 5.5e25",
+      unit: "s⁻¹",
+      within: { range: [1.2e25 / 10, 5.5e25 * 10] },
+      source: "Lillis2017",
+      mark: "published",
+    });
   });
 
   it("begins at the exobase and leaves out what lies under it", () => {

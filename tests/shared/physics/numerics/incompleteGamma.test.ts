@@ -4,22 +4,37 @@ import { describe, expect, it } from "vitest";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { incompleteGamma, scaledUpperGamma } from "../../../../shared/physics/numerics/incompleteGamma";
 import functions from "../../../fixtures/specialFunctions.json";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
 
 describe("incompleteGamma", () => {
   it.each(functions.gamma)("at $x is that of mpmath", ({ x, lower }) => {
-    expect(incompleteGamma(x)).toBeCloseToRelative(lower, 1e-15);
+    expect(incompleteGamma(x)).toAgreeWith({
+      what: "P(3/2, x)",
+      unit: "1",
+      published: lower,
+      within: { relative: 1e-15 },
+      source: "MPMath",
+      mark: "computed independently",
+    });
   });
 
   it.each([
-    // Chi-square with three degrees of freedom, P(3/2, χ²/2): the usual tables, from memory: 50 %, 95 % and 99 %.
+    // Chi-square with three degrees of freedom, P(3/2, χ²/2): 50 %, 95 % and 99 %.
     [2.366, 0.5],
     [7.815, 0.95],
     [11.345, 0.99],
   ])("at half of %s is %s", (chiSquare, share) => {
-    expect(incompleteGamma(chiSquare / 2)).toBeCloseToRelative(share, 1e-4);
+    expect(incompleteGamma(chiSquare / 2)).toAgreeWith({
+      what: "P(3/2, χ²/2) at percentage points of χ²",
+      unit: "1",
+      published: share,
+      within: { relative: 1e-4 },
+      source: "ChiSquareTable",
+      mark: "from memory",
+    });
   });
 
   it("counts the slow ones of three normal speeds", () => {
@@ -64,7 +79,14 @@ describe("incompleteGamma", () => {
 
 describe("scaledUpperGamma", () => {
   it.each(functions.gamma)("at $x is that of mpmath", ({ x, scaledUpper }) => {
-    expect(scaledUpperGamma(x)).toBeCloseToRelative(scaledUpper, 1e-15);
+    expect(scaledUpperGamma(x)).toAgreeWith({
+      what: "eˣ Q(3/2, x)",
+      unit: "1",
+      published: scaledUpper,
+      within: { relative: 1e-15 },
+      source: "MPMath",
+      mark: "computed independently",
+    });
   });
 
   it("is the integral (2/√π) ∫ √(x + t) e^{−t} dt over t above zero", () => {
@@ -85,8 +107,14 @@ describe("scaledUpperGamma", () => {
   });
 
   it("of χ² = 7.815 leaves 5 %", () => {
-    // Table of chi-square with three degrees of freedom, from memory.
-    expect(Math.exp(-7.815 / 2) * scaledUpperGamma(7.815 / 2)).toBeCloseToRelative(0.05, 1e-3);
+    expect(Math.exp(-7.815 / 2) * scaledUpperGamma(7.815 / 2)).toAgreeWith({
+      what: "Q(3/2, χ²/2) at χ² = 7.815",
+      unit: "1",
+      published: 0.05,
+      within: { relative: 1e-3 },
+      source: "ChiSquareTable",
+      mark: "from memory",
+    });
   });
 
   it("solves its differential equation, Q̂′ = Q̂ − 2√(x/π)", () => {

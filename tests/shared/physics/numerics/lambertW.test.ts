@@ -7,6 +7,7 @@ import {
   principalLambertLogarithm,
 } from "../../../../shared/physics/numerics/lambertW";
 import functions from "../../../fixtures/specialFunctions.json";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -17,7 +18,14 @@ const branches = [
 
 describe.each(branches)("$name", ({ solve, key, sign }) => {
   it.each(functions.lambert)("at $c is that of mpmath", (row) => {
-    expect(solve(row.c)).toBeCloseToRelative(row[key], 5e-16);
+    expect(solve(row.c)).toAgreeWith({
+      what: `logarithm of Lambert's W, ${key === "lower" ? "lower" : "principal"} branch`,
+      unit: "1",
+      published: row[key],
+      within: { relative: 5e-16 },
+      source: "MPMath",
+      mark: "computed independently",
+    });
   });
 
   it("finds what bisection finds", () => {
@@ -57,10 +65,24 @@ describe.each(branches)("$name", ({ solve, key, sign }) => {
 
 describe("the two branches", () => {
   it("of W(−0.2) are −0.259171 and −2.542641", () => {
-    // Corless et al. (1996) define both; the values as commonly tabulated, from memory. c = −1 − ln 0.2.
+    // As commonly tabulated; c = −1 − ln 0.2.
     const c = -1 - Math.log(0.2);
-    expect(-Math.exp(principalLambertLogarithm(c))).toBeCloseTo(-0.2591711, 6);
-    expect(-Math.exp(lowerLambertLogarithm(c))).toBeCloseTo(-2.5426414, 6);
+    expect(-Math.exp(principalLambertLogarithm(c))).toAgreeWith({
+      what: "W₀(−0.2)",
+      unit: "1",
+      published: -0.2591711,
+      within: { absolute: 5e-7 },
+      source: "Corless1996",
+      mark: "from memory",
+    });
+    expect(-Math.exp(lowerLambertLogarithm(c))).toAgreeWith({
+      what: "W₋₁(−0.2)",
+      unit: "1",
+      published: -2.5426414,
+      within: { absolute: 5e-7 },
+      source: "Corless1996",
+      mark: "from memory",
+    });
   });
 
   it("are far apart for large c: −1 − c, and ln c", () => {

@@ -4,22 +4,37 @@ import { describe, expect, it } from "vitest";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { scaledErfc } from "../../../../shared/physics/numerics/scaledErfc";
 import functions from "../../../fixtures/specialFunctions.json";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
 
 describe("scaledErfc", () => {
   it.each(functions.gamma)("at $x is that of mpmath", ({ x, scaledErfc: expected }) => {
-    expect(scaledErfc(x)).toBeCloseToRelative(expected, 6e-16);
+    expect(scaledErfc(x)).toAgreeWith({
+      what: "e^{x²} erfc x",
+      unit: "1",
+      published: expected,
+      within: { relative: 6e-16 },
+      source: "MPMath",
+      mark: "computed independently",
+    });
   });
 
   it.each([
-    // erfc x of tables: Abramowitz and Stegun (1964), table 7.1, from memory: erfc 0.5, 1, 2.
+    // Table 7.1: erfc 0.5, 1, 2.
     [0.5, 0.4795001222],
     [1, 0.1572992071],
     [2, 0.0046777349],
   ])("at %s is e^{x²} times the tabulated %s", (x, erfc) => {
-    expect(scaledErfc(x) * Math.exp(-x * x)).toBeCloseToRelative(erfc, 1e-7);
+    expect(scaledErfc(x) * Math.exp(-x * x)).toAgreeWith({
+      what: "erfc x at 0.5, 1 and 2",
+      unit: "1",
+      published: erfc,
+      within: { relative: 1e-7 },
+      source: "AbramowitzStegun1964",
+      mark: "from memory",
+    });
   });
 
   it("is the integral (2/√π) ∫ e^{−t² − 2xt} dt over t above zero", () => {

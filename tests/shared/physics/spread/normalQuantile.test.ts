@@ -2,6 +2,7 @@ import { describe, expect, it } from "vitest";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { normalProbability } from "../../../../shared/physics/spread/normalProbability";
 import { normalQuantile } from "../../../../shared/physics/spread/normalQuantile";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 /** [p, x], x to 17 digits by Newton's method on erfc with 60 digits (mpmath 1.3). */
@@ -40,14 +41,28 @@ const probabilities: [number, number][] = [
 
 describe("normalQuantile", () => {
   it("gives the check values of its publication", () => {
-    // Wichura (1988), AS 241: PPND16(0.25) = −0.6744897501960817, (0.001) = −3.090232306167814, (1e-20) = −9.262340089798408
-    expect(normalQuantile(0.25)).toBeCloseToRelative(-0.6744897501960817, 1e-15);
-    expect(normalQuantile(0.001)).toBeCloseToRelative(-3.090232306167814, 1e-15);
-    expect(normalQuantile(1e-20)).toBeCloseToRelative(-9.262340089798408, 1e-15);
+    const what = "normal quantile, check values of AS 241";
+    const told = {
+      what,
+      unit: "1",
+      within: { relative: 1e-15 },
+      source: "Wichura1988",
+      mark: "published",
+    } as const;
+    expect(normalQuantile(0.25)).toAgreeWith({ ...told, published: -0.6744897501960817 });
+    expect(normalQuantile(0.001)).toAgreeWith({ ...told, published: -3.090232306167814 });
+    expect(normalQuantile(1e-20)).toAgreeWith({ ...told, published: -9.262340089798408 });
   });
 
   it.each(table)("lies at %s where it should", (probability, quantile) => {
-    expect(normalQuantile(probability)).toBeCloseToRelative(quantile, 1e-15);
+    expect(normalQuantile(probability)).toAgreeWith({
+      what: "normal quantile, 1e-300 to 0.975",
+      unit: "1",
+      published: quantile,
+      within: { relative: 1e-15 },
+      source: "MPMath",
+      mark: "computed independently",
+    });
   });
 
   it("is the inverse of the probability", () => {
@@ -74,13 +89,28 @@ describe("normalQuantile", () => {
 
 describe("normalProbability", () => {
   it.each(probabilities)("is right %s standard deviations away", (x, probability) => {
-    expect(normalProbability(x)).toBeCloseToRelative(probability, (1 + (x * x) / 4) * 1e-15);
+    expect(normalProbability(x)).toAgreeWith({
+      what: "normal probability, −37 to 9 standard deviations",
+      unit: "1",
+      published: probability,
+      within: { relative: (1 + (x * x) / 4) * 1e-15 },
+      source: "MPMath",
+      mark: "computed independently",
+    });
   });
 
   it("gives the shares that everyone knows", () => {
-    // Abramowitz and Stegun (1964), table 26.1: P(1) = 0.841344746068543, P(2) = 0.977249868051821
-    expect(normalProbability(1)).toBeCloseToRelative(0.841344746068543, 1e-15);
-    expect(normalProbability(2)).toBeCloseToRelative(0.977249868051821, 1e-15);
+    // Table 26.1
+    const what = "normal probability at 1 and 2 standard deviations";
+    const told = {
+      what,
+      unit: "1",
+      within: { relative: 1e-15 },
+      source: "AbramowitzStegun1964",
+      mark: "published",
+    } as const;
+    expect(normalProbability(1)).toAgreeWith({ ...told, published: 0.841344746068543 });
+    expect(normalProbability(2)).toAgreeWith({ ...told, published: 0.977249868051821 });
   });
 
   it("adds up to one and never falls", () => {

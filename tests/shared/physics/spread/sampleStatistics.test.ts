@@ -3,11 +3,19 @@ import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { histogram } from "../../../../shared/physics/spread/histogram";
 import { rankCorrelation, ranks } from "../../../../shared/physics/spread/rankCorrelation";
 import { sampleQuantile } from "../../../../shared/physics/spread/sampleQuantile";
+import "../../../toAgreeWith";
 
 describe("sampleQuantile", () => {
   it("follows definition 5", () => {
     // Hyndman and Fan (1996): p_k = (k − ½)/n, linear between; of 1, 2, 3, 4 the quartile is 1.5
-    expect(sampleQuantile([1, 2, 3, 4], 0.25)).toBe(1.5);
+    expect(sampleQuantile([1, 2, 3, 4], 0.25)).toAgreeWith({
+      what: "quartile of 1, 2, 3, 4 by definition 5",
+      unit: "1",
+      published: 1.5,
+      within: { relative: 0 },
+      source: "HyndmanFan1996",
+      mark: "computed independently",
+    });
     expect(sampleQuantile([1, 2, 3, 4], 0.5)).toBe(2.5);
     expect(sampleQuantile([1, 2, 3, 4], 0.125)).toBe(1);
     expect(sampleQuantile([10, 20, 40], 0.75)).toBe(35);
@@ -35,10 +43,17 @@ describe("sampleQuantile", () => {
 
 describe("rankCorrelation", () => {
   it("gives a published worked example", () => {
-    // IQ and hours of television of ten people, a widely printed textbook example: ρ = −29/165 = −0.17575757…
+    // IQ and hours of television of ten people: ρ = −29/165 = −0.17575757…
     const iq = [106, 100, 86, 101, 99, 103, 97, 113, 112, 110];
     const hours = [7, 27, 2, 50, 28, 29, 20, 12, 6, 17];
-    expect(rankCorrelation(iq, hours)).toBeCloseTo(-29 / 165, 14);
+    expect(rankCorrelation(iq, hours)).toAgreeWith({
+      what: "Spearman's ρ of a worked example, −29/165",
+      unit: "1",
+      published: -29 / 165,
+      within: { absolute: 5e-15 },
+      source: "Textbook",
+      mark: "published",
+    });
   });
 
   it("sees only the order", () => {

@@ -3,6 +3,7 @@ import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import type { Distribution } from "../../../../shared/physics/spread/distribution";
 import { normalProbability } from "../../../../shared/physics/spread/normalProbability";
 import { truncatedDistribution } from "../../../../shared/physics/spread/truncatedDistribution";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const free = { lower: -Infinity, upper: Infinity };
@@ -24,9 +25,23 @@ describe("truncatedDistribution", () => {
   it("leaves a distribution within its bounds as it is", () => {
     const whole = truncatedDistribution(normal(240, 30), free)!;
     expect(whole.cut).toBe(0);
-    // q16 and q84 lie 0.994457883209753 deviations away: Abramowitz and Stegun (1964), table 26.5, p = 0.16
-    expect(whole.quantile(0.84)).toBeCloseToRelative(240 + 30 * 0.994457883209753, 1e-14);
-    expect(whole.quantile(0.16)).toBeCloseToRelative(240 - 30 * 0.994457883209753, 1e-14);
+    // Table 26.5, p = 0.16: 0.994457883209753 deviations
+    expect(whole.quantile(0.84)).toAgreeWith({
+      what: "q84 of 240 ± 30",
+      unit: "1",
+      published: 240 + 30 * 0.994457883209753,
+      within: { relative: 1e-14 },
+      source: "AbramowitzStegun1964",
+      mark: "published",
+    });
+    expect(whole.quantile(0.16)).toAgreeWith({
+      what: "q16 of 240 ± 30",
+      unit: "1",
+      published: 240 - 30 * 0.994457883209753,
+      within: { relative: 1e-14 },
+      source: "AbramowitzStegun1964",
+      mark: "published",
+    });
     expect(truncatedDistribution(uniform(180, 350), positive)!.quantile(0.25)).toBe(222.5);
     expect(truncatedDistribution(logNormal(2.5e11, 2), free)!.quantile(0.5)).toBeCloseToRelative(
       2.5e11,
@@ -41,10 +56,17 @@ describe("truncatedDistribution", () => {
   });
 
   it("has the mean of a truncated normal distribution in closed form", () => {
-    // Johnson, Kotz and Balakrishnan (1994), Continuous Univariate Distributions 1, eq. 13.134:
+    // Eq. 13.134:
     // mean + σ (φ(α) − φ(β))/(Φ(β) − Φ(α)); φ(−1) = 0.2419707245191434
     const share = 1 - normalProbability(-1);
-    expect(meanOf(normal(1, 1), positive)).toBeCloseToRelative(1 + 0.2419707245191434 / share, 2e-5);
+    expect(meanOf(normal(1, 1), positive)).toAgreeWith({
+      what: "mean of 1 ± 1 truncated to positive numbers",
+      unit: "1",
+      published: 1 + 0.2419707245191434 / share,
+      within: { relative: 2e-5 },
+      source: "JohnsonKotzBalakrishnan1994",
+      mark: "computed independently",
+    });
     const both = 1 - 2 * normalProbability(-1);
     expect(meanOf(normal(0.5, 0.5), { lower: 0, upper: 1 })).toBeCloseToRelative(0.5, 1e-12);
     expect(truncatedDistribution(normal(0.5, 0.5), { lower: 0, upper: 1 })!.cut).toBeCloseToRelative(

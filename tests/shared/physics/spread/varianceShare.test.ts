@@ -4,6 +4,7 @@ import { normalQuantile } from "../../../../shared/physics/spread/normalQuantile
 import { rankCorrelation } from "../../../../shared/physics/spread/rankCorrelation";
 import { scrambledSobol } from "../../../../shared/physics/spread/scrambledSobol";
 import { varianceShare } from "../../../../shared/physics/spread/varianceShare";
+import "../../../toAgreeWith";
 
 const groups = 8;
 
@@ -22,25 +23,37 @@ function draws(inputs: number, count: number, model: (u: Float64Array) => number
 }
 
 /** Within four of its own standard errors, and those below `largest`. */
-function expectShare(found: ReturnType<typeof varianceShare>, exact: number, largest: number) {
+function expectShare(
+  found: ReturnType<typeof varianceShare>,
+  exact: number,
+  largest: number,
+  told: { what: string; source: string } | null = null,
+) {
   expect(found!.error!).toBeLessThan(largest);
-  expect(Math.abs(found!.share - exact)).toBeLessThan(4 * found!.error! + 1e-3);
+  const absolute = 4 * found!.error! + 1e-3;
+  if (told) {
+    const mark = "computed independently";
+    expect(found!.share).toAgreeWith({ ...told, unit: "1", published: exact, within: { absolute }, mark });
+  } else expect(Math.abs(found!.share - exact)).toBeLessThan(absolute);
 }
 
 describe("varianceShare", () => {
   it("gives the first-order indices of the Ishigami function", () => {
-    // Ishigami and Homma (1990), a = 7, b = 0.1, in closed form: S1 = 0.3139, S2 = 0.4424, S3 = 0
+    // a = 7, b = 0.1, in closed form
     const { coordinates, responses } = draws(3, 4096, (u) => {
       const [x, y, z] = [...u].map((v) => (2 * v - 1) * Math.PI);
       return Math.sin(x) + 7 * Math.sin(y) ** 2 + 0.1 * z ** 4 * Math.sin(x);
     });
     [0.3139, 0.4424, 0].forEach((exact, input) =>
-      expectShare(varianceShare(coordinates[input], responses, groups), exact, 0.008),
+      expectShare(varianceShare(coordinates[input], responses, groups), exact, 0.008, {
+        what: `variance share of input ${input + 1} of the Ishigami function, within four standard errors`,
+        source: "IshigamiHomma1990",
+      }),
     );
   });
 
   it("gives those of Sobol's g-function", () => {
-    // Saltelli and Sobol (1995): g = ∏ (|4u − 2| + a)/(1 + a), V_i = 1/(3 (1 + a)²), S_i = V_i/(∏ (1 + V_i) − 1)
+    // g = ∏ (|4u − 2| + a)/(1 + a), V_i = 1/(3 (1 + a)²), S_i = V_i/(∏ (1 + V_i) − 1)
     const a = [0, 1, 4.5, 9, 99];
     const { coordinates, responses } = draws(5, 4096, (u) =>
       u.reduce((product, v, i) => (product * (Math.abs(4 * v - 2) + a[i])) / (1 + a[i]), 1),
@@ -48,7 +61,10 @@ describe("varianceShare", () => {
     const parts = a.map((value) => 1 / (3 * (1 + value) ** 2));
     const whole = parts.reduce((product, part) => product * (1 + part), 1) - 1;
     parts.forEach((part, input) =>
-      expectShare(varianceShare(coordinates[input], responses, groups), part / whole, 0.01),
+      expectShare(varianceShare(coordinates[input], responses, groups), part / whole, 0.01, {
+        what: `variance share of input ${input + 1} of Sobol's g-function, within four standard errors`,
+        source: "SaltelliSobol1995",
+      }),
     );
   });
 
@@ -60,9 +76,16 @@ describe("varianceShare", () => {
     const shares = coordinates.map((u) => varianceShare(u, responses, groups)!);
     [9, 4, 1].forEach((part, i) => expectShare(shares[i], part / 14, 0.01));
     expect(shares.reduce((sum, { share }) => sum + share, 0)).toBeCloseTo(1, 2);
-    // Spearman's of two normal variables: (6/π) asin(ρ/2) (Pearson 1907); ρ = 3/√14
+    // Spearman's of two normal variables: (6/π) asin(ρ/2); ρ = 3/√14
     const exact = (6 / Math.PI) * Math.asin(3 / Math.sqrt(14) / 2);
-    expect(Math.abs(rankCorrelation(coordinates[0], responses)! - exact)).toBeLessThan(0.003);
+    expect(rankCorrelation(coordinates[0], responses)).toAgreeWith({
+      what: "Spearman's of two normal variables, ρ = 3/√14",
+      unit: "1",
+      published: exact,
+      within: { absolute: 0.003 },
+      source: "Pearson1907",
+      mark: "computed independently",
+    });
   });
 
   it("sees no effect of one input where only the product of two acts", () => {

@@ -4,6 +4,7 @@ import { describe, expect, it } from "vitest";
 import { PhysicsDomainError } from "../../../../shared/physics/errors";
 import { temperatureCurve } from "../../../../shared/physics/temperature/temperatureCurve";
 import type { TemperatureProfile } from "../../../../shared/physics/types";
+import "../../../toAgreeWith";
 import "../../../toBeCloseToRelative";
 
 const seed = 20261201;
@@ -25,14 +26,21 @@ const points: TemperatureProfile = {
 
 describe("temperatureCurve", () => {
   it.each([
-    // U.S. Standard Atmosphere 1976: altitude in km, T in K, printed to 0.01 K.
+    // Altitude in km, T in K, printed to 0.01 K.
     [120, 360.0],
     [150, 634.39],
     [200, 854.56],
     [300, 976.01],
     [500, 999.24],
   ])("of the 1976 standard at %s km is %s K", (altitudeKm, printed) => {
-    expect(Math.abs(temperatureCurve(standard, radius).at(altitudeKm * 1e3) - printed)).toBeLessThan(0.01);
+    expect(temperatureCurve(standard, radius).at(altitudeKm * 1e3)).toAgreeWith({
+      what: "Bates temperature of the 1976 standard, 120 to 500 km",
+      unit: "K",
+      published: printed,
+      within: { absolute: 0.01 },
+      source: "USSA1976",
+      mark: "published",
+    });
   });
 
   it("of Bates solves dT/dζ = s (T∞ − T), stepped through in geopotential height", () => {
