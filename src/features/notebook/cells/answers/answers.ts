@@ -4,11 +4,15 @@ import type { CellResult } from "../../../../../shared/notebook/result";
 import type { AnswerProps } from "./answerProps";
 import { ColumnAnswer } from "./ColumnAnswer";
 import { EscapeAnswer } from "./EscapeAnswer";
+import { SpreadAnswer } from "./SpreadAnswer";
+import { SweepAnswer } from "./SweepAnswer";
 
 /** What draws the answer of each kind; the others answer by a list of their values. */
 export const answers: Partial<Record<CellKind, ComponentType<AnswerProps>>> = {
   column: ColumnAnswer,
   escape: EscapeAnswer,
+  spread: SpreadAnswer,
+  sweep: SweepAnswer,
 };
 
 /** How many figures and tables a cell has, which numbers those of the cells below it. */
@@ -22,6 +26,10 @@ export function countResults({ kind, tables }: Pick<CellResult, "kind" | "tables
       return { figures: 2, tables: hasLevels ? 1 : 0 };
     case "escape":
       return { figures: 0, tables: 1 };
+    case "sweep":
+      return { figures: (tables.rows?.length ?? 0) > 0 ? 1 : 0, tables: 0 };
+    case "spread":
+      return (tables.sensitivity?.length ?? 0) > 0 ? { figures: 1, tables: 1 } : { figures: 0, tables: 0 };
     default:
       return { figures: 0, tables: 0 };
   }
