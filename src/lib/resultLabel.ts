@@ -13,7 +13,8 @@ export interface ResultLabel {
   quantity: RichText;
 }
 
-const isGas = (part: string | undefined): part is string => part !== undefined && /^[A-Z][A-Za-z0-9]*$/.test(part);
+const isGas = (part: string | undefined): part is string =>
+  part !== undefined && /^[A-Z][A-Za-z0-9]*$/.test(part);
 
 /** "log10_rate" as log₁₀ rate; underscores are spaces. */
 function words(path: readonly string[]): RichText {
@@ -25,7 +26,8 @@ function labelOf(name: string): ResultLabel {
   const [, ...path] = name.split(".");
   if (path.length === 0) return { name, label: [{ code: name }], gas: null, quantity: [{ code: name }] };
   const [first, ...rest] = path;
-  if (!isGas(first) || rest.length === 0) return { name, label: words(path), gas: null, quantity: words(path) };
+  if (!isGas(first) || rest.length === 0)
+    return { name, label: words(path), gas: null, quantity: words(path) };
   const quantity = words(rest);
   return { name, label: [...quantity, " of ", ...formatGas(first)], gas: first, quantity };
 }

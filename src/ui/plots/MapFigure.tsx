@@ -13,22 +13,21 @@ import { PointReader, type ReadPoint } from "./PointReader";
 import { capital, sweepColumns } from "./SweepFigure";
 import type { SweepFigureProps } from "./sweepFigureProps";
 import { sweepScale, sweptRange } from "./sweepPlot";
-import { shownNumber, type SweepResult, type SweptResult } from "./sweepResult";
+import { steppedNumber, type SweepResult, type SweptResult } from "./sweepResult";
 import { sheetWidth, useFigure } from "./useFigure";
 
 function Caption({ sweep, shown }: { sweep: SweepResult; shown: SweptResult }) {
   const [first, second] = sweep.axes;
   const isInside = sweep.axes.every(
-    ({ written, values }) => written !== null && written >= Math.min(...values) && written <= Math.max(...values),
+    ({ written, values }) =>
+      written !== null && written >= Math.min(...values) && written <= Math.max(...values),
   );
   const isPartial = shown.values.some((value) => value === null);
   return (
     <>
       <Rich text={capital(shown.label)} /> over <code>{first!.name}</code> and <code>{second!.name}</code>.{" "}
       {contourWords(shown, sweep)}.{" "}
-      {isInside
-        ? "The cross is the notebook as written."
-        : "The notebook as written lies beyond the map."}
+      {isInside ? "The cross is the notebook as written." : "The notebook as written lies beyond the map."}
       {isPartial && " Hatched: no answer."}
     </>
   );
@@ -37,7 +36,10 @@ function Caption({ sweep, shown }: { sweep: SweepResult; shown: SweptResult }) {
 /** Index of the point nearest to the notebook as written. */
 function nearestTo(values: readonly number[], written: number | null): number {
   const wanted = written ?? values[0]!;
-  return values.reduce((best, value, index) => (Math.abs(value - wanted) < Math.abs(values[best]! - wanted) ? index : best), 0);
+  return values.reduce(
+    (best, value, index) => (Math.abs(value - wanted) < Math.abs(values[best]! - wanted) ? index : best),
+    0,
+  );
 }
 
 /** A watched quantity over two varied ones; where several are watched, one is chosen. */
@@ -57,16 +59,22 @@ export function MapFigure({ sweep, unitSystem, number, reasons }: SweepFigurePro
   const down = grid.y.map((place) => (1 - share(place, ranges.y)) * room.tall);
   const valueAt = ({ column, row }: ReadPoint) => {
     const value = shown.values[grid.index[row]![column]!] ?? null;
-    return value === null ? null : formatQuantity({ value, unit: shown.unit }, unitSystem, { scale: shown.scale });
+    return value === null
+      ? null
+      : formatQuantity({ value, unit: shown.unit }, unitSystem, { scale: shown.scale });
   };
   const along = ({ column, row }: ReadPoint) => [
-    { name: first.name, text: shownNumber(sweepScale(first).valueAt(grid.x[column]!), first.scale) },
-    { name: second.name, text: shownNumber(sweepScale(second).valueAt(grid.y[row]!), second.scale) },
+    { name: first.name, text: steppedNumber(sweepScale(first).valueAt(grid.x[column]!), first.scale) },
+    { name: second.name, text: steppedNumber(sweepScale(second).valueAt(grid.y[row]!), second.scale) },
   ];
   const rows = (point: ReadPoint) => {
     const value = valueAt(point);
     return [
-      ...along(point).map(({ name, text }) => ({ key: name, symbol: <code>{name}</code>, value: <Rich text={text} /> })),
+      ...along(point).map(({ name, text }) => ({
+        key: name,
+        symbol: <code>{name}</code>,
+        value: <Rich text={text} />,
+      })),
       {
         key: shown.name,
         symbol: <Rich text={shown.label} />,

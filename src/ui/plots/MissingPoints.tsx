@@ -3,7 +3,7 @@ import { formatCount } from "../../lib/format";
 import { formatMessage } from "../../lib/formatMessage";
 import { plainText } from "../../lib/richText";
 import { Rich } from "../../lib/Rich";
-import { shownNumber, type SweepAxis, type SweepResult } from "./sweepResult";
+import { steppedNumber, type SweepAxis, type SweepResult } from "./sweepResult";
 
 /** Stretches of points told before the rest is left to the CSV file. */
 const toldStretches = 12;
@@ -38,7 +38,9 @@ function Reason({ outcome, sweep }: { outcome: ResultRow; sweep: SweepResult }) 
           {places.slice(0, toldStretches).map((place) => (
             <li key={place}>{place}</li>
           ))}
-          {left > 0 && <li>{formatCount(left, "stretch", "stretches")} more; the CSV file has every point.</li>}
+          {left > 0 && (
+            <li>And {formatCount(left, "stretch", "stretches")} more; the CSV file has every point.</li>
+          )}
         </ul>
       </dd>
     </div>
@@ -64,7 +66,8 @@ export function stretches({ axes, reasons }: SweepResult, code: string): string[
   return found;
 }
 
-const at = ({ values, scale }: SweepAxis, index: number): string => plainText(shownNumber(values[index]!, scale));
+const at = ({ values, scale }: SweepAxis, index: number): string =>
+  plainText(steppedNumber(values[index]!, scale));
 
 const ends = (axis: SweepAxis, from: number, to: number): string =>
   from === to ? at(axis, from) : `${at(axis, from)} to ${at(axis, to)}`;

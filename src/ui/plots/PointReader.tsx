@@ -26,7 +26,10 @@ export interface ReadPoint {
 const gap = 12;
 
 const nearest = (places: readonly number[], indices: readonly number[], at: number): number =>
-  indices.reduce((best, index) => (Math.abs(places[index]! - at) < Math.abs(places[best]! - at) ? index : best), indices[0] ?? 0);
+  indices.reduce(
+    (best, index) => (Math.abs(places[index]! - at) < Math.abs(places[best]! - at) ? index : best),
+    indices[0] ?? 0,
+  );
 
 const within = (places: readonly number[], length: number): number[] =>
   places.flatMap((place, index) => (place >= -0.5 && place <= length + 0.5 ? [index] : []));

@@ -19,13 +19,17 @@ interface SpreadFigureProps {
   number: number;
 }
 
+/** Of more results than this, the ranges are left to the table. */
+const mostTold = 2;
+
 /** "4.6 × 10²⁵ to 1.6 × 10²⁶ s⁻¹" */
 function Middle({ watched: { quantiles, scale } }: { watched: SpreadWatched }) {
   const { lower, upper } = quantiles;
   if (lower.value === null || upper.value === null) return "unknown";
   return (
     <>
-      <Rich text={shownNumber(lower.value, { ...scale, unit: "1" })} /> to <Rich text={shownNumber(upper.value, scale)} />
+      <Rich text={shownNumber(lower.value, { ...scale, unit: "1" })} /> to{" "}
+      <Rich text={shownNumber(upper.value, scale)} />
     </>
   );
 }
@@ -54,15 +58,29 @@ function Caption({ spread }: { spread: SpreadResult }) {
       .{" "}
       {shown.length > 0 && (
         <>
-          Grey and thick line: the middle 68{"\u202f"}%,{" "}
-          <Joined parts={shown.map((each) => <Middle key={each.name} watched={each} />)} />; thin: 95{"\u202f"}%; tick: median. Below,
+          Grey and thick line: the middle 68{"\u202f"}%
+          {shown.length <= mostTold && (
+            <>
+              ,{" "}
+              <Joined
+                parts={shown.map((each) => (
+                  <Middle key={each.name} watched={each} />
+                ))}
+              />
+            </>
+          )}
+          ; thin: 95{"\u202f"}%; tick: median. Below,
         </>
       )}{" "}
       {shown.length > 0 ? "first-order" : "First-order"} share of the variance by entry
       {logarithmic.length > 0 && (
         <>
           , of the logarithm for{" "}
-          <Joined parts={logarithmic.map(({ name, label }) => <Rich key={name} text={label} />)} />
+          <Joined
+            parts={logarithmic.map(({ name, label }) => (
+              <Rich key={name} text={label} />
+            ))}
+          />
         </>
       )}
       . What no entry explains alone is shared between them.
@@ -85,8 +103,14 @@ function shareColumns({ watched, inputs }: Pick<SpreadResult, "watched" | "input
   return [
     { head: "entry", values: inputs },
     ...watched.flatMap(({ name, shares }): CsvColumn[] => [
-      { head: `share of variance of ${name}`, values: inputs.map((input) => shares.get(input)?.share ?? null) },
-      { head: `its standard error, ${name}`, values: inputs.map((input) => shares.get(input)?.error ?? null) },
+      {
+        head: `share of variance of ${name}`,
+        values: inputs.map((input) => shares.get(input)?.share ?? null),
+      },
+      {
+        head: `its standard error, ${name}`,
+        values: inputs.map((input) => shares.get(input)?.error ?? null),
+      },
     ]),
   ];
 }

@@ -10,8 +10,16 @@ import { FigureTable } from "./FigureTable";
 import { PlotlyFigure } from "./PlotlyFigure";
 import { PointReader } from "./PointReader";
 import type { SweepFigureProps } from "./sweepFigureProps";
-import { curveName, nameWidth, sweepLabel, sweepPanels, sweepPlot, sweepScale, sweptRange } from "./sweepPlot";
-import { shownNumber, type SweepAxis, type SweepResult } from "./sweepResult";
+import {
+  curveName,
+  nameWidth,
+  sweepLabel,
+  sweepPanels,
+  sweepPlot,
+  sweepScale,
+  sweptRange,
+} from "./sweepPlot";
+import { steppedNumber, type SweepAxis, type SweepResult } from "./sweepResult";
 import { sweepRoom } from "./sweepRoom";
 import { sheetWidth, useFigure } from "./useFigure";
 
@@ -35,10 +43,14 @@ function AsWritten({ axis }: { axis: SweepAxis }) {
       {isInside ? " Line: as written" : " As written, "}
       {!isInside && (
         <>
-          <Rich text={shownNumber(axis.written, axis.scale)} />, it lies beyond what is drawn
+          <Rich text={steppedNumber(axis.written, axis.scale)} />, it lies beyond what is drawn
         </>
       )}
-      {axis.sigma ? (isInside ? "; grey: one sigma of it." : "; grey: one sigma of it, as far as it reaches here.") : "."}
+      {axis.sigma
+        ? isInside
+          ? "; grey: one sigma of it."
+          : "; grey: one sigma of it, as far as it reaches here."
+        : "."}
     </>
   );
 }
@@ -51,7 +63,10 @@ export function sweepColumns({ axes, watched, reasons }: SweepResult): CsvColumn
   const varied = axes.map(({ name, unit, values }): CsvColumn => {
     const own = stride;
     stride *= values.length;
-    return { head: `${name} (${unit})`, values: points.map((index) => values[Math.floor(index / own) % values.length]!) };
+    return {
+      head: `${name} (${unit})`,
+      values: points.map((index) => values[Math.floor(index / own) % values.length]!),
+    };
   });
   const results = watched.map(({ name, unit, values }): CsvColumn => ({ head: `${name} (${unit})`, values }));
   const why = reasons.some((reason) => reason !== null) ? [{ head: "reason", values: reasons }] : [];
@@ -85,10 +100,16 @@ export function SweepFigure({ sweep, columnGases, unitSystem, number, reasons }:
   const across = axis.values.map((value) => ((scale.place(value) - from) / (to - from)) * room.panel);
   const valueOf = (index: number, result: SweepResult["watched"][number]) => {
     const value = result.values[index] ?? null;
-    return value === null ? null : formatQuantity({ value, unit: result.unit }, unitSystem, { scale: result.scale });
+    return value === null
+      ? null
+      : formatQuantity({ value, unit: result.unit }, unitSystem, { scale: result.scale });
   };
   const rows = ({ column }: { column: number }) => [
-    { key: axis.name, symbol: <code>{axis.name}</code>, value: <Rich text={shownNumber(axis.values[column]!, axis.scale)} /> },
+    {
+      key: axis.name,
+      symbol: <code>{axis.name}</code>,
+      value: <Rich text={steppedNumber(axis.values[column]!, axis.scale)} />,
+    },
     ...sweep.watched.map((result) => {
       const value = valueOf(column, result);
       return {
@@ -100,7 +121,7 @@ export function SweepFigure({ sweep, columnGases, unitSystem, number, reasons }:
   ];
   const spoken = ({ column }: { column: number }) =>
     [
-      `${axis.name} ${plainText(shownNumber(axis.values[column]!, axis.scale))}`,
+      `${axis.name} ${plainText(steppedNumber(axis.values[column]!, axis.scale))}`,
       ...sweep.watched.map((result) => {
         const value = valueOf(column, result);
         return `${plainText(result.label)} ${value ? quantityText(value) : "no answer"}`;
@@ -108,7 +129,8 @@ export function SweepFigure({ sweep, columnGases, unitSystem, number, reasons }:
     ].join(", ");
   const written = axis.written ?? axis.values[0]!;
   const start = axis.values.reduce(
-    (best, value, index) => (Math.abs(value - written) < Math.abs(axis.values[best]! - written) ? index : best),
+    (best, value, index) =>
+      Math.abs(value - written) < Math.abs(axis.values[best]! - written) ? index : best,
     0,
   );
 
@@ -117,13 +139,19 @@ export function SweepFigure({ sweep, columnGases, unitSystem, number, reasons }:
       number={number}
       caption={
         <>
-          <Rich text={capital(listed(sweep.watched.map(({ label }) => label)))} /> over <code>{axis.name}</code>.
+          <Rich text={capital(listed(sweep.watched.map(({ label }) => label)))} /> over{" "}
+          <code>{axis.name}</code>.
           <AsWritten axis={axis} />
         </>
       }
       fileName={sweep.name}
       drawing={() =>
-        sweepPlot({ ...input, room: sweepRoom(sheetWidth, panels.length, widest), inks: dayInks(), zoom: null })
+        sweepPlot({
+          ...input,
+          room: sweepRoom(sheetWidth, panels.length, widest),
+          inks: dayInks(),
+          zoom: null,
+        })
       }
       columns={() => sweepColumns(sweep)}
     >

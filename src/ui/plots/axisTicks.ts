@@ -33,7 +33,9 @@ const wideFactor = 10;
 
 /** Whether numbers are better told apart by decades: all positive, and over more than a factor 10. */
 export function spansDecades(values: readonly number[]): boolean {
-  return values.length > 0 && Math.min(...values) > 0 && Math.max(...values) > wideFactor * Math.min(...values);
+  return (
+    values.length > 0 && Math.min(...values) > 0 && Math.max(...values) > wideFactor * Math.min(...values)
+  );
 }
 
 /** The range of places that holds them all, with a little air; some room where they are all one. */
@@ -112,7 +114,9 @@ const gaps = (places: readonly number[]): number[] => places.slice(1).map((place
 
 /** Numbers near one are written out, as they are read. */
 const powerText = (power: number): string =>
-  Math.abs(power) <= 3 ? formatFixed(10 ** power, Math.max(0, -Math.round(power))) : figureText(formatPower(power, 0));
+  Math.abs(power) <= 3
+    ? formatFixed(10 ** power, Math.max(0, -Math.round(power)))
+    : figureText(formatPower(power, 0));
 
 /** An axis in the house's ink with these ticks. */
 export function tickedAxis(
@@ -128,6 +132,13 @@ export function tickedAxis(
     tickmode: "array",
     tickvals: places,
     ticktext: texts,
-    minor: { ticks: "outside", ticklen: 4, tickwidth: 0.8, tickcolor: inks.ink2!, tickmode: "array", tickvals: minor },
+    minor: {
+      ticks: "outside",
+      ticklen: 4,
+      tickwidth: 0.8,
+      tickcolor: inks.ink2!,
+      tickmode: "array",
+      tickvals: minor,
+    },
   };
 }

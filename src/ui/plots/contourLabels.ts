@@ -42,10 +42,18 @@ export function contourLabels(
       .sort((a, b) => a.cost - b.cost);
     const free = candidates.find(
       ({ x, y }) =>
-        placed.every((other) => distance([x, y], [other.x, other.y]) > other.reach + contour.labelWidth / 2 + apart) &&
-        clear.every((place) => distance([x, y], place) > contour.labelWidth / 2 + apart),
+        placed.every(
+          (other) => distance([x, y], [other.x, other.y]) > other.reach + contour.labelWidth / 2 + apart,
+        ) && clear.every((place) => distance([x, y], place) > contour.labelWidth / 2 + apart),
     );
-    if (free) placed.push({ level: contour.level, x: free.x, y: free.y, angle: free.angle, reach: contour.labelWidth / 2 });
+    if (free)
+      placed.push({
+        level: contour.level,
+        x: free.x,
+        y: free.y,
+        angle: free.angle,
+        reach: contour.labelWidth / 2,
+      });
   }
   return placed.map(({ level, x, y, angle }) => ({ level, x, y, angle }));
 }
@@ -59,7 +67,9 @@ function candidatesOn(line: readonly ContourPoint[], { level, labelWidth }: Labe
   const found: (ContourLabel & { cost: number })[] = [];
   if (whole < 1.6 * labelWidth) return found;
   for (let at = labelWidth / 2; at <= whole - labelWidth / 2; at += 6) {
-    const [from, middle, to] = [at - labelWidth / 2, at, at + labelWidth / 2].map((length) => pointAt(line, lengths, length));
+    const [from, middle, to] = [at - labelWidth / 2, at, at + labelWidth / 2].map((length) =>
+      pointAt(line, lengths, length),
+    );
     const [x, y] = middle!;
     const [dx, dy] = [to![0] - from![0], to![1] - from![1]];
     const bend = 1 - Math.hypot(dx, dy) / labelWidth;
@@ -77,7 +87,10 @@ function candidatesOn(line: readonly ContourPoint[], { level, labelWidth }: Labe
 }
 
 function pointAt(line: readonly ContourPoint[], lengths: readonly number[], length: number): ContourPoint {
-  const next = Math.max(1, lengths.findIndex((reached) => reached >= length));
+  const next = Math.max(
+    1,
+    lengths.findIndex((reached) => reached >= length),
+  );
   const [a, b] = [line[next - 1]!, line[next] ?? line[next - 1]!];
   const span = lengths[next]! - lengths[next - 1]! || 1;
   const share = Math.min(1, Math.max(0, (length - lengths[next - 1]!) / span));

@@ -20,9 +20,21 @@ function segmentsOf({ x, y, z }: MapGrid, level: number): Segment[] {
   const segments: Segment[] = [];
   for (let row = 0; row + 1 < y.length; row++) {
     for (let column = 0; column + 1 < x.length; column++) {
-      const corners = [z[row]![column]!, z[row]![column + 1]!, z[row + 1]![column + 1]!, z[row + 1]![column]!];
+      const corners = [
+        z[row]![column]!,
+        z[row]![column + 1]!,
+        z[row + 1]![column + 1]!,
+        z[row + 1]![column]!,
+      ];
       if (corners.some((corner) => corner === null || corner === undefined)) continue;
-      const crossings = meshCrossings(corners, level, [x[column]!, x[column + 1]!], [y[row]!, y[row + 1]!], column, row);
+      const crossings = meshCrossings(
+        corners,
+        level,
+        [x[column]!, x[column + 1]!],
+        [y[row]!, y[row + 1]!],
+        column,
+        row,
+      );
       for (const [a, b] of pairs(crossings, corners, level))
         segments.push({ ends: [a.edge, b.edge], points: [a.point, b.point] });
     }
@@ -50,11 +62,20 @@ function meshCrossings(
     passes(from, to) ? { edge: `h${column} ${at}`, point: [x0 + share(from, to) * (x1 - x0), y] } : null;
   const upright = (from: number, to: number, x: number, at: number): Crossing | null =>
     passes(from, to) ? { edge: `v${at} ${row}`, point: [x, y0 + share(from, to) * (y1 - y0)] } : null;
-  return [across(a!, b!, y0, row), upright(b!, c!, x1, column + 1), across(d!, c!, y1, row + 1), upright(a!, d!, x0, column)];
+  return [
+    across(a!, b!, y0, row),
+    upright(b!, c!, x1, column + 1),
+    across(d!, c!, y1, row + 1),
+    upright(a!, d!, x0, column),
+  ];
 }
 
 /** Two crossings are one line; four are a saddle, told apart by the middle of the mesh. */
-function pairs(crossings: readonly (Crossing | null)[], corners: readonly number[], level: number): [Crossing, Crossing][] {
+function pairs(
+  crossings: readonly (Crossing | null)[],
+  corners: readonly number[],
+  level: number,
+): [Crossing, Crossing][] {
   const found = crossings.filter((crossing) => crossing !== null);
   if (found.length === 2) return [[found[0]!, found[1]!]];
   if (found.length < 4) return [];

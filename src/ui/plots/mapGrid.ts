@@ -21,7 +21,10 @@ export function mapGrid(
   values: readonly (number | null)[],
   scale: AxisScale,
 ): MapGrid {
-  const [xs, ys] = [first!, second!].map((axis) => axis.values.map(sweepScale(axis).place)) as [number[], number[]];
+  const [xs, ys] = [first!, second!].map((axis) => axis.values.map(sweepScale(axis).place)) as [
+    number[],
+    number[],
+  ];
   const [columns, rows] = [ascending(xs), ascending(ys)];
   const index = rows.map((row) => columns.map((column) => row * xs.length + column));
   const placeOf = (value: number | null | undefined): number | null => {
@@ -46,7 +49,8 @@ interface Mesh {
 export function emptyMeshes({ x, y, z }: MapGrid): Mesh[] {
   const found: Mesh[] = [];
   for (let row = 0; row + 1 < y.length; row++)
-    for (let column = 0; column + 1 < x.length; column++) if (!isWhole(z, column, row)) found.push({ column, row });
+    for (let column = 0; column + 1 < x.length; column++)
+      if (!isWhole(z, column, row)) found.push({ column, row });
   return found;
 }
 
@@ -63,11 +67,16 @@ function isWhole(z: MapGrid["z"], column: number, row: number): boolean {
 export function filledGrid({ z }: MapGrid): number[][] {
   let filled: (number | null)[][] = z.map((line) => [...line]);
   const isDone = () => filled.every((line) => line.every((place) => place !== null));
-  if (filled.every((line) => line.every((place) => place === null))) return filled.map((line) => line.map(() => 0));
+  if (filled.every((line) => line.every((place) => place === null)))
+    return filled.map((line) => line.map(() => 0));
   while (!isDone()) {
     const before = filled;
     filled = before.map((line, row) =>
-      line.map((place, column) => place ?? meanOf([line[column - 1], line[column + 1], before[row - 1]?.[column], before[row + 1]?.[column]])),
+      line.map(
+        (place, column) =>
+          place ??
+          meanOf([line[column - 1], line[column + 1], before[row - 1]?.[column], before[row + 1]?.[column]]),
+      ),
     );
   }
   return filled as number[][];

@@ -5,7 +5,7 @@ import type { FigureDrawing } from "./exportFigure";
 import { baseLayout, figureFonts, letteredText, note } from "./figureLayout";
 import { nameWidth } from "./sweepPlot";
 import { titleOf } from "./sweepResult";
-import { keyHeight, keyPlaces, spreadRoom, type SpreadRoom } from "./spreadRoom";
+import { keyEnd, keyHeight, keyPlaces, spreadRoom, type SpreadRoom } from "./spreadRoom";
 import type { SpreadResult, SpreadWatched } from "./spreadResult";
 import type { FigureInks } from "./useFigureInks";
 
@@ -28,7 +28,20 @@ export function roomOfSpread(width: number, { watched, inputs }: SpreadResult): 
 }
 
 /** Marks of the watched results, none twice: filled and open by turns. */
-const symbols = ["circle", "square", "diamond", "triangle-up", "triangle-down", "pentagon", "hexagon", "star", "hourglass", "bowtie", "cross", "x"];
+const symbols = [
+  "circle",
+  "square",
+  "diamond",
+  "triangle-up",
+  "triangle-down",
+  "pentagon",
+  "hexagon",
+  "star",
+  "hourglass",
+  "bowtie",
+  "cross",
+  "x",
+];
 
 export function shareMark(index: number): { symbol: string; isOpen: boolean } {
   return { symbol: symbols[Math.floor(index / 2) % symbols.length]!, isOpen: index % 2 === 1 };
@@ -140,6 +153,8 @@ function histogram(watched: SpreadWatched, index: number, { room, inks }: Spread
   };
 }
 
+const wholeTitle = "share of the variance that this entry alone explains";
+
 /** Shares of variance: a row an entry, a mark a watched result. */
 function shares(index: number, { spread, room, inks }: SpreadPlotInput) {
   const { watched, inputs } = spread;
@@ -152,7 +167,13 @@ function shares(index: number, { spread, room, inks }: SpreadPlotInput) {
   const base = { type: "scatter", xaxis, yaxis, hoverinfo: "skip", cliponaxis: false } as const;
   const marked = (x: number[], y: number[], mark: number): Data => {
     const { symbol, isOpen } = shareMark(mark);
-    const marker = { symbol, size: 8.5, color: isOpen ? inks.paper! : inks.ink!, line: { color: inks.ink!, width: 1.6 } };
+    // Open ones are larger, so that a ring is seen round a dot that lies on it.
+    const marker = {
+      symbol,
+      size: isOpen ? 10 : 7.5,
+      color: isOpen ? inks.paper! : inks.ink!,
+      line: { color: inks.ink!, width: 1.6 },
+    };
     return { ...base, mode: "markers", x, y, marker } as Data;
   };
   const known = (each: SpreadWatched) =>
@@ -160,8 +181,13 @@ function shares(index: number, { spread, room, inks }: SpreadPlotInput) {
       const share = each.shares.get(input)?.share ?? null;
       return share === null ? [] : [{ share, row: -row }];
     });
-  const reach = inputs.map((input) => Math.max(0, ...watched.map(({ shares: own }) => own.get(input)?.share ?? 0)));
-  const key = keyPlaces(watched.map(({ label }) => nameWidth(label)), room.shares.width);
+  const reach = inputs.map((input) =>
+    Math.max(0, ...watched.map(({ shares: own }) => own.get(input)?.share ?? 0)),
+  );
+  const key = keyPlaces(
+    watched.map(({ label }) => nameWidth(label)),
+    room.shares.width,
+  );
   const keyAt = (mark: number) => ({
     x: key[mark]!.left * perPixel + range[0],
     y: 0.5 + keyHeight(key[mark]!.line, room.keyLines) / room.row,
@@ -169,17 +195,30 @@ function shares(index: number, { spread, room, inks }: SpreadPlotInput) {
   return {
     data: [
       ...inputs.map(
-        (_, row): Data => ({ ...base, mode: "lines", x: [0, reach[row]!], y: [-row, -row], line: { color: inks.ink3!, width: 0.8 } }) as Data,
+        (_, row): Data =>
+          ({
+            ...base,
+            mode: "lines",
+            x: [0, reach[row]!],
+            y: [-row, -row],
+            line: { color: inks.ink3!, width: 0.8 },
+          }) as Data,
       ),
       // The first watched result is drawn last, so that its dots are seen whole.
       ...watched
-        .map((each, mark) => marked(known(each).map(({ share }) => share), known(each).map(({ row }) => row), mark))
+        .map((each, mark) =>
+          marked(
+            known(each).map(({ share }) => share),
+            known(each).map(({ row }) => row),
+            mark,
+          ),
+        )
         .reverse(),
       ...watched.map((_, mark) => marked([keyAt(mark).x], [keyAt(mark).y], mark)),
     ],
     layout: {
       [layoutName("x", index)]: {
-        ...tickedAxis(inks, "share of the variance that this entry alone explains", range, {
+        ...tickedAxis(inks, room.shares.width < 330 ? "share of variance, alone" : wholeTitle, range, {
           places: [0, 0.5, 1],
           texts: ["0", "0.5", "1"],
           minor: Array.from({ length: 11 }, (_, tenth) => tenth / 10),
@@ -189,7 +228,7 @@ function shares(index: number, { spread, room, inks }: SpreadPlotInput) {
         fixedrange: true,
       },
       [layoutName("y", index)]: {
-        range: [0.5 - inputs.length, 0.5],
+        range: [0.5 - inputs.length, 0.5 + keyEnd(room.keyLines) / room.row],
         domain: domain.y,
         anchor: xaxis,
         visible: false,
@@ -236,7 +275,11 @@ export function spreadPlot(input: SpreadPlotInput): FigureDrawing {
   const shown = spread.watched.filter(({ bins }) => bins.length > 0);
   const histograms = shown.map((watched, index) => histogram(watched, index, input));
   const drivers = shares(shown.length, input);
-  const layout = Object.assign({}, ...histograms.map((each) => each.layout), drivers.layout) as Partial<Layout>;
+  const layout = Object.assign(
+    {},
+    ...histograms.map((each) => each.layout),
+    drivers.layout,
+  ) as Partial<Layout>;
   return {
     data: [...histograms.flatMap(({ data }) => data), ...drivers.data],
     layout: {

@@ -35,10 +35,14 @@ export interface SpreadResult {
   inputs: string[];
 }
 
-const numberOf = (value: ResultRow[string] | undefined): number | null => (typeof value === "number" ? value : null);
+const numberOf = (value: ResultRow[string] | undefined): number | null =>
+  typeof value === "number" ? value : null;
 
 /** null where nothing has been computed. */
-export function readSpread({ name, values, tables }: CellResult, unitSystem: UnitSystem): SpreadResult | null {
+export function readSpread(
+  { name, values, tables }: CellResult,
+  unitSystem: UnitSystem,
+): SpreadResult | null {
   const draws = numberOf(values.draws?.value);
   const { sensitivity = [], histogram = [] } = tables;
   if (draws === null || sensitivity.length === 0) return null;
@@ -47,7 +51,9 @@ export function readSpread({ name, values, tables }: CellResult, unitSystem: Uni
     name,
     draws,
     faultedShare: numberOf(values.faulted_share?.value) ?? 0,
-    watched: resultLabels(names).map((label) => readWatched(label, values, sensitivity, histogram, unitSystem)),
+    watched: resultLabels(names).map((label) =>
+      readWatched(label, values, sensitivity, histogram, unitSystem),
+    ),
     inputs: sensitivity.flatMap(({ watched, input }) => (watched === names[0] ? [String(input)] : [])),
   };
 }
@@ -64,7 +70,10 @@ function readWatched(
   const quantiles = Object.fromEntries(
     quantileNames.map((quantile) => {
       const key = `${label.name}.${quantile}`;
-      return [quantile, { value: numberOf(values[key]?.value), error: numberOf(values[`${key}_error`]?.value) }];
+      return [
+        quantile,
+        { value: numberOf(values[key]?.value), error: numberOf(values[`${key}_error`]?.value) },
+      ];
     }),
   ) as SpreadWatched["quantiles"];
   return {
@@ -74,7 +83,9 @@ function readWatched(
     isLog: own[0]?.scale === "log10",
     bins: histogram.flatMap((row) => {
       const [from, to, count] = [numberOf(row.from), numberOf(row.to), numberOf(row.count)];
-      return row.watched === label.name && from !== null && to !== null ? [{ from, to, count: count ?? 0 }] : [];
+      return row.watched === label.name && from !== null && to !== null
+        ? [{ from, to, count: count ?? 0 }]
+        : [];
     }),
     quantiles,
     shares: new Map(

@@ -11,7 +11,7 @@ export interface SpreadRoom {
   tall: number;
   /** Place of each histogram, from the upper left. */
   histograms: Box[];
-  /** Place of the axis from 0 to 1 with its rows, and of the line of marks over it. */
+  /** Place of the axis from 0 to 1 with its rows, and over them the key. */
   shares: Box;
   /** Names of entries stand over their rows instead of before them. */
   isStacked: boolean;
@@ -61,8 +61,9 @@ export function spreadRoom(width: number, { histograms: count, inputs, names, ke
   const begin = isStacked ? 0 : Math.max(96, names + 24);
   const shares = { left: begin, width: across - begin };
   const keyLines = Math.max(1, ...keyPlaces(key, shares.width).map(({ line }) => line + 1));
-  const from = Math.ceil(count / columns) * (histogram + under) + keyLines * keyLine + 14;
-  const tall = from + inputs * row;
+  const from = Math.ceil(count / columns) * (histogram + under);
+  const height = keyLines * keyLine + inputs * row;
+  const tall = from + height;
   return {
     width,
     height: top + tall + bottom,
@@ -73,7 +74,7 @@ export function spreadRoom(width: number, { histograms: count, inputs, names, ke
     across,
     tall,
     histograms,
-    shares: { ...shares, top: from, height: inputs * row },
+    shares: { ...shares, top: from, height },
     isStacked,
     row,
     keyLines,
@@ -92,5 +93,6 @@ export function keyPlaces(widths: readonly number[], room: number): { left: numb
   });
 }
 
-/** px over the rows at which a line of the key stands. */
-export const keyHeight = (line: number, lines: number): number => 12 + (lines - 1 - line) * keyLine;
+/** px over the rows at which a line of the key stands, and at which the key ends. */
+export const keyHeight = (line: number, lines: number): number => (lines - 0.5 - line) * keyLine;
+export const keyEnd = (lines: number): number => lines * keyLine;

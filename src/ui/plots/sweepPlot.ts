@@ -1,10 +1,10 @@
 import type { Annotation, Data, Layout, Shape } from "plotly.js";
 import type { GasStyle } from "../../lib/gasStyle";
-import { plainText, type RichText } from "../../lib/richText";
+import { plainText, type RichPiece, type RichText } from "../../lib/richText";
 import { airyRange, axisScale, axisTicks, spansDecades, tickedAxis, type AxisScale } from "./axisTicks";
 import type { FigureDrawing } from "./exportFigure";
 import { baseLayout, dashList, figureFonts, letteredText, note, type FigureZoom } from "./figureLayout";
-import { shownNumber, titleOf, type SweepAxis, type SweepResult, type SweptResult } from "./sweepResult";
+import { steppedNumber, titleOf, type SweepAxis, type SweepResult, type SweptResult } from "./sweepResult";
 import type { SweepRoom } from "./sweepRoom";
 import type { FigureInks } from "./useFigureInks";
 
@@ -48,8 +48,13 @@ export function sharedScale(results: readonly SweptResult[]) {
 }
 
 /** What is written beside a curve: the gas where the panel's curves differ by it. */
-export function curveName({ results }: SweepPanel, result: SweptResult, style: GasStyle | undefined): RichText {
-  if (result.gas !== null && style && results.every(({ gas }) => gas !== null) && isUnlike(results)) return style.name;
+export function curveName(
+  { results }: SweepPanel,
+  result: SweptResult,
+  style: GasStyle | undefined,
+): RichText {
+  if (result.gas !== null && style && results.every(({ gas }) => gas !== null) && isUnlike(results))
+    return style.name;
   return result.label;
 }
 
@@ -85,7 +90,12 @@ interface DrawnPanel {
   curves: DrawnCurve[];
 }
 
-function drawnPanel(panel: SweepPanel, across: readonly number[], xs: [number, number], input: SweepPlotInput): DrawnPanel {
+function drawnPanel(
+  panel: SweepPanel,
+  across: readonly number[],
+  xs: [number, number],
+  input: SweepPlotInput,
+): DrawnPanel {
   const { styles, inks } = input;
   const isSeen = (index: number) => across[index]! >= xs[0] && across[index]! <= xs[1];
   const known = panel.results.flatMap(({ values }) =>
@@ -105,14 +115,18 @@ function drawnPanel(panel: SweepPanel, across: readonly number[], xs: [number, n
       y: result.values.map((value) => (value === null ? null : finite(scale.place(value)))),
     };
   });
-  const places = curves.flatMap(({ y }) => y.filter((place, index): place is number => place !== null && isSeen(index)));
+  const places = curves.flatMap(({ y }) =>
+    y.filter((place, index): place is number => place !== null && isSeen(index)),
+  );
   return { panel, scale, range: places.length > 0 ? airyRange(places, 0.06) : [0, 1], curves };
 }
 
 const finite = (place: number): number | null => (Number.isFinite(place) ? place : null);
 
 const axisNames = (index: number) =>
-  index === 0 ? ({ trace: "y", layout: "yaxis" } as const) : { trace: `y${index + 1}`, layout: `yaxis${index + 1}` };
+  index === 0
+    ? ({ trace: "y", layout: "yaxis" } as const)
+    : { trace: `y${index + 1}`, layout: `yaxis${index + 1}` };
 
 function traces({ curves }: DrawnPanel, index: number): Data[] {
   const yaxis = axisNames(index).trace;
@@ -129,7 +143,9 @@ function traces({ curves }: DrawnPanel, index: number): Data[] {
       hoverinfo: "skip",
     };
     // A point between two without an answer makes no line.
-    const lone = y.flatMap((place, i) => (place !== null && (y[i - 1] ?? null) === null && (y[i + 1] ?? null) === null ? [i] : []));
+    const lone = y.flatMap((place, i) =>
+      place !== null && (y[i - 1] ?? null) === null && (y[i + 1] ?? null) === null ? [i] : [],
+    );
     if (lone.length === 0) return [line];
     const points: Data = {
       type: "scatter",
@@ -145,20 +161,29 @@ function traces({ curves }: DrawnPanel, index: number): Data[] {
 }
 
 /** Names at the ends of their curves, pushed apart where two would meet. */
-function names(drawn: DrawnPanel, index: number, tall: number, xs: [number, number]): Partial<Annotation>[] {
+function names(
+  drawn: DrawnPanel,
+  index: number,
+  across: readonly number[],
+  xs: [number, number],
+  room: SweepRoom,
+): Partial<Annotation>[] {
   const { sans } = figureFonts();
+  const { tall } = room.panels[index]!;
   const { range, curves } = drawn;
   const pixelAt = (place: number) => tall * (1 - (place - range[0]) / (range[1] - range[0]));
   const placed = curves
     .flatMap((curve) => {
-      const last = curve.y.findLastIndex((place, i) => place !== null && curve.x[i]! >= xs[0] && curve.x[i]! <= xs[1]);
-      return last < 0 ? [] : [{ curve, x: curve.x[last]!, pixel: pixelAt(curve.y[last]!) }];
+      const seen = across.flatMap((x, i) => (curve.y[i] !== null && x >= xs[0] && x <= xs[1] ? [i] : []));
+      if (seen.length === 0) return [];
+      const last = seen.reduce((best, i) => (across[i]! > across[best]! ? i : best));
+      return [{ curve, x: across[last]!, pixel: pixelAt(curve.y[last]!) }];
     })
     .sort((a, b) => a.pixel - b.pixel);
   spreadApart(placed, tall);
   return placed.map(({ curve, x, pixel }) =>
     note(
-      curve.result.gas === null ? letteredText(curve.name) : `<span style="font-weight:650">${letteredText(curve.name)}</span>`,
+      nameText(curve, room.right - beside),
       {
         x,
         y: range[0] + (1 - pixel / tall) * (range[1] - range[0]),
@@ -166,11 +191,25 @@ function names(drawn: DrawnPanel, index: number, tall: number, xs: [number, numb
         xanchor: "left",
         yanchor: "middle",
         xshift: 7,
+        align: "left",
       },
       { family: sans, size: 13.5, color: curve.colour },
     ),
   );
 }
+
+/** px between the end of a curve and the edge of the figure that its name cannot have. */
+const beside = 12;
+
+/** A name that is too long for its room stands word under word. */
+function nameText({ name, result }: DrawnCurve, room: number): string {
+  const text = letteredText(nameWidth(name) > room ? name.map(wordUnderWord) : name);
+  const set = text.replace(/\n/g, "<br>");
+  return result.gas === null ? set : `<span style="font-weight:650">${set}</span>`;
+}
+
+const wordUnderWord = (piece: RichPiece): RichPiece =>
+  typeof piece === "string" ? piece.trim().replace(/ /g, "\n") : piece;
 
 const lineOfNames = 16;
 
@@ -192,17 +231,33 @@ function asWritten(axis: SweepAxis, scale: AxisScale, xs: [number, number], { ro
   if (axis.sigma) {
     const [from, to] = sigmaPlaces(axis.sigma, scale, xs);
     if (to > from)
-      shapes.push({ type: "rect", ...across, x0: from, x1: to, fillcolor: inks.ink!, opacity: 0.06, line: { width: 0 }, layer: "below" });
+      shapes.push({
+        type: "rect",
+        ...across,
+        x0: from,
+        x1: to,
+        fillcolor: inks.ink!,
+        opacity: 0.06,
+        line: { width: 0 },
+        layer: "below",
+      });
   }
   const place = axis.written === null ? NaN : scale.place(axis.written);
   if (place >= xs[0] && place <= xs[1]) {
     shapes.push({ type: "line", ...across, x0: place, x1: place, line: { color: inks.ink2!, width: 0.9 } });
-    const text = letteredText([...shownNumber(axis.written!, axis.scale), ", as written"]);
+    const text = letteredText([...steppedNumber(axis.written!, axis.scale), ", as written"]);
     const isRight = (place - xs[0]) / (xs[1] - xs[0]) < 1 - 120 / room.panel;
     notes.push(
       note(
         text,
-        { x: place, y: 1, yref: "paper", xanchor: isRight ? "left" : "right", yanchor: "top", xshift: isRight ? 5 : -5 },
+        {
+          x: place,
+          y: 1,
+          yref: "paper",
+          xanchor: isRight ? "left" : "right",
+          yanchor: "top",
+          xshift: isRight ? 5 : -5,
+        },
         { family: figureFonts().sans, size: 12, color: inks.ink2! },
       ),
     );
@@ -211,7 +266,11 @@ function asWritten(axis: SweepAxis, scale: AxisScale, xs: [number, number], { ro
 }
 
 /** What of it lies on the axis; on decades, nothing lies below zero. */
-function sigmaPlaces(sigma: readonly [number, number], scale: AxisScale, xs: [number, number]): [number, number] {
+function sigmaPlaces(
+  sigma: readonly [number, number],
+  scale: AxisScale,
+  xs: [number, number],
+): [number, number] {
   const lower = scale.isLog && sigma[0] <= 0 ? xs[0] : scale.place(sigma[0]);
   return [Math.max(xs[0], lower), Math.min(xs[1], scale.place(sigma[1]))];
 }
@@ -250,13 +309,18 @@ export function sweepPlot(input: SweepPlotInput): FigureDrawing {
     layout: {
       ...baseLayout(room),
       xaxis: {
-        ...tickedAxis(inks, letteredText(titleOf([{ code: axis.name }], axis.scale)), xs, axisTicks(scale, xs, room.panel, 46)),
+        ...tickedAxis(
+          inks,
+          letteredText(titleOf([{ code: axis.name }], axis.scale)),
+          xs,
+          axisTicks(scale, xs, room.panel, 46),
+        ),
         anchor: axisNames(panels.length - 1).trace as "y",
       },
       ...Object.fromEntries(yAxes),
       shapes: written.shapes,
       annotations: [
-        ...panels.flatMap((panel, index) => names(panel, index, room.panels[index]!.tall, xs)),
+        ...panels.flatMap((panel, index) => names(panel, index, across, xs, room)),
         ...written.notes,
       ],
     },
@@ -266,7 +330,9 @@ export function sweepPlot(input: SweepPlotInput): FigureDrawing {
 /** What the figure shows, for those who do not see it. */
 export function sweepLabel({ name, axes, watched }: SweepResult): string {
   const [axis] = axes;
-  const ends = [axis!.values[0]!, axis!.values.at(-1)!].map((value) => plainText(shownNumber(value, axis!.scale)));
+  const ends = [axis!.values[0]!, axis!.values.at(-1)!].map((value) =>
+    plainText(steppedNumber(value, axis!.scale)),
+  );
   const results = watched.map(({ label }) => plainText(label)).join(", ");
   return `Sweep ${name}: ${results} over ${axis!.name} from ${ends.join(" to ")}`;
 }

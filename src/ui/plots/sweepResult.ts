@@ -1,5 +1,13 @@
 import type { CellResult, ResultRow } from "../../../shared/notebook/result";
-import { displayScale, formatUnit, resultScale, unitSpace, formatNumber, type DisplayScale, type UnitSystem } from "../../lib/format";
+import {
+  displayScale,
+  formatUnit,
+  resultScale,
+  unitSpace,
+  formatNumber,
+  type DisplayScale,
+  type UnitSystem,
+} from "../../lib/format";
 import { resultLabels, type ResultLabel } from "../../lib/resultLabel";
 import type { RichText } from "../../lib/richText";
 
@@ -34,7 +42,8 @@ export interface SweepResult {
   outcomes: ResultRow[];
 }
 
-const numberOf = (value: ResultRow[string] | undefined): number | null => (typeof value === "number" ? value : null);
+const numberOf = (value: ResultRow[string] | undefined): number | null =>
+  typeof value === "number" ? value : null;
 
 const largest = (values: readonly (number | null)[]): number =>
   values.reduce<number>((most, value) => Math.max(most, Math.abs(value ?? 0)), 0);
@@ -49,12 +58,20 @@ export function readSweep(result: CellResult, unitSystem: UnitSystem): SweepResu
   const labels = resultLabels(watched.map(({ name }) => String(name)));
   return {
     name: result.name,
-    axes: varied.map((row, index) => readAxis(row, pointsAlong(rows, counts, index, String(row.name)), unitSystem)),
+    axes: varied.map((row, index) =>
+      readAxis(row, pointsAlong(rows, counts, index, String(row.name)), unitSystem),
+    ),
     watched: watched.map((row, index) => {
       const label = labels[index]!;
       const unit = String(row.unit ?? "1");
       const values = rows.map((point) => numberOf(point[label.name]));
-      return { ...label, unit, written: numberOf(row.written), values, scale: resultScale(label.name, unit, unitSystem, largest(values)) };
+      return {
+        ...label,
+        unit,
+        written: numberOf(row.written),
+        values,
+        scale: resultScale(label.name, unit, unitSystem, largest(values)),
+      };
     }),
     reasons: rows.map(({ reason }) => (typeof reason === "string" ? reason : null)),
     outcomes: outcomes.filter(({ level }) => level === "fault"),
@@ -62,7 +79,12 @@ export function readSweep(result: CellResult, unitSystem: UnitSystem): SweepResu
 }
 
 /** Values along one axis. Of a sweep that was stopped, the first axis may be whole and the second short. */
-function pointsAlong(rows: readonly ResultRow[], counts: readonly number[], index: number, name: string): number[] {
+function pointsAlong(
+  rows: readonly ResultRow[],
+  counts: readonly number[],
+  index: number,
+  name: string,
+): number[] {
   const stride = counts.slice(0, index).reduce((product, count) => product * count, 1);
   const count = Math.min(counts[index]!, Math.ceil(rows.length / stride));
   return Array.from({ length: count }, (_, step) => numberOf(rows[step * stride]![name]) ?? NaN);
@@ -87,6 +109,14 @@ export function shownNumber(value: number, { factor, unit }: DisplayScale, digit
   const shown = formatUnit(unit);
   const number = formatNumber(value * factor, digits);
   return shown.length > 0 ? [...number, unitSpace, ...shown] : number;
+}
+
+/** The same of a number that was written or stepped to: as many digits as it has, four at most. */
+export function steppedNumber(value: number, scale: DisplayScale): RichText {
+  const [mantissa = ""] = Number((value * scale.factor).toPrecision(4))
+    .toExponential()
+    .split("e");
+  return shownNumber(value, scale, mantissa.replace(/\D/g, "").length);
 }
 
 /** "T_quiet, K" */

@@ -1,7 +1,12 @@
 import { formatNumber, formatUnit, unitSpace, type DisplayScale } from "../../lib/format";
 import { Rich } from "../../lib/Rich";
 import { useElementSize } from "../../lib/useElementSize";
-import { quantileNames, type QuantileName, type SpreadResult, type SpreadWatched } from "../plots/spreadResult";
+import {
+  quantileNames,
+  type QuantileName,
+  type SpreadResult,
+  type SpreadWatched,
+} from "../plots/spreadResult";
 import { TableFrame } from "./TableFrame";
 import { tableText } from "./tableText";
 
@@ -79,8 +84,8 @@ export function SpreadTable({ spread, number }: SpreadTableProps) {
         number={number}
         caption={
           <>
-            Quantiles of what <i>{spread.name}</i> watches; under each its standard error, from eight independent parts
-            of the draws.
+            Quantiles of what <i>{spread.name}</i> watches; under each its standard error, from eight
+            independent parts of the draws.
           </>
         }
         text={() => fullText(spread)}

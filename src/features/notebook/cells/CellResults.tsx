@@ -27,7 +27,8 @@ export function CellResults(props: CellResultsProps) {
   if (cell.kind === "prose" || cell.kind === "values") return null;
   const shown = lastGood.current;
   // What was stopped shows its answer as soon as it has been evaluated.
-  const isUnderWayNow = task !== undefined && (isUnderWay(task) || (task.done > 0 && !hasAnswer && !task.failure));
+  const isUnderWayNow =
+    task !== undefined && (isUnderWay(task) || (task.done > 0 && !hasAnswer && !task.failure));
   const isVoid = isLate || isUnderWayNow || !hasAnswer;
   const wait = isUnderWayNow && !isLate ? <TaskProgress task={task} /> : <Computing isBeginning={!shown} />;
   return (
@@ -36,11 +37,7 @@ export function CellResults(props: CellResultsProps) {
       {task && !isUnderWayNow && !isLate && <TaskHalt task={task} />}
       {!shown && (isLate || !evaluation || isUnderWayNow) && wait}
       {shown && (
-        <div
-          className="results"
-          data-void={isVoid || undefined}
-          aria-busy={isLate || isUnderWayNow}
-        >
+        <div className="results" data-void={isVoid || undefined} aria-busy={isLate || isUnderWayNow}>
           {(isLate || isUnderWayNow) && wait}
           <div className="results-body" inert={isVoid}>
             <Answer {...props} evaluation={shown} />

@@ -4,6 +4,7 @@ import type { CellResult } from "../../../../../shared/notebook/result";
 import type { AnswerProps } from "./answerProps";
 import { ColumnAnswer } from "./ColumnAnswer";
 import { EscapeAnswer } from "./EscapeAnswer";
+import { hasSpreadAnswer, hasSweptAnswer } from "./longAnswers";
 import { SpreadAnswer } from "./SpreadAnswer";
 import { SweepAnswer } from "./SweepAnswer";
 
@@ -16,10 +17,11 @@ export const answers: Partial<Record<CellKind, ComponentType<AnswerProps>>> = {
 };
 
 /** How many figures and tables a cell has, which numbers those of the cells below it. */
-export function countResults({ kind, tables }: Pick<CellResult, "kind" | "tables">): {
+export function countResults(result: Pick<CellResult, "kind" | "values" | "tables">): {
   figures: number;
   tables: number;
 } {
+  const { kind, tables } = result;
   const hasLevels = (tables.levels?.length ?? 0) > 0;
   switch (kind) {
     case "column":
@@ -27,9 +29,9 @@ export function countResults({ kind, tables }: Pick<CellResult, "kind" | "tables
     case "escape":
       return { figures: 0, tables: 1 };
     case "sweep":
-      return { figures: (tables.rows?.length ?? 0) > 0 ? 1 : 0, tables: 0 };
+      return { figures: hasSweptAnswer(result) ? 1 : 0, tables: 0 };
     case "spread":
-      return (tables.sensitivity?.length ?? 0) > 0 ? { figures: 1, tables: 1 } : { figures: 0, tables: 0 };
+      return hasSpreadAnswer(result) ? { figures: 1, tables: 1 } : { figures: 0, tables: 0 };
     default:
       return { figures: 0, tables: 0 };
   }
