@@ -101,7 +101,7 @@ describe("what is heard of long work", () => {
   beforeEach(() => void vi.useFakeTimers());
   afterEach(() => void vi.useRealTimers());
   const heard = () => screen.getByRole("status").textContent;
-  const rest = () => act(() => vi.advanceTimersByTime(1100));
+  const rest = () => act(() => void vi.advanceTimersByTime(1100));
 
   it("is its beginning, its quarters and its end, not each part", () => {
     const { rerender } = render(<TaskNews name="sure" task={aTask({ done: 100 })} />);

@@ -2,6 +2,7 @@ import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
 import type { NotebookDocument } from "../../../../shared/notebook/document";
 import { completeNotebook } from "../../../../shared/notebook/completeNotebook";
 import { evaluateNotebook } from "../../../../shared/notebook/evaluateNotebook";
+import type { CellEvaluation } from "../../../../shared/notebook/result";
 import type { LongTask, TaskAnswer, TaskPart } from "../../../../shared/notebook/tasks";
 import {
   createTaskQueue,
@@ -287,6 +288,21 @@ describe("the evaluation service", () => {
     expect(second.tasks).toEqual([]);
     expect(second.cells.map((cell) => typeof cell)).toEqual(["object", "object"]);
     expect(service.evaluate("one", document).cells).toEqual(["given", "sure"]);
+  });
+
+  it("asks for the rest of an answer in part, and has it once it is supplied", async () => {
+    const service = createEvaluationService();
+    const here = createTaskService();
+    here.open(document, task);
+    const part = here.run(0, 40);
+    service.supply(here.finish(document, task, [part]));
+    expect(service.evaluate("one", document)).toMatchObject({ tasks: [], partial: [{ task, done: 40 }] });
+    service.supply(here.finish(document, task, [part, here.run(40, 64)]));
+    const whole = service.evaluate("one", document);
+    expect(whole.partial).toEqual([]);
+    const { result } = whole.cells[1] as CellEvaluation;
+    expect(result.values.draws!.value).toBe(64);
+    expect(result.notes.map(({ code }) => code)).not.toContain("partial");
   });
 
   it("finds an answer again when the text goes back to what it was", async () => {

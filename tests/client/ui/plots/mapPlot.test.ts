@@ -13,7 +13,9 @@ const sweepOf = (text: string, given?: string): SweepResult =>
   readSweep(answerOf("sweep", text, given), "SI")!;
 
 const plane = sweepOf("vary = x from 1 to 5 in 4 steps\nagainst = r from 1 to 4 in 3 steps\nwatch = both");
-const decades = sweepOf("vary = x from 1 to 2 in 4 steps\nagainst = r from 1 to 2 in 4 steps\nwatch = power");
+const decades = sweepOf(
+  "vary = x from 1 to 2 in 4 steps\nagainst = r from 1 to 2 in 4 steps\nwatch = tenfold",
+);
 const holed = sweepOf("vary = x from -2 to 2 in 4 steps\nagainst = r from 1 to 2 in 2 steps\nwatch = root");
 
 interface Trace {

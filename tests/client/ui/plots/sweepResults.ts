@@ -18,7 +18,7 @@ const arithmetic = [
   "e = between 3 and 9",
   "length = x * 1 km",
   "root = sqrt(x)",
-  "power = exp(2.302585092994046 * (x + r))",
+  "tenfold = exp(2.302585092994046 * (x + r))",
   "both = x + r",
 ].join("\n");
 
@@ -99,7 +99,7 @@ export const gasSweep: CellResult = {
   },
 };
 
-export const inks = {
+export const inks: Record<string, string> = {
   ink: "#111111",
   ink2: "#222222",
   ink3: "#444444",
