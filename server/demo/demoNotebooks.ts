@@ -74,6 +74,15 @@ export const demoNotebooks: readonly DemoNotebook[] = [
     ],
   },
   {
+    // Not kept as a version: its sweeps and its spread would have to be computed before the first start.
+    file: "ilmara-how-sure.md",
+    owner: "w.castellane",
+    hoursAgo: 19,
+    groupRole: "reader",
+    shares: [["t.orevale", "co-author"]],
+    versions: [],
+  },
+  {
     file: "nirel-half-atmosphere.md",
     owner: "i.brandvold",
     hoursAgo: 29,

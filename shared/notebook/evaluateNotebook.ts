@@ -16,7 +16,7 @@ import { parseEntries } from "./language/parseEntries";
 import type { ParsedEntries } from "./language/syntax";
 import { withSpreads, type DecoratedCell } from "./evaluation/withSpreads";
 import type { CellEvaluation, Evaluation } from "./result";
-import type { LongTask, TaskAnswer, TaskAnswers } from "./tasks";
+import type { LongTask, PartialTask, TaskAnswer, TaskAnswers } from "./tasks";
 
 interface RememberedCell {
   cell: Cell;
@@ -37,7 +37,7 @@ export type EvaluationMemory = ReadonlyMap<string, RememberedCell>;
  * different. A cell whose text and whose view of the cells above have not changed keeps its answer, the same object.
  *
  * Sweeps and spreads take long: they are answered from `answers` or the memory where their task has been done, else
- * listed in `tasks`.
+ * listed in `tasks`. Those that were stopped before their end are answered in part, and listed in `partial`.
  *
  * Never throws: whatever cannot be answered is said in the notes of a cell.
  */
@@ -45,7 +45,7 @@ export function evaluateNotebook(
   document: NotebookDocument,
   previous?: EvaluationMemory,
   answers?: TaskAnswers,
-): { evaluation: Evaluation; memory: EvaluationMemory; tasks: LongTask[] } {
+): { evaluation: Evaluation; memory: EvaluationMemory; tasks: LongTask[]; partial: PartialTask[] } {
   const taskAnswer = knownAnswers(previous, answers);
   const memory = new Map<string, RememberedCell>();
   const parsed = document.cells.map((cell) => parse(cell, previous?.get(cell.id)));
@@ -66,14 +66,21 @@ export function evaluateNotebook(
   remembered.forEach((answered, place) => {
     memory.set(answered.cell.id, { ...answered, decorated: cells[place] });
   });
-  const tasks = remembered.flatMap(({ cell, evaluated }) => taskOf(cell, evaluated) ?? []);
+  const tasks: LongTask[] = [];
+  const partial: PartialTask[] = [];
+  for (const { cell, evaluated } of remembered) {
+    const task = taskOf(cell, evaluated);
+    const done = evaluated.taskAnswer?.done;
+    if (task && done === undefined) tasks.push(task);
+    else if (task && done! < task.points) partial.push({ task, done: done! });
+  }
   const evaluation = { engine: engineVersion, title: document.title, cells: cells.map((one) => one.shown) };
-  return { evaluation, memory, tasks };
+  return { evaluation, memory, tasks, partial };
 }
 
-/** What is still to be computed for a cell. */
-function taskOf({ id, name }: Cell, { plan, taskAnswer }: EvaluatedCell): LongTask | null {
-  if (!plan || taskAnswer) return null;
+/** What a cell asks for, answered or not. */
+function taskOf({ id, name }: Cell, { plan }: EvaluatedCell): LongTask | null {
+  if (!plan) return null;
   return { cellId: id, kind: plan.kind, name, key: plan.key, points: plan.points };
 }
 

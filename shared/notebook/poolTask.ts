@@ -20,6 +20,8 @@ interface PoolOptions {
   onProgress: (progress: TaskProgress) => void;
   /** Asked before each part; where it says yes, no other is begun. */
   isStopped: () => boolean;
+  /** What was done before the work was stopped, from the first point on without a gap. */
+  begun?: readonly TaskPart[];
 }
 
 /** Points of a first part, and how long a part should take, ms. */
@@ -30,7 +32,7 @@ const partDuration = 200;
  * Shares a task out among workers, from the first point to the last, in parts that take each worker about a fifth of a
  * second. How it is shared out depends on time and load; what comes out does not.
  *
- * @returns the parts that were done: all, or where it was stopped, those from the first point on without a gap
+ * @returns the parts that were done, with those begun: all, or where it was stopped, those from the first point on without a gap
  */
 export async function poolTask({
   task,
@@ -38,12 +40,13 @@ export async function poolTask({
   now,
   onProgress,
   isStopped,
+  begun = [],
 }: PoolOptions): Promise<TaskPart[]> {
-  const parts: TaskPart[] = [];
+  const parts: TaskPart[] = [...begun];
   // The pace is taken from the first finished part on, so that starting a worker does not count.
   let first: { at: number; done: number } | null = null;
-  let next = 0;
-  let done = 0;
+  let done = begun.reduce((sum, { from, to }) => sum + to - from, 0);
+  let next = done;
 
   const secondsLeft = (): number | null => {
     if (!first || done === first.done) return null;
@@ -66,7 +69,7 @@ export async function poolTask({
       onProgress({ done, points: task.points, secondsLeft: secondsLeft() });
     }
   };
-  onProgress({ done: 0, points: task.points, secondsLeft: null });
+  onProgress({ done, points: task.points, secondsLeft: null });
   await Promise.all(workers.map(work));
   return parts;
 }

@@ -13,6 +13,12 @@ export interface LongTask {
   points: number;
 }
 
+/** A task that was stopped: its answer is that of the first `done` points. */
+export interface PartialTask {
+  task: LongTask;
+  done: number;
+}
+
 /** Why a point has no answer for some watched name, or lies outside the validity of a model. */
 export interface PointOutcome {
   level: "caution" | "fault";

@@ -44,8 +44,8 @@ export interface OpenTask {
   plan: TaskPlan;
   /** As written, for each watched name. */
   written: { name: string; value: number; unit: string }[];
-  /** As written, for each axis of a sweep. */
-  axes: { name: string; value: number; unit: string }[];
+  /** As written, for each axis of a sweep; with its uncertainty where it has one. */
+  axes: { name: string; value: number; unit: string; uncertainty?: Uncertainty }[];
   /** Of a spread. */
   inputs: WrittenInput[];
   /** @param replacements by the id of a cell */
@@ -188,8 +188,8 @@ function writtenAxes(
 ): OpenTask["axes"] {
   return axes.map(({ name, dimension }) => {
     const quantities = [...memory.values()].map(({ evaluated }) => evaluated.above.globals[name] ?? null);
-    const { value } = quantities.find((quantity): quantity is Quantity => quantity !== null)!;
-    return { name, value, unit: siUnitText(dimension) };
+    const { value, uncertainty } = quantities.find((quantity): quantity is Quantity => quantity !== null)!;
+    return { name, value, unit: siUnitText(dimension), ...(uncertainty ? { uncertainty } : {}) };
   });
 }
 

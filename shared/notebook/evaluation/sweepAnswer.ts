@@ -1,4 +1,5 @@
 import type { JoinedParts } from "../finishTask";
+import type { Uncertainty } from "../language/quantity";
 import type { ResultRow } from "../result";
 import type { TaskAnswer } from "../tasks";
 import type { OpenTask } from "./openTask";
@@ -25,8 +26,9 @@ export function sweepAnswer(
     return row;
   });
   const varied = axes.map(({ name, first, last, steps, spacing }, axis): ResultRow => {
-    const { unit, value } = open.axes[axis];
-    return { name, part: "varied", unit, written: value, from: first, to: last, steps, spacing };
+    const { unit, value, uncertainty } = open.axes[axis];
+    const sigma = uncertainty ? oneSigma(uncertainty) : {};
+    return { name, part: "varied", unit, written: value, from: first, to: last, steps, spacing, ...sigma };
   });
   const watched = open.written.map(({ name, unit, value }): ResultRow => {
     return { name, part: "watched", unit, written: value, from: null, to: null, steps: null, spacing: null };
@@ -38,4 +40,26 @@ export function sweepAnswer(
     spreads: {},
     drawn: [],
   };
+}
+
+/**
+ * One standard deviation below and above what is written, SI: of the number itself, or of its logarithm where it is given
+ * within a factor. Of an even range, half of it over √3.
+ */
+function oneSigma(uncertainty: Uncertainty): { sigma_lower: number; sigma_upper: number } {
+  switch (uncertainty.form) {
+    case "normal": {
+      const { mean, deviation } = uncertainty;
+      return { sigma_lower: mean - deviation, sigma_upper: mean + deviation };
+    }
+    case "uniform": {
+      const centre = (uncertainty.lower + uncertainty.upper) / 2;
+      const deviation = (uncertainty.upper - uncertainty.lower) / 2 / Math.sqrt(3);
+      return { sigma_lower: centre - deviation, sigma_upper: centre + deviation };
+    }
+    case "log_normal": {
+      const { median, factor } = uncertainty;
+      return { sigma_lower: median / factor, sigma_upper: median * factor };
+    }
+  }
 }

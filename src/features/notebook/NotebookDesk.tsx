@@ -44,7 +44,7 @@ export function NotebookDesk({ notebook, person }: NotebookDeskProps) {
   );
 
   const live = useEvaluation(notebook.id, document);
-  useLongTasks(notebook.id, live);
+  const tasks = useLongTasks(notebook.id, live);
   const notes = useNotebookNotes(document, live);
   const { commands, newCellId } = useCellCommands(draft.document, edit);
   const isEditable = canEdit && merge === null;
@@ -128,6 +128,7 @@ export function NotebookDesk({ notebook, person }: NotebookDeskProps) {
       <Article
         document={document}
         live={live}
+        tasks={tasks}
         notes={notes}
         unitSystem={unitSystem}
         kicker={kicker}

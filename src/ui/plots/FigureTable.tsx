@@ -14,6 +14,11 @@ const rowsTold = 12;
 
 const unitOf = (head: string): string => /\(([^)]*)\)/.exec(head)?.[1] ?? "1";
 
+function cellText(value: CsvColumn["values"][number], factor: number): string {
+  if (value === null) return "–";
+  return typeof value === "string" ? value : plainText(formatNumber(value * factor));
+}
+
 /** The curves as a short table, for those who do not see the figure; it comes after what is seen. */
 export function FigureTable(props: FigureTableProps) {
   return <Table {...useDeferredValue(props)} />;
@@ -44,7 +49,7 @@ const Table = memo(function Table({ label, columns, unitSystem }: FigureTablePro
           {rows.map((row) => (
             <tr key={row}>
               {columns.map(({ head, values }, i) => (
-                <td key={head}>{plainText(formatNumber(values[row]! * scales[i]!.factor))}</td>
+                <td key={head}>{cellText(values[row] ?? null, scales[i]!.factor)}</td>
               ))}
             </tr>
           ))}

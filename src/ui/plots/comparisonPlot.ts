@@ -11,9 +11,17 @@ import {
   type GasCurve,
   type Profiles,
 } from "./columnCurves";
-import { dashList, gasNames, namePlaces, temperaturePanel } from "./densityPlot";
+import { gasNames, namePlaces, temperaturePanel } from "./densityPlot";
 import type { FigureDrawing } from "./exportFigure";
-import { acrossLine, altitudeAxis, axis, baseLayout, decadeAxis, type FigureZoom } from "./figureLayout";
+import {
+  acrossLine,
+  altitudeAxis,
+  axis,
+  baseLayout,
+  dashList,
+  decadeAxis,
+  type FigureZoom,
+} from "./figureLayout";
 import type { FigureRoom } from "./figureRoom";
 import { exobaseNotes, panelScale } from "./panelLettering";
 import type { FigureInks } from "./useFigureInks";

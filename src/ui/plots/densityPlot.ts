@@ -10,6 +10,7 @@ import {
   altitudeAxis,
   axis,
   baseLayout,
+  dashList,
   decadeAxis,
   figureFonts,
   note,
@@ -41,12 +42,6 @@ export interface DensityPlot {
   /** Gases whose names found no place. */
   unnamed: string[];
 }
-
-type FigureDash = NonNullable<NonNullable<Shape["line"]>["dash"]>;
-
-/** A list of lengths, which the library takes though its types name only a few patterns. */
-export const dashList = (dash: string): FigureDash =>
-  (dash === "" ? "solid" : dash.replace(/ /g, "px,").concat("px")) as FigureDash;
 
 function gasTraces({ curves, styles, inks, hidden }: DensityPlotInput): Data[] {
   return curves.flatMap(({ gas, below, above }) => {

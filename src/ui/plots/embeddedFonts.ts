@@ -1,5 +1,5 @@
 /** Families and styles that lettering of figures uses. */
-const lettering = new Set(["Source Sans 3 normal", "Source Serif 4 italic"]);
+const lettering = new Set(["Source Sans 3 normal", "Source Serif 4 italic", "Source Code Pro normal"]);
 
 function fontFaces(): CSSFontFaceRule[] {
   return [...document.styleSheets]

@@ -2,7 +2,8 @@
 export interface CsvColumn {
   /** Name and unit: "H.number_density (m^-3)". */
   head: string;
-  values: readonly number[];
+  /** null where there is no value; words stand as they are. */
+  values: readonly (number | string | null)[];
 }
 
 const quote = (text: string): string => (/[",\n]/.test(text) ? `"${text.replace(/"/g, '""')}"` : text);
@@ -12,7 +13,7 @@ export function figureCsv(columns: readonly CsvColumn[]): string {
   const count = Math.max(0, ...columns.map(({ values }) => values.length));
   const lines = [columns.map(({ head }) => quote(head)).join(",")];
   for (let row = 0; row < count; row++) {
-    lines.push(columns.map(({ values }) => (row < values.length ? String(values[row]) : "")).join(","));
+    lines.push(columns.map(({ values }) => quote(String(values[row] ?? ""))).join(","));
   }
   return `${lines.join("\r\n")}\r\n`;
 }

@@ -1,12 +1,12 @@
 import type { Annotation, Layout, Shape } from "plotly.js";
 import { askMedia } from "../../lib/askMedia";
 import { formatPower, thinSpace } from "../../lib/format";
-import { figureText } from "../../lib/richText";
+import { figureText, type RichText } from "../../lib/richText";
 import { tickSteps } from "../strip/stripScale";
 import type { FigureRoom } from "./figureRoom";
 import type { FigureInks } from "./useFigureInks";
 
-/** The part of a figure one has drawn closer; null shows all. Altitudes in km, decades of the first axis. */
+/** The part of a figure one has drawn closer, in what its axes count; null shows all. */
 export interface FigureZoom {
   x: [number, number];
   y: [number, number];
@@ -24,7 +24,23 @@ const fontOf = (token: string): string =>
   getComputedStyle(document.documentElement).getPropertyValue(token).trim() || "sans-serif";
 
 /** Families as the page has them; the figure library wants them written out. */
-export const figureFonts = () => ({ sans: fontOf("--sans"), serif: fontOf("--serif") });
+export const figureFonts = () => ({
+  sans: fontOf("--sans"),
+  serif: fontOf("--serif"),
+  mono: fontOf("--mono"),
+});
+
+/** Lettering of a figure with words of the cell language in their own type. */
+export function letteredText(rich: RichText): string {
+  const { mono } = figureFonts();
+  const style = `font-family:${mono.replace(/"/g, "'")};font-size:0.94em`;
+  return rich
+    .map((piece) => {
+      const text = figureText([piece]);
+      return typeof piece === "object" && "code" in piece ? `<span style="${style}">${text}</span>` : text;
+    })
+    .join("");
+}
 
 type Axis = NonNullable<Layout["xaxis"]>;
 
@@ -102,6 +118,12 @@ export function plainAxis(
   return { ...axis(inks, title), range: [...range], tick0: 0, dtick: major, ...minorTicks(inks, minor) };
 }
 
+type FigureDash = NonNullable<NonNullable<Shape["line"]>["dash"]>;
+
+/** A list of lengths, which the library takes though its types name only a few patterns. */
+export const dashList = (dash: string): FigureDash =>
+  (dash === "" ? "solid" : dash.replace(/ /g, "px,").concat("px")) as FigureDash;
+
 /** An ink line right across one panel. */
 export function acrossLine(panel: "x" | "x2", km: number, color: string, width: number): Partial<Shape> {
   return {
@@ -124,7 +146,9 @@ export function note(
   return { text, showarrow: false, borderpad: 0, xref: "x", yref: "y", font, ...place };
 }
 
-export function baseLayout(room: FigureRoom): Partial<Layout> {
+type Margins = Pick<FigureRoom, "width" | "height" | "left" | "right" | "top" | "bottom">;
+
+export function baseLayout(room: Margins): Partial<Layout> {
   return {
     width: room.width,
     height: room.height,

@@ -48,6 +48,7 @@ describe("the demonstration", () => {
   it("lets everyone in by one click, each to what they may see", async () => {
     expect(await rolesFor("t.orevale@carrow.example")).toEqual({
       Escape: "owner",
+      How: "co-author",
       Nirel: "co-author",
       Saranth: "reader",
       Tessal: "reader",
@@ -98,7 +99,7 @@ describe("the demonstration", () => {
 
   it("is seeded once", async () => {
     expect(await seedDemo(server.db, { evaluator, now })).toBe(false);
-    expect(await listFor("t.orevale@carrow.example")).toHaveLength(5);
+    expect(await listFor("t.orevale@carrow.example")).toHaveLength(6);
   });
 
   it("keeps away where someone has one of its addresses", async () => {

@@ -5,6 +5,7 @@ import type { AnswerProps } from "./answers/answerProps";
 import { answers } from "./answers/answers";
 import type { CellViewProps } from "./CellView";
 import { Computing } from "./Computing";
+import { isUnderWay, TaskHalt, TaskNews, TaskProgress } from "./TaskProgress";
 
 interface CellResultsProps extends CellViewProps {
   /** Figures are made when the cell first comes near the screen. */
@@ -17,22 +18,33 @@ interface CellResultsProps extends CellViewProps {
  * that nothing is drawn anew, and nothing moves, when the next answer comes.
  */
 export function CellResults(props: CellResultsProps) {
-  const { cell, evaluation, isLate } = props;
+  const { cell, evaluation, isLate, task } = props;
   const hasAnswer = evaluation !== undefined && isAnswered(evaluation);
+  const isLong = cell.kind === "sweep" || cell.kind === "spread";
   const lastGood = useRef<CellEvaluation | null>(null);
   if (hasAnswer) lastGood.current = evaluation;
 
   if (cell.kind === "prose" || cell.kind === "values") return null;
   const shown = lastGood.current;
-  if (!shown) return isLate || !evaluation ? <Computing isBeginning /> : null;
-  const isVoid = isLate || !hasAnswer;
+  // What was stopped shows its answer as soon as it has been evaluated.
+  const isUnderWayNow =
+    task !== undefined && (isUnderWay(task) || (task.done > 0 && !hasAnswer && !task.failure));
+  const isVoid = isLate || isUnderWayNow || !hasAnswer;
+  const wait = isUnderWayNow && !isLate ? <TaskProgress task={task} /> : <Computing isBeginning={!shown} />;
   return (
-    <div className="results" data-void={isVoid || undefined} aria-busy={isLate}>
-      {isLate && <Computing />}
-      <div className="results-body" inert={isVoid}>
-        <Answer {...props} evaluation={shown} />
-      </div>
-    </div>
+    <>
+      {isLong && <TaskNews name={cell.name} task={task} />}
+      {task && !isUnderWayNow && !isLate && <TaskHalt task={task} />}
+      {!shown && (isLate || !evaluation || isUnderWayNow) && wait}
+      {shown && (
+        <div className="results" data-void={isVoid || undefined} aria-busy={isLate || isUnderWayNow}>
+          {(isLate || isUnderWayNow) && wait}
+          <div className="results-body" inert={isVoid}>
+            <Answer {...props} evaluation={shown} />
+          </div>
+        </div>
+      )}
+    </>
   );
 }
 

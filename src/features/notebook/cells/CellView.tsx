@@ -3,6 +3,7 @@ import type { Cell } from "../../../../shared/notebook/document";
 import type { CellEvaluation, Note } from "../../../../shared/notebook/result";
 import type { UnitSystem } from "../../../lib/format";
 import type { LetteredNote } from "../../../ui/tables/tableProps";
+import type { TaskState } from "../evaluation/createTaskQueue";
 import type { NotebookNames } from "./notebookNames";
 import { CellHead } from "./CellHead";
 import { CellNotes } from "./CellNotes";
@@ -21,11 +22,13 @@ export interface CellViewProps {
   evaluation: CellEvaluation | undefined;
   /** The text it speaks of. */
   readText: string | undefined;
-  /** Gases of the column that an escape cell rests on. */
+  /** Gases of the column that the cell rests on, where it names gases. */
   columnGases: readonly string[] | undefined;
   notes: readonly LetteredNote[];
   /** The answer shown may not be what the text says now. */
   isLate: boolean;
+  /** The sweep or spread that the cell asks for, where it is not answered in full. */
+  task: TaskState | undefined;
   unitSystem: UnitSystem;
   figureNumber: number;
   tableNumber: number;
@@ -119,7 +122,7 @@ export const CellView = memo(function CellView(props: CellViewProps) {
           )}
           {evaluation && <DefaultsLine defaults={evaluation.defaults} />}
           <CellResults {...props} isNear={isNear} onRemedy={onRemedy} />
-          <CellNotes notes={props.notes} cell={cell} onRemedy={onRemedy} />
+          <CellNotes notes={props.notes} cell={cell} task={props.task} onRemedy={onRemedy} />
         </>
       )}
     </section>

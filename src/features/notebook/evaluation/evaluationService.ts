@@ -3,7 +3,7 @@ import { evaluateNotebook, type EvaluationMemory } from "../../../../shared/note
 import type { CellEvaluation } from "../../../../shared/notebook/result";
 import { summariseNotebook } from "../../../../shared/notebook/summariseNotebook";
 import type { HeadlineItem } from "../../../../shared/notebook/summary";
-import type { LongTask, TaskAnswer } from "../../../../shared/notebook/tasks";
+import type { LongTask, PartialTask, TaskAnswer } from "../../../../shared/notebook/tasks";
 
 export interface EvaluationAnswer {
   engine: string;
@@ -12,6 +12,8 @@ export interface EvaluationAnswer {
   headline: HeadlineItem[];
   /** Sweeps and spreads that are still to be computed. */
   tasks: LongTask[];
+  /** Those that are answered in part. */
+  partial: PartialTask[];
   /** Time it took, ms. */
   took: number;
 }
@@ -52,7 +54,7 @@ export function createEvaluationService() {
       }
       const answer = evaluateNotebook(document, memory, answers);
       memory = answer.memory;
-      const { evaluation, tasks } = answer;
+      const { evaluation, tasks, partial } = answer;
 
       const before = sent;
       sent = new Map(evaluation.cells.map((cell) => [cell.id, cell]));
@@ -63,7 +65,7 @@ export function createEvaluationService() {
         warm = { runs: 0, time: took };
         setTimeout(() => warmUp(document), 0);
       }
-      return { engine: evaluation.engine, cells, headline, tasks, took };
+      return { engine: evaluation.engine, cells, headline, tasks, partial, took };
     },
 
     /** Takes the answer of a sweep or spread; the next evaluation has it. */

@@ -1,7 +1,7 @@
 import { wrap } from "comlink";
 import type { NotebookDocument } from "../../../../shared/notebook/document";
 import { poolTask, type TaskProgress } from "../../../../shared/notebook/poolTask";
-import type { LongTask, TaskAnswer } from "../../../../shared/notebook/tasks";
+import type { LongTask, TaskAnswer, TaskPart } from "../../../../shared/notebook/tasks";
 import type { TaskService } from "./taskService";
 
 /** The service as the pool sees it: every call answers later. */
@@ -15,11 +15,20 @@ interface TaskWatch {
   onProgress: (progress: TaskProgress) => void;
   /** Asked between parts, every fifth of a second or so. */
   isStopped: () => boolean;
+  /** What was done before it was stopped. */
+  begun?: readonly TaskPart[];
+}
+
+export interface TaskRun {
+  /** Partial where it was stopped. */
+  answer: TaskAnswer;
+  /** What it was made of, to go on from. */
+  parts: TaskPart[];
 }
 
 export interface TaskPool {
-  /** The answer; partial where it was stopped; null where nothing was done at all. One task after the other. */
-  run(document: NotebookDocument, task: LongTask, watch: TaskWatch): Promise<TaskAnswer | null>;
+  /** null where nothing was done at all. One task after the other. */
+  run(document: NotebookDocument, task: LongTask, watch: TaskWatch): Promise<TaskRun | null>;
 }
 
 /** Workers beside the page and its evaluation. */
@@ -32,14 +41,15 @@ export function createTaskPool(startWorker: () => RemoteTaskService, size: numbe
   async function run(
     document: NotebookDocument,
     task: LongTask,
-    { onProgress, isStopped }: TaskWatch,
-  ): Promise<TaskAnswer | null> {
+    { onProgress, isStopped, begun }: TaskWatch,
+  ): Promise<TaskRun | null> {
     if (isStopped()) return null;
     services ??= Array.from({ length: size }, startWorker);
     await Promise.all(services.map((service) => service.open(document, task)));
     const now = () => performance.now();
-    const parts = await poolTask({ task, workers: services, now, onProgress, isStopped });
-    return parts.length === 0 ? null : services[0]!.finish(document, task, parts);
+    const parts = await poolTask({ task, workers: services, now, onProgress, isStopped, begun });
+    if (parts.length === 0) return null;
+    return { answer: await services[0]!.finish(document, task, parts), parts };
   }
 
   return {

@@ -2,7 +2,7 @@ import { useCallback, useEffect, useLayoutEffect, useMemo, useRef, useState } fr
 import type { NotebookDocument } from "../../../../shared/notebook/document";
 import type { CellEvaluation } from "../../../../shared/notebook/result";
 import type { HeadlineItem } from "../../../../shared/notebook/summary";
-import type { LongTask, TaskAnswer } from "../../../../shared/notebook/tasks";
+import type { LongTask, PartialTask, TaskAnswer } from "../../../../shared/notebook/tasks";
 import { createLatestRunner } from "./createLatestRunner";
 import type { EvaluationAnswer } from "./evaluationService";
 import { workerEvaluator, type Evaluator } from "./evaluator";
@@ -20,6 +20,8 @@ interface Evaluated {
   headline: HeadlineItem[];
   /** Sweeps and spreads that are still to be computed; see `useLongTasks`. */
   tasks: LongTask[];
+  /** Those that were stopped, and answered in part. */
+  partial: PartialTask[];
 }
 
 export interface LiveEvaluation {
@@ -111,7 +113,8 @@ function withAnswer(last: Evaluated | null, answer: EvaluationAnswer, document: 
     if (evaluation) cells.set(evaluation.id, evaluation);
   }
   const texts = new Map(document.cells.map(({ id, text }) => [id, text]));
-  return { engine: answer.engine, document, texts, cells, headline: answer.headline, tasks: answer.tasks };
+  const { engine, headline, tasks, partial } = answer;
+  return { engine, document, texts, cells, headline, tasks, partial };
 }
 
 /** True once what is written has gone without an answer for a while. */

@@ -3,14 +3,10 @@ import { createTaskQueue, type TaskState } from "./createTaskQueue";
 import { workerTaskPool, type TaskPool } from "./taskPool";
 import type { LiveEvaluation } from "./useEvaluation";
 
-export interface LongTasks {
-  /** Sweeps and spreads that wait or are under way, by the id of their cell. */
-  states: ReadonlyMap<string, TaskState>;
-  /** Why one could not be computed. */
-  failure: string | null;
-}
+/** Sweeps and spreads that are not answered in full, by the id of their cell. */
+export type TaskStates = ReadonlyMap<string, TaskState>;
 
-const none: ReadonlyMap<string, TaskState> = new Map();
+const none: TaskStates = new Map();
 
 /**
  * Computes the sweeps and spreads that an evaluation asks for, in workers beside it, and hands their answers back to it.
@@ -20,22 +16,13 @@ export function useLongTasks(
   notebookKey: string,
   { evaluated, supply }: LiveEvaluation,
   pool: () => TaskPool = workerTaskPool,
-): LongTasks {
-  const [states, setStates] = useState<ReadonlyMap<string, TaskState>>(none);
-  const [failure, setFailure] = useState<string | null>(null);
+): TaskStates {
+  const [states, setStates] = useState<TaskStates>(none);
   const queueRef = useRef<ReturnType<typeof createTaskQueue> | null>(null);
 
   useEffect(
     function openQueue() {
-      const queue = createTaskQueue({
-        pool: pool(),
-        onChange: setStates,
-        onAnswer: (answer) => {
-          setFailure(null);
-          supply(answer);
-        },
-        onFailure: (error) => setFailure(error instanceof Error ? error.message : String(error)),
-      });
+      const queue = createTaskQueue({ pool: pool(), onChange: setStates, onAnswer: supply });
       queueRef.current = queue;
       return () => {
         queue.close();
@@ -48,10 +35,10 @@ export function useLongTasks(
 
   useEffect(
     function askForTasks() {
-      if (evaluated) queueRef.current?.ask(evaluated.document, evaluated.tasks);
+      if (evaluated) queueRef.current?.ask(evaluated.document, evaluated);
     },
     [evaluated, notebookKey, supply, pool],
   );
 
-  return { states, failure };
+  return states;
 }

@@ -6,6 +6,7 @@ import { CautionFooter } from "../../../ui/CautionFooter";
 import { Message } from "../../../ui/Message";
 import type { CellCommands } from "../cells/useCellCommands";
 import type { LiveEvaluation } from "../evaluation/useEvaluation";
+import type { TaskStates } from "../evaluation/useLongTasks";
 import type { NotebookNotes } from "../evaluation/useNotebookNotes";
 import { ExplainDesk } from "../explain/ExplainDesk";
 import { EmptySheet } from "./EmptySheet";
@@ -19,6 +20,8 @@ import { useColumnInView } from "./useColumnInView";
 interface ArticleProps {
   document: NotebookDocument;
   live: LiveEvaluation;
+  /** null where nothing is computed that takes long: a kept version has its answers. */
+  tasks: TaskStates | null;
   notes: NotebookNotes;
   unitSystem: UnitSystem;
   kicker: readonly string[];
@@ -34,6 +37,7 @@ interface ArticleProps {
 export function Article({
   document,
   live,
+  tasks,
   notes,
   unitSystem,
   kicker,
@@ -73,6 +77,7 @@ export function Article({
             <Sheet
               document={document}
               live={live}
+              tasks={tasks}
               notesOf={notes.of}
               unitSystem={unitSystem}
               isEditable={edit !== null}

@@ -1,5 +1,5 @@
 import { Fragment, useCallback, useDeferredValue, useMemo } from "react";
-import type { Cell, NotebookDocument } from "../../../../shared/notebook/document";
+import type { Cell, CellKind, NotebookDocument } from "../../../../shared/notebook/document";
 import type { CellEvaluation } from "../../../../shared/notebook/result";
 import type { UnitSystem } from "../../../lib/format";
 import type { LetteredNote } from "../../../ui/tables/tableProps";
@@ -10,11 +10,13 @@ import { useNotebookNames } from "../cells/notebookNames";
 import { useCellDrag } from "../cells/useCellDrag";
 import type { CellCommands } from "../cells/useCellCommands";
 import type { LiveEvaluation } from "../evaluation/useEvaluation";
+import type { TaskStates } from "../evaluation/useLongTasks";
 import { numberResults } from "./numberResults";
 
 interface SheetProps {
   document: NotebookDocument;
   live: LiveEvaluation;
+  tasks: TaskStates | null;
   notesOf: (cellId: string) => readonly LetteredNote[];
   unitSystem: UnitSystem;
   isEditable: boolean;
@@ -23,7 +25,16 @@ interface SheetProps {
 }
 
 /** The cells, set like an article, with a caret between each two where another may be put. */
-export function Sheet({ document, live, notesOf, unitSystem, isEditable, newCellId, commands }: SheetProps) {
+export function Sheet({
+  document,
+  live,
+  tasks,
+  notesOf,
+  unitSystem,
+  isEditable,
+  newCellId,
+  commands,
+}: SheetProps) {
   const { late } = live;
   // Columns, which have the figures, follow a key first; the other cells come right after them.
   const evaluated = useDeferredValue(live.evaluated);
@@ -52,6 +63,7 @@ export function Sheet({ document, live, notesOf, unitSystem, isEditable, newCell
               columnGases={columnGases(evaluation)}
               notes={notesOf(cell.id)}
               isLate={late.has(cell.id)}
+              task={tasks?.get(cell.id)}
               unitSystem={unitSystem}
               figureNumber={numbers.get(cell.id)?.figure ?? 1}
               tableNumber={numbers.get(cell.id)?.table ?? 1}
@@ -85,14 +97,21 @@ function DropLine() {
 
 const placeWords = (cell: Cell): string => (cell.kind === "prose" ? "this prose" : cellTitle(cell));
 
-/** Gases of the column that an escape cell names, so that it gives them the same colours. */
+/** Gases of the column that a cell rests on, itself or by way of others, so that it gives them the same colours. */
 function gasesOfColumn(
   evaluation: CellEvaluation | undefined,
   cells: ReadonlyMap<string, CellEvaluation> | undefined,
 ): readonly string[] | undefined {
-  if (evaluation?.result.kind !== "escape" || !cells) return undefined;
-  for (const other of cells.values()) {
-    if (other.result.kind === "column" && evaluation.uses.includes(other.result.name)) return other.gases;
+  if (!evaluation || !cells || !withGases.has(evaluation.result.kind)) return undefined;
+  const uses = new Set(evaluation.uses.map(cellName));
+  for (const other of [...cells.values()].reverse()) {
+    if (!uses.has(other.result.name)) continue;
+    if (other.result.kind === "column") return other.gases;
+    for (const name of other.uses) uses.add(cellName(name));
   }
   return undefined;
 }
+
+const withGases = new Set<CellKind>(["escape", "sweep", "spread"]);
+
+const cellName = (path: string): string => path.split(".", 1)[0]!;

@@ -18,7 +18,8 @@ export function numberResults(
   let table = 1;
   for (const cell of document.cells) {
     numbers.set(cell.id, { figure, table });
-    const own = countResults({ kind: cell.kind, tables: answers?.get(cell.id)?.result.tables ?? {} });
+    const { values = {}, tables = {} } = answers?.get(cell.id)?.result ?? {};
+    const own = countResults({ kind: cell.kind, values, tables });
     figure += own.figures;
     table += own.tables;
   }

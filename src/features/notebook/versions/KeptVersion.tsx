@@ -80,6 +80,7 @@ function VersionDesk({ notebook, version }: { notebook: NotebookResponse; versio
       <Article
         document={document}
         live={live}
+        tasks={null}
         notes={notes}
         unitSystem={unitSystem}
         kicker={[

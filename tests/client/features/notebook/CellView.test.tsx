@@ -24,6 +24,7 @@ function show(cell: Cell, change: Partial<CellViewProps> = {}) {
       columnGases={undefined}
       notes={evaluation.cells[0]!.result.notes.map((note) => ({ note, letter: null }))}
       isLate={false}
+      task={undefined}
       unitSystem="SI"
       figureNumber={1}
       tableNumber={1}

@@ -71,6 +71,30 @@ describe("a sweep", () => {
     ]);
   });
 
+  it.each([
+    ["12 ± 3", 9, 15],
+    ["12 within factor 2", 6, 24],
+    // The standard deviation of an even range is its width over √12.
+    ["between 6 and 18", 12 - 12 / Math.sqrt(12), 12 + 12 / Math.sqrt(12)],
+  ])("says one standard deviation of what is varied where it is uncertain: %s", (written, lower, upper) => {
+    const cells: WrittenCell[] = [
+      ["values", "given", `x = ${written}\ny = 2 * x`],
+      sweep("vary = x from 1 to 4 in 3 steps\nwatch = y"),
+    ];
+    const [varied, watched] = rowsOf(completed(cells)[1], "quantities");
+    expect(numberOf(varied, "sigma_lower")).toBeCloseToRelative(lower, 1e-12);
+    expect(numberOf(varied, "sigma_upper")).toBeCloseToRelative(upper, 1e-12);
+    expect(watched).not.toHaveProperty("sigma_lower");
+  });
+
+  it("says none of what is certain", () => {
+    const cells: WrittenCell[] = [
+      ["values", "given", "x = 3\ny = 2 * x"],
+      sweep("vary = x from 1 to 4 in 3 steps\nwatch = y"),
+    ];
+    expect(rowsOf(completed(cells)[1], "quantities")[0]).not.toHaveProperty("sigma_lower");
+  });
+
   it("carries what is varied through entries that rest on it", () => {
     const cells: WrittenCell[] = [
       ["values", "given", "x = 1 km\ny = x^2\nz = y + 3 km^2"],

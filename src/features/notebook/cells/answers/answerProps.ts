@@ -6,7 +6,7 @@ import type { LetteredNote } from "../../../../ui/tables/tableProps";
 export interface AnswerProps {
   /** The last answer that there was. */
   evaluation: CellEvaluation;
-  /** Gases of the column that an escape cell rests on. */
+  /** Gases of the column that the cell rests on, where it names gases. */
   columnGases: readonly string[] | undefined;
   notes: readonly LetteredNote[];
   unitSystem: UnitSystem;

@@ -30,7 +30,15 @@ function liveOf(document: NotebookDocument, late: readonly string[] = []) {
   const { evaluation } = evaluateNotebook(document);
   const byId = new Map(evaluation.cells.map((cell) => [cell.id, cell]));
   const texts = new Map(document.cells.map(({ id, text }) => [id, text]));
-  const evaluated = { engine: evaluation.engine, document, cells: byId, headline: [], tasks: [], texts };
+  const evaluated = {
+    engine: evaluation.engine,
+    document,
+    cells: byId,
+    headline: [],
+    tasks: [],
+    partial: [],
+    texts,
+  };
   return { evaluated, late: new Set(late) };
 }
 
