@@ -15,6 +15,9 @@ export default defineConfig({
     // A small font inlined as a data URL would be refused by the content-security policy.
     assetsInlineLimit: 0,
     chunkSizeWarningLimit: 5000,
+    // From these on browsers know light-dark() themselves; put in other words it could not be asked for the light of
+    // day on a dark page, which figures that leave the page need.
+    cssTarget: ["chrome123", "firefox120", "safari17.5"],
   },
   worker: { format: "es" },
   // The page's own address stays in the request: the server takes changes from its own pages only.

@@ -93,6 +93,22 @@ it("Curves that follow a key are written where the figure library draws them", a
   await context.close();
 });
 
+it("A figure leaves a dark page as by day", async () => {
+  const { page, context } = await openPage(browser, { acceptDownloads: true, colorScheme: "dark" });
+  await signInAs(page, server.origin, "Tamsin Orevale");
+  await openNotebook(page, ilmara);
+  await seeFirstFigure(page);
+  const [download] = await Promise.all([
+    page.waitForEvent("download"),
+    page.getByRole("button", { name: "Save figure 1 as SVG" }).click(),
+  ]);
+  const svg = await readFile(await download.path(), "utf8");
+  // Ink by day; by night it is rgb(232, 230, 222).
+  expect(svg).toContain("rgb(27, 34, 48)");
+  expect(svg).not.toContain("rgb(232, 230, 222)");
+  await context.close();
+});
+
 it("The notebook exported as Markdown gives the same numbers on the command line as in a kept version", async () => {
   const { page, context } = await openPage(browser, { acceptDownloads: true });
   await signInAs(page, server.origin, "Tamsin Orevale");
