@@ -99,7 +99,7 @@ function answer(
   last: EvaluatedCell | undefined,
 ): RememberedCell {
   const evaluated = evaluateCell(cell, parsed, surroundings, unitSystem, last);
-  const { result, understood, defaults, gases, strip, convention } = evaluated;
+  const { result, understood, defaults, gases, strip, convention, corona, lightHistory } = evaluated;
   const uses = usedNames(surroundings.questions);
   const evaluation = {
     id: cell.id,
@@ -110,6 +110,8 @@ function answer(
     gases,
     ...(strip ? { strip } : {}),
     ...(convention ? { convention } : {}),
+    ...(corona ? { corona } : {}),
+    ...(lightHistory ? { lightHistory } : {}),
   };
   return { cell, parsed, unitSystem, questions: surroundings.questions, evaluated, evaluation };
 }
