@@ -1,10 +1,12 @@
 import { Fragment, useCallback, useDeferredValue, useMemo } from "react";
 import type { Cell, NotebookDocument } from "../../../../shared/notebook/document";
 import type { CellEvaluation } from "../../../../shared/notebook/result";
+import type { ColumnCorona } from "../../../lib/columnCorona";
 import type { UnitSystem } from "../../../lib/format";
 import type { LetteredNote } from "../../../ui/tables/tableProps";
 import { cellTitle } from "../cells/cellTitle";
 import { CellView } from "../cells/CellView";
+import { columnCoronae, columnOf } from "../cells/columnCoronae";
 import { InsertCell } from "../cells/InsertCell";
 import { useNotebookNames } from "../cells/notebookNames";
 import { useCellDrag } from "../cells/useCellDrag";
@@ -50,6 +52,9 @@ export function Sheet({ document, live, notesOf, unitSystem, isEditable, newCell
               evaluation={evaluation}
               readText={answered?.texts.get(cell.id)}
               columnGases={columnGases(evaluation)}
+              coronae={
+                cell.kind === "column" ? columnCoronae(cell.name, answered?.cells ?? noCells) : noCoronae
+              }
               notes={notesOf(cell.id)}
               isLate={late.has(cell.id)}
               unitSystem={unitSystem}
@@ -85,14 +90,16 @@ function DropLine() {
 
 const placeWords = (cell: Cell): string => (cell.kind === "prose" ? "this prose" : cellTitle(cell));
 
-/** Gases of the column that an escape cell names, so that it gives them the same colours. */
+const noCoronae: readonly ColumnCorona[] = [];
+const noCells: ReadonlyMap<string, CellEvaluation> = new Map();
+
+/** Gases of the column that a cell rests on, so that it gives them the same colours. */
 function gasesOfColumn(
   evaluation: CellEvaluation | undefined,
   cells: ReadonlyMap<string, CellEvaluation> | undefined,
 ): readonly string[] | undefined {
-  if (evaluation?.result.kind !== "escape" || !cells) return undefined;
-  for (const other of cells.values()) {
-    if (other.result.kind === "column" && evaluation.uses.includes(other.result.name)) return other.gases;
-  }
-  return undefined;
+  if (!evaluation || !cells || evaluation.result.kind === "column") return undefined;
+  const column = columnOf(evaluation, cells);
+  if (column === null) return undefined;
+  return [...cells.values()].find(({ result }) => result.kind === "column" && result.name === column)?.gases;
 }
