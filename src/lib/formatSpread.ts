@@ -1,4 +1,14 @@
-import { formatFixed, formatNumber, thinSpace } from "./format";
+import {
+  displayScale,
+  formatFixed,
+  formatNumber,
+  formatQuantity,
+  thinSpace,
+  type DisplayScale,
+  type FormattedQuantity,
+  type Quantity,
+  type UnitSystem,
+} from "./format";
 import type { RichText } from "./richText";
 
 /** The middle 68 % of a number's draws, in the number's own unit. */
@@ -13,6 +23,8 @@ export interface FormattedSpread {
   whole: RichText;
   /** The spread alone, to stand under its number: "± 26", "+6.1 −5.3 × 10²⁵", "4.6 to 9.1". */
   alone: RichText;
+  /** The whole is not much longer than the number. */
+  isShort: boolean;
 }
 
 /** Two sides that differ by less than a third of the smaller are told as one. */
@@ -43,6 +55,7 @@ export function formatSpread(value: number, { lower, upper }: NumberSpread): For
   return {
     whole: isPlain ? [inside] : [`(${inside})`, ...power],
     alone: [sides.text, ...power],
+    isShort: isPlain,
   };
 }
 
@@ -62,5 +75,32 @@ function asRange(value: number, { lower, upper }: NumberSpread): FormattedSpread
   return {
     whole: [...formatNumber(value), ` (68${thinSpace}% from `, ...range, ")"],
     alone: range,
+    isShort: false,
   };
 }
+
+/** Its ends as numbers; null where a result has none, or an end is too small to have a value. */
+export function numberSpread(
+  spread: { lower: number | null; upper: number | null } | undefined,
+): NumberSpread | null {
+  if (!spread || spread.lower === null || spread.upper === null) return null;
+  return { lower: spread.lower, upper: spread.upper };
+}
+
+/** A quantity with its spread, where it has one. */
+export function formatUncertain(
+  quantity: Quantity,
+  spread: NumberSpread | null,
+  system: UnitSystem,
+  options: { digits?: number; scale?: DisplayScale } = {},
+): FormattedQuantity {
+  const plain = formatQuantity(quantity, system, options);
+  if (spread === null || quantity.value === null) return plain;
+  const { factor } = options.scale ?? displayScale(quantity.unit, system, quantity.value);
+  return { ...plain, number: formatSpread(quantity.value * factor, scaleSpread(spread, factor)).whole };
+}
+
+export const scaleSpread = ({ lower, upper }: NumberSpread, factor: number): NumberSpread => ({
+  lower: lower * factor,
+  upper: upper * factor,
+});
