@@ -99,7 +99,7 @@ function answer(
   last: EvaluatedCell | undefined,
 ): RememberedCell {
   const evaluated = evaluateCell(cell, parsed, surroundings, unitSystem, last);
-  const { result, understood, defaults, gases, strip, convention, corona, lightHistory } = evaluated;
+  const { result, understood, defaults, gases, strip, convention, corona, ion, lightHistory } = evaluated;
   const uses = usedNames(surroundings.questions);
   const evaluation = {
     id: cell.id,
@@ -111,6 +111,7 @@ function answer(
     ...(strip ? { strip } : {}),
     ...(convention ? { convention } : {}),
     ...(corona ? { corona } : {}),
+    ...(ion === undefined ? {} : { ion }),
     ...(lightHistory ? { lightHistory } : {}),
   };
   return { cell, parsed, unitSystem, questions: surroundings.questions, evaluated, evaluation };

@@ -95,6 +95,8 @@ export interface CellEvaluation {
   convention?: { coupling: "coupled" | "open"; criterion: string };
   /** Of a corona cell. */
   corona?: CoronaBeginning;
+  /** Of a nonthermal cell: "O2+". */
+  ion?: string;
   /** Of a loss cell. */
   lightHistory?: LightHistory;
 }

@@ -191,6 +191,9 @@ export function formatGas(formula: string): RichText {
     .map((part) => (/^\d+$/.test(part) ? { sub: part } : part));
 }
 
+/** O₂⁺ from "O2+". */
+export const formatIon = (ion: string): RichText => [...formatGas(ion.replace(/\+$/, "")), { sup: "+" }];
+
 const durations: readonly [number, string][] = [
   [1e9 * julianYear, "billion years"],
   [1e6 * julianYear, "million years"],

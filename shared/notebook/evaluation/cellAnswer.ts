@@ -16,6 +16,8 @@ export interface CellAnswer {
   convention?: CellEvaluation["convention"];
   /** Of a corona cell. */
   corona?: CellEvaluation["corona"];
+  /** Of a nonthermal cell. */
+  ion?: string;
   /** Of a loss cell. */
   lightHistory?: CellEvaluation["lightHistory"];
   /** What the cells below may build on. */

@@ -167,7 +167,8 @@ function lossValues(
 }
 
 function lightHistoryOf({ begin, now, exponent, history }: LossSpan): LightHistory {
-  const isSaturated = history.kind === "power" && exponent !== 0 && history.saturationAge > begin;
+  const isSaturated =
+    history.kind === "power" && history.exponent * exponent !== 0 && history.saturationAge > begin;
   return { now, saturation: isSaturated ? history.saturationAge : null };
 }
 

@@ -47,7 +47,7 @@ export function evaluateNonthermal(cell: OpenCell): CellAnswer {
   const recombination = escape && recombining ? answerRecombination(cell, escape, recombining, profiles) : {};
   if (isAtomic) sayWithoutRecombination(cell, ion);
   const values = { ...recombination.values, ...pickupValues(cell, ion, flowSpeed, magneticField) };
-  return { values, tables: recombination.tables ?? {} };
+  return { values, tables: recombination.tables ?? {}, ion };
 }
 
 function readIonEntry(cell: OpenCell): string | undefined {

@@ -11,7 +11,8 @@ import {
   type GasCurve,
   type Profiles,
 } from "./columnCurves";
-import { dashList, gasNames, namePlaces, temperaturePanel } from "./densityPlot";
+import { dashList } from "./dashList";
+import { gasNames, namePlaces, temperaturePanel } from "./densityPlot";
 import type { FigureDrawing } from "./exportFigure";
 import { acrossLine, altitudeAxis, axis, baseLayout, decadeAxis, type FigureZoom } from "./figureLayout";
 import type { FigureRoom } from "./figureRoom";

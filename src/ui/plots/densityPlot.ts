@@ -4,6 +4,7 @@ import { formatKilometres, formatUnit, type UnitSystem } from "../../lib/format"
 import type { GasStyle } from "../../lib/gasStyle";
 import { figureText, plainText } from "../../lib/richText";
 import { densityDecades, densityUnit, drawnRows, type GasCurve, type Profiles } from "./columnCurves";
+import { dashList } from "./dashList";
 import type { FigureRoom } from "./figureRoom";
 import {
   acrossLine,
@@ -41,12 +42,6 @@ export interface DensityPlot {
   /** Gases whose names found no place. */
   unnamed: string[];
 }
-
-type FigureDash = NonNullable<NonNullable<Shape["line"]>["dash"]>;
-
-/** A list of lengths, which the library takes though its types name only a few patterns. */
-export const dashList = (dash: string): FigureDash =>
-  (dash === "" ? "solid" : dash.replace(/ /g, "px,").concat("px")) as FigureDash;
 
 /** Curves above the exobase: thinner than below; a corona in dashes of its own. */
 const hydrostatic = { opacity: 0.75, thinned: 0.72, dash: null };

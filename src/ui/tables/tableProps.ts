@@ -41,10 +41,19 @@ export interface ValueListProps {
   isQuiet?: boolean;
 }
 
+/** A column of a table of levels: what it shows, its head, its unit in SI. */
+export interface LevelColumn {
+  key: string;
+  head: RichText;
+  unit: string;
+}
+
 export interface LevelsTableProps {
   /** A column cell whose `levels` table is shown. */
   result: CellResult;
   gases: readonly string[];
+  /** In place of those of a column cell, before the densities of its gases. */
+  columns?: readonly LevelColumn[];
   unitSystem: UnitSystem;
   number: number;
   caption?: ReactNode;
