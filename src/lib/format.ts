@@ -108,6 +108,8 @@ const particleScales: Readonly<Record<string, { below: number; scale: DisplaySca
   kg: { below: 1e-20, scale: { factor: 1 / atomicMass.value, unit: "u" } },
   J: { below: 1e-10, scale: { factor: 1 / elementaryCharge.value, unit: "eV" } },
 };
+/** From here energies of particles are told in keV, J. */
+const kiloelectronvolts = 1e4 * elementaryCharge.value;
 
 /**
  * Unit in which a magnitude is shown.
@@ -120,7 +122,12 @@ export function displayScale(unit: string, system: UnitSystem, magnitude: number
   const kilo = kilometresFrom[unit];
   if (kilo !== undefined && size >= kilo) return { factor: 1e-3, unit: `k${unit}` };
   const particle = particleScales[unit];
-  if (particle && size > 0 && size < particle.below) return particle.scale;
+  if (particle && size > 0 && size < particle.below) {
+    const { factor } = particle.scale;
+    return unit === "J" && size >= kiloelectronvolts
+      ? { factor: factor / 1000, unit: "keV" }
+      : particle.scale;
+  }
   if (unit === "s") {
     const larger = timeScales.find(([from]) => size >= from);
     if (larger) return { factor: 1 / larger[2], unit: larger[1] };

@@ -32,9 +32,9 @@ const likeness = 4 / 3;
 
 const minus = "\u2212";
 
-/** Digits after the point that leave the number two significant ones. */
-const decimalsOf = (size: number): number =>
-  size > 0 ? Math.min(12, Math.max(0, 1 - Math.floor(Math.log10(size)))) : 0;
+/** Digits after the point that leave a number so many significant ones. */
+const decimalsOf = (size: number, digits: number): number =>
+  size > 0 ? Math.min(12, Math.max(0, digits - 1 - Math.floor(Math.log10(size)))) : 0;
 
 /**
  * A number with the middle 68 % of its draws as ±, or as + and − where its two sides differ; as a range where the number
@@ -63,10 +63,10 @@ function asSides(over: number, under: number): { text: string; decimals: number 
   const [less, more] = [Math.min(over, under), Math.max(over, under)];
   if (more <= less * likeness) {
     const mean = (over + under) / 2;
-    const decimals = decimalsOf(mean);
+    const decimals = decimalsOf(mean, 2);
     return { text: `±${thinSpace}${formatFixed(mean, decimals)}`, decimals };
   }
-  const decimals = decimalsOf(less > 0 ? less : more);
+  const decimals = Math.max(decimalsOf(more, 2), decimalsOf(less, 1));
   return { text: `+${formatFixed(over, decimals)} ${minus}${formatFixed(under, decimals)}`, decimals };
 }
 

@@ -55,13 +55,15 @@ export function sightCurves(profiles: Profiles, rows: readonly ResultRow[], fact
   });
 }
 
-/** Catmull and Rom's cubic; straight in the first and last span, where a neighbour is missing. */
+/** Catmull and Rom's cubic; where a neighbour is missing, as if the span went on straight. */
 function between(values: readonly number[], place: number): number {
   const low = Math.min(Math.floor(place), values.length - 2);
   const t = place - low;
   const [p1, p2] = [values[low]!, values[low + 1]!];
-  const p0 = values[low - 1] ?? 2 * p1 - p2;
-  const p3 = values[low + 2] ?? 2 * p2 - p1;
+  if (t === 0 || t === 1) return t === 0 ? p1 : p2;
+  const [before, after] = [values[low - 1] ?? NaN, values[low + 2] ?? NaN];
+  const p0 = Number.isFinite(before) ? before : 2 * p1 - p2;
+  const p3 = Number.isFinite(after) ? after : 2 * p2 - p1;
   const cubic = 2 * p0 - 5 * p1 + 4 * p2 - p3;
   return p1 + 0.5 * t * (p2 - p0 + t * (cubic + t * (3 * (p1 - p2) + p3 - p0)));
 }

@@ -68,7 +68,7 @@ function traces(curves: readonly CoronaCurve[], inks: FigureInks, { x, y }: Pane
       y: curve.y,
       xaxis: x,
       yaxis: y,
-      line: { color: inks[ink]!, width, dash: dash as "solid" },
+      line: { color: inks[ink]!, width, dash: dash as "solid", simplify: false },
       hoverinfo: "skip",
     };
   });

@@ -66,8 +66,10 @@ function curves(input: LossPlotInput): Data[] {
     ...(saturated.x.length > 1
       ? [line(saturated, "y", { color: inks.gas!, width: 2.6, dash: "solid" })]
       : []),
-    ...(after.x.length > 1 ? [line(after, "y", { color: inks.gas!, width: 1.7, dash })] : []),
-    line({ x: age, y: lost }, "y2", { color: inks.ink!, width: 1.6 }),
+    ...(after.x.length > 1
+      ? [line(after, "y", { color: inks.gas!, width: 1.7, dash, simplify: false })]
+      : []),
+    line({ x: age, y: lost }, "y2", { color: inks.ink!, width: 1.6, simplify: false }),
   ];
 }
 

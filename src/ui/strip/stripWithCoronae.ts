@@ -8,6 +8,7 @@ export function stripWithCoronae(strip: Strip, coronae: readonly ColumnCorona[])
   const log10NumberDensity = [...strip.log10NumberDensity];
   const moleFractions = strip.moleFractions.map((shares) => [...shares]);
   strip.altitude.forEach((altitude, level) => {
+    if (!present.some((corona) => altitude >= corona.altitude[0]!)) return;
     const densities = moleFractions.map((shares) => shares[level]! * 10 ** log10NumberDensity[level]!);
     for (const corona of present) {
       const density = coronaDensityAt(corona, altitude);

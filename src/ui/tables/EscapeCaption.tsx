@@ -61,7 +61,7 @@ export function EscapeCaption({
   const reason = result.notes.find(({ code }) => code.startsWith("no_exobase_"));
   return (
     <>
-      {convention ? couplings[convention.coupling] : "Thermal escape."}
+      {convention && altitude !== null ? couplings[convention.coupling] : "Thermal escape."}
       {altitude === null && reason && (
         <>
           {" "}

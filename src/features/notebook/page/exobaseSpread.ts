@@ -1,10 +1,14 @@
-import type { CellEvaluation, ResultSpread } from "../../../../shared/notebook/result";
-import type { NumberSpread } from "../../../lib/formatSpread";
+import type { CellEvaluation } from "../../../../shared/notebook/result";
+import { numberSpread, type NumberSpread } from "../../../lib/formatSpread";
 import { columnOf } from "../cells/columnCoronae";
+
+/** As a share of the spread. */
+const little = 0.1;
 
 /**
  * How far the exobase that a strip marks may lie from there, where a spread watches it: that of an escape cell on the
- * column by the same criterion, the whole gas. Its flux may move it a little; within its own spread that is said of both.
+ * column by the same criterion, the whole gas. Its flux moves it; only where that is little beside the spread is the
+ * spread that of the mark too.
  *
  * @param exobase  altitude marked, m
  * @returns        altitudes, m
@@ -19,13 +23,10 @@ export function exobaseSpread(
     if (result.kind !== "escape" || convention?.criterion.startsWith("bulk") !== true) continue;
     const altitude = result.values["exobase.altitude"];
     if (!altitude?.spread || columnOf(evaluation, cells) !== column) continue;
+    const ends = numberSpread(altitude.spread);
     const offset = Number(altitude.value) - exobase;
-    const ends = around(altitude.spread, offset);
-    if (ends && ends.lower <= exobase && exobase <= ends.upper) return ends;
+    if (!ends || Math.abs(offset) > little * (ends.upper - ends.lower)) continue;
+    return { lower: ends.lower - offset, upper: ends.upper - offset };
   }
   return null;
-}
-
-function around({ lower, upper }: ResultSpread, offset: number): NumberSpread | null {
-  return lower === null || upper === null ? null : { lower: lower - offset, upper: upper - offset };
 }
