@@ -4,6 +4,7 @@ import {
   formatNumber,
   formatQuantity,
   thinSpace,
+  unitSpace,
   type DisplayScale,
   type FormattedQuantity,
   type Quantity,
@@ -67,7 +68,10 @@ function asSides(over: number, under: number): { text: string; decimals: number 
     return { text: `±${thinSpace}${formatFixed(mean, decimals)}`, decimals };
   }
   const decimals = Math.max(decimalsOf(more, 2), decimalsOf(less, 1));
-  return { text: `+${formatFixed(over, decimals)} ${minus}${formatFixed(under, decimals)}`, decimals };
+  return {
+    text: `+${formatFixed(over, decimals)}${unitSpace}${minus}${formatFixed(under, decimals)}`,
+    decimals,
+  };
 }
 
 function asRange(value: number, { lower, upper }: NumberSpread): FormattedSpread {

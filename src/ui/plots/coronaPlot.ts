@@ -44,10 +44,10 @@ export function coronaDecades(curves: readonly CoronaCurve[]): [number, number] 
   return [Math.max(Math.log10(Math.min(...all)) - 0.2, to - mostDecades), to];
 }
 
-/** Decimal logarithms of the altitudes drawn, km: all levels, and a little below the exobase. */
+/** Decimal logarithms of the altitudes drawn, km: all levels, and below the exobase room for its name. */
 export function coronaAltitudes(orbits: readonly CoronaCurve[], exobase: number): [number, number] {
   const [from, to] = [Math.log10(exobase / 1000), Math.log10(orbits[0]?.y.at(-1) ?? exobase / 500)];
-  return [from - 0.05 * (to - from), to];
+  return [from - 0.08 * (to - from), to];
 }
 
 /** The figure library's axes by panel. */
@@ -79,7 +79,6 @@ function names(
   panel: { width: number; tall: number; decades: [number, number]; altitudes: [number, number] },
   inks: FigureInks,
   { x: xref, y: yref }: PanelAxes,
-  obstacles: readonly Box[],
 ): Partial<Annotation>[] {
   const scale = panelScale({ panel: panel.width, tall: panel.tall }, panel.decades, panel.altitudes);
   const frame: Box = { left: 4, right: panel.width - 2, top: 4, bottom: panel.tall - 6 };
@@ -92,7 +91,7 @@ function names(
         .filter(([px]) => px > -60 && px < panel.width + 60),
     })),
     frame,
-    obstacles,
+    [],
   );
   return curves.flatMap(({ key, words }) => {
     const place = places.get(key);
@@ -158,15 +157,6 @@ export function coronaPlot(input: CoronaPlotInput): FigureDrawing {
     dtick: 1,
     minor: { ticks: "outside", ticklen: 4, tickwidth: 0.8, tickcolor: inks.ink2, dtick: "D1" },
   });
-  const letteringWidth = 118;
-  const scale = panelScale(room, decades, altitudes);
-  const exobaseY = scale.y(Math.log10(km)) - 10;
-  const lettering: Box = {
-    left: 0,
-    right: letteringWidth,
-    top: exobaseY - 9,
-    bottom: exobaseY + 19,
-  };
   const first = { width: room.panel, tall: room.tall, decades, altitudes };
   const second = { width: room.second, tall: room.tall, decades: columnDecades, altitudes };
   return {
@@ -194,8 +184,8 @@ export function coronaPlot(input: CoronaPlotInput): FigureDrawing {
       },
       shapes: [exobaseLine(km, inks, axes[0]), exobaseLine(km, inks, axes[1]), ...stepShapes(step, km, inks)],
       annotations: [
-        ...names(orbits, first, inks, axes[0], [lettering]),
-        ...names(sights, second, inks, axes[1], []),
+        ...names(orbits, first, inks, axes[0]),
+        ...names(sights, second, inks, axes[1]),
         note(
           `<span style="font-weight:600">exobase</span> ${formatKilometres(exobase)}${unitSpace}km`,
           {
@@ -205,7 +195,7 @@ export function coronaPlot(input: CoronaPlotInput): FigureDrawing {
             xanchor: "left",
             yanchor: "middle",
             xshift: 6,
-            yshift: 10,
+            yshift: -12,
           },
           { family: sans, size: 12.5, color: inks.ink! },
         ),

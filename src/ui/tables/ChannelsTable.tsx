@@ -22,17 +22,24 @@ interface ChannelsTableProps {
   number: number;
 }
 
-/** "O(3P) + O(1D)" with the multiplicity of each state raised. */
+/** "O(3P) + CO(X1Σ+)" with the multiplicity and the sign of each state raised. */
 export function productsRich(products: string): RichText {
   return products.split(" + ").flatMap((fragment, index): RichText => {
     const [, formula = fragment, state = ""] = /^([^(]+)\(([^)]*)\)$/.exec(fragment) ?? [];
-    const [, multiplicity = "", term = ""] = /^(\d*)(.*)$/.exec(state) ?? [];
-    const raised = multiplicity === "" ? [] : [{ sup: multiplicity }];
-    return [
-      ...(index > 0 ? [" + "] : []),
+    const [, level = "", multiplicity = "", term = "", sign = ""] =
+      /^(\D*)(\d*)([^+-]*)([+-]?)$/.exec(state) ?? [];
+    const pieces: RichText = [
       ...formatGas(formula),
-      ...(term === "" ? [] : ["(", ...raised, term, ")"]),
+      `(${level}`,
+      { sup: multiplicity },
+      term,
+      { sup: sign },
+      ")",
     ];
+    const shown = pieces.filter(
+      (piece) => typeof piece === "string" || !("sup" in piece) || piece.sup !== "",
+    );
+    return [...(index > 0 ? [" + "] : []), ...(state === "" ? formatGas(formula) : shown)];
   });
 }
 

@@ -49,8 +49,11 @@ describe("the course of a loss", () => {
       measure: { unit: "m" },
       half: 2 * gyr,
     });
-    const { water_layer: _, ...values } = lost.values;
-    const dry = lossCourse({ ...lost, values }, { now: gyr, saturation: null });
+    const { particles, mass } = lost.values;
+    const dry = lossCourse(
+      { ...lost, values: { particles: particles!, mass: mass! } },
+      { now: gyr, saturation: null },
+    );
     expect(dry).toMatchObject({ lost: [0, 16, 16], measure: { unit: "kg" } });
   });
 

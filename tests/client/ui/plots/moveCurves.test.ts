@@ -36,7 +36,7 @@ it.each([
 });
 
 it("draws a curve within its own panel, where panels stand above each other", () => {
-  const layout = {
+  const layout: FigureDrawing["layout"] = {
     width: 100,
     height: 200,
     xaxis: { range: [0, 1] },

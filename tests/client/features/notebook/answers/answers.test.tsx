@@ -1,5 +1,7 @@
 import { render, screen, within } from "@testing-library/react";
 import { describe, expect, it } from "vitest";
+import { plainText } from "../../../../../src/lib/richText";
+import { productsRich } from "../../../../../src/ui/tables/ChannelsTable";
 import { answers, countResults } from "../../../../../src/features/notebook/cells/answers/answers";
 import { cellNamed, evaluatedHalo, haloCells } from "./haloNotebook";
 
@@ -98,6 +100,14 @@ describe("the answer of nonthermal escape", () => {
     expect(Number(plain(gets!))).toBeCloseTo(electronvolts(energy), 2);
     expect(Number(plain(needs!))).toBeCloseTo(electronvolts(needed), 2);
     expect(plain(leave!)).toBe(Number(energy) > Number(needed) ? "both" : "none");
+  });
+
+  it.each([
+    ["O(3P) + O(1D)", "O(³P) + O(¹D)"],
+    ["CO(X1Σ+) + O(3P)", "CO(X¹Σ^+) + O(³P)"],
+    ["CO(a3Π) + O2", "CO(a³Π) + O2"],
+  ])("raises multiplicity and sign of the states in %s", (products, text) => {
+    expect(plainText(productsRich(products))).toBe(text);
   });
 
   it("says in words what the wind makes of the ion", () => {
