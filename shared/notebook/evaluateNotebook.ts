@@ -106,7 +106,7 @@ function answer(
   last: EvaluatedCell | undefined,
 ): RememberedCell {
   const evaluated = evaluateCell(cell, parsed, surroundings, unitSystem, last);
-  const { result, understood, defaults, gases, strip, convention } = evaluated;
+  const { result, understood, defaults, gases, strip, convention, corona, ion, lightHistory } = evaluated;
   const uses = usedNames(surroundings.questions);
   const evaluation = {
     id: cell.id,
@@ -117,6 +117,9 @@ function answer(
     gases,
     ...(strip ? { strip } : {}),
     ...(convention ? { convention } : {}),
+    ...(corona ? { corona } : {}),
+    ...(ion === undefined ? {} : { ion }),
+    ...(lightHistory ? { lightHistory } : {}),
   };
   return { cell, parsed, unitSystem, questions: surroundings.questions, evaluated, evaluation };
 }

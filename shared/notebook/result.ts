@@ -93,6 +93,29 @@ export interface CellEvaluation {
   strip?: Strip;
   /** Of an escape cell: what its numbers rest on, in a few words. */
   convention?: { coupling: "coupled" | "open"; criterion: string };
+  /** Of a corona cell. */
+  corona?: CoronaBeginning;
+  /** Of a nonthermal cell: "O2+". */
+  ion?: string;
+  /** Of a loss cell. */
+  lightHistory?: LightHistory;
+}
+
+/** How a corona begins at its exobase. */
+export interface CoronaBeginning {
+  /** s: 0 none of the satellite orbits filled, 1 all. */
+  satellites: number;
+  /** λ at the exobase. */
+  escapeParameter: number;
+  /** ½[1 + P(3/2, λ)]: density of the corona over that of the column, at the exobase. */
+  share: number;
+}
+
+/** What a loss follows back in time. Ages in s. */
+export interface LightHistory {
+  now: number;
+  /** Up to this age the light is as strong as it ever was; null where it never is. */
+  saturation: number | null;
 }
 
 export interface Evaluation {

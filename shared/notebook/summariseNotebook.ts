@@ -1,7 +1,7 @@
 import { findGas } from "../physics";
 import type { NotebookDocument } from "./document";
 import { formatPlainNumber, thinSpace } from "./language/formatQuantity";
-import type { CellEvaluation, Evaluation, NoteLevel } from "./result";
+import type { CellEvaluation, Evaluation, NoteLevel, ResultSpread } from "./result";
 import type { HeadlineItem, NotebookSummary, Strip } from "./summary";
 
 /** What a list shows of a notebook: its headline, how many notes of each level, its bodies, the strip of a column. */
@@ -88,7 +88,7 @@ function namedItem(evaluation: Evaluation, path: string): HeadlineItem {
 
 function itemOf(cell: CellEvaluation, name: string): HeadlineItem {
   const { result } = cell;
-  const { value, unit } = result.values[name];
+  const { value, unit, spread } = result.values[name];
   const twin = result.values[name.replace(/([^.]+)$/, "log10_$1")]?.value;
   const [first, last] = [name.split(".")[0], name.slice(name.lastIndexOf(".") + 1)];
   const gas = last !== first && first !== "exobase" && first !== "base" && first !== "top" ? first : null;
@@ -100,7 +100,14 @@ function itemOf(cell: CellEvaluation, name: string): HeadlineItem {
     unit: unit ?? "",
     gas,
     note: conventionOf(cell, name),
+    ...(spread ? spreadOf(spread) : {}),
   };
+}
+
+/** Left out where an end is too small to have a value. */
+function spreadOf({ lower, upper, cell, isPartial }: ResultSpread): Pick<HeadlineItem, "spread"> {
+  if (lower === null || upper === null) return {};
+  return { spread: { lower, upper, cell, ...(isPartial ? { isPartial } : {}) } };
 }
 
 /** Names of results in words; what is not listed is read as it is written. */

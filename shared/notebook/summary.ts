@@ -34,6 +34,10 @@ export const headlineItemSchema = z.object({
   gas: z.string().nullable(),
   /** The convention in a few words: "bulk, l = H". */
   note: z.string(),
+  /** Middle 68 % where a spread watches the value, in its unit. */
+  spread: z
+    .object({ lower: z.number(), upper: z.number(), cell: z.string(), isPartial: z.literal(true).optional() })
+    .optional(),
 });
 export type HeadlineItem = z.infer<typeof headlineItemSchema>;
 

@@ -1,4 +1,5 @@
 import type { NotebookDocument } from "../../shared/notebook/document";
+import { atomicMass, elementaryCharge } from "../../shared/physics";
 import { plainText, type RichText } from "./richText";
 
 export type UnitSystem = NotebookDocument["unitSystem"];
@@ -41,7 +42,7 @@ export function formatNumber(value: number, digits = 3): RichText {
 }
 
 /** Magnitudes below this are written 10ˣ: their digits mean nothing, their size does. */
-const smallestWritten = 1e-6;
+export const smallestWritten = 1e-6;
 
 /** A magnitude that may be carried by its logarithm alone, as fluxes below 1e-300 are. */
 export function formatMagnitude(value: number | null, log10: number | null, digits = 3): RichText {
@@ -102,6 +103,14 @@ const timeScales: readonly [number, string, number][] = [
   [60, "min", 60],
 ];
 
+/** Masses and energies below these are of single particles, told in u and eV in both systems. */
+const particleScales: Readonly<Record<string, { below: number; scale: DisplayScale }>> = {
+  kg: { below: 1e-20, scale: { factor: 1 / atomicMass.value, unit: "u" } },
+  J: { below: 1e-10, scale: { factor: 1 / elementaryCharge.value, unit: "eV" } },
+};
+/** From here energies of particles are told in keV, J. */
+const kiloelectronvolts = 1e4 * elementaryCharge.value;
+
 /**
  * Unit in which a magnitude is shown.
  *
@@ -112,6 +121,13 @@ export function displayScale(unit: string, system: UnitSystem, magnitude: number
   const size = Math.abs(magnitude);
   const kilo = kilometresFrom[unit];
   if (kilo !== undefined && size >= kilo) return { factor: 1e-3, unit: `k${unit}` };
+  const particle = particleScales[unit];
+  if (particle && size > 0 && size < particle.below) {
+    const { factor } = particle.scale;
+    return unit === "J" && size >= kiloelectronvolts
+      ? { factor: factor / 1000, unit: "keV" }
+      : particle.scale;
+  }
   if (unit === "s") {
     const larger = timeScales.find(([from]) => size >= from);
     if (larger) return { factor: 1 / larger[2], unit: larger[1] };
@@ -140,6 +156,9 @@ export interface FormattedQuantity {
   unit: RichText;
 }
 
+/** What flows off may lie beyond sight, so that only its size says something; any other number keeps its digits. */
+const isOfEscape = (unit: string): boolean => / ?s\^-1$/.test(unit);
+
 /** Number and unit apart, since a unit is set smaller. */
 export function formatQuantity(
   { value, log10 = null, unit }: Quantity,
@@ -148,10 +167,12 @@ export function formatQuantity(
 ): FormattedQuantity {
   const shown = scale ?? displayScale(unit, system, value ?? 0);
   const shownLog10 = log10 === null ? null : log10 + Math.log10(shown.factor);
-  return {
-    number: formatMagnitude(value === null ? null : value * shown.factor, shownLog10, digits),
-    unit: formatUnit(shown.unit),
-  };
+  const shownValue = value === null ? null : value * shown.factor;
+  const number =
+    shownValue !== null && !isOfEscape(unit)
+      ? formatNumber(shownValue, digits)
+      : formatMagnitude(shownValue, shownLog10, digits);
+  return { number, unit: formatUnit(shown.unit) };
 }
 
 /** Number, space, unit. */
@@ -176,6 +197,9 @@ export function formatGas(formula: string): RichText {
     .filter((part) => part !== "")
     .map((part) => (/^\d+$/.test(part) ? { sub: part } : part));
 }
+
+/** O₂⁺ from "O2+". */
+export const formatIon = (ion: string): RichText => [...formatGas(ion.replace(/\+$/, "")), { sup: "+" }];
 
 const durations: readonly [number, string][] = [
   [1e9 * julianYear, "billion years"],

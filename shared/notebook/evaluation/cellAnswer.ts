@@ -14,6 +14,12 @@ export interface CellAnswer {
   strip?: Strip;
   /** Of an escape cell. */
   convention?: CellEvaluation["convention"];
+  /** Of a corona cell. */
+  corona?: CellEvaluation["corona"];
+  /** Of a nonthermal cell. */
+  ion?: string;
+  /** Of a loss cell. */
+  lightHistory?: CellEvaluation["lightHistory"];
   /** What the cells below may build on. */
   model?: CellModel;
   /** Entries that are names of the whole notebook; null where one has a fault. */

@@ -21,7 +21,7 @@ import type { TaskAnswer } from "../tasks";
 
 export interface EvaluatedCell extends Pick<
   CellEvaluation,
-  "result" | "understood" | "defaults" | "gases" | "strip" | "convention"
+  "result" | "understood" | "defaults" | "gases" | "strip" | "convention" | "corona" | "ion" | "lightHistory"
 > {
   /** What the cells below see of it. */
   above: CellAbove;
@@ -78,6 +78,9 @@ export function evaluateCell(
     gases: answer.gases ?? [],
     ...(answer.strip ? { strip: answer.strip } : {}),
     ...(answer.convention ? { convention: answer.convention } : {}),
+    ...(answer.corona ? { corona: answer.corona } : {}),
+    ...(answer.ion === undefined ? {} : { ion: answer.ion }),
+    ...(answer.lightHistory ? { lightHistory: answer.lightHistory } : {}),
     plan: answer.plan ?? null,
     taskAnswer: answer.taskAnswer ?? null,
     above: {

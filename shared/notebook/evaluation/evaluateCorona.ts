@@ -17,7 +17,7 @@ import { quantityKinds } from "../language/dimensions";
 import { formatPlainNumber, formatQuantity } from "../language/formatQuantity";
 import { readGasName } from "../language/readGasName";
 import { readLevels } from "../language/readLevels";
-import type { ResultRow } from "../result";
+import type { CoronaBeginning, ResultRow } from "../result";
 
 export function evaluateCorona(cell: OpenCell): CellAnswer {
   checkName(cell, cell.name);
@@ -40,8 +40,12 @@ export function evaluateCorona(cell: OpenCell): CellAnswer {
   return {
     gases: [gas],
     values,
-    tables: levels ? { levels: tabulate(cell, place, levels) } : {},
+    tables: {
+      ...(levels ? { levels: tabulate(cell, place, levels) } : {}),
+      lines_of_sight: linesOfSight(place),
+    },
     profiles: profilesOf(place),
+    corona: beginningOf(place.corona),
   };
 }
 
@@ -155,8 +159,40 @@ function tabulate(cell: OpenCell, place: CoronaPlace, levels: readonly number[])
 /** Levels of the profiles, evenly spaced in the potential: dense where the gas falls off fast. */
 const profileLevels = 161;
 
-function profilesOf({ corona, bodyRadius, exobaseAltitude }: CoronaPlace): Record<string, number[]> {
+/** Radius and altitude at a share of the way in the potential, from the exobase to the reach. */
+function placeAt({ corona, bodyRadius, exobaseAltitude }: CoronaPlace, share: number) {
   const { exobaseRadius, reach } = corona;
+  if (share === 0) return { radius: exobaseRadius, altitude: exobaseAltitude };
+  const inside = exobaseRadius / (1 - share * (1 - exobaseRadius / reach));
+  const radius = share === 1 ? reach : Math.min(inside, reach);
+  return { radius, altitude: radius - bodyRadius };
+}
+
+/** A column takes hundreds of densities; evenly spaced in the potential its logarithm runs almost straight. */
+const sightLines = 17;
+
+/** Columns along the limb and overhead, from the exobase to the reach. */
+function linesOfSight(place: CoronaPlace): ResultRow[] {
+  const { corona } = place;
+  return Array.from({ length: sightLines }, (_, i) => {
+    const { radius, altitude } = placeAt(place, i / (sightLines - 1));
+    return {
+      altitude,
+      limb_column: limbColumn(corona, radius).column,
+      overhead_column: overheadColumn(corona, radius).column,
+    };
+  });
+}
+
+function beginningOf({ satelliteFraction, exobaseEscapeParameter }: Corona): CoronaBeginning {
+  return {
+    satellites: satelliteFraction,
+    escapeParameter: exobaseEscapeParameter,
+    share: coronaShareAtExobase(exobaseEscapeParameter),
+  };
+}
+
+function profilesOf(place: CoronaPlace): Record<string, number[]> {
   const profiles: Record<string, number[]> = {
     altitude: [],
     number_density: [],
@@ -165,11 +201,9 @@ function profilesOf({ corona, bodyRadius, exobaseAltitude }: CoronaPlace): Recor
     escaping: [],
   };
   for (let i = 0; i < profileLevels; i += 1) {
-    const share = i / (profileLevels - 1);
-    const inside = exobaseRadius / (1 - share * (1 - exobaseRadius / reach));
-    const radius = i === 0 ? exobaseRadius : i === profileLevels - 1 ? reach : Math.min(inside, reach);
-    const density = coronaDensity(corona, radius);
-    profiles.altitude.push(i === 0 ? exobaseAltitude : radius - bodyRadius);
+    const { radius, altitude } = placeAt(place, i / (profileLevels - 1));
+    const density = coronaDensity(place.corona, radius);
+    profiles.altitude.push(altitude);
     profiles.number_density.push(powerOfTen(density.log10NumberDensity));
     profiles.ballistic.push(powerOfTen(density.log10Ballistic));
     profiles.satellite.push(density.log10Satellite === null ? 0 : powerOfTen(density.log10Satellite));

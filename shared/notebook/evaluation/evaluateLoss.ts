@@ -22,7 +22,7 @@ import { quantityKinds } from "../language/dimensions";
 import { formatQuantity } from "../language/formatQuantity";
 import { readGasName } from "../language/readGasName";
 import { readHistory } from "../language/readHistory";
-import type { CellResult, ResultRow } from "../result";
+import type { CellResult, LightHistory, ResultRow } from "../result";
 
 export function evaluateLoss(cell: OpenCell): CellAnswer {
   checkName(cell, cell.name);
@@ -42,6 +42,7 @@ export function evaluateLoss(cell: OpenCell): CellAnswer {
     gases: [gas.formula],
     values: lossValues(cell, body, gas, particles),
     tables: Number.isFinite(particles) && !cell.isDraw ? { history: historyOf(span, rate) } : {},
+    lightHistory: lightHistoryOf(span),
   };
 }
 
@@ -163,6 +164,12 @@ function lossValues(
     "Pa",
   );
   return values;
+}
+
+function lightHistoryOf({ begin, now, exponent, history }: LossSpan): LightHistory {
+  const isSaturated =
+    history.kind === "power" && history.exponent * exponent !== 0 && history.saturationAge > begin;
+  return { now, saturation: isSaturated ? history.saturationAge : null };
 }
 
 /** Rows of the history, in equal ratios of the age. */

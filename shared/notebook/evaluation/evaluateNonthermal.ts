@@ -47,7 +47,7 @@ export function evaluateNonthermal(cell: OpenCell): CellAnswer {
   const recombination = escape && recombining ? answerRecombination(cell, escape, recombining, profiles) : {};
   if (isAtomic) sayWithoutRecombination(cell, ion);
   const values = { ...recombination.values, ...pickupValues(cell, ion, flowSpeed, magneticField) };
-  return { values, tables: recombination.tables ?? {} };
+  return { values, tables: recombination.tables ?? {}, ion };
 }
 
 function readIonEntry(cell: OpenCell): string | undefined {
@@ -88,7 +88,7 @@ function answerRecombination(
     exobaseRadius: escape.exobase.radius,
   };
   const { channels } = escapingFragments(place);
-  const tables = { channels: channels.map(channelRow) };
+  const tables = { channels: channels.map(channelRow), fragments: channels.flatMap(fragmentRows) };
   sayWhatIsNeeded(cell, channels);
   sayWhereChannelsComeFrom(cell, ion);
   if (!profiles) return { tables };
@@ -107,9 +107,23 @@ function answerRecombination(
 }
 
 /** `escapes` counts the fragments of the two that can leave. */
-function channelRow({ fragments, energy, branching, escaping }: ChannelAnswer): ResultRow {
-  const products = fragments.map(({ formula, state }) => `${formula}(${state})`).join(" + ");
-  return { products, energy, branching, escapes: escaping };
+function channelRow(channel: ChannelAnswer): ResultRow {
+  const { energy, branching, escaping } = channel;
+  return { products: productsOf(channel), energy, branching, escapes: escaping };
+}
+
+const fragmentName = ({ formula, state }: ChannelAnswer["fragments"][number]) => `${formula}(${state})`;
+
+const productsOf = ({ fragments }: ChannelAnswer): string => fragments.map(fragmentName).join(" + ");
+
+/** What each of the two gets, and what it needs to leave. */
+function fragmentRows(channel: ChannelAnswer): ResultRow[] {
+  return channel.fragments.map((fragment) => ({
+    products: productsOf(channel),
+    fragment: fragmentName(fragment),
+    energy: fragment.energy,
+    escape_energy: fragment.escapeEnergy,
+  }));
 }
 
 const electronvolts = (energy: number): string =>

@@ -1,5 +1,6 @@
 import type { HeadlineItem } from "../../../shared/notebook/summary";
 import { formatGas, formatQuantity, resultScale } from "../../lib/format";
+import { formatSpread, scaleSpread } from "../../lib/formatSpread";
 import { gasStyle } from "../../lib/gasStyle";
 import { Rich } from "../../lib/Rich";
 
@@ -24,10 +25,31 @@ export function HeadlineValue({ item }: { item: HeadlineItem }) {
 
 function HeadlineNumber({ item, value }: { item: HeadlineItem; value: number | null }) {
   if (value === null && item.log10 === null) return <span className="text-ink3">—</span>;
+  const scale = resultScale(item.name, item.unit, "SI", value ?? 0);
   const { number, unit } = formatQuantity({ value, log10: item.log10, unit: item.unit }, "SI", {
     digits: 2,
-    scale: resultScale(item.name, item.unit, "SI", value ?? 0),
+    scale,
   });
+  const spread =
+    item.spread && value !== null
+      ? formatSpread(value * scale.factor, scaleSpread(item.spread, scale.factor))
+      : null;
+  if (spread)
+    return (
+      <span title={`68 % by ${item.spread!.cell}${item.spread!.isPartial ? ", stopped early" : ""}`}>
+        <span className="whitespace-nowrap">
+          <Rich text={spread.isShort ? spread.whole : number} />{" "}
+          <small className="text-[14px] text-ink2">
+            <Rich text={unit} />
+          </small>
+        </span>
+        {!spread.isShort && (
+          <small className="block text-[12.5px]/[17px] text-ink2">
+            <Rich text={spread.alone} />
+          </small>
+        )}
+      </span>
+    );
   return (
     <span className="whitespace-nowrap">
       <Rich text={number} />{" "}

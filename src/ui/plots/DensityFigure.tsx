@@ -1,9 +1,18 @@
 import { useMemo } from "react";
-import type { Strip } from "../../../shared/notebook/summary";
-import { formatFixed, formatKilometres, formatQuantity, quantityText, unitSpace } from "../../lib/format";
+import { coronaDensityAt, type ColumnCorona } from "../../lib/columnCorona";
+import {
+  formatFixed,
+  formatGas,
+  formatKilometres,
+  formatNumber,
+  formatPercent,
+  formatQuantity,
+  quantityText,
+  unitSpace,
+} from "../../lib/format";
 import { gasStyles } from "../../lib/gasStyle";
 import { Rich } from "../../lib/Rich";
-import { densityCurves, interpolateProfile } from "./columnCurves";
+import { densityCurves, interpolateProfile, type Profiles } from "./columnCurves";
 import { densityLabel, densityPlot } from "./densityPlot";
 import type { CsvColumn } from "./figureCsv";
 import { FigureFrame } from "./FigureFrame";
@@ -15,19 +24,59 @@ import { FigureTable } from "./FigureTable";
 import { PlotlyFigure } from "./PlotlyFigure";
 import { useColumnFigure } from "./useColumnFigure";
 
-function OwnCaption({ strip }: { strip: Strip }) {
+const noCoronae: readonly ColumnCorona[] = [];
+
+/** Which gas goes on as a corona, by how much it steps down, and why it may begin elsewhere than its curve ends. */
+function CoronaSentence({ corona, profiles }: { corona: ColumnCorona; profiles: Profiles }) {
+  const { gas, cell, escape, isCoupled, share, densityBelow } = corona;
+  const column = profiles[`${gas}.number_density`];
+  const closed = column && interpolateProfile(profiles.altitude!, column, corona.altitude[0]!, true);
+  const begins = closed ? densityBelow / closed : 1;
+  return (
+    <>
+      {" "}
+      <Rich text={formatGas(gas)} /> goes on as its corona <i>{cell}</i>, dashed; its step at the exobase,
+      down by <Rich text={formatPercent(1 - share)} />, is drawn to scale between two short bars.
+      {isCoupled && Math.abs(begins - 1) > 0.01 && (
+        <>
+          {" "}
+          It begins at <Rich text={formatNumber(begins, 2)} /> of the density of this column there, since{" "}
+          <i>{escape}</i> reckons with its flux.
+        </>
+      )}
+    </>
+  );
+}
+
+function OwnCaption({
+  strip,
+  profiles,
+  coronae,
+}: Required<Pick<ColumnFigureProps, "strip" | "profiles" | "coronae">>) {
+  const present = coronae.filter(({ gas }) => strip.gases.includes(gas));
   return (
     <>
       Number density of each gas in <i>{strip.column}</i>, and the temperature it rests on.
       {strip.lower !== null && " Lines across part as the Knudsen number goes from 0.1 to 10."}
       {strip.homopauses.length > 0 && " Ticks at left inside mark homopauses."}
-      {strip.exobase !== null && " Above the exobase the gases go on hydrostatically."}
+      {strip.exobase !== null &&
+        ` Above the exobase the ${present.length > 0 ? "other " : ""}gases go on hydrostatically.`}
+      {present.map((corona) => (
+        <CoronaSentence key={corona.gas} corona={corona} profiles={profiles} />
+      ))}
     </>
   );
 }
 
 /** Number density of each gas against altitude, with the temperature beside it where there is room. */
-export function DensityFigure({ profiles, strip, unitSystem, number, caption }: ColumnFigureProps) {
+export function DensityFigure({
+  profiles,
+  strip,
+  coronae = noCoronae,
+  unitSystem,
+  number,
+  caption,
+}: ColumnFigureProps) {
   const styles = gasStyles(strip.gases);
   const inkSources = useMemo(
     () => ({ ...inkValues, ...Object.fromEntries([...styles].map(([gas, style]) => [gas, style.colour])) }),
@@ -35,7 +84,10 @@ export function DensityFigure({ profiles, strip, unitSystem, number, caption }: 
   );
   const figure = useColumnFigure(strip, "two panels", inkSources);
   const { ref, inks, room, altitudes, away, zoom, setZoom, hidden, toggle } = figure;
-  const curves = useMemo(() => densityCurves(profiles, strip, unitSystem), [profiles, strip, unitSystem]);
+  const curves = useMemo(
+    () => densityCurves(profiles, strip, unitSystem, coronae),
+    [profiles, strip, unitSystem, coronae],
+  );
   const input = useMemo(
     () => ({ profiles, strip, unitSystem, curves, styles, room, inks, hidden, zoom }),
     [profiles, strip, unitSystem, curves, styles, room, inks, hidden, zoom],
@@ -45,7 +97,10 @@ export function DensityFigure({ profiles, strip, unitSystem, number, caption }: 
   const densityAt = (gas: string, altitude: number) => {
     const column = profiles[`${gas}.number_density`];
     if (!column) return null;
-    const value = interpolateProfile(profiles.altitude!, column, altitude, true);
+    const corona = coronae.find((each) => each.gas === gas);
+    const value =
+      (corona && coronaDensityAt(corona, altitude)) ??
+      interpolateProfile(profiles.altitude!, column, altitude, true);
     return formatQuantity({ value, unit: "m^-3" }, unitSystem, { digits: 2 });
   };
   const temperatureAt = (altitude: number) =>
@@ -81,13 +136,25 @@ export function DensityFigure({ profiles, strip, unitSystem, number, caption }: 
       return values ? [{ head: `${gas}.number_density (m^-3)`, values }] : [];
     }),
   ];
+  const drawnColumns = () =>
+    columns().map(({ head, values }) => {
+      const corona = coronae.find(({ gas }) => head.startsWith(`${gas}.number_density `));
+      if (!corona) return { head, values };
+      const drawn = values.map((value, row) => coronaDensityAt(corona, profiles.altitude![row]!) ?? value);
+      return { head, values: drawn };
+    });
+  const coronaColumns = (): CsvColumn[] =>
+    coronae.flatMap(({ cell, gas, altitude, numberDensity }) => [
+      { head: `${cell}.altitude (m)`, values: altitude },
+      { head: `${cell}.${gas}.number_density (m^-3)`, values: numberDensity },
+    ]);
   return (
     <FigureFrame
       number={number}
-      caption={caption ?? <OwnCaption strip={strip} />}
+      caption={caption ?? <OwnCaption strip={strip} profiles={profiles} coronae={coronae} />}
       fileName={`${strip.column}-number-density`}
       drawing={() => densityPlot({ ...input, ...away() })}
-      columns={columns}
+      columns={() => [...columns(), ...coronaColumns()]}
     >
       <div ref={ref}>
         <FigureReader
@@ -117,7 +184,7 @@ export function DensityFigure({ profiles, strip, unitSystem, number, caption }: 
         onToggle={toggle}
         unnamed={plot.unnamed}
       />
-      <FigureTable label={densityLabel(strip, styles)} columns={columns()} unitSystem={unitSystem} />
+      <FigureTable label={densityLabel(strip, styles)} columns={drawnColumns()} unitSystem={unitSystem} />
     </FigureFrame>
   );
 }

@@ -9,6 +9,8 @@ interface FigureReaderProps {
   room: FigureRoom;
   /** km drawn */
   altitudes: readonly [number, number];
+  /** The altitude runs in decades. */
+  isLog?: boolean;
   /** m at which reading begins by key */
   start: number;
   /** Name for those who listen: "Altitude read in figure 1". */
@@ -22,25 +24,28 @@ interface FigureReaderProps {
 export function FigureReader({
   room,
   altitudes,
+  isLog = false,
   start,
   label,
   rows,
   spoken,
   children,
 }: PropsWithChildren<FigureReaderProps>) {
-  const [from, to] = [altitudes[0] * 1000, altitudes[1] * 1000];
+  const place = (altitude: number) => (isLog ? Math.log10(altitude) : altitude);
+  const [from, to] = [place(altitudes[0] * 1000), place(altitudes[1] * 1000)];
   const scale = stripScale(from, to, room.tall);
-  const { reading, handlers } = useAltitudeReading({
+  const { reading: placeRead, handlers } = useAltitudeReading({
     scale,
     from,
     to,
     direction: "standing",
-    start: Math.min(to, Math.max(from, start)),
+    start: Math.min(to, Math.max(from, place(start))),
     inset: room.bottom,
   });
+  const reading = placeRead !== null && isLog ? 10 ** placeRead : placeRead;
   const { onPointerMove, onPointerDown, onPointerLeave, ...keys } = handlers;
   const pointer: HTMLAttributes<HTMLDivElement> = { onPointerMove, onPointerDown, onPointerLeave };
-  const y = reading === null ? 0 : room.top + room.tall - scale.along(reading);
+  const y = placeRead === null ? 0 : room.top + room.tall - scale.along(placeRead);
   return (
     <div className="figure-stage" style={{ height: room.height }} {...pointer}>
       {children}

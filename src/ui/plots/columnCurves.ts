@@ -1,4 +1,5 @@
 import type { Strip } from "../../../shared/notebook/summary";
+import { coronaDensityAt, type ColumnCorona } from "../../lib/columnCorona";
 import { displayScale, type UnitSystem } from "../../lib/format";
 
 /** One gas against altitude: x in the unit shown, y in km, split where the gas stops being a fluid. */
@@ -6,6 +7,8 @@ export interface GasCurve {
   gas: string;
   below: { x: number[]; y: number[] };
   above: { x: number[]; y: number[] };
+  /** Where a corona sets in: its density just below the exobase and just above, in the unit shown, at km. */
+  step?: { from: number; to: number; km: number };
 }
 
 export type Profiles = Readonly<Record<string, readonly number[]>>;
@@ -54,29 +57,49 @@ export function altitudeOfKnudsen(profiles: Profiles, log10Knudsen: number): num
 
 export const densityUnit = (unitSystem: UnitSystem) => displayScale("m^-3", unitSystem, 1);
 
+/** The gas's way above the exobase as its corona has it. */
+function coronaCurve(corona: ColumnCorona, top: number, factor: number): GasCurve["above"] {
+  const drawn = corona.altitude.filter((z) => z < top);
+  const altitudes = drawn.length < corona.altitude.length ? [...drawn, top] : drawn;
+  return {
+    x: altitudes.map((z) => coronaDensityAt(corona, z)! * factor),
+    y: altitudes.map((z) => z / 1000),
+  };
+}
+
 /** Curves of number density, one a gas. */
-export function densityCurves(profiles: Profiles, strip: Strip, unitSystem: UnitSystem): GasCurve[] {
+export function densityCurves(
+  profiles: Profiles,
+  strip: Strip,
+  unitSystem: UnitSystem,
+  coronae: readonly ColumnCorona[] = [],
+): GasCurve[] {
   const altitude = profiles.altitude ?? [];
   const rows = drawnRows(profiles, strip);
   const { factor } = densityUnit(unitSystem);
-  const part = strip.exobase ?? Infinity;
   return strip.gases.flatMap((gas) => {
     const column = profiles[`${gas}.number_density`];
     if (!column) return [];
+    const corona = coronae.find((each) => each.gas === gas && each.altitude[0]! < strip.top);
+    const parting = corona ? corona.altitude[0]! : strip.exobase;
+    const part = parting ?? Infinity;
     const curve: GasCurve = { gas, below: { x: [], y: [] }, above: { x: [], y: [] } };
     for (const row of rows) {
       const side = altitude[row]! < part ? curve.below : curve.above;
       side.x.push(column[row]! * factor);
       side.y.push(altitude[row]! / 1000);
     }
-    if (strip.exobase !== null) {
-      const meeting = interpolateProfile(altitude, column, strip.exobase, true) * factor;
+    if (parting !== null) {
+      const meeting = interpolateProfile(altitude, column, parting, true) * factor;
       curve.below.x.push(meeting);
-      curve.below.y.push(strip.exobase / 1000);
+      curve.below.y.push(parting / 1000);
       curve.above.x.unshift(meeting);
-      curve.above.y.unshift(strip.exobase / 1000);
+      curve.above.y.unshift(parting / 1000);
     }
-    return [curve];
+    if (!corona) return [curve];
+    const from = corona.densityBelow * factor;
+    const step = { from, to: from * corona.share, km: part / 1000 };
+    return [{ ...curve, above: coronaCurve(corona, strip.top, factor), step }];
   });
 }
 

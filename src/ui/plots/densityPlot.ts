@@ -43,9 +43,14 @@ export interface DensityPlot {
   unnamed: string[];
 }
 
+/** Curves above the exobase: thinner than below; a corona in dashes of its own. */
+const hydrostatic = { opacity: 0.75, thinned: 0.72, dash: null };
+const ofCorona = { opacity: 0.86, thinned: 0.86, dash: "6 4.5" };
+
 function gasTraces({ curves, styles, inks, hidden }: DensityPlotInput): Data[] {
-  return curves.flatMap(({ gas, below, above }) => {
+  return curves.flatMap(({ gas, below, above, step }) => {
     const { dash, width } = styles.get(gas)!;
+    const look = step ? ofCorona : hydrostatic;
     const trace = (part: typeof below, isAbove: boolean): Data => ({
       type: "scatter",
       mode: "lines",
@@ -53,8 +58,12 @@ function gasTraces({ curves, styles, inks, hidden }: DensityPlotInput): Data[] {
       x: part.x,
       y: part.y,
       visible: !hidden.has(gas),
-      opacity: isAbove ? 0.75 : 1,
-      line: { color: inks[gas]!, width: isAbove ? width * 0.72 : width, dash: dashList(dash) },
+      opacity: isAbove ? look.opacity : 1,
+      line: {
+        color: inks[gas]!,
+        width: isAbove ? width * look.thinned : width,
+        dash: dashList(isAbove ? (look.dash ?? dash) : dash),
+      },
       hoverinfo: "skip",
     });
     return above.x.length > 1 ? [trace(below, false), trace(above, true)] : [trace(below, false)];
@@ -116,6 +125,20 @@ function homopauseTicks({ strip, inks }: DensityPlotInput): Partial<Shape>[] {
       y1: altitude / 1000,
       line: { color: inks[gas]!, width: 2 },
     }));
+}
+
+/** The step from column to corona, drawn to scale between two short bars, one down and one up. */
+function coronaSteps({ curves, inks, hidden }: DensityPlotInput): Partial<Shape>[] {
+  return curves.flatMap(({ gas, step }): Partial<Shape>[] => {
+    if (!step || hidden.has(gas)) return [];
+    const line = { color: inks[gas]!, width: 1.6 };
+    const bar = (x: number, y1: number): Partial<Shape> => ({
+      ...{ type: "line", xref: "x", yref: "y", x0: x, x1: x, line },
+      ...{ ysizemode: "pixel", yanchor: step.km, y0: 0, y1 },
+    });
+    const across = { ...bar(step.from, 0), x1: step.to };
+    return [bar(step.from, -4.5), across, bar(step.to, 4.5)];
+  });
 }
 
 /** Names at their places, those that found one, in the order of the curves. */
@@ -209,7 +232,12 @@ export function densityPlot(input: DensityPlotInput): DensityPlot {
       },
       yaxis: { ...axis(inks, "altitude, km"), ...altitudeAxis(inks, room, altitudes), anchor: "x" },
       ...(room.second > 0 && temperaturePanel(input, altitudes, temperatureEnds(input))),
-      shapes: [...knudsenBand(profiles, panels, inks.ink!, 0.3), ...exobaseLines, ...homopauseTicks(input)],
+      shapes: [
+        ...knudsenBand(profiles, panels, inks.ink!, 0.3),
+        ...exobaseLines,
+        ...homopauseTicks(input),
+        ...coronaSteps(input),
+      ],
       annotations: [...gasNames(input, curves, places, scale), ...lettering.notes],
     },
     named,

@@ -1,5 +1,6 @@
 import type { ReactNode } from "react";
 import type { Strip } from "../../../shared/notebook/summary";
+import type { ColumnCorona } from "../../lib/columnCorona";
 import type { UnitSystem } from "../../lib/format";
 
 /** What every figure of a column needs. */
@@ -8,6 +9,8 @@ export interface ColumnFigureProps {
   profiles: Readonly<Record<string, readonly number[]>>;
   /** The same column's strip: exobase, homopauses and the altitudes worth drawing. */
   strip: Strip;
+  /** Coronae that rest on the column. */
+  coronae?: readonly ColumnCorona[];
   unitSystem: UnitSystem;
   /** Number of the figure in the notebook, from 1. */
   number: number;

@@ -51,9 +51,11 @@ interface Line {
 /** The path of one curve on the axes of `layout`, as the figure library draws it within its panel. */
 export function curvePath({ x, y, xaxis = "x", yaxis = "y" }: Line, layout: Partial<Layout>): string {
   const { l = 0, r = 0, t = 0, b = 0 } = layout.margin ?? {};
-  const tall = layout.height! - t - b;
+  const { domain: [low = 0, high = 1] = [0, 1] } = layout[yaxis.replace("y", "yaxis") as "yaxis"]!;
+  const whole = layout.height! - t - b;
+  const tall = (high - low) * whole;
   const across = alongAxis(layout, xaxis.replace("x", "xaxis"), layout.width! - l - r);
-  const up = alongAxis(layout, yaxis.replace("y", "yaxis"), tall);
+  const up = alongAxis(layout, yaxis.replace("y", "yaxis"), whole);
   let path = "";
   for (let i = 0; i < x.length; i++) {
     path += `${i === 0 ? "M" : "L"}${across(x[i]!).toFixed(2)},${(tall - up(y[i]!)).toFixed(2)}`;

@@ -7,7 +7,11 @@ import type { Box } from "./placeNames";
 import type { FigureInks } from "./useFigureInks";
 
 /** From altitudes and decades to px of the main panel. */
-export function panelScale(room: FigureRoom, decades: [number, number], altitudes: [number, number]) {
+export function panelScale(
+  room: Pick<FigureRoom, "panel" | "tall">,
+  decades: [number, number],
+  altitudes: [number, number],
+) {
   return {
     x: (log10: number) => ((log10 - decades[0]) / (decades[1] - decades[0])) * room.panel,
     y: (km: number) => room.tall - ((km - altitudes[0]) / (altitudes[1] - altitudes[0])) * room.tall,

@@ -33,7 +33,7 @@ const airBelow = (top: number): string =>
   ).join("");
 
 /** A column drawn to scale, standing: it fills the height of its box, and is 252 px wide. */
-export function AltitudeStrip({ strip, unitSystem }: AltitudeStripProps) {
+export function AltitudeStrip({ strip, exobaseSpread = null, unitSystem }: AltitudeStripProps) {
   const { ref, size } = useElementSize<HTMLDivElement>({ width, height: 800 });
   const height = size.height;
   const id = useId();
@@ -59,7 +59,13 @@ export function AltitudeStrip({ strip, unitSystem }: AltitudeStripProps) {
 
   return (
     <div ref={ref} className="strip-standing">
-      <svg className="strip-svg" width={width} height={height} role="img" aria-label={stripLabel(strip)}>
+      <svg
+        className="strip-svg"
+        width={width}
+        height={height}
+        role="img"
+        aria-label={stripLabel(strip, exobaseSpread)}
+      >
         <StripBand strip={strip} scale={scale} breadth={edge} direction="standing" closest={5} dot={1.44} />
         <path className="strip-below" d={airBelow(y(strip.base))} />
         {exobaseY !== null && (
@@ -104,7 +110,13 @@ export function AltitudeStrip({ strip, unitSystem }: AltitudeStripProps) {
               {formatKilometres(altitude)}
             </text>
           ))}
-        <StripMarks labels={labels} gases={strip.gases} height={height} edge={edge} />
+        <StripMarks
+          labels={labels}
+          gases={strip.gases}
+          exobaseSpread={exobaseSpread}
+          height={height}
+          edge={edge}
+        />
         <text className="strip-name" x={edge + 56} y="20">
           {strip.column}
         </text>
@@ -134,7 +146,7 @@ export function AltitudeStrip({ strip, unitSystem }: AltitudeStripProps) {
           style={{ left: edge + 14, top: readY }}
         />
       )}
-      <StripWords strip={strip} />
+      <StripWords strip={strip} exobaseSpread={exobaseSpread} />
     </div>
   );
 }

@@ -83,7 +83,7 @@ export function HalvedStrip({ older, newer, heads }: HalvedStripProps) {
               )}
             </g>
           ))}
-        <StripMarks labels={labels} gases={newer.gases} height={height} edge={edge} />
+        <StripMarks labels={labels} gases={newer.gases} exobaseSpread={null} height={height} edge={edge} />
         {olderY !== null && (
           <>
             <path

@@ -8,7 +8,7 @@ import type { AltitudeStripProps } from "./stripProps";
 import { StripReader } from "./StripReader";
 import { StripReadOut } from "./StripReadOut";
 import { stripScale, stripTicks } from "./stripScale";
-import { readStrip, stripLabel } from "./stripSentences";
+import { exobaseText, readStrip, stripLabel } from "./stripSentences";
 import { StripWords } from "./StripWords";
 import { useAltitudeReading } from "./useAltitudeReading";
 
@@ -17,7 +17,7 @@ const height = 68;
 const plateWidth = 138;
 
 /** The strip lying down for narrow pages: altitude to the right, drawn at the real width of its box. */
-export function LyingStrip({ strip, unitSystem }: AltitudeStripProps) {
+export function LyingStrip({ strip, exobaseSpread = null, unitSystem }: AltitudeStripProps) {
   const { ref, size } = useElementSize<HTMLDivElement>({ width: 390, height });
   const width = size.width;
   const scale = useMemo(() => stripScale(strip.base, strip.top, width), [strip, width]);
@@ -32,11 +32,17 @@ export function LyingStrip({ strip, unitSystem }: AltitudeStripProps) {
   });
   const read = readStrip(strip, reading ?? strip.exobase ?? strip.base, unitSystem);
   const exobaseX = strip.exobase === null ? null : x(strip.exobase);
-  const isLabelLeft = exobaseX !== null && exobaseX > width - 120;
+  const isLabelLeft = exobaseX !== null && exobaseX > width - (exobaseSpread ? 150 : 120);
 
   return (
     <div ref={ref} className="strip-lying">
-      <svg className="strip-svg" width={width} height={height} role="img" aria-label={stripLabel(strip)}>
+      <svg
+        className="strip-svg"
+        width={width}
+        height={height}
+        role="img"
+        aria-label={stripLabel(strip, exobaseSpread)}
+      >
         <StripBand strip={strip} scale={scale} breadth={breadth} direction="lying" closest={4.4} dot={1.5} />
         {ticks.map(({ altitude, isMajor }) => (
           <path
@@ -82,7 +88,7 @@ export function LyingStrip({ strip, unitSystem }: AltitudeStripProps) {
               y="13"
               textAnchor={isLabelLeft ? "end" : "start"}
             >
-              exobase {formatKilometres(strip.exobase!)} km
+              exobase {exobaseText(strip.exobase!, exobaseSpread)}
             </text>
           </>
         )}
@@ -111,7 +117,7 @@ export function LyingStrip({ strip, unitSystem }: AltitudeStripProps) {
           }}
         />
       )}
-      <StripWords strip={strip} />
+      <StripWords strip={strip} exobaseSpread={exobaseSpread} />
     </div>
   );
 }

@@ -2,11 +2,14 @@ import type { CSSProperties } from "react";
 import { formatGas, formatKilometres } from "../../lib/format";
 import { gasStyle } from "../../lib/gasStyle";
 import { RichTspans } from "../../lib/Rich";
+import type { NumberSpread } from "../../lib/formatSpread";
 import type { StripLabel } from "./stripLabels";
+import { exobaseText } from "./stripSentences";
 
 interface StripMarksProps {
   labels: readonly StripLabel[];
   gases: readonly string[];
+  exobaseSpread: NumberSpread | null;
   height: number;
   /** Right edge of the band, px. */
   edge: number;
@@ -23,7 +26,12 @@ const movingPath = (d: string): { d: string; style: CSSProperties } => ({
   style: { d: `path("${d}")` } as CSSProperties,
 });
 
-function Leader({ label, gases, height, edge }: { label: StripLabel } & Omit<StripMarksProps, "labels">) {
+function Leader({
+  label,
+  gases,
+  height,
+  edge,
+}: { label: StripLabel } & Omit<StripMarksProps, "labels" | "exobaseSpread">) {
   const mark = height - label.mark;
   const stand = height - label.label;
   switch (label.kind) {
@@ -44,7 +52,11 @@ function Leader({ label, gases, height, edge }: { label: StripLabel } & Omit<Str
   }
 }
 
-function LabelText({ label, gases }: { label: StripLabel; gases: readonly string[] }) {
+function LabelText({
+  label,
+  gases,
+  exobaseSpread,
+}: { label: StripLabel } & Pick<StripMarksProps, "gases" | "exobaseSpread">) {
   switch (label.kind) {
     case "caption":
       return (
@@ -74,7 +86,7 @@ function LabelText({ label, gases }: { label: StripLabel; gases: readonly string
             exobase
           </text>
           <text y="10" className="strip-label">
-            {formatKilometres(label.altitude)} km
+            {exobaseText(label.altitude, exobaseSpread)}
           </text>
         </>
       );
@@ -94,7 +106,7 @@ function LabelText({ label, gases }: { label: StripLabel; gases: readonly string
 }
 
 /** Base, homopauses, Knudsen band and exobase, each with its leader and its label. */
-export function StripMarks({ labels, gases, height, edge }: StripMarksProps) {
+export function StripMarks({ labels, gases, exobaseSpread, height, edge }: StripMarksProps) {
   const key = ({ kind, gas }: StripLabel) => `${kind}${gas ?? ""}`;
   return (
     <g>
@@ -107,7 +119,7 @@ export function StripMarks({ labels, gases, height, edge }: StripMarksProps) {
           className="strip-moves"
           style={{ transform: `translate(${edge + 56}px, ${(height - label.label).toFixed(1)}px)` }}
         >
-          <LabelText label={label} gases={gases} />
+          <LabelText label={label} gases={gases} exobaseSpread={exobaseSpread} />
         </g>
       ))}
     </g>

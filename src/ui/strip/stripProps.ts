@@ -1,9 +1,12 @@
 import type { Strip } from "../../../shared/notebook/summary";
 import type { UnitSystem } from "../../lib/format";
+import type { NumberSpread } from "../../lib/formatSpread";
 
 /** The strip of one column, standing in a box whose height it fills, or lying in one whose width it fills. */
 export interface AltitudeStripProps {
   strip: Strip;
+  /** Where a spread watches the exobase: altitudes between which the middle 68 % of its draws lie, m. */
+  exobaseSpread?: NumberSpread | null;
   unitSystem: UnitSystem;
 }
 

@@ -9,19 +9,27 @@ import {
   unitSpace,
   type UnitSystem,
 } from "../../lib/format";
+import { formatSpread, type NumberSpread } from "../../lib/formatSpread";
 import { plainText } from "../../lib/richText";
 import { leadingGas, sampleStrip } from "./stripSample";
 
 const altitudeText = (metres: number): string => `${formatKilometres(metres)}${unitSpace}km`;
 
+/** "239 ± 26 km" where a spread watches it. */
+export function exobaseText(exobase: number, spread: NumberSpread | null = null): string {
+  if (spread === null) return altitudeText(exobase);
+  const { whole } = formatSpread(exobase / 1000, { lower: spread.lower / 1000, upper: spread.upper / 1000 });
+  return `${plainText(whole)}${unitSpace}km`;
+}
+
 /** The strip in one line, for those who do not see it. */
-export function stripLabel(strip: Strip): string {
-  const exobase = strip.exobase === null ? "no exobase" : `exobase at ${altitudeText(strip.exobase)}`;
+export function stripLabel(strip: Strip, spread: NumberSpread | null = null): string {
+  const exobase = strip.exobase === null ? "no exobase" : `exobase at ${exobaseText(strip.exobase, spread)}`;
   return `Altitude strip of ${strip.column}: base at ${altitudeText(strip.base)}, ${exobase}`;
 }
 
 /** Every mark of the strip as a sentence, from the base up. */
-export function stripSentences(strip: Strip): string[] {
+export function stripSentences(strip: Strip, spread: NumberSpread | null = null): string[] {
   const marks: [altitude: number, sentence: string][] = strip.homopauses.map(({ gas, altitude }) => [
     altitude,
     `${gas} parts from the mixture at its homopause, ${altitudeText(altitude)}.`,
@@ -32,7 +40,10 @@ export function stripSentences(strip: Strip): string[] {
   if (strip.exobase !== null) {
     const { temperature } = sampleStrip(strip, strip.exobase);
     const warmth = `${formatFixed(temperature)}${unitSpace}K`;
-    marks.push([strip.exobase, `The exobase is at ${altitudeText(strip.exobase)}, where it is ${warmth}.`]);
+    marks.push([
+      strip.exobase,
+      `The exobase is at ${exobaseText(strip.exobase, spread)}, where it is ${warmth}.`,
+    ]);
   }
   if (strip.upper !== null)
     marks.push([strip.upper, `The Knudsen number is 10 at ${altitudeText(strip.upper)}.`]);

@@ -1,5 +1,4 @@
 import type { CellResult } from "../../../shared/notebook/result";
-import { formatKilometres, formatFixed, formatQuantity, quantityRich, unitSpace } from "../../lib/format";
 import { gasStyle } from "../../lib/gasStyle";
 import { Rich } from "../../lib/Rich";
 import { plainText } from "../../lib/richText";
@@ -10,62 +9,30 @@ import {
   escapeAnswer,
   escapeColumns,
   escapeNumber,
+  escapeSpread,
   scaleUnit,
   shownColumns,
   type EscapeColumn,
 } from "./escapeColumns";
+import { EscapeCaption } from "./EscapeCaption";
 import { ExplainNumber } from "./ExplainNumber";
 import { noteTarget } from "./noteTarget";
+import { SpreadRemark } from "./SpreadRemark";
 import { TableFrame } from "./TableFrame";
 import { TableNotes } from "./TableNotes";
 import type { EscapeTableProps, LetteredNote } from "./tableProps";
 import { tableText } from "./tableText";
+import { ValueList } from "./ValueList";
 
 /** Under this width, px, gases become columns. */
 const narrow = 560;
 const mostColumns = 7;
 
-const regimes: Record<string, string> = {
-  jeans: "Jeans",
-  jeans_estimate: "Jeans, as an estimate",
-  transition: "between Jeans escape and a wind",
-  wind: "a wind",
-};
-
-/** "Thermal escape. Exobase at 239 km, where T = 411 K and v_esc = 7.94 km s⁻¹. Regime …" */
-function OwnCaption({ result, unitSystem }: Pick<EscapeTableProps, "result" | "unitSystem">) {
-  const number = (name: string) => {
-    const value = result.values[name]?.value;
-    return typeof value === "number" ? value : null;
-  };
-  const [altitude, temperature] = [number("exobase.altitude"), number("exobase.temperature")];
-  const [speed, bulk] = [number("exobase.escape_speed"), number("bulk_escape_parameter")];
-  const regime = result.values.regime?.value;
-  return (
-    <>
-      Thermal escape.
-      {altitude !== null && temperature !== null && speed !== null && (
-        <>
-          {" "}
-          Exobase at {formatKilometres(altitude)}
-          {unitSpace}km, where <i>T</i> = {formatFixed(temperature)}
-          {unitSpace}K and <i>v</i>
-          <sub>esc</sub> ={" "}
-          <Rich text={quantityRich(formatQuantity({ value: speed, unit: "m s^-1" }, unitSystem))} />.
-        </>
-      )}
-      {typeof regime === "string" && bulk !== null && (
-        <>
-          {" "}
-          Regime: {regimes[regime] ?? regime}; λ of the mean mass there is{" "}
-          {formatFixed(bulk, bulk < 10 ? 2 : 0)}.
-        </>
-      )}
-    </>
-  );
-}
+/** What is said of all gases together, under the table. */
+const sharedValues = ["energy_limited_mass_rate", "crossover_mass", "wind_mass_rate"];
 
 function fullText(result: CellResult, gases: readonly string[]): string {
+  if (shownColumns(result, gases, Infinity).length === 0) return sharedText(result);
   const keys = escapeColumns.map(({ key }) => key).flatMap((key) => [key, `log10_${key}`]);
   const present = [...keys, "mass_rate"].filter((key) => gases.some((gas) => result.values[`${gas}.${key}`]));
   const unitOf = (key: string) =>
@@ -75,6 +42,10 @@ function fullText(result: CellResult, gases: readonly string[]): string {
     ...gases.map((gas) => [gas, ...present.map((key) => result.values[`${gas}.${key}`]?.value ?? null)]),
   ]);
 }
+
+/** Without an exobase there is nothing to say of each gas. */
+const sharedText = ({ values }: CellResult): string =>
+  tableText(Object.entries(values).map(([name, { value, unit = "1" }]) => [name, value, unit]));
 
 /** A letter that leads to its note under the table. */
 function Letters({ notes }: { notes: readonly LetteredNote[] }) {
@@ -89,6 +60,7 @@ function Letters({ notes }: { notes: readonly LetteredNote[] }) {
 export function EscapeTable({
   result,
   gases,
+  convention,
   columnGases,
   unitSystem,
   number,
@@ -119,16 +91,25 @@ export function EscapeTable({
     const answer = escapeAnswer(result, gas, key);
     const full = answer === null ? undefined : `${answer.value ?? `10^${answer.log10}`} ${answer.unit}`;
     const text = escapeNumber(answer, key, scales.get(key)!, isTurned ? 2 : 3);
+    const spread = answer && escapeSpread(answer, key, scales.get(key)!);
     return (
       <td key={`${gas}${key}`} title={full?.replace(/ 1$/, "")}>
         {answer === null ? (
           <Rich text={text} />
         ) : (
-          <ExplainNumber place={{ cell: result.name, name: `${gas}.${key}` }} spoken={plainText(text)}>
+          <ExplainNumber
+            place={{ cell: result.name, name: `${gas}.${key}` }}
+            spoken={plainText(spread ? [...text, " ", ...spread] : text)}
+          >
             <Rich text={text} />
           </ExplainNumber>
         )}
         <Letters notes={at(gas, key)} />
+        {spread && (
+          <small className="table-spread">
+            <Rich text={spread} />
+          </small>
+        )}
       </td>
     );
   };
@@ -138,11 +119,23 @@ export function EscapeTable({
     <div ref={ref}>
       <TableFrame
         number={number}
-        caption={caption ?? <OwnCaption result={result} unitSystem={unitSystem} />}
+        caption={caption ?? <EscapeCaption result={result} convention={convention} unitSystem={unitSystem} />}
         text={() => fullText(result, gases)}
-        notes={<TableNotes notes={free} onRemedy={onRemedy} />}
+        notes={
+          <>
+            <SpreadRemark
+              values={result.values}
+              names={[
+                "exobase.altitude",
+                ...columns.flatMap(({ key }) => gases.map((gas) => `${gas}.${key}`)),
+              ]}
+            />
+            <ValueList result={result} unitSystem={unitSystem} names={sharedValues} isQuiet />
+            <TableNotes notes={free} onRemedy={onRemedy} />
+          </>
+        }
       >
-        {isTurned ? (
+        {columns.length === 0 ? null : isTurned ? (
           <table className="table" data-turned>
             <thead>
               <tr>

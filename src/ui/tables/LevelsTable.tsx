@@ -2,17 +2,11 @@ import type { ResultRow } from "../../../shared/notebook/result";
 import { displayScale, formatKilometres, formatNumber, formatUnit, type UnitSystem } from "../../lib/format";
 import { gasStyle } from "../../lib/gasStyle";
 import { Rich } from "../../lib/Rich";
-import { plainText, type RichText } from "../../lib/richText";
+import { plainText } from "../../lib/richText";
 import { ExplainNumber } from "./ExplainNumber";
 import { TableFrame } from "./TableFrame";
-import type { LevelsTableProps } from "./tableProps";
+import type { LevelColumn, LevelsTableProps } from "./tableProps";
 import { tableText } from "./tableText";
-
-interface LevelColumn {
-  key: string;
-  head: RichText;
-  unit: string;
-}
 
 const bulkColumns: readonly LevelColumn[] = [
   { key: "temperature", head: [{ italic: "T" }], unit: "K" },
@@ -36,6 +30,12 @@ const units: Readonly<Record<string, string>> = {
   mean_free_path: "m",
   knudsen: "1",
   mole_fraction: "1",
+  radius: "m",
+  ballistic: "m^-3",
+  satellite: "m^-3",
+  escaping: "m^-3",
+  limb_column: "m^-2",
+  overhead_column: "m^-2",
 };
 
 const unitOf = (key: string): string => units[key.split(".").at(-1)!] ?? "1";
@@ -56,7 +56,14 @@ function scaleOf(rows: readonly ResultRow[], { key, unit }: LevelColumn, unitSys
 }
 
 /** The column at the altitudes asked for, the highest on top as altitude has it; then densities of each gas. */
-export function LevelsTable({ result, gases, unitSystem, number, caption }: LevelsTableProps) {
+export function LevelsTable({
+  result,
+  gases,
+  columns: own = bulkColumns,
+  unitSystem,
+  number,
+  caption,
+}: LevelsTableProps) {
   const rows = [...(result.tables.levels ?? [])].sort(
     (a, b) => (numberOf(b.altitude) ?? 0) - (numberOf(a.altitude) ?? 0),
   );
@@ -65,7 +72,7 @@ export function LevelsTable({ result, gases, unitSystem, number, caption }: Leve
     const { name } = gasStyle(gas, gases);
     return { key: `${gas}.number_density`, head: [{ italic: "n" }, " ", ...name], unit: "m^-3" };
   });
-  const columns = [...bulkColumns, ...gasColumns].filter(({ key }) => rows.some((row) => key in row));
+  const columns = [...own, ...gasColumns].filter(({ key }) => rows.some((row) => key in row));
   const scales = new Map(columns.map((column) => [column.key, scaleOf(rows, column, unitSystem)]));
   return (
     <TableFrame

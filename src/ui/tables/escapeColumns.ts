@@ -6,9 +6,12 @@ import {
   formatPercent,
   formatPower,
   formatUnit,
+  smallestWritten,
+  thinSpace,
   type DisplayScale,
   type UnitSystem,
 } from "../../lib/format";
+import { formatSpread, numberSpread, scaleSpread, type NumberSpread } from "../../lib/formatSpread";
 import type { RichText } from "../../lib/richText";
 
 export interface EscapeColumn {
@@ -38,13 +41,19 @@ export interface EscapeAnswer {
   value: number | null;
   log10: number | null;
   unit: string;
+  spread: NumberSpread | null;
 }
 
 export function escapeAnswer(result: CellResult, gas: string, key: string): EscapeAnswer | null {
   const answer = result.values[`${gas}.${key}`];
   if (!answer || typeof answer.value === "string") return null;
   const twin = result.values[`${gas}.log10_${key}`]?.value;
-  return { value: answer.value, log10: typeof twin === "number" ? twin : null, unit: answer.unit ?? "1" };
+  return {
+    value: answer.value,
+    log10: typeof twin === "number" ? twin : null,
+    unit: answer.unit ?? "1",
+    spread: numberSpread(answer.spread),
+  };
 }
 
 /** Columns that at least one gas has an answer for; no more than fit where the table stands across the page. */
@@ -89,4 +98,18 @@ export function escapeNumber(
     log10 === null ? null : log10 + Math.log10(scale.factor),
     digits,
   );
+}
+
+/** How far one number of the table may be off, to stand under it; null where no spread watches it. */
+export function escapeSpread(
+  { value, spread }: EscapeAnswer,
+  key: string,
+  { factor }: DisplayScale,
+): RichText | null {
+  if (value === null || spread === null) return null;
+  if (key === "supply_fraction")
+    return [...formatSpread(value * 100, scaleSpread(spread, 100)).alone, `${thinSpace}%`];
+  const [number, ends] = [value * factor, scaleSpread(spread, factor)];
+  if (Math.abs(number) >= smallestWritten) return formatSpread(number, ends).alone;
+  return [...formatMagnitude(ends.lower, null), " to ", ...formatMagnitude(ends.upper, null)];
 }

@@ -1,6 +1,7 @@
 import type { ReactNode } from "react";
-import type { CellResult, Note } from "../../../shared/notebook/result";
+import type { CellEvaluation, CellResult, Note } from "../../../shared/notebook/result";
 import type { UnitSystem } from "../../lib/format";
+import type { RichText } from "../../lib/richText";
 
 /** A note with the letter that marks its number, its line under the table and its line in the margin. */
 export interface LetteredNote {
@@ -14,6 +15,8 @@ export interface EscapeTableProps {
   result: CellResult;
   /** Its gases, in the order written. */
   gases: readonly string[];
+  /** What its numbers rest on. */
+  convention?: CellEvaluation["convention"];
   /** Gases of the column it rests on, so that colours and dashes agree with the figures. */
   columnGases?: readonly string[];
   unitSystem: UnitSystem;
@@ -32,12 +35,25 @@ export interface ValueListProps {
   unitSystem: UnitSystem;
   /** Values to show, in this order; all that are known for the kind where left out. */
   names?: readonly string[];
+  /** In place of the usual words, by name. */
+  labels?: Readonly<Record<string, RichText>>;
+  /** Small and without a rule, under a table. */
+  isQuiet?: boolean;
+}
+
+/** A column of a table of levels: what it shows, its head, its unit in SI. */
+export interface LevelColumn {
+  key: string;
+  head: RichText;
+  unit: string;
 }
 
 export interface LevelsTableProps {
   /** A column cell whose `levels` table is shown. */
   result: CellResult;
   gases: readonly string[];
+  /** In place of those of a column cell, before the densities of its gases. */
+  columns?: readonly LevelColumn[];
   unitSystem: UnitSystem;
   number: number;
   caption?: ReactNode;

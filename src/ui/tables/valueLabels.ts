@@ -14,7 +14,7 @@ export const valueLabels: Readonly<Record<string, string>> = {
   bulk_escape_parameter: "λ of the mean mass",
   energy_limited_mass_rate: "Energy limit",
   crossover_mass: "Crossover mass",
-  wind_mass_rate: "Wind",
+  wind_mass_rate: "Isothermal wind",
 };
 
 /** A label for any name: its own, or its words. */

@@ -66,6 +66,16 @@ describe("formatMagnitude", () => {
 });
 
 describe("formatQuantity", () => {
+  it.each([
+    [4.464e-26, "kg", "26.9 u"],
+    [7.45e-19, "J", "4.65 eV"],
+    [1.7e-14, "J", "106 keV"],
+    [3.2e-8, "Pa", "3.20 × 10⁻⁸ Pa"],
+    [3.2e-8, "s^-1", "10^−7.5 s⁻¹"],
+  ])("tells %s %s as %s: only what flows off as a bare power", (value, unit, text) => {
+    expect(quantityText(formatQuantity({ value, unit }, "SI")).replace(/[\u202f\u00a0]/g, " ")).toBe(text);
+  });
+
   it("shows SI as it is and lengths in km from a kilometre", () => {
     expect(quantityText(formatQuantity({ value: 6.6886, unit: "m s^-2" }, "SI"))).toBe(
       "6.69\u00a0m\u00a0s⁻²",

@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import { completeNotebook } from "../../../shared/notebook/completeNotebook";
 import { engineVersion } from "../../../shared/notebook/engine";
 import { evaluateNotebook } from "../../../shared/notebook/evaluateNotebook";
 import { stripOf, summariseNotebook } from "../../../shared/notebook/summariseNotebook";
@@ -110,6 +111,25 @@ describe("the headline", () => {
     expect(noteOf("column = dayside", "leak.H.rate")).toBe("Jeans, coupled column");
     expect(noteOf("column = dayside\ncoupling = open", "leak.H.rate")).toBe("Jeans, open column");
     expect(noteOf("column = dayside", "leak.wind_mass_rate")).toBe("isothermal wind");
+  });
+
+  it("carries the spread of what a spread watches", () => {
+    const document = notebookOf(
+      [
+        ["values", "given", "x = 240 ± 30 K"],
+        ["spread", "sure", "watch = x\nsamples = 1024"],
+      ],
+      { headline: ["x"] },
+    );
+    const [item] = summariseNotebook(document, completeNotebook(document)).headline;
+    expect(notebookSummarySchema.shape.headline.parse([item])).toEqual([item]);
+    // Of a normal distribution the middle 68.27 % lie within one sigma.
+    expect(item.spread).toEqual({
+      lower: expect.closeTo(210, 0),
+      upper: expect.closeTo(270, 0),
+      cell: "sure",
+    });
+    expect(summarise(cells).summary.headline[0]).not.toHaveProperty("spread");
   });
 
   it("is empty without an escape cell", () => {

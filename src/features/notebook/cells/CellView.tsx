@@ -1,6 +1,7 @@
 import { memo, useCallback, useId, useMemo, useRef } from "react";
 import type { Cell } from "../../../../shared/notebook/document";
 import type { CellEvaluation, Note } from "../../../../shared/notebook/result";
+import type { ColumnCorona } from "../../../lib/columnCorona";
 import type { UnitSystem } from "../../../lib/format";
 import type { LetteredNote } from "../../../ui/tables/tableProps";
 import type { TaskState } from "../evaluation/createTaskQueue";
@@ -24,6 +25,8 @@ export interface CellViewProps {
   readText: string | undefined;
   /** Gases of the column that the cell rests on, where it names gases. */
   columnGases: readonly string[] | undefined;
+  /** Coronae that rest on a column cell. */
+  coronae: readonly ColumnCorona[];
   notes: readonly LetteredNote[];
   /** The answer shown may not be what the text says now. */
   isLate: boolean;

@@ -1,5 +1,6 @@
 import { useRef } from "react";
 import type { CellEvaluation } from "../../../../shared/notebook/result";
+import type { ColumnCorona } from "../../../lib/columnCorona";
 import type { UnitSystem } from "../../../lib/format";
 import { useSettled } from "../../../lib/useSettled";
 import { CrossingFigure } from "../../../ui/plots/CrossingFigure";
@@ -9,6 +10,7 @@ import { useOnScreen } from "./useOnScreen";
 
 interface ColumnFiguresProps {
   evaluation: CellEvaluation;
+  coronae: readonly ColumnCorona[];
   unitSystem: UnitSystem;
   /** Number of the first of them. */
   number: number;
@@ -18,16 +20,11 @@ interface ColumnFiguresProps {
 const rest = 500;
 
 /** The figures of a column. */
-export function ColumnFigures({ evaluation, unitSystem, number }: ColumnFiguresProps) {
+export function ColumnFigures({ number, ...column }: ColumnFiguresProps) {
   return (
     <>
-      <SeenFigure figure={DensityFigure} evaluation={evaluation} unitSystem={unitSystem} number={number} />
-      <SeenFigure
-        figure={CrossingFigure}
-        evaluation={evaluation}
-        unitSystem={unitSystem}
-        number={number + 1}
-      />
+      <SeenFigure figure={DensityFigure} {...column} number={number} />
+      <SeenFigure figure={CrossingFigure} {...column} number={number + 1} />
     </>
   );
 }
@@ -36,6 +33,7 @@ export function ColumnFigures({ evaluation, unitSystem, number }: ColumnFiguresP
 function SeenFigure({
   figure: Figure,
   evaluation,
+  coronae,
   unitSystem,
   number,
 }: ColumnFiguresProps & { figure: React.ComponentType<ColumnFigureProps> }) {
@@ -47,7 +45,13 @@ function SeenFigure({
   return (
     <div ref={place}>
       {result.profiles && strip && (
-        <Figure profiles={result.profiles} strip={strip} unitSystem={unitSystem} number={number} />
+        <Figure
+          profiles={result.profiles}
+          strip={strip}
+          coronae={coronae}
+          unitSystem={unitSystem}
+          number={number}
+        />
       )}
     </div>
   );

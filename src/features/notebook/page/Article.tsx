@@ -16,6 +16,7 @@ import { Sheet } from "./Sheet";
 import { SheetHead } from "./SheetHead";
 import { StripPane } from "./StripPane";
 import { useColumnInView } from "./useColumnInView";
+import { useDrawnStrip } from "./useDrawnStrip";
 
 interface ArticleProps {
   document: NotebookDocument;
@@ -50,12 +51,17 @@ export function Article({
   // Figures follow a key first; what stands round the sheet comes right after them.
   const evaluated = useDeferredValue(live.evaluated);
   const columnId = useColumnInView(document, evaluated?.cells);
-  const strip = columnId === null ? null : (evaluated?.cells.get(columnId)?.strip ?? null);
+  const { strip, spread } = useDrawnStrip(columnId, evaluated?.cells);
 
   return (
     <ExplainDesk document={document} live={live} unitSystem={unitSystem}>
       <div className="notebook-grid">
-        <StripPane strip={strip} unitSystem={unitSystem} isVoid={columnId !== null && late.has(columnId)} />
+        <StripPane
+          strip={strip}
+          exobaseSpread={spread}
+          unitSystem={unitSystem}
+          isVoid={columnId !== null && late.has(columnId)}
+        />
         <main id="page" className="notebook-sheet" tabIndex={-1}>
           <SheetHead document={document} kicker={kicker} edit={edit}>
             {evaluated && (

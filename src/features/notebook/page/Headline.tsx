@@ -1,11 +1,22 @@
 import type { HeadlineItem } from "../../../../shared/notebook/summary";
 import {
+  displayScale,
   formatQuantity,
+  formatUnit,
   kilometreScale,
   quantityText,
+  thinSpace,
+  type DisplayScale,
   type FormattedQuantity,
   type UnitSystem,
 } from "../../../lib/format";
+import {
+  formatSpread,
+  formatUncertain,
+  scaleSpread,
+  type FormattedSpread,
+  type NumberSpread,
+} from "../../../lib/formatSpread";
 import { Rich } from "../../../lib/Rich";
 import { ExplainNumber } from "../../../ui/tables/ExplainNumber";
 
@@ -27,7 +38,9 @@ export function Headline({ items, unitSystem, isLate }: HeadlineProps) {
           <dd className="headline-number">
             <ExplainedNumber item={item} unitSystem={unitSystem} />
           </dd>
-          <dd className="headline-note">{item.note}</dd>
+          <dd className="headline-note">
+            <HeadlineNote item={item} unitSystem={unitSystem} />
+          </dd>
         </div>
       ))}
     </dl>
@@ -67,11 +80,45 @@ export function HeadlineNumber({ item, unitSystem }: HeadlineNumberProps) {
   );
 }
 
+const scaleOf = (unit: string, value: number, unitSystem: UnitSystem): DisplayScale =>
+  unit === "m" ? kilometreScale : displayScale(unit, unitSystem, value);
+
+function headlineSpread(
+  { unit, spread }: { unit: string; spread: NumberSpread },
+  value: number,
+  unitSystem: UnitSystem,
+): FormattedSpread {
+  const { factor } = scaleOf(unit, value, unitSystem);
+  return formatSpread(value * factor, scaleSpread(spread, factor));
+}
+
+/** The convention; where a spread watches the number, whose draws it rests on, and what does not fit beside it. */
+function HeadlineNote({ item, unitSystem }: HeadlineNumberProps) {
+  const { note, spread, value, unit } = item;
+  if (!spread || typeof value !== "number") return note;
+  const shown = headlineSpread({ unit, spread }, value, unitSystem);
+  const scale = scaleOf(unit, value, unitSystem);
+  return (
+    <>
+      {note};{" "}
+      {!shown.isShort && (
+        <>
+          <Rich text={shown.alone} /> <Rich text={formatUnit(scale.unit)} />,{" "}
+        </>
+      )}
+      68{thinSpace}% by <i>{spread.cell}</i>
+      {spread.isPartial && ", stopped early"}
+    </>
+  );
+}
+
 function headlineQuantity(
-  { log10, unit }: HeadlineItem,
+  { log10, unit, spread }: HeadlineItem,
   value: number | null,
   unitSystem: UnitSystem,
 ): FormattedQuantity {
   const manner = unit === "m" ? { scale: kilometreScale } : { digits: 2 };
-  return formatQuantity({ value, log10, unit }, unitSystem, manner);
+  const plain = formatQuantity({ value, log10, unit }, unitSystem, manner);
+  if (value === null || !spread || !headlineSpread({ unit, spread }, value, unitSystem).isShort) return plain;
+  return formatUncertain({ value, log10, unit }, spread, unitSystem, manner);
 }

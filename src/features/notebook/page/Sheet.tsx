@@ -1,10 +1,12 @@
 import { Fragment, useCallback, useDeferredValue, useMemo } from "react";
-import type { Cell, CellKind, NotebookDocument } from "../../../../shared/notebook/document";
+import type { Cell, NotebookDocument } from "../../../../shared/notebook/document";
 import type { CellEvaluation } from "../../../../shared/notebook/result";
+import type { ColumnCorona } from "../../../lib/columnCorona";
 import type { UnitSystem } from "../../../lib/format";
 import type { LetteredNote } from "../../../ui/tables/tableProps";
 import { cellTitle } from "../cells/cellTitle";
 import { CellView } from "../cells/CellView";
+import { columnCoronae } from "../cells/columnCoronae";
 import { InsertCell } from "../cells/InsertCell";
 import { useNotebookNames } from "../cells/notebookNames";
 import { useCellDrag } from "../cells/useCellDrag";
@@ -61,6 +63,9 @@ export function Sheet({
               evaluation={evaluation}
               readText={answered?.texts.get(cell.id)}
               columnGases={columnGases(evaluation)}
+              coronae={
+                cell.kind === "column" ? columnCoronae(cell.name, answered?.cells ?? noCells) : noCoronae
+              }
               notes={notesOf(cell.id)}
               isLate={late.has(cell.id)}
               task={tasks?.get(cell.id)}
@@ -97,12 +102,15 @@ function DropLine() {
 
 const placeWords = (cell: Cell): string => (cell.kind === "prose" ? "this prose" : cellTitle(cell));
 
+const noCoronae: readonly ColumnCorona[] = [];
+const noCells: ReadonlyMap<string, CellEvaluation> = new Map();
+
 /** Gases of the column that a cell rests on, itself or by way of others, so that it gives them the same colours. */
 function gasesOfColumn(
   evaluation: CellEvaluation | undefined,
   cells: ReadonlyMap<string, CellEvaluation> | undefined,
 ): readonly string[] | undefined {
-  if (!evaluation || !cells || !withGases.has(evaluation.result.kind)) return undefined;
+  if (!evaluation || !cells || evaluation.result.kind === "column") return undefined;
   const uses = new Set(evaluation.uses.map(cellName));
   for (const other of [...cells.values()].reverse()) {
     if (!uses.has(other.result.name)) continue;
@@ -111,7 +119,5 @@ function gasesOfColumn(
   }
   return undefined;
 }
-
-const withGases = new Set<CellKind>(["escape", "sweep", "spread"]);
 
 const cellName = (path: string): string => path.split(".", 1)[0]!;

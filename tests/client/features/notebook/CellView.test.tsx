@@ -22,6 +22,7 @@ function show(cell: Cell, change: Partial<CellViewProps> = {}) {
       evaluation={evaluation.cells[0]}
       readText={cell.text}
       columnGases={undefined}
+      coronae={[]}
       notes={evaluation.cells[0]!.result.notes.map((note) => ({ note, letter: null }))}
       isLate={false}
       task={undefined}

@@ -40,6 +40,7 @@ function view(
       evaluation={evaluation}
       readText={text}
       columnGases={undefined}
+      coronae={[]}
       notes={evaluation.result.notes.map((note) => ({ note, letter: null }))}
       isLate={false}
       task={undefined}

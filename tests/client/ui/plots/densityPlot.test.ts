@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import type { ColumnCorona } from "../../../../src/lib/columnCorona";
 import { gasStyles } from "../../../../src/lib/gasStyle";
 import { figureText } from "../../../../src/lib/richText";
 import { densityCurves } from "../../../../src/ui/plots/columnCurves";
@@ -18,12 +19,24 @@ const inks = {
   ...Object.fromEntries(strip.gases.map((gas) => [gas, "#123"])),
 };
 
-function drawn(width: number, hidden: string[] = [], of = strip) {
+/** A corona of H that begins at a fifth of the column's density and steps down by half, made by hand. */
+const halo: ColumnCorona = {
+  gas: "H",
+  cell: "halo",
+  escape: "leak",
+  isCoupled: true,
+  share: 0.5,
+  densityBelow: 2e11,
+  altitude: [strip.exobase!, 300e3, 1000e3],
+  numberDensity: [1e11, 9e10, 2e10],
+};
+
+function drawn(width: number, hidden: string[] = [], of = strip, coronae: ColumnCorona[] = []) {
   return densityPlot({
     profiles,
     strip: of,
     unitSystem: "SI",
-    curves: densityCurves(profiles, of, "SI"),
+    curves: densityCurves(profiles, of, "SI", coronae),
     styles,
     room: figureRoom(width, 600, "two panels"),
     inks,
@@ -73,6 +86,41 @@ describe("the density figure", () => {
 
   it("draws the band with few shapes, since each costs time at every keystroke", () => {
     expect(drawn(736).layout.shapes!.length).toBeLessThan(30);
+  });
+});
+
+describe("a gas with a corona in the density figure", () => {
+  type Line = { name: string; x: number[]; y: number[]; opacity: number; line: { dash: string } };
+  const linesOf = (gas: string, coronae: ColumnCorona[]) =>
+    (drawn(736, [], strip, coronae).data as Line[]).filter(({ name }) => name === gas);
+  const km = strip.exobase! / 1000;
+
+  it("goes on dashed above the exobase, by the corona's densities, up to the end of the figure", () => {
+    const [, above] = linesOf("H", [halo]);
+    expect(above!.line.dash).toBe("6px,4.5px");
+    expect(above!.opacity).toBe(0.86);
+    expect([above!.x[0], above!.y[0]]).toEqual([1e11, km]);
+    expect([above!.x[1], above!.y[1]]).toEqual([9e10, 300]);
+    expect(above!.y.at(-1)).toBe(strip.top / 1000);
+    expect(above!.x.at(-1)).toBeLessThan(9e10);
+    expect(above!.x.at(-1)).toBeGreaterThan(2e10);
+  });
+
+  it("leaves all others hydrostatic", () => {
+    expect(linesOf("O", [halo])).toEqual(linesOf("O", []));
+  });
+
+  it("has its step drawn to scale between two short bars", () => {
+    const bars = (hidden: string[]) =>
+      drawn(736, hidden, strip, [halo]).layout.shapes!.filter(
+        ({ yanchor, ysizemode }) => ysizemode === "pixel" && yanchor === km,
+      );
+    expect(bars([]).map(({ x0, x1, y1 }) => [x0, x1, y1])).toEqual([
+      [2e11, 2e11, -4.5],
+      [2e11, 1e11, 0],
+      [1e11, 1e11, 4.5],
+    ]);
+    expect(bars(["H"])).toEqual([]);
   });
 });
 

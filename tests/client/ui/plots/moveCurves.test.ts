@@ -1,6 +1,6 @@
 import { expect, it } from "vitest";
 import type { FigureDrawing } from "../../../../src/ui/plots/exportFigure";
-import { isMove } from "../../../../src/ui/plots/moveCurves";
+import { curvePath, isMove } from "../../../../src/ui/plots/moveCurves";
 
 const drawing = (
   change: { to?: number; width?: number; color?: string; x?: number[] } = {},
@@ -33,4 +33,17 @@ it.each([
   ["a curve more", { ...drawing(), data: [...drawing().data, ...drawing().data] }],
 ])("draws the figure anew for %s", (_words, next) => {
   expect(isMove(drawing(), next)).toBe(false);
+});
+
+it("draws a curve within its own panel, where panels stand above each other", () => {
+  const layout: FigureDrawing["layout"] = {
+    width: 100,
+    height: 200,
+    xaxis: { range: [0, 1] },
+    yaxis: { range: [0, 1], domain: [0.5, 1] },
+    yaxis2: { range: [0, 1], domain: [0, 0.25] },
+  };
+  const line = { x: [0, 1], y: [0, 1] };
+  expect(curvePath(line, layout)).toBe("M0.00,100.00L100.00,0.00");
+  expect(curvePath({ ...line, yaxis: "y2" }, layout)).toBe("M0.00,50.00L100.00,0.00");
 });

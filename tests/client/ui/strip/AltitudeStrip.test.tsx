@@ -34,6 +34,15 @@ describe.each([
     expect(container.querySelector(".strip-plate")).toBeNull();
   });
 
+  it("says how far its exobase may lie from the mark, where that is known", () => {
+    const spread = { lower: strip.exobase! - 26e3, upper: strip.exobase! + 26e3 };
+    const { container } = render(<Part strip={strip} exobaseSpread={spread} unitSystem="SI" />);
+    const told = new RegExp(`${Math.round(strip.exobase! / 1000)}\\s±\\s26\\skm`);
+    expect(container.querySelector("svg.strip-svg")!.textContent).toMatch(told);
+    expect(screen.getByRole("img").getAttribute("aria-label")).toMatch(told);
+    expect(screen.getByRole("list").textContent).toMatch(told);
+  });
+
   it("draws a column that has no exobase", () => {
     render(<Part strip={unbound} unitSystem="SI" />);
     expect(screen.getByRole("img", { name: /no exobase/ })).toBeTruthy();

@@ -4,6 +4,7 @@ import type { CellResult, Note } from "../../../../shared/notebook/result";
 import { EscapeTable } from "../../../../src/ui/tables/EscapeTable";
 import { LevelsTable } from "../../../../src/ui/tables/LevelsTable";
 import { noteTarget } from "../../../../src/ui/tables/noteTarget";
+import type { EscapeTableProps } from "../../../../src/ui/tables/tableProps";
 import { tableText } from "../../../../src/ui/tables/tableText";
 import { ValueList } from "../../../../src/ui/tables/ValueList";
 
@@ -124,6 +125,78 @@ describe("the escape table", () => {
   });
 });
 
+describe("what an escape table rests on", () => {
+  const shown = (
+    change: Partial<CellResult>,
+    convention: EscapeTableProps["convention"] = { coupling: "coupled", criterion: "bulk, l = H" },
+  ) => {
+    const { container } = render(
+      <EscapeTable
+        result={{ ...escape, ...change }}
+        gases={["H", "CO2"]}
+        convention={convention}
+        unitSystem="SI"
+        number={1}
+      />,
+    );
+    return (selector: string) =>
+      [...container.querySelectorAll(selector)].map(({ textContent }) =>
+        (textContent ?? "").replace(/[\u202f\u00a0]/g, " "),
+      );
+  };
+
+  it("is said in its caption: coupling and criterion", () => {
+    expect(shown({})(".table-caption")[0]).toContain(
+      "Thermal escape, solved together with its flux. Exobase (bulk, l = H) at 239 km",
+    );
+    expect(shown({}, { coupling: "open", criterion: "unit depth" })(".table-caption")[0]).toContain(
+      "Thermal escape on an open column, which does not reckon with its flux. Exobase (unit depth)",
+    );
+  });
+
+  it("is in place of the table why there is no exobase, and what can be said without one", () => {
+    const at = shown({
+      values: { regime: { value: "wind" }, wind_mass_rate: number(3.9e10, "kg s^-1") },
+      notes: [
+        { level: "fault", code: "no_exobase_runaway", message: "No exobase. The gas leaves as a wind." },
+      ],
+    });
+    expect(at(".table-caption")[0]).toContain("Thermal escape. No exobase. The gas leaves as a wind.");
+    expect(at("table")).toEqual([]);
+    expect(at(".value-list")).toEqual(["Isothermal wind3.90 × 1010 kg s−1"]);
+  });
+
+  it("has under it what is said of all gases together", () => {
+    const values = {
+      ...escape.values,
+      energy_limited_mass_rate: number(2246, "kg s^-1"),
+      crossover_mass: number(4.464e-26, "kg"),
+    };
+    expect(shown({ values })(".value-list div")).toEqual([
+      "Energy limit2 246 kg s−1",
+      "Crossover mass26.9 u",
+    ]);
+    expect(shown({})(".value-list")).toEqual([]);
+  });
+
+  it("has spreads under its numbers, says what they are, and remarks where draws are missing", () => {
+    const spread = { median: 9e25, lower: 4.6e25, upper: 1.6e26, q2_5: null, q97_5: null, cell: "how_sure" };
+    const values = {
+      ...escape.values,
+      "exobase.altitude": { ...number(239_200, "m"), spread: { ...spread, lower: 213_200, upper: 265_200 } },
+      "H.rate": { ...number(9.94e25, "s^-1"), spread },
+      "H.supply_fraction": { ...number(0.57, "1"), spread: { ...spread, lower: 0.5, upper: 0.64 } },
+    };
+    const at = shown({ values });
+    expect(at(".table-caption")[0]).toContain("at 239 ± 26 km, where");
+    expect(at(".table-spread")).toEqual(["± 5.7 × 1025", "± 7.0 %"]);
+    expect(at(".spread-remark")).toEqual(["± holds the middle 68 % of the draws of how_sure."]);
+    const partial = { ...values["H.rate"], spread: { ...spread, isPartial: true as const } };
+    const stopped = shown({ values: { ...values, "H.rate": partial } });
+    expect(stopped(".spread-remark")[0]).toContain("which was stopped before all of them were done");
+  });
+});
+
 describe("where a note belongs", () => {
   it.each([
     ["estimated_collisions", "for H2 in Ar", { gas: "H2", key: "diffusion_limit" }],
@@ -157,6 +230,23 @@ describe("values and levels", () => {
     expect(within(list).getByText(/669/).title).toBe("ilmara.surface_gravity = 6.6886 m s^-2");
   });
 
+  it("shows a value with its spread, and says whose it is", () => {
+    const spread = { median: 6.7, lower: 6.49, upper: 6.89, q2_5: null, q97_5: null, cell: "sure" };
+    const values = { ...body.values, surface_gravity: { ...number(6.69, "m s^-2"), spread } };
+    const { container } = render(
+      <ValueList
+        result={{ ...body, values }}
+        unitSystem="SI"
+        names={["surface_gravity"]}
+        labels={{ surface_gravity: ["Pull at ", { italic: "R" }] }}
+      />,
+    );
+    expect(container.querySelector("dl")!.textContent.replace(/[\u202f\u00a0]/g, " ")).toBe(
+      "Pull at R6.69 ± 0.20 m s−2",
+    );
+    expect(container.querySelector(".spread-remark")!.textContent).toContain("the draws of sure.");
+  });
+
   it("is nothing where nothing is given", () => {
     const { container } = render(<ValueList result={{ ...body, values: {} }} unitSystem="SI" />);
     expect(container.innerHTML).toBe("");
@@ -170,6 +260,14 @@ describe("values and levels", () => {
     const column: CellResult = { ...body, kind: "column", name: "dayside", tables: { levels } };
     render(<LevelsTable result={column} gases={["H"]} unitSystem="SI" number={2} />);
     expect(screen.getAllByRole("rowheader").map(({ textContent }) => textContent)).toEqual(["240", "80"]);
+  });
+
+  it("writes pressures far up with their digits", () => {
+    const levels = [{ altitude: 400e3, temperature: 420, pressure: 6.87e-8 }];
+    const column: CellResult = { ...body, kind: "column", name: "dayside", tables: { levels } };
+    render(<LevelsTable result={column} gases={[]} unitSystem="SI" number={2} />);
+    const cells = screen.getAllByRole("cell").map(({ textContent }) => textContent);
+    expect(cells[1]!.replace(/\u202f/g, " ")).toBe("6.87 × 10−8");
   });
 
   it("copies rows as tab-separated lines", () => {

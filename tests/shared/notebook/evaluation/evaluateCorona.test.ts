@@ -51,6 +51,32 @@ describe("a corona", () => {
     );
   });
 
+  it("tells how it begins: orbits filled, λ, and the share of the column's density that goes on", () => {
+    const cells = evaluateCells(withHydrogenAt(3, "satellites = 0.25"));
+    const { corona, result } = cells.at(-1)!;
+    expect(corona!.satellites).toBe(0.25);
+    expect(corona!.escapeParameter).toBeCloseToRelative(
+      numberIn(cells.at(-2)!.result, "H.escape_parameter"),
+      1e-12,
+    );
+    const { ballistic, escaping } = result.profiles!;
+    const begins = ballistic[0] + escaping[0];
+    expect(begins / numberIn(result, "exobase.number_density")).toBeCloseToRelative(corona!.share, 1e-12);
+  });
+
+  it("gives columns along lines of sight from the exobase to the reach, as its levels do", () => {
+    const { lines_of_sight: sights, levels } = halo.tables;
+    const { altitude } = halo.profiles!;
+    expect(sights.map((row) => row.altitude)).toEqual(
+      sights.map((_, i) => altitude[(i * (altitude.length - 1)) / (sights.length - 1)]),
+    );
+    const atExobase = levels.find((row) => row.altitude === sights[0].altitude)!;
+    expect(sights[0].limb_column).toBe(atExobase.limb_column);
+    expect(sights[0].overhead_column).toBe(atExobase.overhead_column);
+    for (const { limb_column: limb, overhead_column: overhead } of sights.slice(0, -1))
+      expect(limb).toBeGreaterThan(overhead as number);
+  });
+
   // After Chamberlain and Hunten (1987), computed from the stated formulas and checked by quadrature over velocities.
   it.each([
     {

@@ -139,6 +139,16 @@ describe("a loss", () => {
     expect(first.rate).toBeCloseToRelative(1e27 * (4.56 / 0.5) ** 1.23, 1e-9);
   });
 
+  it.each([
+    [{ saturation: "2 Gyr" }, 2e9 * 31557600],
+    [{ saturation: "0.5 Gyr" }, null],
+    [{ saturation: "2 Gyr", exponent: "0" }, null],
+    [{ saturation: null, history: "points(0.9 Gyr: 6, 5 Gyr: 1)" }, null],
+  ])("tells up to which age the light was saturated: %j", (change, saturation) => {
+    const { lightHistory } = evaluateCells([mars, loss(change)])[1];
+    expect(lightHistory).toEqual({ now: 4.56e9 * 31557600, saturation });
+  });
+
   it("follows a history of points in any unit of light, or none", () => {
     const lost = (history: string) => numberIn(answer({ history }), "particles");
     const relative = lost("points(0.9 Gyr: 6, 2 Gyr: 2.5, 5 Gyr: 1)");

@@ -48,6 +48,20 @@ describe("recombination above an exobase", () => {
     expect(channels.map(({ escapes }) => escapes)).toEqual([2, 2, 0, 0]);
   });
 
+  it("gives each fragment its share of the energy, and counts those that get more than they need", () => {
+    const { channels, fragments } = answer({ ion: "CO2+" }).tables;
+    for (const { products, energy, escapes } of channels) {
+      const own = fragments.filter((row) => row.products === products);
+      expect(own).toHaveLength(2);
+      const sum = own.reduce((total, row) => total + (row.energy as number), 0);
+      expect(sum).toBeCloseToRelative(energy as number, 1e-12);
+      expect(own.filter((row) => (row.energy as number) > (row.escape_energy as number))).toHaveLength(
+        escapes as number,
+      );
+    }
+    expect(fragments[0].fragment).toBe((channels[0].products as string).split(" + ")[0]);
+  });
+
   // Computed from the masses and GM: an atom of O-16 needs 1.978 eV at 200 km on Mars, 9.617 eV at 500 km on Earth, and has
   // 3.495 eV at most.
   it("says what an atom needs and what it gets", () => {

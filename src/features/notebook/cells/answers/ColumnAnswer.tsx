@@ -5,11 +5,25 @@ import type { AnswerProps } from "./answerProps";
 
 const Levels = memo(LevelsTable);
 
-export function ColumnAnswer({ evaluation, unitSystem, figureNumber, tableNumber, isNear }: AnswerProps) {
+export function ColumnAnswer({
+  evaluation,
+  coronae,
+  unitSystem,
+  figureNumber,
+  tableNumber,
+  isNear,
+}: AnswerProps) {
   const { result, gases } = useDeferredValue(evaluation);
   return (
     <>
-      {isNear && <ColumnFigures evaluation={evaluation} unitSystem={unitSystem} number={figureNumber} />}
+      {isNear && (
+        <ColumnFigures
+          evaluation={evaluation}
+          coronae={coronae}
+          unitSystem={unitSystem}
+          number={figureNumber}
+        />
+      )}
       {(result.tables.levels?.length ?? 0) > 0 && (
         <Levels result={result} gases={gases} unitSystem={unitSystem} number={tableNumber} />
       )}

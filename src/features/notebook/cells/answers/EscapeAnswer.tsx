@@ -13,6 +13,7 @@ export function EscapeAnswer({
     <EscapeTable
       result={evaluation.result}
       gases={evaluation.gases}
+      convention={evaluation.convention}
       columnGases={columnGases}
       unitSystem={unitSystem}
       number={tableNumber}

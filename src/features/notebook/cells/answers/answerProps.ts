@@ -1,4 +1,5 @@
 import type { CellEvaluation, Note } from "../../../../../shared/notebook/result";
+import type { ColumnCorona } from "../../../../lib/columnCorona";
 import type { UnitSystem } from "../../../../lib/format";
 import type { LetteredNote } from "../../../../ui/tables/tableProps";
 
@@ -8,6 +9,8 @@ export interface AnswerProps {
   evaluation: CellEvaluation;
   /** Gases of the column that the cell rests on, where it names gases. */
   columnGases: readonly string[] | undefined;
+  /** Coronae that rest on a column cell. */
+  coronae: readonly ColumnCorona[];
   notes: readonly LetteredNote[];
   unitSystem: UnitSystem;
   /** Numbers of the first figure and of the first table of this cell. */

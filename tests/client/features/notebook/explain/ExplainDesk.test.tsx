@@ -141,7 +141,7 @@ describe("a number that explains itself", () => {
     render(<Page document={written} />);
     fireEvent.click(screen.getByRole("button", { name: /^Explain H\.escape_parameter: / }));
     // Wang et al. (2012) for the mass of the atom, 1.00782503 u; CODATA 2022 for k
-    expect(row("With")!.textContent).toMatch(/1\.674\s?×\s?10−27\skg\s?mass of one particle/);
+    expect(row("With")!.textContent).toMatch(/1\.008\su\s?mass of one particle/);
     expect(row("With")!.textContent).toMatch(/1\.381\s?×\s?10−23\sJ\sK−1\s?Boltzmann constant/);
   });
 
