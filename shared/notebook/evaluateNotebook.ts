@@ -106,7 +106,8 @@ function answer(
   last: EvaluatedCell | undefined,
 ): RememberedCell {
   const evaluated = evaluateCell(cell, parsed, surroundings, unitSystem, last);
-  const { result, understood, defaults, gases, strip, convention, corona, ion, lightHistory } = evaluated;
+  const { result, understood, defaults, gases, strip, convention, column, corona, ion, lightHistory } =
+    evaluated;
   const uses = usedNames(surroundings.questions);
   const evaluation = {
     id: cell.id,
@@ -117,6 +118,7 @@ function answer(
     gases,
     ...(strip ? { strip } : {}),
     ...(convention ? { convention } : {}),
+    ...(column ? { column } : {}),
     ...(corona ? { corona } : {}),
     ...(ion === undefined ? {} : { ion }),
     ...(lightHistory ? { lightHistory } : {}),

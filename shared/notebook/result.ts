@@ -93,12 +93,21 @@ export interface CellEvaluation {
   strip?: Strip;
   /** Of an escape cell: what its numbers rest on, in a few words. */
   convention?: { coupling: "coupled" | "open"; criterion: string };
+  /** Of an escape cell that is solved with its flux: its column as what escapes leaves it. */
+  column?: DrawnColumn;
   /** Of a corona cell. */
   corona?: CoronaBeginning;
   /** Of a nonthermal cell: "O2+". */
   ion?: string;
   /** Of a loss cell. */
   lightHistory?: LightHistory;
+}
+
+/** What figure and strip of a column are drawn from. */
+export interface DrawnColumn {
+  /** Columns of equal length against `altitude`. */
+  profiles: Record<string, number[]>;
+  strip: Strip;
 }
 
 /** How a corona begins at its exobase. */

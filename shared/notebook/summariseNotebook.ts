@@ -18,16 +18,15 @@ export function summariseNotebook(document: NotebookDocument, evaluation: Evalua
     bodies: results
       .filter(({ kind, values }) => kind === "body" && "radius" in values)
       .map(({ name }) => name),
-    strip: evaluation.cells.find(({ strip }) => strip)?.strip ?? null,
+    strip: firstStrip(evaluation),
   };
 }
 
-/** The strip of the column of that name; null if there is none or it has no answer. */
-export function stripOf(evaluation: Evaluation, columnName: string): Strip | null {
-  const column = evaluation.cells.find(
-    ({ result }) => result.kind === "column" && result.name === columnName,
-  );
-  return column?.strip ?? null;
+/** The first column, as what escapes leaves it where an escape cell says so. */
+function firstStrip({ cells }: Evaluation): Strip | null {
+  const atRest = cells.find(({ strip }) => strip)?.strip;
+  if (!atRest) return null;
+  return cells.find(({ column }) => column?.strip.column === atRest.column)?.column!.strip ?? atRest;
 }
 
 /** What the notebook names, or of its first escape cell the exobase and the gas that leaves fastest. */

@@ -14,6 +14,8 @@ export interface CellAnswer {
   strip?: Strip;
   /** Of an escape cell. */
   convention?: CellEvaluation["convention"];
+  /** Of an escape cell that is solved with its flux. */
+  column?: CellEvaluation["column"];
   /** Of a corona cell. */
   corona?: CellEvaluation["corona"];
   /** Of a nonthermal cell. */

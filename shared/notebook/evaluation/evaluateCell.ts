@@ -21,7 +21,16 @@ import type { TaskAnswer } from "../tasks";
 
 export interface EvaluatedCell extends Pick<
   CellEvaluation,
-  "result" | "understood" | "defaults" | "gases" | "strip" | "convention" | "corona" | "ion" | "lightHistory"
+  | "result"
+  | "understood"
+  | "defaults"
+  | "gases"
+  | "strip"
+  | "convention"
+  | "column"
+  | "corona"
+  | "ion"
+  | "lightHistory"
 > {
   /** What the cells below see of it. */
   above: CellAbove;
@@ -78,6 +87,7 @@ export function evaluateCell(
     gases: answer.gases ?? [],
     ...(answer.strip ? { strip: answer.strip } : {}),
     ...(answer.convention ? { convention: answer.convention } : {}),
+    ...(answer.column ? { column: answer.column } : {}),
     ...(answer.corona ? { corona: answer.corona } : {}),
     ...(answer.ion === undefined ? {} : { ion: answer.ion }),
     ...(answer.lightHistory ? { lightHistory: answer.lightHistory } : {}),

@@ -169,7 +169,7 @@ function placeAt({ corona, bodyRadius, exobaseAltitude }: CoronaPlace, share: nu
 }
 
 /** A column takes hundreds of densities; evenly spaced in the potential its logarithm runs almost straight. */
-const sightLines = 17;
+const sightLines = 9;
 
 /** Columns along the limb and overhead, from the exobase to the reach. */
 function linesOfSight(place: CoronaPlace): ResultRow[] {

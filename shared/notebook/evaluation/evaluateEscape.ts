@@ -1,6 +1,6 @@
 import type { GasEscape, PhysicsNote } from "../../physics";
 import { checkName } from "./checkName";
-import { exobaseValues } from "./columnResults";
+import { columnProfiles, columnStrip, exobaseValues } from "./columnResults";
 import { crossoverValues, energyLimitValues, limitValues, windValues } from "./escapeLimits";
 import { boundValues, gasValues } from "./escapeValues";
 import type { ColumnModel } from "./models";
@@ -34,12 +34,19 @@ export function evaluateEscape(cell: OpenCell): CellAnswer {
   sayWhatBandLacks(cell, exobase);
   return {
     ...convened,
+    ...(coupled && !cell.isDraw ? { column: drawnColumn(cell, solution.source) } : {}),
     values: {
       ...exobaseValues(exobase.level, exobase.lower, exobase.upper),
       ...escapeValues(cell, solution, gases, convention),
     },
     model: { kind: "escape", source: solution.source, exobase: exobase.level, coupled },
   };
+}
+
+function drawnColumn(cell: OpenCell, { column }: ColumnModel): NonNullable<CellAnswer["column"]> {
+  const { node } = cell.entry("column")!;
+  const name = node.type === "name" ? node.path : "";
+  return { profiles: columnProfiles(column), strip: columnStrip(name, column) };
 }
 
 /** Why there is no exobase, where the gas is too loosely bound to have one and flows off as a wind. */

@@ -4,7 +4,6 @@ import {
   formatFixed,
   formatGas,
   formatKilometres,
-  formatNumber,
   formatPercent,
   formatQuantity,
   quantityText,
@@ -12,7 +11,7 @@ import {
 } from "../../lib/format";
 import { gasStyles } from "../../lib/gasStyle";
 import { Rich } from "../../lib/Rich";
-import { densityCurves, interpolateProfile, type Profiles } from "./columnCurves";
+import { densityCurves, interpolateProfile } from "./columnCurves";
 import { densityLabel, densityPlot } from "./densityPlot";
 import type { CsvColumn } from "./figureCsv";
 import { FigureFrame } from "./FigureFrame";
@@ -26,43 +25,39 @@ import { useColumnFigure } from "./useColumnFigure";
 
 const noCoronae: readonly ColumnCorona[] = [];
 
-/** Which gas goes on as a corona, by how much it steps down, and why it may begin elsewhere than its curve ends. */
-function CoronaSentence({ corona, profiles }: { corona: ColumnCorona; profiles: Profiles }) {
-  const { gas, cell, escape, isCoupled, share, densityBelow } = corona;
-  const column = profiles[`${gas}.number_density`];
-  const closed = column && interpolateProfile(profiles.altitude!, column, corona.altitude[0]!, true);
-  const begins = closed ? densityBelow / closed : 1;
+/** Which gas goes on as a corona, and by how much it steps down. */
+function CoronaSentence({ corona }: { corona: ColumnCorona }) {
+  const { gas, cell, share } = corona;
   return (
     <>
       {" "}
       <Rich text={formatGas(gas)} /> goes on as its corona <i>{cell}</i>, dashed; its step at the exobase,
       down by <Rich text={formatPercent(1 - share)} />, is drawn to scale between two short bars.
-      {isCoupled && Math.abs(begins - 1) > 0.01 && (
-        <>
-          {" "}
-          It begins at <Rich text={formatNumber(begins, 2)} /> of the density of this column there, since{" "}
-          <i>{escape}</i> reckons with its flux.
-        </>
-      )}
     </>
   );
 }
 
 function OwnCaption({
   strip,
-  profiles,
   coronae,
-}: Required<Pick<ColumnFigureProps, "strip" | "profiles" | "coronae">>) {
+  escape,
+}: Required<Pick<ColumnFigureProps, "strip" | "coronae" | "escape">>) {
   const present = coronae.filter(({ gas }) => strip.gases.includes(gas));
   return (
     <>
-      Number density of each gas in <i>{strip.column}</i>, and the temperature it rests on.
+      Number density of each gas in <i>{strip.column}</i>
+      {escape !== null && (
+        <>
+          , less what escapes in <i>{escape}</i>
+        </>
+      )}
+      , and the temperature it rests on.
       {strip.lower !== null && " Lines across part as the Knudsen number goes from 0.1 to 10."}
       {strip.homopauses.length > 0 && " Ticks at left inside mark homopauses."}
       {strip.exobase !== null &&
         ` Above the exobase the ${present.length > 0 ? "other " : ""}gases go on hydrostatically.`}
       {present.map((corona) => (
-        <CoronaSentence key={corona.gas} corona={corona} profiles={profiles} />
+        <CoronaSentence key={corona.gas} corona={corona} />
       ))}
     </>
   );
@@ -73,6 +68,7 @@ export function DensityFigure({
   profiles,
   strip,
   coronae = noCoronae,
+  escape = null,
   unitSystem,
   number,
   caption,
@@ -151,7 +147,7 @@ export function DensityFigure({
   return (
     <FigureFrame
       number={number}
-      caption={caption ?? <OwnCaption strip={strip} profiles={profiles} coronae={coronae} />}
+      caption={caption ?? <OwnCaption strip={strip} coronae={coronae} escape={escape} />}
       fileName={`${strip.column}-number-density`}
       drawing={() => densityPlot({ ...input, ...away() })}
       columns={() => [...columns(), ...coronaColumns()]}

@@ -11,6 +11,8 @@ export interface ColumnFigureProps {
   strip: Strip;
   /** Coronae that rest on the column. */
   coronae?: readonly ColumnCorona[];
+  /** Name of the escape cell whose flux the column feels here; null for the gas at rest. */
+  escape?: string | null;
   unitSystem: UnitSystem;
   /** Number of the figure in the notebook, from 1. */
   number: number;

@@ -61,6 +61,7 @@ export function LevelsTable({
   gases,
   columns: own = bulkColumns,
   unitSystem,
+  isAtRest = false,
   number,
   caption,
 }: LevelsTableProps) {
@@ -80,7 +81,8 @@ export function LevelsTable({
       caption={
         caption ?? (
           <>
-            Levels of <i>{result.name}</i>, from the highest down.
+            Levels of <i>{result.name}</i>
+            {isAtRest && " with no gas leaving"}, from the highest down.
           </>
         )
       }

@@ -55,6 +55,8 @@ export interface LevelsTableProps {
   /** In place of those of a column cell, before the densities of its gases. */
   columns?: readonly LevelColumn[];
   unitSystem: UnitSystem;
+  /** The figures beside it show the column as what escapes leaves it, which these levels do not. */
+  isAtRest?: boolean;
   number: number;
   caption?: ReactNode;
 }

@@ -11,6 +11,7 @@ import { CellNotes } from "./CellNotes";
 import { CellResults } from "./CellResults";
 import { cellTitle } from "./cellTitle";
 import { DefaultsLine } from "./DefaultsLine";
+import type { ShownColumn } from "./drawnColumn";
 import { EntriesEditor } from "./EntriesEditor";
 import { ProseCell } from "./ProseCell";
 import type { CellCommands } from "./useCellCommands";
@@ -27,6 +28,8 @@ export interface CellViewProps {
   columnGases: readonly string[] | undefined;
   /** Coronae that rest on a column cell. */
   coronae: readonly ColumnCorona[];
+  /** Of a column: what its figures show. */
+  drawn: ShownColumn | null;
   notes: readonly LetteredNote[];
   /** The answer shown may not be what the text says now. */
   isLate: boolean;

@@ -1,15 +1,15 @@
 import { useRef } from "react";
-import type { CellEvaluation } from "../../../../shared/notebook/result";
 import type { ColumnCorona } from "../../../lib/columnCorona";
 import type { UnitSystem } from "../../../lib/format";
 import { useSettled } from "../../../lib/useSettled";
 import { CrossingFigure } from "../../../ui/plots/CrossingFigure";
 import { DensityFigure } from "../../../ui/plots/DensityFigure";
 import type { ColumnFigureProps } from "../../../ui/plots/figureProps";
+import type { ShownColumn } from "./drawnColumn";
 import { useOnScreen } from "./useOnScreen";
 
 interface ColumnFiguresProps {
-  evaluation: CellEvaluation;
+  drawn: ShownColumn;
   coronae: readonly ColumnCorona[];
   unitSystem: UnitSystem;
   /** Number of the first of them. */
@@ -32,27 +32,26 @@ export function ColumnFigures({ number, ...column }: ColumnFiguresProps) {
 /** On the screen a figure follows every key; off it, it waits for a rest and costs the writer nothing. */
 function SeenFigure({
   figure: Figure,
-  evaluation,
+  drawn,
   coronae,
   unitSystem,
   number,
 }: ColumnFiguresProps & { figure: React.ComponentType<ColumnFigureProps> }) {
   const place = useRef<HTMLDivElement>(null);
   const isOnScreen = useOnScreen(place);
-  const settled = useSettled(evaluation, rest);
-  const { result, strip } = isOnScreen ? evaluation : settled;
+  const settled = useSettled(drawn, rest);
+  const { profiles, strip, escape } = isOnScreen ? drawn : settled;
 
   return (
     <div ref={place}>
-      {result.profiles && strip && (
-        <Figure
-          profiles={result.profiles}
-          strip={strip}
-          coronae={coronae}
-          unitSystem={unitSystem}
-          number={number}
-        />
-      )}
+      <Figure
+        profiles={profiles}
+        strip={strip}
+        escape={escape}
+        coronae={coronae}
+        unitSystem={unitSystem}
+        number={number}
+      />
     </div>
   );
 }

@@ -29,7 +29,7 @@ const none: readonly ColumnCorona[] = [];
 export function columnCoronae(column: string, cells: Cells): readonly ColumnCorona[] {
   const found = new Map<string, ColumnCorona>();
   for (const evaluation of cells.values()) {
-    const corona = coronaIn(evaluation, cells);
+    const corona = coronaIn(evaluation);
     if (!corona || found.has(corona.gas) || columnOf(evaluation, cells) !== column) continue;
     found.set(corona.gas, corona);
   }
@@ -47,35 +47,24 @@ function sameList(list: readonly ColumnCorona[]): readonly ColumnCorona[] {
   return list;
 }
 
-const known = new WeakMap<
-  CellEvaluation,
-  { escape: CellEvaluation | undefined; corona: ColumnCorona | null }
->();
+const known = new WeakMap<CellEvaluation, ColumnCorona>();
 
-/** null where the cell has no answer; the same object for the same evaluations. */
-function coronaIn(evaluation: CellEvaluation, cells: Cells): ColumnCorona | null {
-  if (!evaluation.corona) return null;
-  const escape = usedOf("escape", evaluation, cells);
+/** null where the cell has no answer; the same object for the same evaluation. */
+function coronaIn(evaluation: CellEvaluation): ColumnCorona | null {
   const last = known.get(evaluation);
-  if (last && last.escape === escape) return last.corona;
-  const corona = readCorona(evaluation, escape);
-  known.set(evaluation, { escape, corona });
-  return corona;
-}
-
-function readCorona(evaluation: CellEvaluation, escape: CellEvaluation | undefined): ColumnCorona | null {
+  if (last) return last;
   const { corona, gases } = evaluation;
   const { profiles, values, name } = evaluation.result;
   const below = values["exobase.number_density"]?.value;
   if (!corona || !profiles || typeof below !== "number") return null;
-  return {
+  const fresh: ColumnCorona = {
     gas: gases[0]!,
     cell: name,
-    escape: escape?.result.name ?? "",
-    isCoupled: escape?.convention?.coupling === "coupled",
     share: corona.share,
     densityBelow: below,
     altitude: profiles.altitude!,
     numberDensity: profiles.number_density!,
   };
+  known.set(evaluation, fresh);
+  return fresh;
 }

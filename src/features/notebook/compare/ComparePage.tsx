@@ -1,8 +1,7 @@
 import { useQuery } from "@tanstack/react-query";
 import { useMemo, useState } from "react";
 import { Link, useSearchParams } from "react-router-dom";
-import type { CellEvaluation } from "../../../../shared/notebook/result";
-import type { Strip } from "../../../../shared/notebook/summary";
+import type { CellEvaluation, DrawnColumn } from "../../../../shared/notebook/result";
 import type { NotebookResponse } from "../../../../shared/schemas/notebooks";
 import type { VersionSummary } from "../../../../shared/schemas/versions";
 import { formatDay, type UnitSystem } from "../../../lib/format";
@@ -15,6 +14,7 @@ import { HalvedStrip } from "../../../ui/strip/HalvedStrip";
 import { TextButton } from "../../../ui/TextButton";
 import { TwoWay } from "../../../ui/TwoWay";
 import { WordMenu } from "../../../ui/WordMenu";
+import { drawnColumn } from "../cells/drawnColumn";
 import { versionsQuery } from "../notebookQueries";
 import { PlainBar } from "../page/PlainBar";
 import { useMediaQuery } from "../page/useMediaQuery";
@@ -292,20 +292,16 @@ function Compare({ before, after, older, newer, unitSystem, head }: CompareProps
 }
 
 interface ColumnPair {
-  older: { profiles: Record<string, number[]>; strip: Strip };
-  newer: { profiles: Record<string, number[]>; strip: Strip };
+  older: DrawnColumn;
+  newer: DrawnColumn;
 }
 
 /** Columns that both states have and could compute, by name. */
 function columnPairs(before: readonly CellEvaluation[], after: readonly CellEvaluation[]): ColumnPair[] {
-  return after.flatMap(({ result, strip }) => {
-    const twin = before.find(({ result: other }) => other.kind === "column" && other.name === result.name);
-    if (!strip || !result.profiles || !twin?.strip || !twin.result.profiles) return [];
-    return [
-      {
-        older: { profiles: twin.result.profiles, strip: twin.strip },
-        newer: { profiles: result.profiles, strip },
-      },
-    ];
+  const byId = (cells: readonly CellEvaluation[]) => new Map(cells.map((cell) => [cell.id, cell]));
+  return after.flatMap((cell) => {
+    const twin = before.find(({ result }) => result.kind === "column" && result.name === cell.result.name);
+    const [older, newer] = [drawnColumn(twin, byId(before)), drawnColumn(cell, byId(after))];
+    return older && newer ? [{ older, newer }] : [];
   });
 }

@@ -7,6 +7,7 @@ import type { LetteredNote } from "../../../ui/tables/tableProps";
 import { cellTitle } from "../cells/cellTitle";
 import { CellView } from "../cells/CellView";
 import { columnCoronae } from "../cells/columnCoronae";
+import { drawnColumn } from "../cells/drawnColumn";
 import { InsertCell } from "../cells/InsertCell";
 import { useNotebookNames } from "../cells/notebookNames";
 import { useCellDrag } from "../cells/useCellDrag";
@@ -66,6 +67,7 @@ export function Sheet({
               coronae={
                 cell.kind === "column" ? columnCoronae(cell.name, answered?.cells ?? noCells) : noCoronae
               }
+              drawn={cell.kind === "column" ? drawnColumn(evaluation, answered?.cells ?? noCells) : null}
               notes={notesOf(cell.id)}
               isLate={late.has(cell.id)}
               task={tasks?.get(cell.id)}

@@ -23,6 +23,7 @@ function show(cell: Cell, change: Partial<CellViewProps> = {}) {
       readText={cell.text}
       columnGases={undefined}
       coronae={[]}
+      drawn={null}
       notes={evaluation.cells[0]!.result.notes.map((note) => ({ note, letter: null }))}
       isLate={false}
       task={undefined}

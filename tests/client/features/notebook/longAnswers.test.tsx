@@ -41,6 +41,7 @@ function view(
       readText={text}
       columnGases={undefined}
       coronae={[]}
+      drawn={null}
       notes={evaluation.result.notes.map((note) => ({ note, letter: null }))}
       isLate={false}
       task={undefined}

@@ -23,8 +23,6 @@ const inks = {
 const halo: ColumnCorona = {
   gas: "H",
   cell: "halo",
-  escape: "leak",
-  isCoupled: true,
   share: 0.5,
   densityBelow: 2e11,
   altitude: [strip.exobase!, 300e3, 1000e3],

@@ -12,8 +12,6 @@ const { strip } = sampleColumn(ilmara);
 const halo: ColumnCorona = {
   gas: "H",
   cell: "halo",
-  escape: "leak",
-  isCoupled: false,
   share: 0.99,
   densityBelow: 1.01e16,
   altitude: [strip.exobase!, 400e3, 1000e3],

@@ -7,6 +7,7 @@ const Levels = memo(LevelsTable);
 
 export function ColumnAnswer({
   evaluation,
+  drawn,
   coronae,
   unitSystem,
   figureNumber,
@@ -14,18 +15,20 @@ export function ColumnAnswer({
   isNear,
 }: AnswerProps) {
   const { result, gases } = useDeferredValue(evaluation);
+  const isAtRest = drawn !== null && drawn.escape !== null;
   return (
     <>
-      {isNear && (
-        <ColumnFigures
-          evaluation={evaluation}
-          coronae={coronae}
-          unitSystem={unitSystem}
-          number={figureNumber}
-        />
+      {isNear && drawn && (
+        <ColumnFigures drawn={drawn} coronae={coronae} unitSystem={unitSystem} number={figureNumber} />
       )}
       {(result.tables.levels?.length ?? 0) > 0 && (
-        <Levels result={result} gases={gases} unitSystem={unitSystem} number={tableNumber} />
+        <Levels
+          result={result}
+          gases={gases}
+          unitSystem={unitSystem}
+          number={tableNumber}
+          isAtRest={isAtRest}
+        />
       )}
     </>
   );

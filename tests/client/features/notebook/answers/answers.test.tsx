@@ -3,6 +3,7 @@ import { describe, expect, it } from "vitest";
 import { plainText } from "../../../../../src/lib/richText";
 import { productsRich } from "../../../../../src/ui/tables/ChannelsTable";
 import { answers, countResults } from "../../../../../src/features/notebook/cells/answers/answers";
+import { drawnColumn } from "../../../../../src/features/notebook/cells/drawnColumn";
 import { cellNamed, evaluatedHalo, haloCells } from "./haloNotebook";
 
 const cells = evaluatedHalo();
@@ -13,6 +14,7 @@ function show(name: string, from = cells) {
   return render(
     <Answer
       evaluation={evaluation}
+      drawn={drawnColumn(evaluation, from)}
       columnGases={["CO2", "O", "H"]}
       coronae={[]}
       notes={[]}

@@ -10,7 +10,7 @@ describe("coronae of a column", () => {
   it("are found by the escape cell that they rest on", () => {
     const [halo, ...others] = columnCoronae("dayside", cells);
     expect(others).toEqual([]);
-    expect(halo).toMatchObject({ gas: "H", cell: "halo", escape: "leak", isCoupled: false });
+    expect(halo).toMatchObject({ gas: "H", cell: "halo" });
     const leak = cellNamed(cells, "leak").result.values;
     expect(halo!.densityBelow).toBe(leak["H.number_density"]!.value);
     expect(halo!.altitude[0]).toBe(leak["exobase.altitude"]!.value);
