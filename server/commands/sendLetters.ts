@@ -22,7 +22,7 @@ export async function claimLetter(db: Db, at: Date) {
     .for("update", { skipLocked: true });
   const [letter] = await db
     .update(letters)
-    .set({ state: "sending", tries: sql`${letters.tries} + 1` })
+    .set({ state: "sending", dueAt: at, tries: sql`${letters.tries} + 1` })
     .where(inArray(letters.id, due))
     .returning();
   return letter;
@@ -60,16 +60,21 @@ export async function giveUp(db: Db, { id }: ClaimedLetter, failure: string): Pr
   await db.update(letters).set({ state: "failed", failure }).where(eq(letters.id, id));
 }
 
+/** How long sending one letter may take, in ms, before nobody is sending it any more. */
+const longestSending = 10 * 60_000;
+
 /**
  * Closes the letters that a server left half sent when it stopped: they may have gone out, so they are not sent again.
- * Call it at the start, of a server that alone sends. Answers how many.
+ * Answers how many.
  */
-export async function closeHalfSent(db: Db): Promise<number> {
+export async function closeHalfSent(db: Db, at: Date): Promise<number> {
   const failure = "The server stopped while it was being sent; it may have arrived.";
   const closed = await db
     .update(letters)
     .set({ state: "failed", failure })
-    .where(eq(letters.state, "sending"))
+    .where(
+      and(eq(letters.state, "sending"), lte(letters.dueAt, new Date(at.getTime() - longestSending))),
+    )
     .returning({ id: letters.id });
   return closed.length;
 }

@@ -1,6 +1,6 @@
 /** Invitations by a link in a letter: to a group, or to a notebook. */
 import { z } from "zod";
-import { emailAddress } from "./accounts";
+import { emailAddress } from "./emailAddress";
 import { person } from "./people";
 import { groupRole, shareRole } from "./roles";
 

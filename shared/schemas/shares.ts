@@ -1,6 +1,6 @@
 /** Who may see a notebook, and by which role. */
 import { z } from "zod";
-import { emailAddress } from "./accounts";
+import { emailAddress } from "./emailAddress";
 import { notebookInvitation } from "./invitations";
 import { person } from "./people";
 import { groupRole, shareRole } from "./roles";

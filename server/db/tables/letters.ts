@@ -25,7 +25,7 @@ export const letters = pgTable(
     /** How many times sending was begun. */
     tries: integer("tries").notNull().default(0),
     createdAt: timestamp("created_at", { withTimezone: true }).notNull(),
-    /** Not before then. */
+    /** Not before then; while it is being sent, since then. */
     dueAt: timestamp("due_at", { withTimezone: true }).notNull(),
     sentAt: timestamp("sent_at", { withTimezone: true }),
     /** What the last try that went wrong said. */
