@@ -26,7 +26,7 @@ export function GroupsPage() {
       <p className="pt-8 text-ink2 italic">People who share notebooks</p>
       {groups.data.length === 0 ? (
         <p className="max-w-[34em] pt-28 type-abstract">
-          You are in no group yet. A lead can add you by your e-mail address, or you can found one and be its
+          You are in no group yet. A lead can invite you by your e-mail address, or you can found one and be its
           lead.
         </p>
       ) : (
