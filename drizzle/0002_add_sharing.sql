@@ -67,7 +67,7 @@ ALTER TABLE "invitations" ADD CONSTRAINT "invitations_notebook_id_notebooks_id_f
 ALTER TABLE "invitations" ADD CONSTRAINT "invitations_invited_by_users_id_fk" FOREIGN KEY ("invited_by") REFERENCES "public"."users"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "letters" ADD CONSTRAINT "letters_to_user_id_users_id_fk" FOREIGN KEY ("to_user_id") REFERENCES "public"."users"("id") ON DELETE set null ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "mail_choices" ADD CONSTRAINT "mail_choices_user_id_users_id_fk" FOREIGN KEY ("user_id") REFERENCES "public"."users"("id") ON DELETE cascade ON UPDATE no action;--> statement-breakpoint
-CREATE INDEX "acts_group_id" ON "acts" USING btree ("group_id","id");--> statement-breakpoint
+CREATE INDEX "acts_group_id" ON "acts" USING btree ("group_id","at","id");--> statement-breakpoint
 CREATE INDEX "acts_actor_id" ON "acts" USING btree ("actor_id");--> statement-breakpoint
 CREATE UNIQUE INDEX "invitations_open_to_group" ON "invitations" USING btree ("group_id","email") WHERE accepted_at is null and revoked_at is null;--> statement-breakpoint
 CREATE UNIQUE INDEX "invitations_open_to_notebook" ON "invitations" USING btree ("notebook_id","email") WHERE accepted_at is null and revoked_at is null;--> statement-breakpoint

@@ -62,7 +62,11 @@ async function apply(
 ): Promise<void> {
   const { id, groupId, notebookId } = invitation;
   await db.transaction(async (tx) => {
-    const target = await lockTarget(tx, groupId !== null ? { groupId } : { notebookId: notebookId! }, actorId);
+    const target = await lockTarget(
+      tx,
+      groupId !== null ? { groupId } : { notebookId: notebookId! },
+      actorId,
+    );
     const [changed] = await tx
       .update(invitations)
       .set(what.set)

@@ -8,10 +8,7 @@ import { conflict, notFound } from "../errors";
  *
  * @throws AppError if it is gone or in the bin, or has another owner by now
  */
-export async function lockNotebook(
-  tx: Db,
-  { notebookId, ownerId }: { notebookId: string; ownerId: string },
-) {
+export async function lockNotebook(tx: Db, { notebookId, ownerId }: { notebookId: string; ownerId: string }) {
   const [notebook] = await tx
     .select({
       ownerId: notebooks.ownerId,

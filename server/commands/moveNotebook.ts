@@ -13,7 +13,12 @@ import { recordAct, type Act } from "./recordAct";
  */
 export async function moveNotebook(
   db: Db,
-  { notebookId, groupId, actorId, at }: { notebookId: string; groupId: string | null; actorId: string; at: Date },
+  {
+    notebookId,
+    groupId,
+    actorId,
+    at,
+  }: { notebookId: string; groupId: string | null; actorId: string; at: Date },
 ): Promise<void> {
   await db.transaction(async (tx) => {
     if (groupId !== null) await requireWriter(tx, groupId, actorId);

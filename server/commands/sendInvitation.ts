@@ -61,7 +61,12 @@ export async function lockTarget(
   tx: Db,
   to: { groupId: string } | { notebookId: string },
   actorId: string,
-): Promise<{ groupId: string | null; subject: "group" | "notebook"; subjectId: string; subjectName: string }> {
+): Promise<{
+  groupId: string | null;
+  subject: "group" | "notebook";
+  subjectId: string;
+  subjectName: string;
+}> {
   if ("groupId" in to) {
     const { name } = await lockGroup(tx, { groupId: to.groupId, actorId });
     return { groupId: to.groupId, subject: "group", subjectId: to.groupId, subjectName: name };
@@ -95,9 +100,7 @@ async function makeRoom(
     .from(invitations)
     .where(
       and(
-        "groupId" in to
-          ? eq(invitations.groupId, to.groupId)
-          : eq(invitations.notebookId, to.notebookId),
+        "groupId" in to ? eq(invitations.groupId, to.groupId) : eq(invitations.notebookId, to.notebookId),
         eq(invitations.email, email),
         isNull(invitations.acceptedAt),
         isNull(invitations.revokedAt),

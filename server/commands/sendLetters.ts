@@ -72,9 +72,7 @@ export async function closeHalfSent(db: Db, at: Date): Promise<number> {
   const closed = await db
     .update(letters)
     .set({ state: "failed", failure })
-    .where(
-      and(eq(letters.state, "sending"), lte(letters.dueAt, new Date(at.getTime() - longestSending))),
-    )
+    .where(and(eq(letters.state, "sending"), lte(letters.dueAt, new Date(at.getTime() - longestSending))))
     .returning({ id: letters.id });
   return closed.length;
 }

@@ -1,5 +1,12 @@
 import type { Logger } from "pino";
-import { claimLetter, closeHalfSent, giveUp, markSent, putBack, type ClaimedLetter } from "../commands/sendLetters";
+import {
+  claimLetter,
+  closeHalfSent,
+  giveUp,
+  markSent,
+  putBack,
+  type ClaimedLetter,
+} from "../commands/sendLetters";
 import type { Db } from "../db/client";
 import type { Transport } from "../mail/transport";
 

@@ -1,4 +1,8 @@
-import { choosableMailKinds, type KeptMailResponse, type MailChoicesResponse } from "../../shared/schemas/mail";
+import {
+  choosableMailKinds,
+  type KeptMailResponse,
+  type MailChoicesResponse,
+} from "../../shared/schemas/mail";
 import type { KeptMailRow, MailChoiceRow } from "../db/reads/mail";
 
 /** What a person has not spoken of, they want. */

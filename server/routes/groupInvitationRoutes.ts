@@ -29,7 +29,11 @@ interface Parts {
 export function groupInvitationRoutes({ db, post, linkOrigin }: Parts): Router {
   const router = Router();
 
-  const compose = async (group: GroupRow, actor: Actor, { email, role }: { email: string; role: GroupRole }) => {
+  const compose = async (
+    group: GroupRow,
+    actor: Actor,
+    { email, role }: { email: string; role: GroupRole },
+  ) => {
     const { token, tokenHash } = newInvitationToken();
     const account = await findUserByEmail(db, email);
     const letter = groupInvitation(

@@ -1,4 +1,4 @@
-import { and, count, desc, eq, gte, inArray, lt } from "drizzle-orm";
+import { and, count, desc, eq, gte, inArray, lt, sql } from "drizzle-orm";
 import { actKinds, type ActName, type AuditQuery } from "../../../shared/schemas/audit";
 import type { Db } from "../client";
 import { acts } from "../tables/acts";
@@ -24,19 +24,20 @@ export async function listActs(
     })
     .from(acts)
     .leftJoin(users, eq(users.id, acts.actorId))
-    .where(and(under(groupId, query), before === undefined ? undefined : lt(acts.id, before)))
-    .orderBy(desc(acts.id));
+    .where(and(under(groupId, query), before === undefined ? undefined : earlierThan(before)))
+    .orderBy(desc(acts.at), desc(acts.id));
   return limit === null ? lines : lines.limit(limit);
 }
+
+/** Of lines of one moment the later written stands first. */
+const earlierThan = (id: number) =>
+  sql`(${acts.at}, ${acts.id}) < (select line.at, line.id from acts as line where line.id = ${id})`;
 
 export type ActRow = Awaited<ReturnType<typeof listActs>>[number];
 
 /** How many lines there are under the filters, wherever the page begins. */
 export async function countActs(db: Db, groupId: string, query: AuditQuery): Promise<number> {
-  const [counted] = await db
-    .select({ lines: count() })
-    .from(acts)
-    .where(under(groupId, query));
+  const [counted] = await db.select({ lines: count() }).from(acts).where(under(groupId, query));
   return counted?.lines ?? 0;
 }
 

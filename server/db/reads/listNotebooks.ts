@@ -40,12 +40,7 @@ export async function listNotebooks(db: Db, actorId: string, { q, order, place }
     .leftJoin(groups, eq(groups.id, notebooks.groupId))
     .leftJoin(notebookShares, shareOf(actorId))
     .leftJoin(groupMembers, membershipOf(actorId))
-    .where(
-      and(
-        inPlace[place],
-        q.trim() === "" ? undefined : sought,
-      ),
-    )
+    .where(and(inPlace[place], q.trim() === "" ? undefined : sought))
     .orderBy(
       ...(order === "title" ? [asc(sql`lower(${notebooks.title})`)] : [desc(notebooks.savedAt)]),
       asc(notebooks.id),

@@ -21,5 +21,8 @@ export const acts = pgTable(
     subjectName: text("subject_name").notNull(),
     details: json("details").$type<ActDetails>().notNull(),
   },
-  (table) => [index("acts_group_id").on(table.groupId, table.id), index("acts_actor_id").on(table.actorId)],
+  (table) => [
+    index("acts_group_id").on(table.groupId, table.at, table.id),
+    index("acts_actor_id").on(table.actorId),
+  ],
 );

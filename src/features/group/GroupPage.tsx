@@ -69,9 +69,7 @@ export function GroupPage({ groupId }: { groupId: string }) {
           </div>
         </aside>
       </div>
-      {isRenaming && (
-        <RenameGroupDialog groupId={groupId} name={name} onClose={() => setRenaming(false)} />
-      )}
+      {isRenaming && <RenameGroupDialog groupId={groupId} name={name} onClose={() => setRenaming(false)} />}
     </Page>
   );
 }

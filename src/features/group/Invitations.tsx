@@ -61,7 +61,7 @@ function InvitationLine({ groupId, invitation }: { groupId: string; invitation: 
   return (
     <li className="grid grid-cols-[minmax(0,1fr)_auto] items-baseline gap-x-18 gap-y-2 py-10 mid:grid-cols-[minmax(0,1.5fr)_130px_minmax(0,1fr)_auto]">
       <span className="min-w-0">
-        <span className="block overflow-hidden font-serif text-[19px]/[26px] text-ellipsis">{email}</span>
+        <span className="block font-serif text-[19px]/[26px] [overflow-wrap:anywhere]">{email}</span>
         <StateWord state={hasLapsed ? "remark" : "waits"} className="font-normal">
           {hasLapsed ? "lapsed without an answer" : "no answer yet"}
         </StateWord>

@@ -56,11 +56,10 @@ export function InviteForm({ groupId }: { groupId: string }) {
         }}
         fault={complaint ?? serverSays}
       />
-      <div className="pt-26 font-sans text-[15px]/[24px]">
-        as{" "}
-        <WordMenu label="Role of the invited" value={role} options={groupRoleOptions} onChange={setRole} />
+      <div className="font-sans text-[15px]/[24px] mid:pt-26">
+        as <WordMenu label="Role of the invited" value={role} options={groupRoleOptions} onChange={setRole} />
       </div>
-      <Button type="submit" busy={invite.isPending} className="mt-21">
+      <Button type="submit" busy={invite.isPending} className="mid:mt-21">
         Invite
       </Button>
     </form>

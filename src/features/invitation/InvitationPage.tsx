@@ -36,7 +36,11 @@ export function InvitationPage({ token, account }: InvitationPageProps) {
   return <OpenInvitation token={token} account={account} invitation={invitation.data} />;
 }
 
-function OpenInvitation({ token, account, invitation }: InvitationPageProps & { invitation: InvitationResponse }) {
+function OpenInvitation({
+  token,
+  account,
+  invitation,
+}: InvitationPageProps & { invitation: InvitationResponse }) {
   const { to, name, role, email, invitedBy, expiresAt } = invitation;
   const queryClient = useQueryClient();
   const navigate = useNavigate();

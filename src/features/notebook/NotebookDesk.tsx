@@ -86,7 +86,9 @@ export function NotebookDesk({ notebook, person }: NotebookDeskProps) {
               isKept={isKept}
             />
           ) : (
-            <span className="save-status">{notebook.isArchived ? "archived, to be read" : "you may read it"}</span>
+            <span className="save-status">
+              {notebook.isArchived ? "archived, to be read" : "you may read it"}
+            </span>
           )
         }
         unitSystem={unitSystem}

@@ -24,7 +24,11 @@ it("removes, with its versions, what has been in the bin for over 30 days, and n
     await buildNotebook(db, { owner }),
   ];
   await deleteNotebook(db, { notebookId: old.id, actorId: owner.id, at: new Date("2026-10-31T12:00:00Z") });
-  await deleteNotebook(db, { notebookId: recent.id, actorId: owner.id, at: new Date("2026-11-02T12:00:00Z") });
+  await deleteNotebook(db, {
+    notebookId: recent.id,
+    actorId: owner.id,
+    at: new Date("2026-11-02T12:00:00Z"),
+  });
 
   expect(await emptyBin(db, { at: new Date("2026-12-01T12:00:00Z") })).toBe(1);
   const left = await db.select({ id: notebooks.id }).from(notebooks);

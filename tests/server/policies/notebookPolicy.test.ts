@@ -107,7 +107,12 @@ describe("who may do what with a notebook", () => {
   });
 
   it("a guest who is co-author in person writes", () => {
-    const facts = { ...private_, actorGroupRole: "guest", groupRole: "reader", shareRole: "co-author" } as const;
+    const facts = {
+      ...private_,
+      actorGroupRole: "guest",
+      groupRole: "reader",
+      shareRole: "co-author",
+    } as const;
     expect(notebookPolicy.edit(other, facts)).toBe(true);
   });
 

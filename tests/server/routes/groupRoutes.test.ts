@@ -191,9 +191,7 @@ describe("members", () => {
       [
         [lead, second],
         [second, lead],
-      ].map(async ([by, whom]) =>
-        (await server.as(by!)).delete(`/api/groups/${id}/members/${whom!.id}`),
-      ),
+      ].map(async ([by, whom]) => (await server.as(by!)).delete(`/api/groups/${id}/members/${whom!.id}`)),
     );
     expect(answers.filter(({ status }) => status === 204)).toHaveLength(1);
     const group = groupResponse.parse((await (await server.as(third)).get(`/api/groups/${id}`)).body);

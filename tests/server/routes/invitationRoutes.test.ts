@@ -171,7 +171,9 @@ describe("an invitation to a group", () => {
   it("is refused where the person has switched such letters off", async () => {
     const group = await buildGroup(server.db);
     const user = await buildUser(server.db);
-    await (await server.as(user))
+    await (
+      await server.as(user)
+    )
       .patch("/api/account/mail")
       .send({ kind: "group_invitation", isWanted: false });
     const lead = await server.as(group.lead);

@@ -41,7 +41,9 @@ describe("the routes of shares", () => {
     const { id } = await buildNotebook(server.db, { owner });
     const agent = await server.as(owner);
     const at = `/api/notebooks/${id}`;
-    expect((await agent.post(`${at}/shares`).send({ email: "x", role: "owner" })).body.issues).toHaveLength(2);
+    expect((await agent.post(`${at}/shares`).send({ email: "x", role: "owner" })).body.issues).toHaveLength(
+      2,
+    );
     expect((await agent.patch(`${at}/shares/${nobody}`).send({ role: "owner" })).status).toBe(422);
     expect((await agent.put(`${at}/group-share`).send({ role: "owner" })).status).toBe(422);
     expect((await agent.patch(`${at}/shares/${nobody}`).send({ role: "reader" })).status).toBe(404);
@@ -151,7 +153,9 @@ describe("sharing with a person", () => {
   it("not with oneself", async () => {
     const owner = await buildUser(server.db);
     const { id } = await buildNotebook(server.db, { owner });
-    const answer = await (await server.as(owner))
+    const answer = await (
+      await server.as(owner)
+    )
       .post(`/api/notebooks/${id}/shares`)
       .send({ email: owner.email, role: "reader" });
     expect(answer.body).toMatchObject({ code: "own_notebook", issues: [{ path: "email" }] });
@@ -170,7 +174,11 @@ describe("sharing with the group", () => {
     const { id } = await buildNotebook(server.db, { owner, groupId: group.id });
     const agent = await server.as(owner);
     const shared = await agent.put(`/api/notebooks/${id}/group-share`).send({ role: "co-author" });
-    expect(sharesResponse.parse(shared.body).group).toMatchObject({ role: "co-author", people: 3, guests: 1 });
+    expect(sharesResponse.parse(shared.body).group).toMatchObject({
+      role: "co-author",
+      people: 3,
+      guests: 1,
+    });
     const roleOf = async (person: typeof owner) =>
       (await (await server.as(person)).get(`/api/notebooks/${id}`)).body.role;
     expect(await roleOf(group.lead)).toBe("co-author");

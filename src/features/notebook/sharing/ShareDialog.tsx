@@ -10,7 +10,7 @@ import { Button } from "../../../ui/Button";
 import { Dialog } from "../../../ui/Dialog";
 import { Message } from "../../../ui/Message";
 import { useNotify } from "../../../ui/Notices";
-import { StateWord } from "../../../ui/StateMark";
+import { StateMark } from "../../../ui/StateMark";
 import { TextButton } from "../../../ui/TextButton";
 import { HandOverNotebook } from "./HandOverNotebook";
 import { ShareForm } from "./ShareForm";
@@ -158,11 +158,14 @@ function ShareList({ notebook, shares, onLeft, onHandOver }: ShareListProps) {
           key={invitationId}
           name={email}
           about={
-            <StateWord state={hasLapsed ? "remark" : "waits"} className="font-normal whitespace-normal">
-              {hasLapsed
-                ? `invited on ${onDay(invitedAt)}, lapsed without an answer`
-                : `invited on ${onDay(invitedAt)}, no answer yet; lapses on ${onDay(expiresAt)}`}
-            </StateWord>
+            <span className="flex items-baseline gap-6">
+              <StateMark state={hasLapsed ? "remark" : "waits"} className="translate-y-1" />
+              <span className={hasLapsed ? "" : "text-dusk"}>
+                {hasLapsed
+                  ? `invited on ${onDay(invitedAt)}, lapsed without an answer`
+                  : `invited on ${onDay(invitedAt)}, no answer yet; lapses on ${onDay(expiresAt)}`}
+              </span>
+            </span>
           }
           role={role}
           onRole={(next) =>

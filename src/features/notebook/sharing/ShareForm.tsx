@@ -52,9 +52,14 @@ export function ShareForm({ notebookId }: { notebookId: string }) {
           }}
           fault={complaint ?? serverSays}
         />
-        <div className="pt-26 font-sans text-[15px]/[24px]">
+        <div className="font-sans text-[15px]/[24px] mid:pt-26">
           as{" "}
-          <WordMenu label="Role of the new reader" value={role} options={shareRoleOptions} onChange={setRole} />
+          <WordMenu
+            label="Role of the new reader"
+            value={role}
+            options={shareRoleOptions}
+            onChange={setRole}
+          />
         </div>
       </div>
       <div className="flex flex-wrap items-center gap-x-18 gap-y-8 pt-14">

@@ -17,7 +17,7 @@ export function ShareLine({ name, about, role, onRole, acts }: ShareLineProps) {
   return (
     <li className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-18 gap-y-4 py-9 mid:grid-cols-[minmax(0,1fr)_130px_160px]">
       <span className="col-span-2 min-w-0 mid:col-span-1">
-        <span className="block overflow-hidden font-serif text-[18px]/[25px] text-ellipsis">{name}</span>
+        <span className="block font-serif text-[18px]/[25px] [overflow-wrap:anywhere]">{name}</span>
         <span className="block type-meta text-ink2">{about}</span>
       </span>
       <span className="font-sans text-[15px]/[24px]">

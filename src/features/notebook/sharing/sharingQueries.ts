@@ -12,10 +12,7 @@ export const sharesQuery = (id: string) =>
   });
 
 /** Changes to who may see a notebook. Whatever the answer, what they touch is asked for anew. */
-function useSharesChange<Input>(
-  id: string,
-  change: (input: Input) => Promise<unknown>,
-) {
+function useSharesChange<Input>(id: string, change: (input: Input) => Promise<unknown>) {
   const queryClient = useQueryClient();
   return useMutation({
     mutationFn: change,

@@ -4,7 +4,7 @@ import type { AuditResponse } from "../../../../shared/schemas/audit";
 import type { GroupResponse } from "../../../../shared/schemas/groups";
 import type { GroupInvitation } from "../../../../shared/schemas/invitations";
 import { GroupPage } from "../../../../src/features/group/GroupPage";
-import { answerWith, problemAnswer } from "../../answers";
+import { answerWith, problemAnswer, type Asked } from "../../answers";
 import { renderPage } from "../../renderPage";
 
 const jorun = { id: "j", name: "Jorun Aldaker", email: "j.aldaker@carrow.example" };
@@ -115,7 +115,14 @@ describe("for its lead", () => {
   });
 
   it("tells what has happened in sentences, filtered, page by page, and as a table", async () => {
-    const asked = answerWith(forLead);
+    const asked: Asked[] = answerWith({
+      ...forLead,
+      "GET /groups/g/audit": () => ({
+        body: asked.at(-1)!.path.includes("before=8")
+          ? { ...trail, lines: [{ ...trail.lines[0]!, id: 7 }], next: null }
+          : trail,
+      }),
+    });
     renderPage(<GroupPage groupId="g" />, { user: jorun });
     const lines = await screen.findByRole("list", { name: /What has happened/ });
     expect(lines.textContent).toContain("Jorun Aldaker made Pello Marrash guest; was researcher");
@@ -123,10 +130,13 @@ describe("for its lead", () => {
       "/notebooks/n",
     );
     fireEvent.click(screen.getByRole("button", { name: "Earlier" }));
-    await waitFor(() => expect(asked.some(({ path }) => path === "/groups/g/audit?before=8")).toBe(true));
+    await waitFor(() => expect(within(lines).getAllByRole("listitem")).toHaveLength(3));
+    expect(screen.queryByRole("button", { name: "Earlier" })).toBeNull();
     fireEvent.click(screen.getByRole("button", { name: "To what: anything" }));
     fireEvent.click(await screen.findByRole("menuitemradio", { name: /notebooks/ }));
-    await waitFor(() => expect(asked.some(({ path }) => path === "/groups/g/audit?kind=notebooks")).toBe(true));
+    await waitFor(() =>
+      expect(asked.some(({ path }) => path === "/groups/g/audit?kind=notebooks")).toBe(true),
+    );
     const table = screen.getByRole("link", { name: /CSV/ });
     expect(table.getAttribute("href")).toBe("/api/groups/g/audit.csv?kind=notebooks");
   });
