@@ -112,6 +112,9 @@ describe("sending by a mail server", () => {
 
   it("whatever else goes wrong is not tried again", () => {
     const delivery = deliveryOf(new Error("out of memory"));
-    expect(delivery).toMatchObject({ outcome: "never", failure: expect.stringContaining("may have arrived") });
+    expect(delivery).toMatchObject({
+      outcome: "never",
+      failure: expect.stringContaining("may have arrived"),
+    });
   });
 });
