@@ -4,7 +4,7 @@
  */
 import { pino } from "pino";
 import { seedDemo } from "../server/demo/seedDemo";
-import { readEnv } from "../server/env";
+import { linkOriginOf, readEnv } from "../server/env";
 import { createEvaluator } from "../server/jobs/evaluator";
 import { createSummaries } from "../server/jobs/summaries";
 import { openData } from "../server/openData";
@@ -14,7 +14,11 @@ try {
   const data = await openData(env);
   const evaluator = createEvaluator();
   const summaries = createSummaries({ db: data.db, evaluator, logger: pino({ level: env.logLevel }) });
-  const isNew = await seedDemo(data.db, { evaluator, now: new Date() });
+  const isNew = await seedDemo(data.db, {
+    evaluator,
+    now: new Date(),
+    linkOrigin: linkOriginOf(env),
+  });
   await summaries.catchUp();
   await summaries.idle();
   await summaries.close();

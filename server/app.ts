@@ -4,6 +4,7 @@ import type { Auth } from "./auth/auth";
 import type { Db } from "./db/client";
 import { notFound } from "./errors";
 import type { Evaluator } from "./jobs/evaluator";
+import type { Post } from "./jobs/post";
 import type { Summaries } from "./jobs/summaries";
 import { clientFiles } from "./middleware/clientFiles";
 import { errorHandler } from "./middleware/errorHandler";
@@ -13,10 +14,16 @@ import { sameOrigin } from "./middleware/sameOrigin";
 import { securityHeaders } from "./middleware/securityHeaders";
 import { session } from "./middleware/session";
 import { accountRoutes } from "./routes/accountRoutes";
+import { auditRoutes } from "./routes/auditRoutes";
+import { groupInvitationRoutes } from "./routes/groupInvitationRoutes";
 import { groupRoutes } from "./routes/groupRoutes";
 import { healthRoutes } from "./routes/healthRoutes";
+import { invitationRoutes } from "./routes/invitationRoutes";
+import { keepingRoutes } from "./routes/keepingRoutes";
+import { mailRoutes } from "./routes/mailRoutes";
 import { notebookRoutes } from "./routes/notebookRoutes";
 import { sessionRoutes } from "./routes/sessionRoutes";
+import { shareRoutes } from "./routes/shareRoutes";
 import { versionRoutes } from "./routes/versionRoutes";
 
 export interface AppParts {
@@ -24,8 +31,13 @@ export interface AppParts {
   auth: Auth;
   evaluator: Evaluator;
   summaries: Summaries;
+  post: Post;
   logger: Logger;
   demo: boolean;
+  /** Whether letters are kept to be looked at by anyone, in place of being sent. */
+  showsMail: boolean;
+  /** Where links in letters lead, without a slash at its end. */
+  linkOrigin: () => string;
   /** Public origin, where it is not the address that requests name. */
   origin?: string | undefined;
   proxies?: number;
@@ -36,7 +48,8 @@ export interface AppParts {
 
 /** The whole server but its listening: what every request passes, the routes, the page, the answer to failures. */
 export function createApp(parts: AppParts): Express {
-  const { db, auth, evaluator, summaries, logger, demo, origin, proxies = 0, clientFolder } = parts;
+  const { db, auth, evaluator, summaries, post, logger, demo, origin, proxies = 0, clientFolder } = parts;
+  const { showsMail, linkOrigin } = parts;
   const limits = rateLimits(parts.tries ?? usualTries);
   const app = express();
   app.disable("x-powered-by");
@@ -52,8 +65,14 @@ export function createApp(parts: AppParts): Express {
   api.use(sameOrigin(origin), express.json({ limit: "8mb" }), session(auth));
   api.use(sessionRoutes({ db, auth, demo, signInLimits: limits.signIn }));
   api.use(accountRoutes({ db, auth, demo, signUpLimits: limits.signUp }));
+  api.use(invitationRoutes({ db }));
+  api.use(mailRoutes({ db, showsMail }));
   api.use(groupRoutes({ db }));
+  api.use(groupInvitationRoutes({ db, post, linkOrigin }));
+  api.use(auditRoutes({ db }));
   api.use(notebookRoutes({ db, summaries }));
+  api.use(keepingRoutes({ db, summaries }));
+  api.use(shareRoutes({ db, post, linkOrigin }));
   api.use(versionRoutes({ db, evaluator, summaries }));
   api.use(() => {
     throw notFound("address");

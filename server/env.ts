@@ -14,13 +14,35 @@ const environment = z
     TENUITY_DEMO: z.enum(["on", "off"], "neither on nor off").default("off"),
     TENUITY_ORIGIN: origin.optional(),
     TENUITY_PROXIES: z.coerce.number("not a number").int().min(0).max(10).default(0),
+    TENUITY_SMTP_HOST: z.string().min(1).optional(),
+    TENUITY_SMTP_PORT: z.coerce.number("not a number").int().min(1).max(65_535).default(587),
+    TENUITY_SMTP_USER: z.string().min(1).optional(),
+    TENUITY_SMTP_PASSWORD: z.string().min(1).optional(),
+    TENUITY_SMTP_FROM: z.string().min(3).max(320).optional(),
     LOG_LEVEL: z.enum(["fatal", "error", "warn", "info", "debug", "trace", "silent"]).default("info"),
   })
   .refine((env) => !(env.TENUITY_DEMO === "on" && env.NODE_ENV === "production"), {
     path: ["TENUITY_DEMO"],
     message:
       "on lets anyone in without a password and is refused together with NODE_ENV=production; unset one of the two",
+  })
+  .refine((env) => env.TENUITY_SMTP_HOST === undefined || env.TENUITY_SMTP_FROM !== undefined, {
+    path: ["TENUITY_SMTP_FROM"],
+    message: "needed with TENUITY_SMTP_HOST: the address that letters come from",
+  })
+  .refine((env) => (env.TENUITY_SMTP_USER === undefined) === (env.TENUITY_SMTP_PASSWORD === undefined), {
+    path: ["TENUITY_SMTP_PASSWORD"],
+    message: "set it together with TENUITY_SMTP_USER, or neither",
   });
+
+/** A mail server to send by. Port 465 is encrypted from the start; any other is upgraded where the server offers it. */
+export interface SmtpSettings {
+  host: string;
+  port: number;
+  user: string | undefined;
+  password: string | undefined;
+  from: string;
+}
 
 export interface Env {
   /** Address to listen on; every one where it is left out. */
@@ -35,6 +57,8 @@ export interface Env {
   origin: string | undefined;
   /** Proxies in front of the server whose word on the caller's address is taken. */
   proxies: number;
+  /** null: letters are kept in the database and go nowhere. */
+  smtp: SmtpSettings | null;
   logLevel: string;
 }
 
@@ -55,6 +79,19 @@ export function readEnv(variables: Record<string, string | undefined>): Env {
     demo: env.TENUITY_DEMO === "on",
     origin: env.TENUITY_ORIGIN,
     proxies: env.TENUITY_PROXIES,
+    smtp: env.TENUITY_SMTP_HOST
+      ? {
+          host: env.TENUITY_SMTP_HOST,
+          port: env.TENUITY_SMTP_PORT,
+          user: env.TENUITY_SMTP_USER,
+          password: env.TENUITY_SMTP_PASSWORD,
+          from: env.TENUITY_SMTP_FROM!,
+        }
+      : null,
     logLevel: env.LOG_LEVEL,
   };
 }
+
+/** Where the server is reached by links: its public origin, or this machine. */
+export const linkOriginOf = ({ origin, port }: Pick<Env, "origin" | "port">): string =>
+  origin ?? `http://localhost:${port}`;

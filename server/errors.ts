@@ -45,6 +45,37 @@ export const crossOrigin = () =>
 export const conflict = (code: string, detail: string, issues?: ProblemIssue[]) =>
   new AppError(409, code, "Not possible as things stand", detail, issues ? { issues } : {});
 
+export const archived = () =>
+  conflict(
+    "archived",
+    "This notebook is archived, to be read only. Its owner can take it out of the archive to go on.",
+  );
+
+export const invitationUnknown = () =>
+  new AppError(
+    404,
+    "not_found",
+    "Not found",
+    "There is no invitation behind this link, or a newer letter has replaced it. Look for the last one.",
+  );
+
+export const invitationUsed = () =>
+  conflict("invitation_used", "This invitation was accepted already; it is good once. Sign in to go on.");
+
+export const invitationRevoked = () =>
+  conflict("invitation_revoked", "This invitation was taken back. Ask whoever sent it.");
+
+export const invitationLapsed = () =>
+  conflict("invitation_lapsed", "This invitation is over. Ask whoever sent it to send it again.");
+
+export const invitationForAnother = (email: string) =>
+  new AppError(
+    403,
+    "invitation_for_another",
+    "For another address",
+    `This invitation is for ${email}. Sign in with that address, or ask to be invited by yours.`,
+  );
+
 export const staleRevision = (current: DraftState) =>
   new AppError(
     409,

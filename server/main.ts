@@ -7,10 +7,12 @@ import { pino, type Logger } from "pino";
 import { createApp } from "./app";
 import { createAuth } from "./auth/auth";
 import { seedDemo } from "./demo/seedDemo";
-import { readEnv, type Env } from "./env";
+import { linkOriginOf, readEnv, type Env } from "./env";
 import { createEvaluator } from "./jobs/evaluator";
 import { startHousekeeping } from "./jobs/housekeeping";
+import { createPost } from "./jobs/post";
 import { createSummaries } from "./jobs/summaries";
+import { drawerTransport, smtpTransport } from "./mail/transport";
 import { openData } from "./openData";
 import { places } from "./places";
 
@@ -43,23 +45,31 @@ async function start(env: Env, logger: Logger): Promise<() => Promise<void>> {
   const { db } = data;
   const evaluator = createEvaluator();
   const summaries = createSummaries({ db, evaluator, logger });
+  const transport = env.smtp ? smtpTransport(env.smtp) : drawerTransport(db);
+  const post = createPost({ db, transport, logger });
   const auth = await createAuth(db, { hasSecureCookies: env.origin?.startsWith("https:") ?? false });
-  if (env.demo) await seedDemo(db, { evaluator, now: new Date() });
+  if (env.demo) await seedDemo(db, { evaluator, now: new Date(), linkOrigin: linkOriginOf(env) });
 
   const hasClient = existsSync(path.join(places.client, "index.html"));
   if (!hasClient) logger.warn({ folder: places.client }, "no built page here; only the API is served");
+  const server = createServer();
+  const address = (): string =>
+    linkOriginOf({ ...env, port: (server.address() as AddressInfo | null)?.port ?? env.port });
   const app = createApp({
     db,
     auth,
     evaluator,
     summaries,
+    post,
     logger,
     demo: env.demo,
+    showsMail: env.demo && env.smtp === null,
+    linkOrigin: address,
     origin: env.origin,
     proxies: env.proxies,
     clientFolder: hasClient ? places.client : undefined,
   });
-  const server = createServer(app);
+  server.on("request", app);
   try {
     await listen(server, env);
   } catch (error) {
@@ -68,14 +78,15 @@ async function start(env: Env, logger: Logger): Promise<() => Promise<void>> {
     throw error;
   }
   const housekeeping = startHousekeeping({ db, auth, logger });
+  post.start();
   await summaries.catchUp();
-  const { port } = server.address() as AddressInfo;
-  process.stdout.write(`Tenuity is on ${env.origin ?? `http://localhost:${port}`}\n`);
+  process.stdout.write(`Tenuity is on ${address()}\n`);
 
   return async () => {
     housekeeping.stop();
     await drain(server);
     await summaries.close();
+    await post.close();
     await evaluator.close();
     await data.close();
   };

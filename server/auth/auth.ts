@@ -5,7 +5,7 @@
 import { DrizzlePostgreSQLAdapter } from "@lucia-auth/adapter-drizzle";
 import { Lucia, TimeSpan } from "lucia";
 import { Argon2id } from "oslo/password";
-import { emailAddress } from "../../shared/schemas/accounts";
+import { emailAddress } from "../../shared/schemas/emailAddress";
 import type { Db } from "../db/client";
 import { findUserByEmail } from "../db/reads/findUser";
 import { sessions } from "../db/tables/sessions";

@@ -2,6 +2,7 @@ import type { Db } from "../db/client";
 import { groupMembers } from "../db/tables/groupMembers";
 import { groups } from "../db/tables/groups";
 import { conflict } from "../errors";
+import { recordAct } from "./recordAct";
 
 /** Founds a group whose first lead is the founder. */
 export async function createGroup(
@@ -21,6 +22,15 @@ export async function createGroup(
     await tx
       .insert(groupMembers)
       .values({ groupId: group.id, userId: founderId, role: "lead", joinedAt: at });
+    await recordAct(tx, {
+      at,
+      groupId: group.id,
+      actorId: founderId,
+      act: "group_founded",
+      subject: "group",
+      subjectId: group.id,
+      subjectName: name,
+    });
     return group;
   });
 }

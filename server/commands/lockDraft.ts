@@ -3,12 +3,12 @@ import type { DraftState } from "../../shared/schemas/notebooks";
 import type { Db } from "../db/client";
 import { notebooks } from "../db/tables/notebooks";
 import { users } from "../db/tables/users";
-import { notFound } from "../errors";
+import { archived, notFound } from "../errors";
 
 /**
  * The draft as it is, with its row locked until the transaction ends: two who write at once come one after the other.
  *
- * @throws AppError if the notebook is gone or in the bin
+ * @throws AppError if the notebook is gone, in the bin or archived
  */
 export async function lockDraft(
   tx: Db,
@@ -22,11 +22,13 @@ export async function lockDraft(
       savedAt: notebooks.savedAt,
       savedBy: notebooks.savedBy,
       lastVersion: notebooks.lastVersion,
+      archivedAt: notebooks.archivedAt,
     })
     .from(notebooks)
     .where(and(eq(notebooks.id, notebookId), isNull(notebooks.deletedAt)))
     .for("update");
   if (!draft) throw notFound("notebook");
+  if (draft.archivedAt !== null) throw archived();
 
   const [saver] = await tx
     .select({ id: users.id, name: users.name })

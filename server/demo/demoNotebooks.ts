@@ -44,6 +44,9 @@ export const demoGroup = {
   members: [DemoPerson, GroupRole][];
 };
 
+/** Of the lead, to the group, without an answer yet. */
+export const demoInvitation = { email: "l.verrano@lomme.example", role: "guest", daysAgo: 3 } as const;
+
 export const demoNotebooks: readonly DemoNotebook[] = [
   {
     file: "ilmara-dayside.md",

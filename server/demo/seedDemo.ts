@@ -11,13 +11,16 @@ import { createGroup } from "../commands/createGroup";
 import { createNotebook } from "../commands/createNotebook";
 import { keepVersion } from "../commands/keepVersion";
 import { saveDraft } from "../commands/saveDraft";
+import { sendInvitation } from "../commands/sendInvitation";
 import { shareWithGroup } from "../commands/shareWithGroup";
 import { shareWithPerson } from "../commands/shareWithPerson";
 import type { Db } from "../db/client";
 import { users } from "../db/tables/users";
 import type { Evaluator } from "../jobs/evaluator";
+import { newInvitationToken } from "../mail/invitationToken";
+import { groupInvitation } from "../mail/templates/groupInvitation";
 import { places } from "../places";
-import { demoGroup, demoNotebooks, type DemoNotebook, type DemoPerson } from "./demoNotebooks";
+import { demoGroup, demoInvitation, demoNotebooks, type DemoNotebook, type DemoPerson } from "./demoNotebooks";
 
 const day = 86_400_000;
 
@@ -32,7 +35,10 @@ interface PreparedState {
  * Puts the demonstration in place, all or nothing: an invented group, its people, their notebooks with kept
  * versions. Acts for the people it invents. Answers false, and changes nothing, where any of them is there already.
  */
-export async function seedDemo(db: Db, { evaluator, now }: { evaluator: Evaluator; now: Date }): Promise<boolean> {
+export async function seedDemo(
+  db: Db,
+  { evaluator, now, linkOrigin }: { evaluator: Evaluator; now: Date; linkOrigin: string },
+): Promise<boolean> {
   const addresses = demoAccounts.map(({ email }) => email);
   const present = await db.select({ id: users.id }).from(users).where(inArray(users.email, addresses));
   if (present.length > 0) return false;
@@ -43,6 +49,7 @@ export async function seedDemo(db: Db, { evaluator, now }: { evaluator: Evaluato
   await db.transaction(async (tx) => {
     const { groupId, idOf } = await seedPeople(tx, now);
     for (const { notebook, states } of histories) await seedNotebook(tx, { notebook, states, groupId, idOf });
+    await seedInvitation(tx, { groupId, actorId: idOf(demoGroup.lead), now, linkOrigin });
   });
   return true;
 }
@@ -91,7 +98,7 @@ async function seedPeople(tx: Db, now: Date) {
   const idOf = (person: DemoPerson): string => ids.get(addressOf(person))!;
   const { name, code, lead, members } = demoGroup;
   const { id: groupId } = await createGroup(tx, { name, code, founderId: idOf(lead), at });
-  for (const [person, role] of members) await addMember(tx, { groupId, email: addressOf(person), role, at });
+  for (const [person, role] of members) await addMember(tx, { groupId, userId: idOf(person), role, at });
   return { groupId, idOf };
 }
 
@@ -114,8 +121,28 @@ async function seedNotebook(
     ({ revision } = await saveDraft(tx, { notebookId, revision, document: state.document, actorId, at: state.at }));
     if (state.kept) await keepVersion(tx, { notebookId, revision, ...state.kept, actorId, at: state.at });
   }
-  await shareWithGroup(tx, { notebookId, role: notebook.groupRole });
+  const share = { notebookId, letter: null, actorId: idOf(notebook.owner), at };
+  await shareWithGroup(tx, { ...share, role: notebook.groupRole });
   for (const [person, role] of notebook.shares) {
-    await shareWithPerson(tx, { notebookId, userId: idOf(person), role, at });
+    await shareWithPerson(tx, { ...share, user: { id: idOf(person), name: nameOf(person) }, role });
   }
+}
+
+const nameOf = (person: DemoPerson): string =>
+  demoAccounts.find(({ email }) => email.startsWith(`${person}@`))!.name;
+
+/** Someone who has not answered yet. */
+async function seedInvitation(
+  tx: Db,
+  parts: { groupId: string; actorId: string; now: Date; linkOrigin: string },
+): Promise<void> {
+  const { groupId, actorId, now, linkOrigin } = parts;
+  const { email, role, daysAgo } = demoInvitation;
+  const { token, tokenHash } = newInvitationToken();
+  const letter = groupInvitation(
+    { address: email, userId: null },
+    { group: demoGroup.name, role, invitedBy: nameOf(demoGroup.lead), href: `${linkOrigin}/invitation#${token}` },
+  );
+  const at = new Date(now.getTime() - daysAgo * day);
+  await sendInvitation(tx, { to: { groupId, role }, email, tokenHash, letter, actorId, at });
 }

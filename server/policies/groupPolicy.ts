@@ -1,5 +1,12 @@
-import type { GroupAbilities, GroupAction, GroupRole } from "../../shared/schemas/roles";
+import {
+  groupActions,
+  servedGroupActions,
+  type GroupAbilities,
+  type GroupAction,
+  type GroupRole,
+} from "../../shared/schemas/roles";
 import type { Actor } from "./actor";
+import { groupRules, type GroupRule } from "./rules";
 
 /** What decides about a group, as seen from the actor. */
 export interface GroupFacts {
@@ -11,22 +18,19 @@ export interface GroupFacts {
 
 type Rule = (actor: Actor | null, group: GroupFacts) => boolean;
 
-const isOneOf =
-  (...roles: GroupRole[]): Rule =>
-  (actor, { actorRole }) =>
-    actor !== null && actorRole !== null && roles.includes(actorRole);
+const ruleOf =
+  ({ roles, isNotForLastLead }: GroupRule): Rule =>
+  (actor, { actorRole, leads }) =>
+    actor !== null &&
+    actorRole !== null &&
+    roles.includes(actorRole) &&
+    !(isNotForLastLead && actorRole === "lead" && leads === 1);
 
-export const groupPolicy: Record<GroupAction, Rule> = {
-  see: isOneOf("lead", "researcher", "guest"),
-  createNotebook: isOneOf("lead", "researcher"),
-  addMember: isOneOf("lead"),
-  setRole: isOneOf("lead"),
-  removeMember: isOneOf("lead"),
-  leave: (actor, group) =>
-    actor !== null && group.actorRole !== null && !(group.actorRole === "lead" && group.leads === 1),
-};
+export const groupPolicy = Object.fromEntries(
+  groupActions.map((action) => [action, ruleOf(groupRules[action])]),
+) as Record<GroupAction, Rule>;
 
 export function groupAbilitiesOf(actor: Actor | null, group: GroupFacts): GroupAbilities {
-  const entries = Object.entries(groupPolicy).map(([action, rule]) => [action, rule(actor, group)]);
+  const entries = servedGroupActions.map((action) => [action, groupPolicy[action](actor, group)]);
   return Object.fromEntries(entries) as GroupAbilities;
 }

@@ -11,9 +11,11 @@ export function notebookFacts(row: Head): NotebookFacts {
   return {
     ownerId: row.ownerId,
     isDeleted: row.deletedAt !== null,
+    isArchived: row.archivedAt !== null,
     shareRole: row.shareRole,
     groupRole: row.groupRole,
     actorGroupRole: row.actorGroupRole,
+    vetting: null,
   };
 }
 
@@ -34,6 +36,7 @@ function presentHead(row: Head, actor: Actor) {
     revision: row.revision,
     savedAt: row.savedAt.toISOString(),
     lastVersion: row.lastVersion === 0 ? null : row.lastVersion,
+    isArchived: facts.isArchived,
     abilities: notebookAbilitiesOf(actor, facts),
   };
 }

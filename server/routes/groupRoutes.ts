@@ -1,8 +1,15 @@
-import { Router, type Request } from "express";
-import { addMemberBody, createGroupBody, setMemberRoleBody } from "../../shared/schemas/groups";
-import { addMember } from "../commands/addMember";
+import { Router } from "express";
+import {
+  createGroupBody,
+  type MemberNotebooks,
+  renameGroupBody,
+  setMemberRoleBody,
+} from "../../shared/schemas/groups";
+import { toPersonBody } from "../../shared/schemas/shares";
 import { createGroup } from "../commands/createGroup";
+import { handOverLead } from "../commands/handOverLead";
 import { removeMember } from "../commands/removeMember";
+import { renameGroup } from "../commands/renameGroup";
 import { setMemberRole } from "../commands/setMemberRole";
 import type { Db } from "../db/client";
 import {
@@ -12,27 +19,34 @@ import {
   listGroups,
   type GroupRow,
 } from "../db/reads/findGroup";
+import { countMembersNotebooks, findHeir } from "../db/reads/membersNotebooks";
 import { conflict, forbidden, notFound } from "../errors";
 import { requireActor } from "../middleware/session";
 import type { Actor } from "../policies/actor";
 import { groupPolicy } from "../policies/groupPolicy";
 import { presentGroup, presentGroupSummary } from "../presenters/presentGroup";
 import { readId } from "./ids";
+import { loadGroup } from "./loadGroup";
 
-/** `/groups/…`: list, found, see; add, set the role of and remove members; leave. */
+/** `/groups/…`: list, found, see, rename; set the role of and remove members; hand over; leave. */
 export function groupRoutes({ db }: { db: Db }): Router {
   const router = Router();
-
-  /** The group in the address, if the actor may see it. */
-  const loadGroup = async (req: Request, actor: Actor): Promise<GroupRow> => {
-    const group = await findGroup(db, readId(req, "groupId", "group"), actor.id);
-    if (!group || !groupPolicy.see(actor, group)) throw notFound("group");
-    return group;
-  };
 
   const presentFresh = async (groupId: string, actor: Actor) => {
     const group = await findGroup(db, groupId, actor.id);
     return presentGroup(group!, await listGroupMembers(db, groupId), actor);
+  };
+
+  /** The member, if the actor may take them out of the group: oneself, or another. */
+  const authoriseLeaving = async (group: GroupRow, userId: string, actor: Actor): Promise<string> => {
+    if (userId === actor.id) {
+      if (!groupPolicy.leave(actor, group))
+        throw conflict("last_lead", "A group keeps at least one lead. Make someone else a lead first.");
+    } else {
+      if (!(await findMembership(db, group.id, userId))) throw notFound("member");
+      if (!groupPolicy.removeMember(actor, group)) throw forbidden("remove people from this group");
+    }
+    return userId;
   };
 
   router.get("/groups", async (req, res) => {
@@ -50,44 +64,58 @@ export function groupRoutes({ db }: { db: Db }): Router {
 
   router.get("/groups/:groupId", async (req, res) => {
     const actor = requireActor(req);
-    const group = await loadGroup(req, actor);
+    const group = await loadGroup(db, req, actor);
     res.json(presentGroup(group, await listGroupMembers(db, group.id), actor));
   });
 
-  router.post("/groups/:groupId/members", async (req, res) => {
+  router.patch("/groups/:groupId", async (req, res) => {
     const actor = requireActor(req);
-    const { email, role } = addMemberBody.parse(req.body);
-    const group = await loadGroup(req, actor);
-    if (!groupPolicy.addMember(actor, group)) throw forbidden("add people to this group");
+    const { name } = renameGroupBody.parse(req.body);
+    const group = await loadGroup(db, req, actor);
+    if (!groupPolicy.rename(actor, group)) throw forbidden("rename this group");
 
-    await addMember(db, { groupId: group.id, email, role, at: new Date() });
-    res.status(201).json(await presentFresh(group.id, actor));
+    await renameGroup(db, { groupId: group.id, name, actorId: actor.id, at: new Date() });
+    res.json(await presentFresh(group.id, actor));
+  });
+
+  router.post("/groups/:groupId/hand-over", async (req, res) => {
+    const actor = requireActor(req);
+    const { userId } = toPersonBody.parse(req.body);
+    const group = await loadGroup(db, req, actor);
+    if (!groupPolicy.handOver(actor, group)) throw forbidden("hand this group over");
+
+    await handOverLead(db, { groupId: group.id, userId, actorId: actor.id, at: new Date() });
+    res.json(await presentFresh(group.id, actor));
   });
 
   router.patch("/groups/:groupId/members/:userId", async (req, res) => {
     const actor = requireActor(req);
     const { role } = setMemberRoleBody.parse(req.body);
-    const group = await loadGroup(req, actor);
+    const group = await loadGroup(db, req, actor);
     const userId = readId(req, "userId", "member");
     if (!groupPolicy.setRole(actor, group)) throw forbidden("set roles in this group");
 
-    await setMemberRole(db, { groupId: group.id, userId, role });
+    await setMemberRole(db, { groupId: group.id, userId, role, actorId: actor.id, at: new Date() });
     res.json(await presentFresh(group.id, actor));
+  });
+
+  router.get("/groups/:groupId/members/:userId/notebooks", async (req, res) => {
+    const actor = requireActor(req);
+    const group = await loadGroup(db, req, actor);
+    const userId = await authoriseLeaving(group, readId(req, "userId", "member"), actor);
+
+    const notebooks = await countMembersNotebooks(db, group.id, userId);
+    const goTo = await findHeir(db, { groupId: group.id, userId, actorId: actor.id });
+    const told: MemberNotebooks = { notebooks, goTo };
+    res.json(told);
   });
 
   router.delete("/groups/:groupId/members/:userId", async (req, res) => {
     const actor = requireActor(req);
-    const group = await loadGroup(req, actor);
-    const userId = readId(req, "userId", "member");
-    if (userId === actor.id) {
-      if (!groupPolicy.leave(actor, group))
-        throw conflict("last_lead", "A group keeps at least one lead. Make someone else a lead first.");
-    } else {
-      if (!(await findMembership(db, group.id, userId))) throw notFound("member");
-      if (!groupPolicy.removeMember(actor, group)) throw forbidden("remove people from this group");
-    }
+    const group = await loadGroup(db, req, actor);
+    const userId = await authoriseLeaving(group, readId(req, "userId", "member"), actor);
 
-    await removeMember(db, { groupId: group.id, userId });
+    await removeMember(db, { groupId: group.id, userId, actorId: actor.id, at: new Date() });
     res.status(204).end();
   });
 

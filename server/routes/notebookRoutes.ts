@@ -11,35 +11,24 @@ import {
   savedDocument,
 } from "../../shared/schemas/notebooks";
 import { createNotebook } from "../commands/createNotebook";
-import { deleteNotebook } from "../commands/deleteNotebook";
 import { renameNotebook } from "../commands/renameNotebook";
-import { restoreFromBin } from "../commands/restoreFromBin";
 import { saveDraft } from "../commands/saveDraft";
 import type { Db } from "../db/client";
-import { findGroup } from "../db/reads/findGroup";
 import { listNotebooks } from "../db/reads/listNotebooks";
-import { forbidden, invalid, notFound } from "../errors";
+import { invalid } from "../errors";
 import type { Summaries } from "../jobs/summaries";
 import { requireActor } from "../middleware/session";
 import type { Actor } from "../policies/actor";
-import { groupPolicy } from "../policies/groupPolicy";
 import { notebookPolicy } from "../policies/notebookPolicy";
 import { notebookFacts, presentNotebook, presentNotebookListItem } from "../presenters/presentNotebook";
+import { authorise, authoriseIn } from "./authorise";
 import { fileName } from "./fileName";
 import { readId } from "./ids";
 import { loadNotebook } from "./loadNotebook";
 
-/** `/notebooks/…`: list, create, import, read, save, rename, export, delete and take back. */
+/** `/notebooks/…`: list, create, import, read, save, rename, export. */
 export function notebookRoutes({ db, summaries }: { db: Db; summaries: Summaries }): Router {
   const router = Router();
-
-  /** @throws AppError if the actor may not create notebooks in the group */
-  const authoriseIn = async (groupId: string | null, actor: Actor): Promise<void> => {
-    if (groupId === null) return;
-    const group = await findGroup(db, groupId, actor.id);
-    if (!group || !groupPolicy.see(actor, group)) throw notFound("group");
-    if (!groupPolicy.createNotebook(actor, group)) throw forbidden("create notebooks in this group");
-  };
 
   const create = async (actor: Actor, groupId: string | null, document: NotebookDocument) => {
     const { id } = await createNotebook(db, { ownerId: actor.id, groupId, document, at: new Date() });
@@ -62,7 +51,7 @@ export function notebookRoutes({ db, summaries }: { db: Db; summaries: Summaries
   router.post("/notebooks", async (req, res) => {
     const actor = requireActor(req);
     const { title, groupId, document } = createNotebookBody.parse(req.body);
-    await authoriseIn(groupId, actor);
+    await authoriseIn(db, groupId, actor);
     res
       .status(201)
       .json(await create(actor, groupId, document ? { ...document, title } : emptyDocument(title)));
@@ -71,7 +60,7 @@ export function notebookRoutes({ db, summaries }: { db: Db; summaries: Summaries
   router.post("/notebooks/import", async (req, res) => {
     const actor = requireActor(req);
     const { text, groupId } = importNotebookBody.parse(req.body);
-    await authoriseIn(groupId, actor);
+    await authoriseIn(db, groupId, actor);
     const { document, notes } = readImport(text);
     const imported: ImportNotebookResponse = { ...(await create(actor, groupId, document)), notes };
     res.status(201).json(imported);
@@ -87,7 +76,7 @@ export function notebookRoutes({ db, summaries }: { db: Db; summaries: Summaries
     const actor = requireActor(req);
     const { title } = renameNotebookBody.parse(req.body);
     const notebook = await loadNotebook(db, notebookId(req), actor);
-    if (!notebookPolicy.rename(actor, notebookFacts(notebook))) throw forbidden("rename this notebook");
+    authorise(actor, notebook, "rename", "rename this notebook");
 
     await renameNotebook(db, { notebookId: notebook.id, title, actorId: actor.id, at: new Date() });
     summaries.request(notebook.id);
@@ -98,7 +87,7 @@ export function notebookRoutes({ db, summaries }: { db: Db; summaries: Summaries
     const actor = requireActor(req);
     const { revision, document } = saveDraftBody.parse(req.body);
     const notebook = await loadNotebook(db, notebookId(req), actor);
-    if (!notebookPolicy.edit(actor, notebookFacts(notebook))) throw forbidden("change this notebook");
+    authorise(actor, notebook, "edit", "change this notebook");
 
     const saved = await saveDraft(db, {
       notebookId: notebook.id,
@@ -114,30 +103,10 @@ export function notebookRoutes({ db, summaries }: { db: Db; summaries: Summaries
   router.get("/notebooks/:notebookId/file", async (req, res) => {
     const actor = requireActor(req);
     const notebook = await loadNotebook(db, notebookId(req), actor);
-    if (!notebookPolicy.export(actor, notebookFacts(notebook))) throw forbidden("export this notebook");
+    authorise(actor, notebook, "export", "export this notebook");
 
     res.attachment(fileName(notebook.title));
     res.type("text/markdown; charset=utf-8").send(writeNotebookFile(notebook.document));
-  });
-
-  router.delete("/notebooks/:notebookId", async (req, res) => {
-    const actor = requireActor(req);
-    const notebook = await loadNotebook(db, notebookId(req), actor);
-    if (!notebookPolicy.delete(actor, notebookFacts(notebook))) throw forbidden("delete this notebook");
-
-    await deleteNotebook(db, { notebookId: notebook.id, at: new Date() });
-    res.status(204).end();
-  });
-
-  router.post("/notebooks/:notebookId/restore-from-bin", async (req, res) => {
-    const actor = requireActor(req);
-    const notebook = await loadNotebook(db, notebookId(req), actor, { orInBin: true });
-    if (!notebookPolicy.restoreFromBin(actor, notebookFacts(notebook)))
-      throw forbidden("take this notebook out of the bin: it is not there, or not yours");
-
-    await restoreFromBin(db, { notebookId: notebook.id });
-    summaries.request(notebook.id);
-    res.json(await presentFresh(notebook.id, actor));
   });
 
   return router;

@@ -4,13 +4,13 @@ import { keepVersion } from "../commands/keepVersion";
 import { saveDraft } from "../commands/saveDraft";
 import type { Db } from "../db/client";
 import { findVersion, listVersions } from "../db/reads/findVersion";
-import { evaluationFailed, forbidden, notFound, staleRevision } from "../errors";
+import { evaluationFailed, notFound, staleRevision } from "../errors";
 import type { Evaluator } from "../jobs/evaluator";
 import type { Summaries } from "../jobs/summaries";
 import { requireActor } from "../middleware/session";
-import { notebookPolicy } from "../policies/notebookPolicy";
-import { draftStateOf, notebookFacts, presentNotebook } from "../presenters/presentNotebook";
+import { draftStateOf, presentNotebook } from "../presenters/presentNotebook";
 import { presentVersion, presentVersionSummary } from "../presenters/presentVersion";
+import { authorise } from "./authorise";
 import { readId, readOrdinal } from "./ids";
 import { loadNotebook } from "./loadNotebook";
 
@@ -30,8 +30,7 @@ export function versionRoutes(parts: { db: Db; evaluator: Evaluator; summaries: 
     const actor = requireActor(req);
     const { message, revision } = keepVersionBody.parse(req.body);
     const notebook = await loadNotebook(db, notebookId(req), actor);
-    if (!notebookPolicy.keepVersion(actor, notebookFacts(notebook)))
-      throw forbidden("keep a version of this notebook");
+    authorise(actor, notebook, "keepVersion", "keep a version of this notebook");
     if (notebook.revision !== revision) throw staleRevision(draftStateOf(notebook));
 
     const answer = await evaluator.evaluate(notebook.document, { isKept: true });
@@ -63,8 +62,7 @@ export function versionRoutes(parts: { db: Db; evaluator: Evaluator; summaries: 
     const notebook = await loadNotebook(db, notebookId(req), actor);
     const version = await findVersion(db, notebook.id, versionNumber(req));
     if (!version) throw notFound("version");
-    if (!notebookPolicy.restoreVersion(actor, notebookFacts(notebook)))
-      throw forbidden("restore versions of this notebook");
+    authorise(actor, notebook, "restoreVersion", "restore versions of this notebook");
 
     const { document } = version;
     await saveDraft(db, { notebookId: notebook.id, revision, document, actorId: actor.id, at: new Date() });

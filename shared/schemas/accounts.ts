@@ -1,14 +1,8 @@
 import { z } from "zod";
+import { emailAddress } from "./emailAddress";
+import { invitationToken } from "./invitations";
 import { passwordLimits } from "./session";
 import { line } from "./text";
-
-/** An e-mail address in the one form by which it is kept and looked up. */
-export const emailAddress = z
-  .string("An e-mail address is needed.")
-  .trim()
-  .toLowerCase()
-  .max(320, "An e-mail address may have at most 320 characters.")
-  .pipe(z.email("This is not an e-mail address; write it as name@place.example."));
 
 export const createAccountBody = z.object({
   name: line("A name", 120),
@@ -17,5 +11,7 @@ export const createAccountBody = z.object({
     .string("A password is needed.")
     .min(passwordLimits.shortest, `A password needs at least ${passwordLimits.shortest} characters.`)
     .max(passwordLimits.longest, `A password may have at most ${passwordLimits.longest} characters.`),
+  /** The token of an invitation to this address, accepted in the same act. */
+  invitation: invitationToken.optional(),
 });
 export type CreateAccountBody = z.infer<typeof createAccountBody>;

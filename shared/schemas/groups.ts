@@ -1,5 +1,4 @@
 import { z } from "zod";
-import { emailAddress } from "./accounts";
 import { person } from "./people";
 import { groupAbilities, groupRole } from "./roles";
 import { line } from "./text";
@@ -12,8 +11,8 @@ export const groupCode = z
 export const createGroupBody = z.object({ name: line("A name", 120), code: groupCode });
 export type CreateGroupBody = z.infer<typeof createGroupBody>;
 
-export const addMemberBody = z.object({ email: emailAddress, role: groupRole });
-export type AddMemberBody = z.infer<typeof addMemberBody>;
+export const renameGroupBody = z.object({ name: line("A name", 120) });
+export type RenameGroupBody = z.infer<typeof renameGroupBody>;
 
 export const setMemberRoleBody = z.object({ role: groupRole });
 export type SetMemberRoleBody = z.infer<typeof setMemberRoleBody>;
@@ -42,3 +41,7 @@ export const groupResponse = groupSummary.extend({
   memberList: z.array(groupMember),
 });
 export type GroupResponse = z.infer<typeof groupResponse>;
+
+/** What becomes of a member's notebooks in the group when they go: told before they do. */
+export const memberNotebooks = z.object({ notebooks: z.number().int(), goTo: person });
+export type MemberNotebooks = z.infer<typeof memberNotebooks>;

@@ -44,6 +44,10 @@ const groupId = z.uuid("This is not the id of a group.").nullable();
 export const createNotebookBody = z.object({ title, groupId, document: savedDocument.optional() });
 export type CreateNotebookBody = z.infer<typeof createNotebookBody>;
 
+/** Where the copy goes: a group, or one's own shelf. */
+export const duplicateNotebookBody = z.object({ groupId });
+export type DuplicateNotebookBody = z.infer<typeof duplicateNotebookBody>;
+
 export const importNotebookBody = z.object({
   text: z.string("The text of a notebook file is needed.").max(documentLimits.documentLength + 100_000),
   groupId,
@@ -76,8 +80,8 @@ export const notebookListQuery = z.object({
   /** Looks in titles and owners' names. */
   q: z.string().max(200).refine(isStorable, unstorableText).default(""),
   order: z.enum(["changed", "title"]).default("changed"),
-  /** `bin`: one's own deleted notebooks, kept 30 days. */
-  place: z.enum(["shelf", "bin"]).default("shelf"),
+  /** `archived`: put away, to be read only; `bin`: one's own deleted notebooks, kept 30 days. */
+  place: z.enum(["shelf", "archived", "bin"]).default("shelf"),
 });
 export type NotebookListQuery = z.infer<typeof notebookListQuery>;
 
@@ -93,6 +97,8 @@ export const notebookListItem = z.object({
   revision: z.number().int(),
   savedAt: z.iso.datetime(),
   lastVersion: z.number().int().nullable(),
+  /** Put away by its owner, to be read only. */
+  isArchived: z.boolean(),
   /** As last computed after a save; null until then. */
   summary: notebookSummarySchema.nullable(),
   deletedAt: z.iso.datetime().nullable(),
@@ -116,6 +122,8 @@ export const notebookResponse = z.object({
   savedBy: person,
   document: notebookDocumentSchema,
   lastVersion: z.number().int().nullable(),
+  /** Put away by its owner, to be read only. */
+  isArchived: z.boolean(),
   abilities: notebookAbilities,
 });
 export type NotebookResponse = z.infer<typeof notebookResponse>;

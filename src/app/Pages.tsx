@@ -12,6 +12,8 @@ const CreateAccountRoute = lazy(() => import("./CreateAccountRoute"));
 const GroupRoute = lazy(() => import("./GroupRoute"));
 const GroupsRoute = lazy(() => import("./GroupsRoute"));
 const HandbookRoute = lazy(() => import("./HandbookRoute"));
+const InvitationRoute = lazy(() => import("./InvitationRoute"));
+const KeptMailRoute = lazy(() => import("./KeptMailRoute"));
 const NotebookPage = lazy(() =>
   import("../features/notebook/NotebookPage").then((file) => ({ default: file.NotebookPage })),
 );
@@ -32,7 +34,10 @@ export function Pages() {
             <Route path="/handbook" element={<HandbookRoute />} />
           </Route>
         </Route>
+        <Route path="/invitation" element={<InvitationRoute />} />
+        <Route path="/development/mail" element={<KeptMailRoute />} />
         <Route element={<SessionGate />}>
+          <Route path="/invitation/open" element={<InvitationRoute />} />
           <Route path="/notebooks/:notebookId/*" element={<NotebookPage />} />
           <Route element={<HouseLayout />}>
             <Route index element={<Navigate to="/notebooks" replace />} />

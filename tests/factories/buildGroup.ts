@@ -28,6 +28,6 @@ export async function buildGroup(
   const at = new Date("2026-10-02T08:00:00Z");
   const { name = "A group", code = nextCode(), lead = await buildUser(db), members = [] } = parts;
   const { id } = await createGroup(db, { name, code, founderId: lead.id, at });
-  for (const [{ email }, role] of members) await addMember(db, { groupId: id, email, role, at });
+  for (const [{ id: userId }, role] of members) await addMember(db, { groupId: id, userId, role, at });
   return { id, code, lead };
 }

@@ -30,9 +30,9 @@ export async function buildNotebook(
   const at = new Date("2026-10-03T08:00:00Z");
   const { owner, document = buildDocument(), groupId = null, groupRole, shares = [], versions = [] } = parts;
   const { id } = await createNotebook(db, { ownerId: owner.id, groupId, document, at });
-  if (groupRole) await shareWithGroup(db, { notebookId: id, role: groupRole });
-  for (const [{ id: userId }, role] of shares)
-    await shareWithPerson(db, { notebookId: id, userId, role, at });
+  const share = { notebookId: id, letter: null, actorId: owner.id, at };
+  if (groupRole) await shareWithGroup(db, { ...share, role: groupRole });
+  for (const [user, role] of shares) await shareWithPerson(db, { ...share, user, role });
   for (const message of versions) {
     const { result } = evaluateDocument(document);
     await keepVersion(db, { notebookId: id, revision: 1, message, result, actorId: owner.id, at });

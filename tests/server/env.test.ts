@@ -11,6 +11,7 @@ describe("the settings", () => {
       demo: false,
       origin: undefined,
       proxies: 0,
+      smtp: null,
       logLevel: "info",
     });
   });
@@ -35,5 +36,18 @@ describe("the settings", () => {
   it("refuse the demonstration in production", () => {
     expect(() => readEnv({ TENUITY_DEMO: "on", NODE_ENV: "production" })).toThrow(/without a password/);
     expect(readEnv({ TENUITY_DEMO: "on", NODE_ENV: "development" }).demo).toBe(true);
+  });
+
+  it("take a mail server whole, or none", () => {
+    const whole = { TENUITY_SMTP_HOST: "mail.tenuity.example", TENUITY_SMTP_FROM: "post@tenuity.example" };
+    expect(readEnv(whole).smtp).toEqual({
+      host: "mail.tenuity.example",
+      port: 587,
+      user: undefined,
+      password: undefined,
+      from: "post@tenuity.example",
+    });
+    expect(() => readEnv({ TENUITY_SMTP_HOST: "mail.tenuity.example" })).toThrow(/TENUITY_SMTP_FROM/);
+    expect(() => readEnv({ ...whole, TENUITY_SMTP_USER: "post" })).toThrow(/TENUITY_SMTP_PASSWORD/);
   });
 });

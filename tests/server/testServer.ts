@@ -4,7 +4,9 @@ import { createApp, type AppParts } from "../../server/app";
 import { createAuth } from "../../server/auth/auth";
 import { evaluateDocument } from "../../server/jobs/evaluateDocument";
 import type { Evaluator } from "../../server/jobs/evaluator";
+import { createPost } from "../../server/jobs/post";
 import { createSummaries } from "../../server/jobs/summaries";
+import { drawerTransport } from "../../server/mail/transport";
 import type { Actor } from "../../server/policies/actor";
 import { openTestDatabase } from "./testDatabase";
 
@@ -23,7 +25,20 @@ export async function startTestServer(parts: Partial<AppParts> = {}) {
   const logger = pino({ level: "silent" });
   const auth = await createAuth(db, { hasSecureCookies: false });
   const summaries = createSummaries({ db, evaluator, logger });
-  const app = createApp({ db, auth, evaluator, summaries, logger, demo: false, tries: manyTries, ...parts });
+  const post = parts.post ?? createPost({ db, transport: drawerTransport(db), logger });
+  const app = createApp({
+    db,
+    auth,
+    evaluator,
+    summaries,
+    post,
+    logger,
+    demo: false,
+    showsMail: false,
+    linkOrigin: () => "https://tenuity.example",
+    tries: manyTries,
+    ...parts,
+  });
 
   const cookieOf = async (user: Actor): Promise<string> => (await auth.openSession(user.id)).split(";")[0]!;
 
@@ -32,12 +47,14 @@ export async function startTestServer(parts: Partial<AppParts> = {}) {
     app,
     auth,
     summaries,
+    post,
     cookieOf,
     signedOut: request(app),
     /** Requests in the name of this person. */
     as: async (user: Actor) => request.agent(app).set("Cookie", await cookieOf(user)),
     close: async () => {
       await summaries.close();
+      await post.close();
       await opened?.close();
     },
   };

@@ -15,7 +15,7 @@ const coAuthors = sql<Person[]>`(
 )`;
 
 /**
- * The notebooks that an actor has some tie to, without their documents: on the shelf, or one's own in the bin.
+ * The notebooks that an actor has some tie to, without their documents: on the shelf, archived, or one's own in the bin.
  * Whether they may see each is for the policy.
  */
 export async function listNotebooks(db: Db, actorId: string, { q, order, place }: NotebookListQuery) {
@@ -25,6 +25,12 @@ export async function listNotebooks(db: Db, actorId: string, { q, order, place }
     isNotNull(notebookShares.role),
     and(isNotNull(notebooks.groupRole), isNotNull(groupMembers.role)),
   );
+  const isOut = isNull(notebooks.deletedAt);
+  const inPlace = {
+    shelf: and(isTied, isOut, isNull(notebooks.archivedAt)),
+    archived: and(isTied, isOut, isNotNull(notebooks.archivedAt)),
+    bin: and(isMine, isNotNull(notebooks.deletedAt)),
+  };
   const sought = sql`strpos(lower(${notebooks.title} || E'\n' || ${owner.name}), lower(${q.trim()})) > 0`;
 
   return db
@@ -34,14 +40,7 @@ export async function listNotebooks(db: Db, actorId: string, { q, order, place }
     .leftJoin(groups, eq(groups.id, notebooks.groupId))
     .leftJoin(notebookShares, shareOf(actorId))
     .leftJoin(groupMembers, membershipOf(actorId))
-    .where(
-      and(
-        place === "bin"
-          ? and(isMine, isNotNull(notebooks.deletedAt))
-          : and(isTied, isNull(notebooks.deletedAt)),
-        q.trim() === "" ? undefined : sought,
-      ),
-    )
+    .where(and(inPlace[place], q.trim() === "" ? undefined : sought))
     .orderBy(
       ...(order === "title" ? [asc(sql`lower(${notebooks.title})`)] : [desc(notebooks.savedAt)]),
       asc(notebooks.id),

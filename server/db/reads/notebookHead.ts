@@ -24,6 +24,7 @@ export const notebookHeadColumns = {
   revision: notebooks.revision,
   savedAt: notebooks.savedAt,
   lastVersion: notebooks.lastVersion,
+  archivedAt: notebooks.archivedAt,
   deletedAt: notebooks.deletedAt,
 };
 

@@ -1,4 +1,4 @@
-import { index, integer, json, pgTable, text, timestamp, uuid } from "drizzle-orm/pg-core";
+import { boolean, index, integer, json, pgTable, text, timestamp, uuid } from "drizzle-orm/pg-core";
 import type { NotebookDocument } from "../../../shared/notebook/document";
 import type { NotebookSummary } from "../../../shared/notebook/summary";
 import { shareRoles } from "../../../shared/schemas/roles";
@@ -32,6 +32,10 @@ export const notebooks = pgTable(
     summaryRevision: integer("summary_revision").notNull().default(0),
     summaryEngine: text("summary_engine"),
     createdAt: timestamp("created_at", { withTimezone: true }).notNull().defaultNow(),
+    /** Put away, to be read only, since then. */
+    archivedAt: timestamp("archived_at", { withTimezone: true }),
+    /** A published reference rests on it, so that it is never removed for good. */
+    isReferenced: boolean("is_referenced").notNull().default(false),
     /** In the bin since then. */
     deletedAt: timestamp("deleted_at", { withTimezone: true }),
   },

@@ -10,6 +10,7 @@ import { Page } from "../../ui/Page";
 import { RadioLine } from "../../ui/RadioLine";
 import { useSignOut } from "./accountQueries";
 import { lights } from "./lights";
+import { MailChoices } from "./MailChoices";
 
 /** Who one is here, and in which light one reads. */
 export function AccountPage({ groups }: { groups: readonly GroupSummary[] }) {
@@ -41,7 +42,7 @@ export function AccountPage({ groups }: { groups: readonly GroupSummary[] }) {
       <AccountSection name="Groups">
         {groups.length === 0 ? (
           <p>
-            None yet. <Link to="/groups">Found one</Link>, or be added by the lead of another.
+            None yet. <Link to="/groups">Found one</Link>, or be invited by the lead of another.
           </p>
         ) : (
           <>
@@ -61,6 +62,10 @@ export function AccountPage({ groups }: { groups: readonly GroupSummary[] }) {
         <Line label="Light">
           <RadioLine label="Light" value={theme} options={lights} onChange={setTheme} />
         </Line>
+      </AccountSection>
+
+      <AccountSection name="Mail">
+        <MailChoices />
       </AccountSection>
 
       <AccountSection name="Leaving">

@@ -12,9 +12,19 @@ import { SignInFrame } from "./SignInFrame";
 
 type FieldName = "name" | "email" | "password";
 
+interface CreateAccountPageProps {
+  onSignedIn: (session: SessionResponse) => void;
+  /** Accepted in the same act; it is for one address. */
+  invitation?: { token: string; email: string; name: string } | null;
+}
+
 /** Opening an account; who has one is signed in at once. */
-export function CreateAccountPage({ onSignedIn }: { onSignedIn: (session: SessionResponse) => void }) {
-  const [fields, setFields] = useState<Record<FieldName, string>>({ name: "", email: "", password: "" });
+export function CreateAccountPage({ onSignedIn, invitation = null }: CreateAccountPageProps) {
+  const [fields, setFields] = useState<Record<FieldName, string>>({
+    name: "",
+    email: invitation?.email ?? "",
+    password: "",
+  });
   const [complaints, setComplaints] = useState<Partial<Record<FieldName, string>>>({});
   const create = useCreateAccount(onSignedIn);
 
@@ -30,7 +40,9 @@ export function CreateAccountPage({ onSignedIn }: { onSignedIn: (session: Sessio
 
   function handleSubmit(event: React.FormEvent) {
     event.preventDefault();
-    const parsed = createAccountBody.safeParse(fields);
+    const parsed = createAccountBody.safeParse(
+      invitation ? { ...fields, invitation: invitation.token } : fields,
+    );
     if (parsed.success) {
       create.mutate(parsed.data);
       return;
@@ -68,7 +80,9 @@ export function CreateAccountPage({ onSignedIn }: { onSignedIn: (session: Sessio
           autoComplete="username"
           value={fields.email}
           onChange={handleChange}
+          readOnly={invitation !== null}
           fault={faultOf("email")}
+          hint={invitation ? `The invitation to ${invitation.name} is for this address.` : undefined}
         />
         <PasswordField
           label="Password"

@@ -1,19 +1,24 @@
 import { useQuery } from "@tanstack/react-query";
+import { useState } from "react";
 import { formatCount, formatDay } from "../../lib/format";
 import { useAccount } from "../../lib/session";
 import { AltitudeRule } from "../../ui/AltitudeRule";
 import { Opening } from "../../ui/Opening";
 import { Page } from "../../ui/Page";
 import { ProblemPage } from "../../ui/ProblemPage";
-import { AddMember } from "./AddMember";
+import { TextButton } from "../../ui/TextButton";
+import { AuditTrail } from "./AuditTrail";
 import { groupQuery } from "./groupQueries";
 import { groupRoleOptions } from "./groupRoles";
+import { Invitations } from "./Invitations";
 import { MemberList } from "./MemberList";
+import { RenameGroupDialog } from "./RenameGroupDialog";
 
 /** One group: who is in it, by which role, and what each role may do. */
 export function GroupPage({ groupId }: { groupId: string }) {
   const group = useQuery(groupQuery(groupId));
   const account = useAccount();
+  const [isRenaming, setRenaming] = useState(false);
   if (group.isPending) return <Opening what="the group" />;
   if (group.isError) {
     return <ProblemPage error={group.error} onRetry={() => void group.refetch()} email={account?.email} />;
@@ -31,6 +36,11 @@ export function GroupPage({ groupId }: { groupId: string }) {
           <p className="pt-4 text-ink2 italic">
             {people[0]?.toUpperCase()}
             {people.slice(1)}, founded {formatDay(new Date(foundedAt), new Date())}
+            {abilities.rename && (
+              <TextButton className="ml-12 not-italic" onClick={() => setRenaming(true)}>
+                Rename
+              </TextButton>
+            )}
           </p>
         </div>
       </div>
@@ -38,7 +48,8 @@ export function GroupPage({ groupId }: { groupId: string }) {
         <div>
           <h2 className="pb-12 type-section">Members</h2>
           <MemberList group={group.data} />
-          {abilities.addMember && <AddMember groupId={groupId} />}
+          {abilities.invite && <Invitations groupId={groupId} />}
+          {abilities.seeAudit && <AuditTrail groupId={groupId} members={memberList} />}
         </div>
         <aside className="margin:pt-40" aria-label="About roles">
           <div className="border-t-[1.5px] border-ink pt-12">
@@ -58,6 +69,7 @@ export function GroupPage({ groupId }: { groupId: string }) {
           </div>
         </aside>
       </div>
+      {isRenaming && <RenameGroupDialog groupId={groupId} name={name} onClose={() => setRenaming(false)} />}
     </Page>
   );
 }

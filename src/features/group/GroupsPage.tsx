@@ -26,8 +26,8 @@ export function GroupsPage() {
       <p className="pt-8 text-ink2 italic">People who share notebooks</p>
       {groups.data.length === 0 ? (
         <p className="max-w-[34em] pt-28 type-abstract">
-          You are in no group yet. A lead can add you by your e-mail address, or you can found one and be its
-          lead.
+          You are in no group yet. A lead can invite you by your e-mail address, or you can found one and be
+          its lead.
         </p>
       ) : (
         <ul className="ruled-list mt-28">

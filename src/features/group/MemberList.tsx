@@ -1,22 +1,22 @@
 import { useState } from "react";
-import { useNavigate } from "react-router-dom";
 import type { GroupMember, GroupResponse } from "../../../shared/schemas/groups";
 import type { GroupRole } from "../../../shared/schemas/roles";
 import { failureSentence } from "../../lib/ApiError";
 import { formatDay } from "../../lib/format";
 import { useAccount } from "../../lib/session";
-import { Button } from "../../ui/Button";
-import { Dialog, DialogActions } from "../../ui/Dialog";
 import { useNotify } from "../../ui/Notices";
 import { TextButton } from "../../ui/TextButton";
 import { WordMenu } from "../../ui/WordMenu";
-import { useRemoveMember, useSetMemberRole } from "./groupQueries";
+import { useSetMemberRole } from "./groupQueries";
 import { groupRoleOptions } from "./groupRoles";
+import { HandOverLeadDialog } from "./HandOverLeadDialog";
+import { RemoveMemberDialog } from "./RemoveMemberDialog";
 
 /** Who is in a group. Roles are words to exchange for those who may set them. */
 export function MemberList({ group }: { group: GroupResponse }) {
   const account = useAccount();
   const [leaving, setLeaving] = useState<GroupMember | null>(null);
+  const [isHandingOver, setHandingOver] = useState(false);
   const leads = group.memberList.filter((member) => member.role === "lead").length;
 
   return (
@@ -30,11 +30,13 @@ export function MemberList({ group }: { group: GroupResponse }) {
             isSelf={member.user.id === account?.id}
             isLastLead={member.role === "lead" && leads === 1}
             onRemove={() => setLeaving(member)}
+            onHandOver={() => setHandingOver(true)}
           />
         ))}
       </ul>
+      {isHandingOver && <HandOverLeadDialog group={group} onClose={() => setHandingOver(false)} />}
       {leaving && (
-        <RemoveDialog
+        <RemoveMemberDialog
           group={group}
           member={leaving}
           isSelf={leaving.user.id === account?.id}
@@ -52,12 +54,14 @@ interface MemberLineProps {
   /** A group keeps at least one lead. */
   isLastLead: boolean;
   onRemove: () => void;
+  onHandOver: () => void;
 }
 
-function MemberLine({ group, member, isSelf, isLastLead, onRemove }: MemberLineProps) {
+function MemberLine({ group, member, isSelf, isLastLead, onRemove, onHandOver }: MemberLineProps) {
   const setRole = useSetMemberRole(group.id);
   const notify = useNotify();
   const { user, role, joinedAt } = member;
+  const canHandOver = isSelf && group.abilities.handOver && group.memberList.length > 1;
   const canRemove = isSelf ? group.abilities.leave : group.abilities.removeMember;
 
   function handleRole(next: GroupRole) {
@@ -97,66 +101,15 @@ function MemberLine({ group, member, isSelf, isLastLead, onRemove }: MemberLineP
         )}
       </span>
       <span className="type-meta text-ink2">since {formatDay(new Date(joinedAt), new Date())}</span>
-      <span className="text-right">
+      <span className="flex flex-wrap justify-end gap-x-12 text-right">
+        {canHandOver && <TextButton onClick={onHandOver}>Hand over</TextButton>}
         {canRemove && !isLastLead && (
           <TextButton onClick={onRemove} aria-label={isSelf ? "Leave the group" : `Remove ${user.name}`}>
             {isSelf ? "Leave" : "Remove"}
           </TextButton>
         )}
-        {isLastLead && <span className="type-meta text-ink3">the last lead stays</span>}
+        {isLastLead && !canHandOver && <span className="type-meta text-ink3">the last lead stays</span>}
       </span>
     </li>
-  );
-}
-
-interface RemoveDialogProps {
-  group: GroupResponse;
-  member: GroupMember;
-  isSelf: boolean;
-  onClose: () => void;
-}
-
-function RemoveDialog({ group, member, isSelf, onClose }: RemoveDialogProps) {
-  const remove = useRemoveMember(group.id);
-  const notify = useNotify();
-  const navigate = useNavigate();
-  const { user } = member;
-
-  function handleRemove() {
-    remove.mutate(user.id, {
-      onSuccess: () => {
-        notify({
-          state: "holds",
-          text: isSelf ? `You have left ${group.name}.` : `${user.name} was removed.`,
-        });
-        onClose();
-        if (isSelf) void navigate("/groups");
-      },
-    });
-  }
-
-  return (
-    <Dialog
-      open
-      onOpenChange={(open) => !open && onClose()}
-      title={isSelf ? `Leave ${group.name}` : `Remove ${user.name}`}
-      description={
-        isSelf
-          ? "You no longer see what is shared with the group. Notebooks you own stay yours. Only a lead can add you again."
-          : `${user.name} no longer sees what is shared with the group. Their notebooks stay theirs. You can add them again.`
-      }
-    >
-      {remove.isError && (
-        <p role="alert" className="pt-12 type-meta text-redline">
-          {failureSentence(remove.error)}
-        </p>
-      )}
-      <DialogActions>
-        <Button tone="fault" onClick={handleRemove} busy={remove.isPending}>
-          {isSelf ? "Leave the group" : "Remove from the group"}
-        </Button>
-        <Button onClick={onClose}>Keep</Button>
-      </DialogActions>
-    </Dialog>
   );
 }

@@ -3,9 +3,10 @@ import { z } from "zod";
 import {
   groupListResponse,
   groupResponse,
-  type AddMemberBody,
+  memberNotebooks,
   type CreateGroupBody,
 } from "../../../shared/schemas/groups";
+import { groupInvitationList, type InviteToGroupBody } from "../../../shared/schemas/invitations";
 import type { GroupRole } from "../../../shared/schemas/roles";
 import { api } from "../../lib/api";
 
@@ -42,8 +43,8 @@ function useMembershipChange<Input>(change: (input: Input) => Promise<unknown>) 
   });
 }
 
-export const useAddMember = (groupId: string) =>
-  useMembershipChange((body: AddMemberBody) => api.post(`/groups/${groupId}/members`, body, z.unknown()));
+export const useRenameGroup = (groupId: string) =>
+  useMembershipChange((name: string) => api.patch(`/groups/${groupId}`, { name }, z.unknown()));
 
 export const useSetMemberRole = (groupId: string) =>
   useMembershipChange(({ userId, role }: { userId: string; role: GroupRole }) =>
@@ -52,3 +53,41 @@ export const useSetMemberRole = (groupId: string) =>
 
 export const useRemoveMember = (groupId: string) =>
   useMembershipChange((userId: string) => api.delete(`/groups/${groupId}/members/${userId}`));
+
+/** Gives one's own part as lead to another member. */
+export const useHandOverLead = (groupId: string) =>
+  useMembershipChange((userId: string) => api.post(`/groups/${groupId}/hand-over`, { userId }, z.unknown()));
+
+/** How many notebooks a member leaves behind, and to whom they go. */
+export const memberNotebooksQuery = (groupId: string, userId: string) =>
+  queryOptions({
+    queryKey: ["groups", groupId, "members", userId, "notebooks"],
+    queryFn: ({ signal }) =>
+      api.get(`/groups/${groupId}/members/${userId}/notebooks`, memberNotebooks, { signal }),
+    staleTime: 0,
+  });
+
+/** Invitations without an answer yet, for leads. */
+export const invitationsQuery = (groupId: string) =>
+  queryOptions({
+    queryKey: ["groups", groupId, "invitations"],
+    queryFn: ({ signal }) => api.get(`/groups/${groupId}/invitations`, groupInvitationList, { signal }),
+  });
+
+export const useInvite = (groupId: string) =>
+  useMembershipChange((body: InviteToGroupBody) =>
+    api.post(`/groups/${groupId}/invitations`, body, z.unknown()),
+  );
+
+export const useInviteAgain = (groupId: string) =>
+  useMembershipChange((id: string) =>
+    api.post(`/groups/${groupId}/invitations/${id}/send-again`, {}, z.unknown()),
+  );
+
+export const useSetInvitedRole = (groupId: string) =>
+  useMembershipChange(({ id, role }: { id: string; role: GroupRole }) =>
+    api.patch(`/groups/${groupId}/invitations/${id}`, { role }, z.unknown()),
+  );
+
+export const useRevokeInvitation = (groupId: string) =>
+  useMembershipChange((id: string) => api.delete(`/groups/${groupId}/invitations/${id}`));

@@ -1,4 +1,4 @@
-import { useCallback, useMemo, useState } from "react";
+import { lazy, Suspense, useCallback, useMemo, useState } from "react";
 import { useNavigate } from "react-router-dom";
 import type { NotebookResponse } from "../../../shared/schemas/notebooks";
 import type { Person } from "../../../shared/schemas/people";
@@ -20,6 +20,10 @@ import { useDeskKeys } from "./page/useDeskKeys";
 import { visibleTo } from "./page/visibleTo";
 import { KeepVersion } from "./versions/KeepVersion";
 
+const ShareDialog = lazy(() =>
+  import("./sharing/ShareDialog").then((file) => ({ default: file.ShareDialog })),
+);
+
 interface NotebookDeskProps {
   notebook: NotebookResponse;
   person: Person;
@@ -35,6 +39,7 @@ export function NotebookDesk({ notebook, person }: NotebookDeskProps) {
     canEdit,
   });
   const [isKeeping, setKeeping] = useState(false);
+  const [isSharing, setSharing] = useState(false);
   const [readersUnits, setReadersUnits] = useState<UnitSystem | null>(null);
   const written = merge?.document ?? draft.document;
   const unitSystem = readersUnits ?? written.unitSystem;
@@ -81,7 +86,9 @@ export function NotebookDesk({ notebook, person }: NotebookDeskProps) {
               isKept={isKept}
             />
           ) : (
-            <span className="save-status">you may read it</span>
+            <span className="save-status">
+              {notebook.isArchived ? "archived, to be read" : "you may read it"}
+            </span>
           )
         }
         unitSystem={unitSystem}
@@ -99,7 +106,13 @@ export function NotebookDesk({ notebook, person }: NotebookDeskProps) {
                 Keep a version
               </Button>
             )}
+            {notebook.abilities.share && (
+              <Button size="small" className="notebook-bar-share" onClick={() => setSharing(true)}>
+                Share
+              </Button>
+            )}
             <MoreMenu
+              onShares={() => setSharing(true)}
               notebook={notebook}
               document={document}
               onDeleted={() => void navigate("/notebooks")}
@@ -118,6 +131,15 @@ export function NotebookDesk({ notebook, person }: NotebookDeskProps) {
           </>
         }
       />
+      <Suspense>
+        {isSharing && (
+          <ShareDialog
+            notebook={notebook}
+            onClose={() => setSharing(false)}
+            onLeft={() => void navigate("/notebooks")}
+          />
+        )}
+      </Suspense>
       <KeepVersion
         notebookId={notebook.id}
         flush={flush}

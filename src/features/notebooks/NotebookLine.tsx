@@ -1,4 +1,4 @@
-import { Link } from "react-router-dom";
+import { Link, useNavigate } from "react-router-dom";
 import type { NotebookListItem } from "../../../shared/schemas/notebooks";
 import { failureSentence } from "../../lib/ApiError";
 import { formatWhen } from "../../lib/format";
@@ -8,17 +8,23 @@ import { StateWord } from "../../ui/StateMark";
 import { StripThumb } from "../../ui/strip/StripThumb";
 import { TextButton } from "../../ui/TextButton";
 import { HeadlineValue } from "./HeadlineValue";
-import { useDeleteNotebook, useRestoreNotebook } from "./notebooksQueries";
+import {
+  useArchiveNotebook,
+  useDeleteNotebook,
+  useDuplicateNotebook,
+  useRestoreNotebook,
+} from "./notebooksQueries";
 import { binLine, peopleLine, standingLine, stateOf } from "./notebookSentences";
 
 interface NotebookLineProps {
   notebook: NotebookListItem;
   now: Date;
   onRename: (notebook: NotebookListItem) => void;
+  onMove: (notebook: NotebookListItem) => void;
 }
 
 /** One notebook of the list: its air, its name, what it answers, how it stands. The whole line leads to it. */
-export function NotebookLine({ notebook, now, onRename }: NotebookLineProps) {
+export function NotebookLine({ notebook, now, onRename, onMove }: NotebookLineProps) {
   const { summary, deletedAt } = notebook;
   const { state, words } = stateOf(notebook);
   return (
@@ -53,17 +59,20 @@ export function NotebookLine({ notebook, now, onRename }: NotebookLineProps) {
         <time dateTime={notebook.savedAt} className="type-meta whitespace-nowrap text-ink2">
           {formatWhen(new Date(notebook.savedAt), now)}
         </time>
-        <NotebookVerbs notebook={notebook} onRename={onRename} />
+        <NotebookVerbs notebook={notebook} onRename={onRename} onMove={onMove} />
       </div>
     </li>
   );
 }
 
-function NotebookVerbs({ notebook, onRename }: Omit<NotebookLineProps, "now">) {
+function NotebookVerbs({ notebook, onRename, onMove }: Omit<NotebookLineProps, "now">) {
   const { id, title, abilities, deletedAt } = notebook;
   const notify = useNotify();
   const toBin = useDeleteNotebook();
   const restore = useRestoreNotebook();
+  const archive = useArchiveNotebook();
+  const duplicate = useDuplicateNotebook();
+  const navigate = useNavigate();
 
   function handleRestore() {
     restore.mutate(id, {
@@ -85,6 +94,37 @@ function NotebookVerbs({ notebook, onRename }: Omit<NotebookLineProps, "now">) {
     });
   }
 
+  function handleArchive(isArchived: boolean) {
+    archive.mutate(
+      { id, isArchived },
+      {
+        onSuccess: () =>
+          notify({
+            state: "holds",
+            text: isArchived
+              ? `“${title}” is in the archive, to be read only.`
+              : `“${title}” stands on the shelf again.`,
+            action: isArchived ? { label: "Put back", run: () => handleArchive(false) } : undefined,
+          }),
+        onError: (error) =>
+          notify({ state: "fault", text: `“${title}” stays where it is. ${failureSentence(error)}` }),
+      },
+    );
+  }
+
+  function handleDuplicate() {
+    duplicate.mutate(id, {
+      onSuccess: (copy) =>
+        notify({
+          state: "holds",
+          text: `A copy of “${title}” stands on your own shelf.`,
+          action: { label: "Open", run: () => void navigate(`/notebooks/${copy.id}`) },
+        }),
+      onError: (error) =>
+        notify({ state: "fault", text: `“${title}” was not duplicated. ${failureSentence(error)}` }),
+    });
+  }
+
   if (deletedAt !== null) {
     return abilities.restoreFromBin ? (
       <TextButton onClick={handleRestore} disabled={restore.isPending} aria-label={`Put back ${title}`}>
@@ -103,6 +143,16 @@ function NotebookVerbs({ notebook, onRename }: Omit<NotebookLineProps, "now">) {
     >
       <MenuLink to={`/notebooks/${id}`}>Open</MenuLink>
       {abilities.rename && <MenuItem onSelect={() => onRename(notebook)}>Rename</MenuItem>}
+      {abilities.duplicate && (
+        <MenuItem onSelect={handleDuplicate} disabled={duplicate.isPending}>
+          Duplicate
+        </MenuItem>
+      )}
+      {abilities.move && <MenuItem onSelect={() => onMove(notebook)}>Move</MenuItem>}
+      {abilities.archive && <MenuItem onSelect={() => handleArchive(true)}>Archive</MenuItem>}
+      {abilities.unarchive && (
+        <MenuItem onSelect={() => handleArchive(false)}>Take out of the archive</MenuItem>
+      )}
       {abilities.export && (
         <MenuLink to={`/api/notebooks/${id}/file`} download>
           Export as Markdown

@@ -22,6 +22,7 @@ import { useListFilters, type ListOrder, type ListPlace } from "./useListFilters
 import "./notebooks.css";
 
 const ImportDialog = lazy(() => import("./ImportDialog").then((file) => ({ default: file.ImportDialog })));
+const MoveDialog = lazy(() => import("./MoveDialog").then((file) => ({ default: file.MoveDialog })));
 const NewNotebookDialog = lazy(() =>
   import("./NewNotebookDialog").then((file) => ({ default: file.NewNotebookDialog })),
 );
@@ -29,6 +30,7 @@ const RenameDialog = lazy(() => import("./RenameDialog").then((file) => ({ defau
 
 const places: readonly { value: ListPlace; label: string }[] = [
   { value: "shelf", label: "on the shelf" },
+  { value: "archived", label: "in the archive" },
   { value: "bin", label: "in the bin" },
 ];
 const orders: readonly { value: ListOrder; label: string }[] = [
@@ -39,7 +41,8 @@ const orders: readonly { value: ListOrder; label: string }[] = [
 type Open =
   | { kind: "new"; beginning: Beginning }
   | { kind: "import"; file: File | null }
-  | { kind: "rename"; notebook: NotebookListItem };
+  | { kind: "rename"; notebook: NotebookListItem }
+  | { kind: "move"; notebook: NotebookListItem };
 
 /** The notebooks one may see, with the airs they speak of on one scale. `groups` are those one is in. */
 export function NotebooksPage({ groups }: { groups: readonly GroupSummary[] }) {
@@ -90,7 +93,8 @@ export function NotebooksPage({ groups }: { groups: readonly GroupSummary[] }) {
         <>
           <NoNotebooks onNew={openNew} onImport={openImport} />
           <p className="pt-8 type-label">
-            <TextButton onClick={() => changeFilters({ place: "bin" })}>Look in the bin</TextButton>
+            <TextButton onClick={() => changeFilters({ place: "bin" })}>Look in the bin</TextButton>{" "}
+            <TextButton onClick={() => changeFilters({ place: "archived" })}>or in the archive</TextButton>
           </p>
         </>
       ) : (
@@ -120,6 +124,7 @@ export function NotebooksPage({ groups }: { groups: readonly GroupSummary[] }) {
                   notebook={notebook}
                   now={now}
                   onRename={(chosen) => setOpen({ kind: "rename", notebook: chosen })}
+                  onMove={(chosen) => setOpen({ kind: "move", notebook: chosen })}
                 />
               ))}
             </ul>
@@ -127,7 +132,9 @@ export function NotebooksPage({ groups }: { groups: readonly GroupSummary[] }) {
             <p className="border-t-[1.5px] border-ink pt-18 type-abstract">
               {filters.q
                 ? `Nothing with “${filters.q}” in its title or its owner’s name.`
-                : "The bin is empty."}
+                : filters.place === "bin"
+                  ? "The bin is empty."
+                  : "The archive is empty."}
               {filters.q && (
                 <TextButton className="ml-12" onClick={() => changeFilters({ q: "" })}>
                   Show all
@@ -148,6 +155,7 @@ export function NotebooksPage({ groups }: { groups: readonly GroupSummary[] }) {
           <NewNotebookDialog groups={groups} beginning={open.beginning} onClose={close} />
         )}
         {open?.kind === "import" && <ImportDialog groups={groups} file={open.file} onClose={close} />}
+        {open?.kind === "move" && <MoveDialog notebook={open.notebook} groups={groups} onClose={close} />}
         {open?.kind === "rename" && <RenameDialog notebook={open.notebook} onClose={close} />}
       </Suspense>
       {isDraggedOver && (

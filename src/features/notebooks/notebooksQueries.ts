@@ -58,3 +58,18 @@ export const useDeleteNotebook = () => useListChange((id: string) => api.delete(
 
 export const useRestoreNotebook = () =>
   useListChange((id: string) => api.post(`/notebooks/${id}/restore-from-bin`, {}, z.unknown()));
+
+/** A copy of one's own, on one's own shelf. */
+export const useDuplicateNotebook = () =>
+  useListChange((id: string) => api.post(`/notebooks/${id}/duplicate`, { groupId: null }, madeNotebook));
+
+export const useArchiveNotebook = () =>
+  useListChange(({ id, isArchived }: { id: string; isArchived: boolean }) =>
+    api.post(`/notebooks/${id}/${isArchived ? "archive" : "unarchive"}`, {}, z.unknown()),
+  );
+
+/** To a group, or with null to one's own shelf. */
+export const useMoveNotebook = () =>
+  useListChange(({ id, groupId }: { id: string; groupId: string | null }) =>
+    api.post(`/notebooks/${id}/move`, { groupId }, z.unknown()),
+  );

@@ -6,12 +6,14 @@ export type ListPlace = NotebookListQuery["place"];
 
 const shortest: NotebookListQuery = { q: "", order: "changed", place: "shelf" };
 
+const places: readonly ListPlace[] = ["shelf", "archived", "bin"];
+
 /** The filters as an address holds them; whatever it does not say, or says wrongly, is as usual. */
 export function readListFilters(address: URLSearchParams): NotebookListQuery {
   return {
     q: (address.get("q") ?? "").slice(0, 200),
     order: address.get("order") === "title" ? "title" : "changed",
-    place: address.get("place") === "bin" ? "bin" : "shelf",
+    place: places.find((place) => place === address.get("place")) ?? "shelf",
   };
 }
 

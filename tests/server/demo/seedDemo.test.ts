@@ -5,8 +5,10 @@ import { demoNotebooks } from "../../../server/demo/demoNotebooks";
 import { seedDemo } from "../../../server/demo/seedDemo";
 import { evaluateDocument } from "../../../server/jobs/evaluateDocument";
 import type { Evaluator } from "../../../server/jobs/evaluator";
+import { letters } from "../../../server/db/tables/letters";
 import { places } from "../../../server/places";
 import { notebookListResponse, type NotebookListItem } from "../../../shared/schemas/notebooks";
+import { groupInvitationList } from "../../../shared/schemas/invitations";
 import { versionListResponse } from "../../../shared/schemas/versions";
 import { buildUser } from "../../factories/buildUser";
 import { openTestDatabase } from "../testDatabase";
@@ -21,7 +23,7 @@ const now = new Date("2026-12-01T10:42:00Z");
 let server: TestServer;
 beforeAll(async () => {
   server = await startTestServer({ demo: true });
-  expect(await seedDemo(server.db, { evaluator, now })).toBe(true);
+  expect(await seedDemo(server.db, { evaluator, now, linkOrigin: "https://tenuity.example" })).toBe(true);
   await server.summaries.catchUp();
   await server.summaries.idle();
 });
@@ -71,6 +73,15 @@ describe("the demonstration", () => {
     expect(group).toMatchObject({ name: "Carrow Aeronomy", code: "CAR", role: "guest", members: 5 });
   });
 
+  it("has an invitation without an answer, whose letter waits", async () => {
+    const agent = await demoAgent("j.aldaker@carrow.example");
+    const [group] = (await agent.get("/api/groups")).body;
+    const open = groupInvitationList.parse((await agent.get(`/api/groups/${group.id}/invitations`)).body);
+    expect(open).toMatchObject([{ email: "l.verrano@lomme.example", role: "guest", hasLapsed: false }]);
+    const [letter] = await server.db.select().from(letters);
+    expect(letter).toMatchObject({ toAddress: "l.verrano@lomme.example", kind: "group_invitation" });
+  });
+
   it("has kept versions, oldest differing from newest, and times that are past", async () => {
     const agent = await demoAgent("w.castellane@carrow.example");
     const [ilmara] = (await listFor("w.castellane@carrow.example")).filter(
@@ -98,14 +109,14 @@ describe("the demonstration", () => {
   });
 
   it("is seeded once", async () => {
-    expect(await seedDemo(server.db, { evaluator, now })).toBe(false);
+    expect(await seedDemo(server.db, { evaluator, now, linkOrigin: "https://tenuity.example" })).toBe(false);
     expect(await listFor("t.orevale@carrow.example")).toHaveLength(6);
   });
 
   it("keeps away where someone has one of its addresses", async () => {
     const { db, close } = await openTestDatabase();
     await buildUser(db, { email: demoAccounts[2]!.email });
-    expect(await seedDemo(db, { evaluator, now })).toBe(false);
+    expect(await seedDemo(db, { evaluator, now, linkOrigin: "https://tenuity.example" })).toBe(false);
     await close();
   });
 });

@@ -6,7 +6,7 @@ import {
   notebookRoleOf,
   type NotebookFacts,
 } from "../../../server/policies/notebookPolicy";
-import { notebookActions, type NotebookAction } from "../../../shared/schemas/roles";
+import { notebookActions, servedNotebookActions, type NotebookAction } from "../../../shared/schemas/roles";
 
 const tamsin: Actor = { id: "tamsin", name: "Tamsin Orevale", email: "t.orevale@carrow.example" };
 const other: Actor = { id: "other", name: "Someone Else", email: "someone@else.example" };
@@ -14,87 +14,106 @@ const other: Actor = { id: "other", name: "Someone Else", email: "someone@else.e
 const private_: NotebookFacts = {
   ownerId: "tamsin",
   isDeleted: false,
+  isArchived: false,
   shareRole: null,
   groupRole: null,
   actorGroupRole: null,
+  vetting: null,
 };
 
-const may = (actor: Actor | null, facts: Partial<NotebookFacts>, action: NotebookAction): boolean =>
-  notebookPolicy[action](actor, { ...private_, ...facts });
+type Who = [who: string, actor: Actor | null, facts: Partial<NotebookFacts>];
 
-type Row = [who: string, actor: Actor | null, facts: Partial<NotebookFacts>, answers: string];
+const vetting = { isOwnersAlone: false, groupLeads: 2 };
+const vettingAlone = { isOwnersAlone: true, groupLeads: 2 };
+const vettingAloneOnlyLead = { isOwnersAlone: true, groupLeads: 1 };
 
-/** Columns: read, export, edit, rename, keepVersion, restoreVersion, delete, restoreFromBin. */
-const table: Row[] = [
-  ["signed out", null, {}, "- - - - - - - -"],
-  ["signed out, shared with its group", null, { groupRole: "co-author" }, "- - - - - - - -"],
-  ["no tie", other, {}, "- - - - - - - -"],
-  ["no tie, shared with its group", other, { groupRole: "co-author" }, "- - - - - - - -"],
-  ["owner", tamsin, {}, "y y y y y y y -"],
-  ["owner who left the group", tamsin, { groupRole: "reader" }, "y y y y y y y -"],
-  ["co-author", other, { shareRole: "co-author" }, "y y y y y y - -"],
-  ["commenter", other, { shareRole: "commenter" }, "y y - - - - - -"],
-  ["reader", other, { shareRole: "reader" }, "y y - - - - - -"],
-  ["lead, private draft", other, { actorGroupRole: "lead" }, "- - - - - - - -"],
-  ["lead, group reads", other, { actorGroupRole: "lead", groupRole: "reader" }, "y y - - - - - -"],
-  ["lead, group comments", other, { actorGroupRole: "lead", groupRole: "commenter" }, "y y - - - - - -"],
-  ["lead, group writes", other, { actorGroupRole: "lead", groupRole: "co-author" }, "y y y y y y - -"],
-  ["researcher, private draft", other, { actorGroupRole: "researcher" }, "- - - - - - - -"],
-  [
-    "researcher, group reads",
-    other,
-    { actorGroupRole: "researcher", groupRole: "reader" },
-    "y y - - - - - -",
-  ],
-  [
-    "researcher, group writes",
-    other,
-    { actorGroupRole: "researcher", groupRole: "co-author" },
-    "y y y y y y - -",
-  ],
-  ["guest, private draft", other, { actorGroupRole: "guest" }, "- - - - - - - -"],
-  ["guest, group reads", other, { actorGroupRole: "guest", groupRole: "reader" }, "y y - - - - - -"],
-  ["guest, group writes", other, { actorGroupRole: "guest", groupRole: "co-author" }, "y y - - - - - -"],
-  [
-    "guest who is co-author in person",
-    other,
-    { actorGroupRole: "guest", groupRole: "reader", shareRole: "co-author" },
-    "y y y y y y - -",
-  ],
-  [
-    "reader in person, group writes",
-    other,
-    { actorGroupRole: "researcher", groupRole: "co-author", shareRole: "reader" },
-    "y y y y y y - -",
-  ],
-  ["signed out, in the bin", null, { isDeleted: true }, "- - - - - - - -"],
-  ["no tie, in the bin", other, { isDeleted: true }, "- - - - - - - -"],
-  ["owner, in the bin", tamsin, { isDeleted: true }, "- - - - - - - y"],
-  ["co-author, in the bin", other, { isDeleted: true, shareRole: "co-author" }, "- - - - - - - -"],
-  ["commenter, in the bin", other, { isDeleted: true, shareRole: "commenter" }, "- - - - - - - -"],
-  ["reader, in the bin", other, { isDeleted: true, shareRole: "reader" }, "- - - - - - - -"],
-  [
-    "lead, in the bin",
-    other,
-    { isDeleted: true, actorGroupRole: "lead", groupRole: "co-author" },
-    "- - - - - - - -",
-  ],
+/** One column each, in this order. */
+const people: Who[] = [
+  ["signed out", null, { groupRole: "co-author" }],
+  ["a stranger", other, { groupRole: "co-author" }],
+  ["the owner", tamsin, {}],
+  ["a co-author", other, { shareRole: "co-author" }],
+  ["a commenter", other, { shareRole: "commenter" }],
+  ["a reader", other, { shareRole: "reader" }],
+  ["a researcher, nothing shared", other, { actorGroupRole: "researcher" }],
+  ["a guest, nothing shared", other, { actorGroupRole: "guest" }],
+  ["the lead, nothing shared", other, { actorGroupRole: "lead" }],
+  ["the lead, in vetting", other, { actorGroupRole: "lead", vetting }],
+  ["a lead, own alone, in vetting", tamsin, { actorGroupRole: "lead", vetting: vettingAlone }],
+  ["the only lead, own alone, in vetting", tamsin, { actorGroupRole: "lead", vetting: vettingAloneOnlyLead }],
+  ["a researcher, the group writes", other, { actorGroupRole: "researcher", groupRole: "co-author" }],
+  ["a guest, the group writes", other, { actorGroupRole: "guest", groupRole: "co-author" }],
+  ["the lead, the group reads", other, { actorGroupRole: "lead", groupRole: "reader" }],
 ];
 
+/** Every action: live, archived, in the bin; a column for each of the people. */
+const table: Record<NotebookAction, [live: string, archived: string, binned: string]> = {
+  read: ["--yyyy----yyyyy", "--yyyy----yyyyy", "---------------"],
+  export: ["--yyyy----yyyyy", "--yyyy----yyyyy", "---------------"],
+  fork: ["--yyyy----yyyyy", "--yyyy----yyyyy", "---------------"],
+  duplicate: ["--yyyy----yyyyy", "--yyyy----yyyyy", "---------------"],
+  seeShares: ["--yyyy----yyyyy", "--yyyy----yyyyy", "---------------"],
+  leave: ["---yyy---------", "---yyy---------", "---------------"],
+  comment: ["--yyy-----yyy--", "---------------", "---------------"],
+  resolveOwnThread: ["--yyy-----yyy--", "---------------", "---------------"],
+  resolveAnyThread: ["--yy------yyy--", "---------------", "---------------"],
+  edit: ["--yy------yyy--", "---------------", "---------------"],
+  rename: ["--yy------yyy--", "---------------", "---------------"],
+  keepVersion: ["--yy------yyy--", "---------------", "---------------"],
+  restoreVersion: ["--yy------yyy--", "---------------", "---------------"],
+  answerCautions: ["--yy------yyy--", "---------------", "---------------"],
+  offer: ["--yy------yyy--", "---------------", "---------------"],
+  takeOffers: ["--yy------yyy--", "---------------", "---------------"],
+  requestVetting: ["--yy------yyy--", "---------------", "---------------"],
+  share: ["--y-------yy---", "--y-------yy---", "---------------"],
+  handOver: ["--y-------yy---", "--y-------yy---", "---------------"],
+  move: ["--y-------yy---", "--y-------yy---", "---------------"],
+  archive: ["--y-------yy---", "---------------", "---------------"],
+  unarchive: ["---------------", "--y-------yy---", "---------------"],
+  delete: ["--y-------yy---", "--y-------yy---", "---------------"],
+  restoreFromBin: ["---------------", "---------------", "--y-------yy---"],
+  readVersionInVetting: ["--yyyy---yyyyyy", "--yyyy---yyyyyy", "---------------"],
+  vet: ["---------y-y---", "---------y-y---", "---------------"],
+  publish: ["---------y-y---", "---------y-y---", "---------------"],
+};
+
+const states = [
+  ["live", {}],
+  ["archived", { isArchived: true }],
+  ["in the bin", { isDeleted: true }],
+  ["in the bin from the archive", { isDeleted: true, isArchived: true }],
+] as const;
+
 describe("who may do what with a notebook", () => {
-  it.each(table)("%s", (_who, actor, facts, answers) => {
-    const said = notebookActions.map((action) => (may(actor, facts, action) ? "y" : "-")).join(" ");
-    expect(said).toBe(answers);
+  it.each(notebookActions)("%s", (action) => {
+    for (const [state, stateFacts] of states) {
+      const column = state === "live" ? 0 : state === "archived" ? 1 : 2;
+      const said = people
+        .map(([, actor, facts]) => notebookPolicy[action](actor, { ...private_, ...facts, ...stateFacts }))
+        .map((may) => (may ? "y" : "-"))
+        .join("");
+      expect(said, `${action}, ${state}`).toBe(table[action][column]);
+    }
   });
 
-  it("the abilities sent along are the rules' answers", () => {
-    for (const [, actor, facts] of table) {
+  it("what the page is told are the rules' answers, of what has a route", () => {
+    for (const [, actor, facts] of people) {
       const notebook = { ...private_, ...facts };
       const abilities = notebookAbilitiesOf(actor, notebook);
-      expect(Object.keys(abilities).sort()).toEqual([...notebookActions].sort());
-      for (const action of notebookActions)
+      expect(Object.keys(abilities).sort()).toEqual([...servedNotebookActions].sort());
+      for (const action of servedNotebookActions)
         expect(abilities[action]).toBe(notebookPolicy[action](actor, notebook));
     }
+  });
+
+  it("a guest who is co-author in person writes", () => {
+    const facts = {
+      ...private_,
+      actorGroupRole: "guest",
+      groupRole: "reader",
+      shareRole: "co-author",
+    } as const;
+    expect(notebookPolicy.edit(other, facts)).toBe(true);
   });
 
   it("of a share in person and one with the group the greater counts", () => {

@@ -1,5 +1,8 @@
+import { eq } from "drizzle-orm";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
-import { groupListResponse, groupResponse } from "../../../shared/schemas/groups";
+import { setMemberRole } from "../../../server/commands/setMemberRole";
+import { groupMembers } from "../../../server/db/tables/groupMembers";
+import { groupListResponse, groupResponse, memberNotebooks } from "../../../shared/schemas/groups";
 import { buildGroup } from "../../factories/buildGroup";
 import { buildNotebook } from "../../factories/buildNotebook";
 import { buildUser } from "../../factories/buildUser";
@@ -18,7 +21,9 @@ describe("every route of groups", () => {
     ["get", "/api/groups"],
     ["post", "/api/groups"],
     ["get", `/api/groups/${nobody}`],
-    ["post", `/api/groups/${nobody}/members`],
+    ["patch", `/api/groups/${nobody}`],
+    ["post", `/api/groups/${nobody}/hand-over`],
+    ["get", `/api/groups/${nobody}/members/${nobody}/notebooks`],
     ["patch", `/api/groups/${nobody}/members/${nobody}`],
     ["delete", `/api/groups/${nobody}/members/${nobody}`],
   ] as const)("signed out: %s %s is refused", async (method, path) => {
@@ -29,7 +34,9 @@ describe("every route of groups", () => {
 
   it.each([
     ["get", "", undefined],
-    ["post", "/members", { email: "person@carrow.example", role: "guest" }],
+    ["patch", "", { name: "Another name" }],
+    ["post", "/hand-over", { userId: nobody }],
+    ["get", `/members/${nobody}/notebooks`, undefined],
     ["patch", `/members/${nobody}`, { role: "guest" }],
     ["delete", `/members/${nobody}`, undefined],
   ] as const)("outside the group: %s …%s is not found", async (method, path, body) => {
@@ -60,7 +67,7 @@ describe("POST /api/groups", () => {
     const group = groupResponse.parse(response.body);
     expect(group).toMatchObject({ name: "Carrow Aeronomy", code: "CAR", role: "lead", members: 1 });
     expect(group.memberList).toMatchObject([{ user: { name: "Jorun Aldaker" }, role: "lead" }]);
-    expect(group.abilities).toMatchObject({ addMember: true, leave: false });
+    expect(group.abilities).toMatchObject({ invite: true, leave: false });
 
     const again = await lead.post("/api/groups").send({ name: "Another", code: "CAR" });
     expect(again.status).toBe(409);
@@ -104,24 +111,7 @@ describe("GET /api/groups/:id", () => {
 });
 
 describe("members", () => {
-  it("are added by a lead, by the address of their account", async () => {
-    const { id, lead } = await buildGroup(server.db);
-    const ishani = await buildUser(server.db);
-    const agent = await server.as(lead);
-    const add = (body: object) => agent.post(`/api/groups/${id}/members`).send(body);
-
-    expect((await add({ email: "x", role: "boss" })).body.issues).toHaveLength(2);
-    const unknown = await add({ email: "nobody@carrow.example", role: "guest" });
-    expect(unknown.status).toBe(422);
-    expect(unknown.body).toMatchObject({ code: "no_account", issues: [{ path: "email" }] });
-
-    const added = await add({ email: ishani.email.toUpperCase(), role: "researcher" });
-    expect(added.status).toBe(201);
-    expect(groupResponse.parse(added.body).memberList).toMatchObject([{}, { user: { id: ishani.id } }]);
-    expect((await add({ email: ishani.email, role: "guest" })).body.code).toBe("already_member");
-  });
-
-  it("are not added, changed or removed by anyone else in the group", async () => {
+  it("are not changed, removed or made lead by anyone but a lead", async () => {
     const researcher = await buildUser(server.db);
     const guest = await buildUser(server.db);
     const { id } = await buildGroup(server.db, {
@@ -135,13 +125,12 @@ describe("members", () => {
       [guest, researcher],
     ] as const) {
       const agent = await server.as(person);
-      const added = await agent
-        .post(`/api/groups/${id}/members`)
-        .send({ email: "a@b.example", role: "guest" });
-      expect(added.status).toBe(403);
       const changed = await agent.patch(`/api/groups/${id}/members/${person.id}`).send({ role: "lead" });
       expect(changed.status).toBe(403);
       expect((await agent.delete(`/api/groups/${id}/members/${other.id}`)).status).toBe(403);
+      expect((await agent.get(`/api/groups/${id}/members/${other.id}/notebooks`)).status).toBe(403);
+      expect((await agent.post(`/api/groups/${id}/hand-over`).send({ userId: other.id })).status).toBe(403);
+      expect((await agent.patch(`/api/groups/${id}`).send({ name: "Mine" })).status).toBe(403);
     }
   });
 
@@ -165,7 +154,7 @@ describe("members", () => {
     const stepped = await set(lead.id, "guest");
     expect(groupResponse.parse(stepped.body)).toMatchObject({
       role: "guest",
-      abilities: { addMember: false },
+      abilities: { invite: false },
     });
   });
 
@@ -191,21 +180,119 @@ describe("members", () => {
     expect(answers.map(({ status }) => status).sort()).toEqual([204, 409]);
   });
 
-  it("are removed by a lead; what was theirs alone goes with them, what was shared stays", async () => {
+  it("two leads who remove each other at once do not both succeed, though a third is there", async () => {
+    const [second, third] = [await buildUser(server.db), await buildUser(server.db)];
+    const { id, lead } = await buildGroup(server.db, {
+      members: [
+        [second, "lead"],
+        [third, "lead"],
+      ],
+    });
+    const answers = await Promise.all(
+      [
+        [lead, second],
+        [second, lead],
+      ].map(async ([by, whom]) => (await server.as(by!)).delete(`/api/groups/${id}/members/${whom!.id}`)),
+    );
+    const [done, refused] = answers.map(({ status }) => status).sort();
+    expect(done).toBe(204);
+    expect([404, 409]).toContain(refused);
+    const group = groupResponse.parse((await (await server.as(third)).get(`/api/groups/${id}`)).body);
+    expect(group.members).toBe(2);
+  });
+
+  it("are not changed by a lead who has ceased to be one in the meantime", async () => {
+    const [second, guest] = [await buildUser(server.db), await buildUser(server.db)];
+    const { id, lead } = await buildGroup(server.db, {
+      members: [
+        [second, "lead"],
+        [guest, "guest"],
+      ],
+    });
+    const at = new Date();
+    const change = { groupId: id, actorId: second.id, at };
+    await setMemberRole(server.db, { ...change, userId: second.id, role: "researcher" });
+    const late = setMemberRole(server.db, { ...change, userId: guest.id, role: "lead" });
+    await expect(late).rejects.toMatchObject({ code: "not_lead_any_more" });
+    const group = groupResponse.parse((await (await server.as(lead)).get(`/api/groups/${id}`)).body);
+    expect(group.memberList.map(({ role }) => role)).toEqual(["lead", "researcher", "guest"]);
+  });
+
+  it("leave their notebooks in the group to the lead who removes them, who is told how many before", async () => {
     const tamsin = await buildUser(server.db);
     const { id, lead } = await buildGroup(server.db, { members: [[tamsin, "researcher"]] });
     const alone = await buildNotebook(server.db, { owner: tamsin, groupId: id });
-    const shared = await buildNotebook(server.db, { owner: tamsin, groupId: id, groupRole: "reader" });
+    const shared = await buildNotebook(server.db, {
+      owner: tamsin,
+      groupId: id,
+      groupRole: "reader",
+      shares: [[lead, "commenter"]],
+    });
+    const elsewhere = await buildNotebook(server.db, { owner: tamsin });
     const agent = await server.as(lead);
+    const told = await agent.get(`/api/groups/${id}/members/${tamsin.id}/notebooks`);
+    expect(memberNotebooks.parse(told.body)).toEqual({
+      notebooks: 2,
+      goTo: { id: lead.id, name: lead.name },
+    });
     expect((await agent.delete(`/api/groups/${id}/members/${nobody}`)).status).toBe(404);
     expect((await agent.delete(`/api/groups/${id}/members/${tamsin.id}`)).status).toBe(204);
 
+    for (const { id: notebookId } of [alone, shared]) {
+      const notebook = (await agent.get(`/api/notebooks/${notebookId}`)).body;
+      expect(notebook).toMatchObject({ role: "owner", group: { id } });
+      expect((await agent.get(`/api/notebooks/${notebookId}/shares`)).body.people).toEqual([]);
+    }
     const hers = await server.as(tamsin);
-    expect((await hers.get(`/api/notebooks/${alone.id}`)).body.group).toBeNull();
-    expect((await hers.get(`/api/notebooks/${shared.id}`)).body).toMatchObject({
-      group: { id },
-      role: "owner",
+    expect((await hers.get(`/api/notebooks/${alone.id}`)).status).toBe(404);
+    expect((await hers.get(`/api/notebooks/${elsewhere.id}`)).body.role).toBe("owner");
+  });
+
+  it("who leave leave them to the lead who has been there longest", async () => {
+    const [tamsin, newer] = [await buildUser(server.db), await buildUser(server.db)];
+    const { id, lead } = await buildGroup(server.db, {
+      members: [
+        [tamsin, "lead"],
+        [newer, "lead"],
+      ],
     });
-    expect((await agent.get(`/api/notebooks/${shared.id}`)).status).toBe(200);
+    const later = new Date("2026-11-01T00:00:00Z");
+    await server.db.update(groupMembers).set({ joinedAt: later }).where(eq(groupMembers.userId, newer.id));
+    const { id: notebookId } = await buildNotebook(server.db, { owner: tamsin, groupId: id });
+    const hers = await server.as(tamsin);
+    const told = await hers.get(`/api/groups/${id}/members/${tamsin.id}/notebooks`);
+    expect(told.body).toMatchObject({ notebooks: 1, goTo: { id: lead.id } });
+    expect((await hers.delete(`/api/groups/${id}/members/${tamsin.id}`)).status).toBe(204);
+    const theirs = await (await server.as(lead)).get(`/api/notebooks/${notebookId}`);
+    expect(theirs.body.role).toBe("owner");
+  });
+});
+
+describe("PATCH /api/groups/:id", () => {
+  it("renames the group for its leads; the code stays", async () => {
+    const { id, lead, code } = await buildGroup(server.db, { name: "Before" });
+    const agent = await server.as(lead);
+    expect((await agent.patch(`/api/groups/${id}`).send({ name: " " })).status).toBe(422);
+    const renamed = await agent.patch(`/api/groups/${id}`).send({ name: "After", code: "XXXXX" });
+    expect(groupResponse.parse(renamed.body)).toMatchObject({ name: "After", code });
+  });
+});
+
+describe("POST /api/groups/:id/hand-over", () => {
+  it("makes a member lead in one's place", async () => {
+    const tamsin = await buildUser(server.db);
+    const { id, lead } = await buildGroup(server.db, { members: [[tamsin, "guest"]] });
+    const agent = await server.as(lead);
+    const handOver = (userId: unknown) => agent.post(`/api/groups/${id}/hand-over`).send({ userId });
+    expect((await handOver("x")).status).toBe(422);
+    expect((await handOver(nobody)).status).toBe(404);
+    expect((await handOver(lead.id)).body.code).toBe("already_lead");
+
+    const answer = groupResponse.parse((await handOver(tamsin.id)).body);
+    expect(answer.memberList.map(({ user, role }) => [user.id, role])).toEqual([
+      [tamsin.id, "lead"],
+      [lead.id, "researcher"],
+    ]);
+    expect((await handOver(tamsin.id)).status).toBe(403);
   });
 });

@@ -20,6 +20,8 @@ interface MoreMenuProps {
   /** As it is on the page, unsaved text and all. */
   document: NotebookDocument;
   onDeleted: () => void;
+  /** Opens the list of who may see it. */
+  onShares: () => void;
   /** On narrow pages the menu also has what the bar has no room for. */
   unitSystem: UnitSystem;
   onUnitSystem: (system: UnitSystem) => void;
@@ -39,6 +41,7 @@ export function MoreMenu({
   notebook,
   document,
   onDeleted,
+  onShares,
   unitSystem,
   onUnitSystem,
   onKeep,
@@ -65,6 +68,9 @@ export function MoreMenu({
             <MenuChoice value={unitSystem} options={unitOptions} onChange={onUnitSystem} />
             <MenuRule />
           </>
+        )}
+        {notebook.abilities.seeShares && (
+          <MenuItem onSelect={onShares}>{notebook.abilities.share ? "Share" : "Who may see it"}</MenuItem>
         )}
         <MenuLink to={`/notebooks/${notebook.id}/versions`}>Versions</MenuLink>
         {notebook.lastVersion !== null && (

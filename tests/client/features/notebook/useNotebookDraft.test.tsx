@@ -3,7 +3,7 @@ import { act, renderHook, waitFor } from "@testing-library/react";
 import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
 import type { NotebookDocument } from "../../../../shared/notebook/document";
 import type { NotebookResponse } from "../../../../shared/schemas/notebooks";
-import { notebookActions } from "../../../../shared/schemas/roles";
+import { servedNotebookActions } from "../../../../shared/schemas/roles";
 import { useNotebookDraft } from "../../../../src/features/notebook/draft/useNotebookDraft";
 import { aNotebook, withTexts, wiremu } from "./aNotebook";
 
@@ -40,7 +40,7 @@ async function serve(_path: RequestInfo | URL, init?: RequestInit): Promise<Resp
 }
 
 function aResponse(): NotebookResponse {
-  const abilities = Object.fromEntries(notebookActions.map((action) => [action, true]));
+  const abilities = Object.fromEntries(servedNotebookActions.map((action) => [action, true]));
   return {
     id: "ilmara",
     title: server.document.title,
@@ -53,6 +53,7 @@ function aResponse(): NotebookResponse {
     savedBy: server.savedBy,
     document: server.document,
     lastVersion: null,
+    isArchived: false,
     abilities: abilities as NotebookResponse["abilities"],
   };
 }

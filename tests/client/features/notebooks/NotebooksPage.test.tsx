@@ -2,18 +2,17 @@ import { fireEvent, screen, waitFor, within } from "@testing-library/react";
 import { afterEach, describe, expect, it, vi } from "vitest";
 import type { NotebookListItem } from "../../../../shared/schemas/notebooks";
 import { NotebooksPage } from "../../../../src/features/notebooks/NotebooksPage";
+import type { GroupSummary } from "../../../../shared/schemas/groups";
+import { servedGroupActions, servedNotebookActions } from "../../../../shared/schemas/roles";
 import { answerWith, problemAnswer } from "../../answers";
 import { renderPage } from "../../renderPage";
 
 const mayAll = {
-  read: true,
-  export: true,
-  edit: true,
-  rename: true,
-  keepVersion: true,
-  restoreVersion: true,
-  delete: true,
+  ...(Object.fromEntries(
+    servedNotebookActions.map((action) => [action, true]),
+  ) as NotebookListItem["abilities"]),
   restoreFromBin: false,
+  unarchive: false,
 };
 
 function notebook(id: string, title: string, more: Partial<NotebookListItem> = {}): NotebookListItem {
@@ -56,10 +55,22 @@ function notebook(id: string, title: string, more: Partial<NotebookListItem> = {
       strip: null,
     },
     deletedAt: null,
+    isArchived: false,
     abilities: mayAll,
     ...more,
   };
 }
+
+const carrow: GroupSummary = {
+  id: "car",
+  name: "Carrow Aeronomy",
+  code: "CAR",
+  role: "researcher",
+  members: 5,
+  abilities: Object.fromEntries(
+    servedGroupActions.map((action) => [action, true]),
+  ) as GroupSummary["abilities"],
+};
 
 const ilmara = notebook("a", "Escape of hydrogen from Ilmara’s dayside");
 const list = (...notebooks: NotebookListItem[]) => ({ body: { notebooks } });
@@ -151,6 +162,44 @@ describe("the verbs of a line", () => {
     await screen.findByRole("menuitem", { name: "Export as Markdown" });
     expect(screen.queryByRole("menuitem", { name: "Delete" })).toBeNull();
     expect(screen.queryByRole("menuitem", { name: "Rename" })).toBeNull();
+  });
+
+  it("duplicate, archive and move", async () => {
+    const asked = answerWith({
+      "GET /notebooks": list(ilmara),
+      "POST /notebooks/a/duplicate": { body: { id: "b" } },
+      "POST /notebooks/a/archive": { body: {} },
+      "POST /notebooks/a/move": { body: {} },
+    });
+    renderPage(<NotebooksPage groups={[carrow]} />);
+    const choose = async (name: string) => {
+      fireEvent.keyDown(await screen.findByRole("button", { name: /^More for Escape/ }), {
+        key: "ArrowDown",
+      });
+      fireEvent.click(await screen.findByRole("menuitem", { name }));
+    };
+    await choose("Duplicate");
+    await screen.findByText(/A copy of .* stands on your own shelf/);
+    await choose("Archive");
+    await screen.findByText(/is in the archive, to be read only/);
+    await choose("Move");
+    const dialog = within(await screen.findByRole("dialog", { name: "Move the notebook" }));
+    expect(dialog.getByRole("button", { name: "Move" }).hasAttribute("disabled")).toBe(true);
+    fireEvent.click(dialog.getByRole("radio", { name: "Carrow Aeronomy" }));
+    fireEvent.click(dialog.getByRole("button", { name: "Move" }));
+    await screen.findByText(/stands in Carrow Aeronomy now/);
+    expect(asked.filter(({ method }) => method === "POST").map(({ path, body }) => [path, body])).toEqual([
+      ["/notebooks/a/duplicate", { groupId: null }],
+      ["/notebooks/a/archive", {}],
+      ["/notebooks/a/move", { groupId: "car" }],
+    ]);
+  });
+
+  it("look in the archive", async () => {
+    const asked = answerWith({ "GET /notebooks": list(ilmara) });
+    renderPage(<NotebooksPage groups={[]} />, { at: "/notebooks?place=archived" });
+    await screen.findByRole("button", { name: "Where: in the archive" });
+    expect(asked[0]!.path).toContain("place=archived");
   });
 
   it("put back what is in the bin", async () => {

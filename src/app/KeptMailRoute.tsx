@@ -1,0 +1,10 @@
+import { KeptMailPage } from "../features/development/KeptMailPage";
+import { PageFrame } from "../ui/PageFrame";
+
+export default function KeptMailRoute() {
+  return (
+    <PageFrame places={[{ to: "/notebooks", label: "Notebooks" }]}>
+      <KeptMailPage />
+    </PageFrame>
+  );
+}
