@@ -53,7 +53,7 @@ const server = await startServer();
 const browser = await launchBrowser();
 try {
   // High enough that the entry and the figure are both on screen: a figure that nobody sees waits.
-  const { page } = await openPage(browser, { viewport: { width: 1440, height: 2000 } });
+  const { page } = await openPage(browser, { viewport: { width: 1440, height: 1200 } });
   await signInAs(page, server.origin, "Tamsin Orevale");
   await openNotebook(page, /Escape of hydrogen from Ilmara/);
   await seeFirstFigure(page);

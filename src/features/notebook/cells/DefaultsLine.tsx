@@ -11,7 +11,7 @@ export function DefaultsLine({ defaults }: Pick<CellEvaluation, "defaults">) {
         <Fragment key={key}>
           {index > 0 && (index === defaults.length - 1 ? " and " : ", ")}
           <code>{text}</code>
-          {note && `, ${note}${index < defaults.length - 1 ? "," : ""}`}
+          {note && `, ${note}${index === defaults.length - 2 ? "," : ""}`}
         </Fragment>
       ))}
       .
