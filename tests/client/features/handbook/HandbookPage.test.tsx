@@ -2,6 +2,7 @@ import { fireEvent, screen, waitFor, within } from "@testing-library/react";
 import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
 import { engineVersion } from "../../../../shared/notebook/engine";
 import { handbookBodies, handbookGases, references } from "../../../../shared/physics";
+import { servedNotebookActions } from "../../../../shared/schemas/roles";
 import { HandbookPage } from "../../../../src/features/handbook/HandbookPage";
 import { answerWith, problemAnswer } from "../../answers";
 import { renderPage } from "../../renderPage";
@@ -86,16 +87,7 @@ describe("the handbook", () => {
   });
 });
 
-const mayAll = {
-  read: true,
-  export: true,
-  edit: true,
-  rename: true,
-  keepVersion: true,
-  restoreVersion: true,
-  delete: true,
-  restoreFromBin: false,
-};
+const mayAll = Object.fromEntries(servedNotebookActions.map((action) => [action, true]));
 const listed = (id: string, title: string, edit: boolean) => ({
   id,
   title,
@@ -106,6 +98,7 @@ const listed = (id: string, title: string, edit: boolean) => ({
   revision: 4,
   savedAt: "2026-03-01T10:00:00.000Z",
   lastVersion: null,
+  isArchived: false,
   summary: null,
   deletedAt: null,
   abilities: { ...mayAll, edit },
@@ -125,6 +118,7 @@ const notebook = (revision: number, cells: object[] = []) => ({
     savedBy: { id: "t", name: "Tamsin Orevale" },
     document: { format: 1, title: "Oda", unitSystem: "SI", headline: [], authors: [], cells },
     lastVersion: null,
+    isArchived: false,
     abilities: mayAll,
   },
 });
