@@ -12,8 +12,18 @@ export const entryLine = (page: Page, key: string): Locator =>
 
 /** Writes another value in an entry's place, as a person would: to the end of its line, back to the sign, over it. */
 export async function writeEntry(page: Page, key: string, value: string): Promise<void> {
+  await focusEntry(page, key);
+  await typeEntry(page, key, value);
+}
+
+/** Puts the caret into an entry. */
+export async function focusEntry(page: Page, key: string): Promise<void> {
   await scrollTo(page, entryLine(page, key));
   await entryLine(page, key).click();
+}
+
+/** Writes over the entry that the caret is in. */
+export async function typeEntry(page: Page, key: string, value: string): Promise<void> {
   await page.keyboard.press("Home");
   await page.keyboard.press("Shift+End");
   await page.keyboard.insertText(`${key} = ${value}`);

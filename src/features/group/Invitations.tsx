@@ -80,7 +80,7 @@ function InvitationLine({ groupId, invitation }: { groupId: string; invitation: 
       <span className="type-meta text-ink2">{hasLapsed ? `lapsed ${lapse}` : `lapses ${lapse}`}</span>
       <span className="flex flex-wrap justify-end gap-x-18">
         <TextButton
-          aria-label={`Send the invitation of ${email} again`}
+          aria-label={`Send again the invitation of ${email}`}
           disabled={again.isPending}
           onClick={() => again.mutate(id, tell(`${email} has a new letter; the old link is void.`))}
         >

@@ -82,7 +82,7 @@ function MemberLine({ group, member, isSelf, isLastLead, onRemove, onHandOver }:
   }
 
   return (
-    <li className="grid grid-cols-[minmax(0,1fr)_auto] items-baseline gap-x-18 py-10 mid:grid-cols-[minmax(0,1.6fr)_130px_minmax(0,1fr)_140px]">
+    <li className="grid grid-cols-[minmax(0,1fr)_auto] items-baseline gap-x-18 gap-y-8 py-10 mid:grid-cols-[minmax(0,1.6fr)_130px_minmax(0,1fr)_140px]">
       <span className="font-serif text-[19px]/[26px]">
         {user.name}
         {isSelf && <span className="type-meta text-ink3"> you</span>}
@@ -101,7 +101,7 @@ function MemberLine({ group, member, isSelf, isLastLead, onRemove, onHandOver }:
         )}
       </span>
       <span className="type-meta text-ink2">since {formatDay(new Date(joinedAt), new Date())}</span>
-      <span className="flex flex-wrap justify-end gap-x-12 text-right">
+      <span className="flex flex-wrap justify-end gap-x-12 gap-y-4 text-right">
         {canHandOver && <TextButton onClick={onHandOver}>Hand over</TextButton>}
         {canRemove && !isLastLead && (
           <TextButton onClick={onRemove} aria-label={isSelf ? "Leave the group" : `Remove ${user.name}`}>

@@ -174,7 +174,7 @@ function ShareList({ notebook, shares, onLeft, onHandOver }: ShareListProps) {
           acts={
             <>
               <TextButton
-                aria-label={`Send the invitation of ${email} again`}
+                aria-label={`Send again the invitation of ${email}`}
                 disabled={again.isPending}
                 onClick={() =>
                   again.mutate(invitationId, tell(`${email} has a new letter; the old link is void.`))

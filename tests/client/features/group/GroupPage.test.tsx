@@ -104,7 +104,7 @@ describe("for its lead", () => {
     });
     renderPage(<GroupPage groupId="g" />, { user: jorun });
     await screen.findByText("no answer yet");
-    fireEvent.click(screen.getByRole("button", { name: /Send the invitation of l\.verrano/ }));
+    fireEvent.click(screen.getByRole("button", { name: /Send again the invitation of l\.verrano/ }));
     await screen.findByText(/has a new letter/);
     fireEvent.click(screen.getByRole("button", { name: /Take back the invitation of l\.verrano/ }));
     await screen.findByText(/is taken back/);

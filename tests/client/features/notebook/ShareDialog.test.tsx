@@ -110,7 +110,7 @@ describe("for its owner", () => {
     await screen.findByText("Wiremu Castellane is now reader.");
     fireEvent.click(screen.getByRole("button", { name: "Take back from Pello Marrash" }));
     await screen.findByText(/Pello Marrash no longer sees it in person/);
-    fireEvent.click(screen.getByRole("button", { name: /Send the invitation of n\.harcourt/ }));
+    fireEvent.click(screen.getByRole("button", { name: /Send again the invitation of n\.harcourt/ }));
     await screen.findByText(/has a new letter/);
     fireEvent.click(screen.getByRole("button", { name: "Share with all" }));
     await screen.findByText("The group may read it.");
