@@ -1,5 +1,6 @@
 import { formatNumber, formatUnit, unitSpace, type DisplayScale } from "../../lib/format";
 import { Rich } from "../../lib/Rich";
+import { plainText } from "../../lib/richText";
 import { useElementSize } from "../../lib/useElementSize";
 import {
   quantileNames,
@@ -7,6 +8,7 @@ import {
   type SpreadResult,
   type SpreadWatched,
 } from "../plots/spreadResult";
+import { ExplainNumber } from "./ExplainNumber";
 import { TableFrame } from "./TableFrame";
 import { tableText } from "./tableText";
 
@@ -39,14 +41,26 @@ function fullText({ watched }: SpreadResult): string {
 }
 
 /** A quantile, and under it its standard error. */
-function Quantile({ watched, quantile }: { watched: SpreadWatched; quantile: QuantileName }) {
-  const { unit, scale, quantiles } = watched;
+function Quantile({
+  cell,
+  watched,
+  quantile,
+}: {
+  /** Name of the spread cell. */
+  cell: string;
+  watched: SpreadWatched;
+  quantile: QuantileName;
+}) {
+  const { unit, scale, quantiles, name } = watched;
   const { value, error } = quantiles[quantile];
   if (value === null) return <td>–</td>;
   const full = `${value} ${unit}`.replace(/ 1$/, "");
+  const text = formatNumber(value * scale.factor);
   return (
     <td title={error === null ? full : `${full}, standard error ${error}`}>
-      <Rich text={formatNumber(value * scale.factor)} />
+      <ExplainNumber place={{ cell, name: `${name}.${quantile}` }} spoken={plainText(text)}>
+        <Rich text={text} />
+      </ExplainNumber>
       {error !== null && (
         <small className="table-error">
           ±{unitSpace}
@@ -113,7 +127,7 @@ export function SpreadTable({ spread, number }: SpreadTableProps) {
                   <tr key={quantile}>
                     <th scope="row">{heads[quantile]}</th>
                     {watched.map((each) => (
-                      <Quantile key={each.name} watched={each} quantile={quantile} />
+                      <Quantile key={each.name} cell={spread.name} watched={each} quantile={quantile} />
                     ))}
                   </tr>
                 ))
@@ -121,7 +135,7 @@ export function SpreadTable({ spread, number }: SpreadTableProps) {
                   <tr key={each.name}>
                     <th scope="row">{name(each)}</th>
                     {quantileNames.map((quantile) => (
-                      <Quantile key={quantile} watched={each} quantile={quantile} />
+                      <Quantile key={quantile} cell={spread.name} watched={each} quantile={quantile} />
                     ))}
                   </tr>
                 ))}
