@@ -22,9 +22,11 @@ import { invitationRoutes } from "./routes/invitationRoutes";
 import { keepingRoutes } from "./routes/keepingRoutes";
 import { mailRoutes } from "./routes/mailRoutes";
 import { notebookRoutes } from "./routes/notebookRoutes";
+import { referenceRoutes } from "./routes/referenceRoutes";
 import { sessionRoutes } from "./routes/sessionRoutes";
 import { shareRoutes } from "./routes/shareRoutes";
 import { versionRoutes } from "./routes/versionRoutes";
+import { vettingRoutes } from "./routes/vettingRoutes";
 
 export interface AppParts {
   db: Db;
@@ -74,6 +76,8 @@ export function createApp(parts: AppParts): Express {
   api.use(keepingRoutes({ db, summaries }));
   api.use(shareRoutes({ db, post, linkOrigin }));
   api.use(versionRoutes({ db, evaluator, summaries }));
+  api.use(vettingRoutes({ db, evaluator, post, linkOrigin }));
+  api.use(referenceRoutes({ db }));
   api.use(() => {
     throw notFound("address");
   });

@@ -11,6 +11,7 @@ import { linkOriginOf, readEnv, type Env } from "./env";
 import { createEvaluator } from "./jobs/evaluator";
 import { startHousekeeping } from "./jobs/housekeeping";
 import { createPost } from "./jobs/post";
+import { recomputeReferences } from "./jobs/recomputeReferences";
 import { createSummaries } from "./jobs/summaries";
 import { drawerTransport, smtpTransport } from "./mail/transport";
 import { openData } from "./openData";
@@ -80,6 +81,9 @@ async function start(env: Env, logger: Logger): Promise<() => Promise<void>> {
   const housekeeping = startHousekeeping({ db, auth, logger });
   post.start();
   await summaries.catchUp();
+  const recomputing = recomputeReferences({ db, evaluator, logger }).catch((error: unknown) =>
+    logger.error({ err: error }, "references were not recomputed"),
+  );
   process.stdout.write(`Tenuity is on ${address()}\n`);
 
   return async () => {
@@ -88,6 +92,7 @@ async function start(env: Env, logger: Logger): Promise<() => Promise<void>> {
     await summaries.close();
     await post.close();
     await evaluator.close();
+    await recomputing;
     await data.close();
   };
 }

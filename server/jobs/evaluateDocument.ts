@@ -2,6 +2,8 @@ import { performance } from "node:perf_hooks";
 import type { NotebookDocument } from "../../shared/notebook/document";
 import { completeNotebook } from "../../shared/notebook/completeNotebook";
 import { evaluateNotebook } from "../../shared/notebook/evaluateNotebook";
+import { publishedBodies } from "../../shared/notebook/publishedParts";
+import { nothingSupplied, type SuppliedReferences } from "../../shared/notebook/references";
 import type { Evaluation } from "../../shared/notebook/result";
 import { resultDocument } from "../../shared/notebook/resultDocument";
 import { summariseNotebook } from "../../shared/notebook/summariseNotebook";
@@ -15,8 +17,12 @@ import type { EvaluationOutcome } from "./evaluator";
 export function evaluateDocument(
   document: NotebookDocument,
   longWork: number | null = null,
+  references: SuppliedReferences = nothingSupplied,
 ): EvaluationOutcome {
-  const evaluation = longWork === null ? evaluateNotebook(document).evaluation : complete(document, longWork);
+  const evaluation =
+    longWork === null
+      ? evaluateNotebook(document, undefined, undefined, references).evaluation
+      : complete(document, longWork, references);
   const { engine, title, cells } = resultDocument(evaluation);
   const kept = cells.map(({ kind, name, status, values, tables, notes }) => ({
     kind,
@@ -26,10 +32,14 @@ export function evaluateDocument(
     tables,
     notes,
   }));
-  return { result: { engine, title, cells: kept }, summary: summariseNotebook(document, evaluation) };
+  return {
+    result: { engine, title, cells: kept },
+    summary: summariseNotebook(document, evaluation),
+    bodies: publishedBodies(document, references),
+  };
 }
 
-function complete(document: NotebookDocument, longWork: number): Evaluation {
+function complete(document: NotebookDocument, longWork: number, references: SuppliedReferences): Evaluation {
   const end = performance.now() + longWork;
-  return completeNotebook(document, () => performance.now() < end);
+  return completeNotebook(document, () => performance.now() < end, references);
 }

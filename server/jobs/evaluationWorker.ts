@@ -3,8 +3,9 @@ import { parentPort } from "node:worker_threads";
 import type { EvaluationAnswer, EvaluationRequest } from "./evaluator";
 import { evaluateDocument } from "./evaluateDocument";
 
-parentPort?.on("message", ({ document, longWork }: EvaluationRequest) => {
-  const answer: EvaluationAnswer = { ok: true, outcome: evaluateDocument(document, longWork) };
+parentPort?.on("message", ({ document, references, longWork }: EvaluationRequest) => {
+  const supplied = new Map(references.map((reference) => [reference.pin, reference]));
+  const answer: EvaluationAnswer = { ok: true, outcome: evaluateDocument(document, longWork, supplied) };
   parentPort?.postMessage(answer);
 });
 

@@ -1,6 +1,7 @@
 import { once } from "node:events";
 import { Worker } from "node:worker_threads";
 import type { NotebookDocument } from "../../shared/notebook/document";
+import type { SuppliedReference } from "../../shared/notebook/references";
 import type { NotebookSummary } from "../../shared/notebook/summary";
 import type { KeptResult } from "../../shared/schemas/results";
 import { places } from "../places";
@@ -9,22 +10,31 @@ import { places } from "../places";
 export interface EvaluationOutcome {
   result: KeptResult;
   summary: NotebookSummary;
+  /** What its body cells hand on to notebooks that use it once it is published. */
+  bodies: SuppliedReference["bodies"];
 }
 
 export type EvaluationAnswer = { ok: true; outcome: EvaluationOutcome } | { ok: false; reason: string };
+
+export interface EvaluationOptions {
+  isKept?: boolean;
+  /** Published references that the document pins and whoever it is evaluated for may see. */
+  references?: readonly SuppliedReference[];
+}
 
 export interface Evaluator {
   /**
    * One after the other; documents to be kept do not wait for others, and have their sweeps and spreads computed.
    * Never rejects.
    */
-  evaluate(document: NotebookDocument, options?: { isKept: boolean }): Promise<EvaluationAnswer>;
+  evaluate(document: NotebookDocument, options?: EvaluationOptions): Promise<EvaluationAnswer>;
   close(): Promise<void>;
 }
 
 /** What a worker is asked. */
 export interface EvaluationRequest {
   document: NotebookDocument;
+  references: readonly SuppliedReference[];
   /** ms for sweeps and spreads; null leaves them out. */
   longWork: number | null;
 }
@@ -47,7 +57,8 @@ export function createEvaluator({ timeLimit = 10_000, longWork = 60_000 }: Limit
   const drafts = createLane(null, timeLimit);
   const kept = createLane(longWork, timeLimit + longWork);
   return {
-    evaluate: (document, { isKept } = { isKept: false }) => (isKept ? kept : drafts).evaluate(document),
+    evaluate: (document, { isKept = false, references = [] } = {}) =>
+      (isKept ? kept : drafts).evaluate(document, references),
     close: async () => {
       await Promise.all([drafts.close(), kept.close()]);
     },
@@ -56,11 +67,12 @@ export function createEvaluator({ timeLimit = 10_000, longWork = 60_000 }: Limit
 
 interface WaitingDocument {
   document: NotebookDocument;
+  references: readonly SuppliedReference[];
   answer: (answer: EvaluationAnswer) => void;
 }
 
 interface Lane {
-  evaluate(document: NotebookDocument): Promise<EvaluationAnswer>;
+  evaluate(document: NotebookDocument, references: readonly SuppliedReference[]): Promise<EvaluationAnswer>;
   close(): Promise<void>;
 }
 
@@ -71,13 +83,13 @@ function createLane(longWork: number | null, timeLimit: number): Lane {
   let running: Promise<void> | null = null;
   let isClosed = false;
 
-  const run = async ({ document, answer }: WaitingDocument): Promise<void> => {
+  const run = async ({ document, references, answer }: WaitingDocument): Promise<void> => {
     try {
       worker ??= await startWorker(() => (worker = null));
     } catch (error) {
       return answer({ ok: false, reason: `The evaluation could not begin: ${String(error)}` });
     }
-    const reply = await askWorker(worker, { document, longWork }, timeLimit);
+    const reply = await askWorker(worker, { document, references, longWork }, timeLimit);
     if (!reply.isAlive) {
       await worker?.terminate();
       worker = null;
@@ -91,10 +103,10 @@ function createLane(longWork: number | null, timeLimit: number): Lane {
   };
 
   return {
-    evaluate: (document) =>
+    evaluate: (document, references) =>
       new Promise((answer) => {
         if (isClosed) return answer({ ok: false, reason: "The server is stopping. Try again in a minute." });
-        waiting.push({ document, answer });
+        waiting.push({ document, references, answer });
         running ??= runAll();
       }),
 

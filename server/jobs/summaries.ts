@@ -3,6 +3,7 @@ import { engineVersion } from "../../shared/notebook/engine";
 import { storeSummary } from "../commands/storeSummary";
 import type { Db } from "../db/client";
 import { findDraft, listDraftsToSummarise } from "../db/reads/draftsToSummarise";
+import { supplyReferences } from "../references/supplyReferences";
 import type { Evaluator } from "./evaluator";
 
 export interface Summaries {
@@ -16,7 +17,8 @@ export interface Summaries {
   close(): Promise<void>;
 }
 
-/** Computes summaries of saved drafts beside the answers. Acts for the server itself: a summary tells nobody new. */
+/** Computes summaries of saved drafts beside the answers. Acts for the server itself: a summary tells nobody new.
+ * What a draft takes from references is what whoever saved it may see. */
 export function createSummaries(parts: { db: Db; evaluator: Evaluator; logger: Logger }): Summaries {
   const { db, evaluator, logger } = parts;
   const wanted = new Set<string>();
@@ -26,7 +28,9 @@ export function createSummaries(parts: { db: Db; evaluator: Evaluator; logger: L
   const summarise = async (notebookId: string): Promise<void> => {
     const draft = await findDraft(db, notebookId);
     if (!draft) return;
-    const answer = await evaluator.evaluate(draft.document);
+    const answer = await evaluator.evaluate(draft.document, {
+      references: await supplyReferences(db, draft.document, draft.savedBy),
+    });
     if (isClosed && !answer.ok) return;
     if (!answer.ok) logger.warn({ notebookId, reason: answer.reason }, "a draft could not be summarised");
     const summary = answer.ok ? answer.outcome.summary : null;

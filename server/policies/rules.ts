@@ -95,4 +95,6 @@ export const referenceRules: Record<ReferenceAction, ReferenceRule> = {
   use: { roles: everyone, isForAllIfPublic: true },
   supersede: { roles: leads },
   withdraw: { roles: leads },
+  // Its DOI, and whether it is read without an account.
+  describe: { roles: leads },
 };

@@ -10,6 +10,7 @@ import type { Summaries } from "../jobs/summaries";
 import { requireActor } from "../middleware/session";
 import { draftStateOf, presentNotebook } from "../presenters/presentNotebook";
 import { presentVersion, presentVersionSummary } from "../presenters/presentVersion";
+import { supplyReferences } from "../references/supplyReferences";
 import { authorise } from "./authorise";
 import { readId, readOrdinal } from "./ids";
 import { loadNotebook } from "./loadNotebook";
@@ -33,7 +34,10 @@ export function versionRoutes(parts: { db: Db; evaluator: Evaluator; summaries: 
     authorise(actor, notebook, "keepVersion", "keep a version of this notebook");
     if (notebook.revision !== revision) throw staleRevision(draftStateOf(notebook));
 
-    const answer = await evaluator.evaluate(notebook.document, { isKept: true });
+    const answer = await evaluator.evaluate(notebook.document, {
+      isKept: true,
+      references: await supplyReferences(db, notebook.document, actor.id),
+    });
     if (!answer.ok) throw evaluationFailed(`The version was not kept. ${answer.reason}`);
     const { result } = answer.outcome;
     const { number } = await keepVersion(db, {

@@ -25,6 +25,8 @@ export const documentLimits = {
   authors: 100,
   authorLength: 200,
   cells: 500,
+  answers: 500,
+  answerLength: 1000,
   cellLength: 1_000_000,
   documentLength: 4_000_000,
 } as const;
@@ -46,6 +48,18 @@ export const cellSchema = z.object({
   text: z.string().max(documentLimits.cellLength),
 });
 
+/** Why a caution is right to stand, in a sentence; kept under the cell's name, the caution's code and its entry. */
+export const cautionAnswerSchema = z.object({
+  cell: singleLine(documentLimits.nameLength),
+  code: singleLine(64).min(1),
+  /** Empty where the caution is about the cell as a whole. */
+  entry: singleLine(documentLimits.nameLength),
+  /** Numbers of the caution as answered; the answer lapses when one moves by over 1 %. */
+  numbers: z.array(z.number()).max(100),
+  sentence: singleLine(documentLimits.answerLength).min(1),
+});
+export type CautionAnswer = z.infer<typeof cautionAnswerSchema>;
+
 export const notebookDocumentSchema = z.object({
   format: z.literal(1),
   title: singleLine(documentLimits.titleLength),
@@ -54,6 +68,8 @@ export const notebookDocumentSchema = z.object({
   headline: z.array(singleLine(documentLimits.headlineLength).min(1)).max(documentLimits.headlineItems),
   authors: z.array(singleLine(documentLimits.authorLength).min(1)).max(documentLimits.authors),
   cells: z.array(cellSchema).max(documentLimits.cells),
+  /** Left out where no caution has been answered. */
+  answers: z.array(cautionAnswerSchema).max(documentLimits.answers).optional(),
 });
 
 export type Cell = z.infer<typeof cellSchema>;

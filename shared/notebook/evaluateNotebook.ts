@@ -15,6 +15,7 @@ import {
 import { parseEntries } from "./language/parseEntries";
 import type { ParsedEntries } from "./language/syntax";
 import { withSpreads, type DecoratedCell } from "./evaluation/withSpreads";
+import { nothingSupplied, type SuppliedReferences } from "./references";
 import type { CellEvaluation, Evaluation } from "./result";
 import type { LongTask, PartialTask, TaskAnswer, TaskAnswers } from "./tasks";
 
@@ -39,12 +40,15 @@ export type EvaluationMemory = ReadonlyMap<string, RememberedCell>;
  * Sweeps and spreads take long: they are answered from `answers` or the memory where their task has been done, else
  * listed in `tasks`. Those that were stopped before their end are answered in part, and listed in `partial`.
  *
+ * What `ref(…)` names is taken from `references`; a pin that is not among them is a fault of its cell.
+ *
  * Never throws: whatever cannot be answered is said in the notes of a cell.
  */
 export function evaluateNotebook(
   document: NotebookDocument,
   previous?: EvaluationMemory,
   answers?: TaskAnswers,
+  references: SuppliedReferences = nothingSupplied,
 ): { evaluation: Evaluation; memory: EvaluationMemory; tasks: LongTask[]; partial: PartialTask[] } {
   const taskAnswer = knownAnswers(previous, answers);
   const memory = new Map<string, RememberedCell>();
@@ -53,7 +57,7 @@ export function evaluateNotebook(
   let above = nothingAbove;
 
   const remembered = document.cells.map((cell, place) => {
-    const surroundings = surroundingsOf(above, places, place, taskAnswer);
+    const surroundings = surroundingsOf(above, places, place, taskAnswer, references);
     const last = previous?.get(cell.id);
     const answered =
       last && isSameCell(last, cell, document) && answersTheSame(last.questions, surroundings)

@@ -2,6 +2,7 @@ import type { NotebookDocument } from "./document";
 import { openTask } from "./evaluation/openTask";
 import { spreadAnswer } from "./evaluation/spreadAnswer";
 import { sweepAnswer } from "./evaluation/sweepAnswer";
+import { nothingSupplied, type SuppliedReferences } from "./references";
 import type { LongTask, PointOutcome, TaskAnswer, TaskPart } from "./tasks";
 
 /** Points from the first without a gap, joined. */
@@ -21,8 +22,9 @@ export function finishTask(
   document: NotebookDocument,
   task: LongTask,
   parts: readonly TaskPart[],
+  references: SuppliedReferences = nothingSupplied,
 ): TaskAnswer {
-  const open = openTask(document, task);
+  const open = openTask(document, task, references);
   const joined = joinParts(task, open.plan.watch.length, parts);
   const answer = open.plan.kind === "sweep" ? sweepAnswer(open, joined) : spreadAnswer(open, joined);
   const { done } = joined;

@@ -4,22 +4,30 @@ import { spreadDraws } from "./evaluation/spreadDraws";
 import { sweepPoint } from "./evaluation/sweepPoints";
 import type { Replacements } from "./evaluation/surroundings";
 import type { TaskPlan } from "./evaluation/taskPlan";
+import { nothingSupplied, type SuppliedReferences } from "./references";
 import type { LongTask, PointOutcome, TaskPart } from "./tasks";
 
 /**
  * Computes points `from` up to, but not including, `to` of a task. A pure function: each point rests on its index alone,
  * so any split over any number of workers gives the same bits.
  */
-export function runTask(document: NotebookDocument, task: LongTask, from: number, to: number): TaskPart {
-  return taskRunner(document, task)(from, to);
+export function runTask(
+  document: NotebookDocument,
+  task: LongTask,
+  from: number,
+  to: number,
+  references: SuppliedReferences = nothingSupplied,
+): TaskPart {
+  return taskRunner(document, task, references)(from, to);
 }
 
 /** The same for many parts: what all points share is done once. Throws where the document has no such task. */
 export function taskRunner(
   document: NotebookDocument,
   task: LongTask,
+  references: SuppliedReferences = nothingSupplied,
 ): (from: number, to: number) => TaskPart {
-  const open = openTask(document, task);
+  const open = openTask(document, task, references);
   const replacementsAt = replacementsOf(open.plan);
   return (from, to) => runPart(open, replacementsAt, from, to);
 }

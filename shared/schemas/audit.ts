@@ -37,6 +37,12 @@ export const actKinds = {
     "notebook_moved_out",
     "notebook_deleted",
     "notebook_restored",
+    "vetting_requested",
+    "vetting_taken_back",
+    "vetting_returned",
+    "vetting_approved",
+    "reference_withdrawn",
+    "reference_described",
   ],
 } as const;
 

@@ -34,6 +34,8 @@ export const servedNotebookActions = [
   "unarchive",
   "delete",
   "restoreFromBin",
+  "requestVetting",
+  "answerCautions",
 ] as const;
 
 export const notebookActions = [
@@ -44,8 +46,6 @@ export const notebookActions = [
   "resolveAnyThread",
   "offer",
   "takeOffers",
-  "answerCautions",
-  "requestVetting",
   "readVersionInVetting",
   "vet",
   "publish",
@@ -64,12 +64,14 @@ export const servedGroupActions = [
   "handOver",
   "leave",
   "seeAudit",
+  "seeReferences",
+  "seeQueue",
 ] as const;
 
-export const groupActions = [...servedGroupActions, "seeReferences", "seeQueue"] as const;
+export const groupActions = [...servedGroupActions] as const;
 export type GroupAction = (typeof groupActions)[number];
 
-export const referenceActions = ["read", "cite", "use", "supersede", "withdraw"] as const;
+export const referenceActions = ["read", "cite", "use", "supersede", "withdraw", "describe"] as const;
 export type ReferenceAction = (typeof referenceActions)[number];
 
 /** What this person may do with this notebook, as the server decided. */

@@ -12,7 +12,10 @@ import { openTestDatabase } from "./testDatabase";
 
 /** Evaluates here rather than in a thread: the thread has a test of its own. */
 const evaluator: Evaluator = {
-  evaluate: async (document) => ({ ok: true, outcome: evaluateDocument(document) }),
+  evaluate: async (document, { references = [] } = {}) => ({
+    ok: true,
+    outcome: evaluateDocument(document, null, new Map(references.map((one) => [one.pin, one]))),
+  }),
   close: async () => undefined,
 };
 

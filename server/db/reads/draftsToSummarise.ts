@@ -5,7 +5,7 @@ import { notebooks } from "../tables/notebooks";
 /** The draft as it is now; undefined where the notebook is gone. */
 export async function findDraft(db: Db, notebookId: string) {
   const [draft] = await db
-    .select({ revision: notebooks.revision, document: notebooks.document })
+    .select({ revision: notebooks.revision, document: notebooks.document, savedBy: notebooks.savedBy })
     .from(notebooks)
     .where(eq(notebooks.id, notebookId));
   return draft;

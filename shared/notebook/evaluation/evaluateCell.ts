@@ -15,6 +15,7 @@ import { locateNotes } from "../language/locateNotes";
 import type { ParsedEntries } from "../language/syntax";
 import type { CellEvaluation, CellResult, CellStatus, Note } from "../result";
 import { openCell, type OpenCell } from "./openCell";
+import { sayHowReferencesStand } from "./sayHowReferencesStand";
 import type { TaskPlan } from "./taskPlan";
 import { usedNames, type CellAbove, type RecordedSurroundings } from "./surroundings";
 import type { TaskAnswer } from "../tasks";
@@ -69,6 +70,7 @@ export function evaluateCell(
   const lastModel = last?.above.model ?? null;
   const open = openCell(cell, parsed, cellSchemas[cell.kind], surroundings, unitSystem, lastModel, wanted);
   const answer = evaluateSafely(open, cell.kind);
+  if (!open.isDraw) sayHowReferencesStand(open);
   const values = finiteValues(open, answer.values ?? {});
   const notes = orderNotes(locateNotes(open.notes, open.text, open.entries));
   const result: CellResult = {

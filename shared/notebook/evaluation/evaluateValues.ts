@@ -53,6 +53,7 @@ function withEntriesAbove(cell: OpenCell, globals: Readonly<Record<string, Quant
       return above;
     },
     names: () => [...Object.keys(globals), ...surroundings.names()],
+    reference: (pin) => surroundings.reference(pin),
     draw: surroundings.draw,
   };
 }

@@ -6,6 +6,7 @@ import type { Dimension } from "../language/dimensions";
 import { siUnitText } from "../language/formatQuantity";
 import type { Quantity, Uncertainty } from "../language/quantity";
 import type { ParsedEntries } from "../language/syntax";
+import { nothingSupplied, type SuppliedReferences } from "../references";
 import type { Note, ResultValue } from "../result";
 import { aboveMagnitude, belowMagnitude, type LongTask } from "../tasks";
 import { evaluateCell, type EvaluatedCell } from "./evaluateCell";
@@ -53,10 +54,14 @@ export interface OpenTask {
 }
 
 /** Throws where the document has no such task. */
-export function openTask(document: NotebookDocument, task: LongTask): OpenTask {
+export function openTask(
+  document: NotebookDocument,
+  task: LongTask,
+  references: SuppliedReferences = nothingSupplied,
+): OpenTask {
   const index = document.cells.findIndex(({ id }) => id === task.cellId);
   const cells = document.cells.slice(0, index + 1);
-  const { memory } = evaluateNotebook({ ...document, cells });
+  const { memory } = evaluateNotebook({ ...document, cells }, undefined, undefined, references);
   const plan = memory.get(task.cellId)?.evaluated.plan;
   if (!plan || plan.key !== task.key) throw new Error(`The document has no task for ${task.name}.`);
 
@@ -79,7 +84,7 @@ export function openTask(document: NotebookDocument, task: LongTask): OpenTask {
       },
     ];
   });
-  const evaluate = evaluatorOf(taskCells, plan, document.unitSystem);
+  const evaluate = evaluatorOf(taskCells, plan, document.unitSystem, references);
   const above = aboveOf(taskCells);
   const resultOf = (name: string) => {
     const { value, unit = "1" } = resultAt(above, name)!;
@@ -127,6 +132,7 @@ function evaluatorOf(
   cells: readonly TaskCell[],
   { watch }: TaskPlan,
   unitSystem: NotebookDocument["unitSystem"],
+  references: SuppliedReferences,
 ): OpenTask["evaluate"] {
   const firstMoved = cells.findIndex(({ isMoved }) => isMoved);
   const still = firstMoved < 0 ? cells : cells.slice(0, firstMoved);
@@ -142,7 +148,7 @@ function evaluatorOf(
         continue;
       }
       const surroundings = {
-        ...surroundingsOf(above, noPlaces, 0, noAnswer),
+        ...surroundingsOf(above, noPlaces, 0, noAnswer, references),
         ...replacements(cell.id),
         questions: [],
       };

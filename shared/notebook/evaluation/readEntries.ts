@@ -2,13 +2,15 @@
 import { handbookGases } from "../../physics";
 import type { CellKind } from "../document";
 import { evaluateExpression } from "../language/evaluateExpression";
-import { inWords } from "../language/notes";
+import { nearestName } from "../language/nearestName";
+import { changeTo, inWords } from "../language/notes";
 import { readQuantity } from "../language/readQuantity";
+import { readPin } from "../language/readPin";
 import { readReference } from "../language/readReference";
 import type { Reading } from "../language/reading";
-import type { Entry, ValueNode } from "../language/syntax";
+import type { CallNode, Entry, ValueNode } from "../language/syntax";
 import { understoodText } from "../language/understoodText";
-import type { CellModel } from "./models";
+import type { BodyModel, CellModel } from "./models";
 import type { OpenCell } from "./openCell";
 
 /** undefined where the entry is missing or has a fault. */
@@ -52,6 +54,8 @@ export function readCellEntry<Kind extends CellModel["kind"]>(
   const { surroundings } = cell;
   const entry = cell.entry(key);
   if (!entry) return undefined;
+  if (entry.node.type === "call" && entry.node.name === "ref" && key === "body")
+    return readReferenceBody(cell, entry.node) as Extract<CellModel, { kind: Kind }> | undefined;
   const path = entry.node.type === "name" ? entry.node.path : "";
   const target = path === "" ? undefined : surroundings.cell(path);
   if (target?.found === "below") {
@@ -66,6 +70,23 @@ export function readCellEntry<Kind extends CellModel["kind"]>(
   if (name === undefined || target?.found !== "above") return undefined;
   if (target.model?.kind === key) return target.model as Extract<CellModel, { kind: Kind }>;
   cell.say("fault", "reference_without_answer", withoutAnswer(name, key), entry);
+  return undefined;
+}
+
+/** `body = ref(CAR4.2, ilmara)`: a body as its reference was published. */
+function readReferenceBody(cell: OpenCell, node: CallNode): BodyModel | undefined {
+  const pin = readPin(node, cell.surroundings.reference);
+  cell.notes.push(...pin.notes);
+  if (!pin.ok) return undefined;
+  const { reference, name, range } = pin.value;
+  if (Object.hasOwn(reference.bodies, name)) return reference.bodies[name];
+  const bodies = Object.keys(reference.bodies);
+  const nearest = nearestName(name, bodies) ?? (bodies.length === 1 ? bodies[0] : undefined);
+  const message =
+    nearest === undefined
+      ? `${reference.pin} has no body *${name}*.`
+      : `${reference.pin} has no body *${name}*. It has *${nearest}*.`;
+  cell.say("fault", "reference_body", message, range, nearest === undefined ? undefined : changeTo(range, nearest));
   return undefined;
 }
 

@@ -3,6 +3,7 @@ import type { CellKind } from "../document";
 import type { Quantity } from "../language/quantity";
 import type { Scope, Unavailable } from "../language/scope";
 import type { Entry } from "../language/syntax";
+import { nothingSupplied, type SuppliedReference, type SuppliedReferences } from "../references";
 import type { ResultValue } from "../result";
 import type { TaskAnswer } from "../tasks";
 import type { CellModel, GasModel } from "./models";
@@ -44,6 +45,8 @@ export interface Surroundings {
   valuesEntry(name: string): "yes" | null;
   /** What results above rest on; their names with spaces between. */
   trace(names: string): Trace;
+  /** A published reference by its pin, such as "CAR4.2", where it was supplied. */
+  reference(pin: string): SuppliedReference | undefined;
   /** The answer of a sweep or spread, by the key of its task, if it has been computed. */
   taskAnswer(key: string): TaskAnswer | undefined;
 }
@@ -95,6 +98,7 @@ export function surroundingsOf(
   places: NamePlaces,
   place: number,
   taskAnswer: Surroundings["taskAnswer"],
+  references: SuppliedReferences = nothingSupplied,
 ): Surroundings {
   const isBelow = (name: string) => (places.get(name) ?? -1) > place;
   return {
@@ -140,6 +144,7 @@ export function surroundingsOf(
     },
     valuesEntry: (name) => (above.globals.has(name) ? "yes" : null),
     trace: (names) => traceResults(above, names.split(" ")),
+    reference: (pin) => references.get(pin),
     taskAnswer,
   };
 }
@@ -208,6 +213,7 @@ export function recordQuestions(surroundings: Surroundings): RecordedSurrounding
     definedAbove: asking("definedAbove", surroundings.definedAbove),
     valuesEntry: asking("valuesEntry", surroundings.valuesEntry),
     trace: asking("trace", surroundings.trace),
+    reference: asking("reference", surroundings.reference),
     taskAnswer: asking("taskAnswer", surroundings.taskAnswer),
     get questions() {
       return [...questions.values()];

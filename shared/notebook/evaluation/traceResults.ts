@@ -1,6 +1,6 @@
 /** What results rest on: cells and `values` entries, back to the uncertain numbers written in them. */
 import { cellSchemas } from "../cellSchemas";
-import type { Entry, ValueNode } from "../language/syntax";
+import type { CallNode, Entry, ListNode, ValueNode } from "../language/syntax";
 import { rolesIn, type PhysicalRole } from "./physicalRole";
 import type { CellAbove, NotebookAbove } from "./surroundings";
 
@@ -133,13 +133,19 @@ function childrenOf(node: ValueNode): ValueNode[] {
     case "variation":
       return [node.subject, node.first, node.last, node.steps];
     case "call":
+      // What stands in ref(…) is named in the reference, not here.
+      return node.name === "ref" ? [] : itemsOf(node);
     case "list":
-      return node.items.flatMap(({ label, value }) => (label ? [label, value] : [value]));
+      return itemsOf(node);
     case "number":
     case "name":
     case "broken":
       return [];
   }
+}
+
+function itemsOf(node: CallNode | ListNode): ValueNode[] {
+  return node.items.flatMap(({ label, value }) => (label ? [label, value] : [value]));
 }
 
 function uncertainInputs(above: NotebookAbove, places: readonly Place[]): UncertainInput[] {

@@ -1,19 +1,33 @@
 /** The block `notebook` of a file: format, unit system, headline, authors. */
-import type { NotebookDocument } from "../document";
-import { documentLimits } from "../document";
+import type { CautionAnswer, NotebookDocument } from "../document";
+import { cautionAnswerSchema, documentLimits } from "../document";
 import type { Note } from "../result";
 
-export type Header = Pick<NotebookDocument, "unitSystem" | "headline" | "authors">;
+export type Header = Pick<NotebookDocument, "unitSystem" | "headline" | "authors" | "answers">;
 
-const keys = ["format", "unit_system", "headline", "authors"] as const;
+const keys = ["format", "unit_system", "headline", "authors", "answer"] as const;
 
 /** The lines inside the fence. What stands at its default is left out. */
-export function writeHeader({ unitSystem, headline, authors }: Header): string {
+export function writeHeader({ unitSystem, headline, authors, answers = [] }: Header): string {
   const lines = ["format = 1"];
   if (unitSystem !== "SI") lines.push(`unit_system = ${unitSystem}`);
   if (headline.length > 0) lines.push(`headline = ${writeList(headline)}`);
   if (authors.length > 0) lines.push(`authors = ${writeList(authors)}`);
+  for (const { cell, code, entry, numbers, sentence } of answers)
+    lines.push(`answer = ${writeList([cell || none, code, entry || none, numbers.join(" ") || none, sentence])}`);
   return lines.join("\n");
+}
+
+/** Stands where an answer's cell has no name, its caution no entry or no numbers. */
+const none = "-";
+
+/** `answer = cell, code, entry, numbers, sentence`; null where it has another form. */
+function readAnswer(values: readonly string[]): CautionAnswer | null {
+  if (values.length !== 5) return null;
+  const [cell, code, entry, written, sentence] = values.map((value) => (value === none ? "" : value));
+  const numbers = written === "" ? [] : written.split(" ").map(Number);
+  const answer = cautionAnswerSchema.safeParse({ cell, code, entry, numbers, sentence });
+  return answer.success ? answer.data : null;
 }
 
 /**
@@ -37,7 +51,7 @@ export function readHeader(text: string, firstLine: number): { header: Header; n
     }
     const key = parts[1]!.trim();
     const values = readList(parts[2]!);
-    if (seen.has(key)) fault(line, "key_twice", `${key} stands twice in the block notebook; keep one.`);
+    if (seen.has(key) && key !== "answer") fault(line, "key_twice", `${key} stands twice in the block notebook; keep one.`);
     seen.add(key);
 
     if (key === "format") {
@@ -59,6 +73,10 @@ export function readHeader(text: string, firstLine: number): { header: Header; n
           `authors takes up to ${documentLimits.authors} names of up to ${documentLimits.authorLength} characters.`,
         );
       }
+    } else if (key === "answer") {
+      const answer = readAnswer(values);
+      if (answer) header.answers = [...(header.answers ?? []), answer];
+      else fault(line, "answer", "An answer to a caution is written answer = cell, code, entry, numbers, sentence.");
     } else {
       fault(line, "unknown_key", `No entry ${key} in the block notebook; it takes ${keys.join(", ")}.`);
     }

@@ -17,6 +17,8 @@ import {
 import { nearestName } from "./nearestName";
 import { changeTo, fault, inWords } from "./notes";
 import type { Quantity } from "./quantity";
+import { readPin } from "./readPin";
+import { dimensionOfUnit } from "../evaluation/resultUnits";
 import { languageLimits } from "./readValue";
 import { functionNames, type FunctionName } from "./reservedWord";
 import type { Scope } from "./scope";
@@ -227,7 +229,27 @@ function applyFunction(name: FunctionName, node: CallNode, values: Quantity[]): 
   }
 }
 
+/** `ref(CAR4.2, leak.H.rate)`: a result of a published reference, as it was published. */
+function evaluateReference(node: CallNode, scope: Scope): Quantity {
+  const pin = readPin(node, scope.reference);
+  if (!pin.ok) throw new ExpressionFault(pin.notes);
+  const { reference, name, range } = pin.value;
+  const found = Object.hasOwn(reference.values, name) ? reference.values[name] : undefined;
+  if (!found) {
+    const nearest = nearestName(name, Object.keys(reference.values));
+    const message = `${reference.pin} has no result *${name}*.`;
+    if (nearest === undefined) return fail("reference_result", range, message);
+    return fail("reference_result", range, `${message} The nearest is *${nearest}*.`, changeTo(range, nearest));
+  }
+  if (typeof found.value === "string")
+    return fail("not_a_quantity", range, `*${name}* of ${reference.pin} is no quantity, but *${found.value}*.`);
+  if (found.value === null)
+    return fail("unavailable", range, `*${name}* of ${reference.pin} lies outside 1e-300 to 1e300; use its log10.`);
+  return { value: found.value, dimension: dimensionOfUnit(found.unit ?? "1") };
+}
+
 function evaluateCall(node: CallNode, scope: Scope): Quantity {
+  if (node.name === "ref") return evaluateReference(node, scope);
   const name = functionNames.find((candidate) => candidate === node.name);
   if (name === undefined) {
     const unit = unitsForCompletion.some(({ unit: symbol }) => symbol === node.name);

@@ -71,7 +71,7 @@ export function readEddy(node: ValueNode, scope: Scope): Reading<EddyProfile> {
       notes: points.notes,
     };
   }
-  if (node.type === "call" && !(functionNames as readonly string[]).includes(node.name)) {
+  if (node.type === "call" && node.name !== "ref" && !(functionNames as readonly string[]).includes(node.name)) {
     const nearest = nearestName(node.name, ["power", "points"]);
     const forms = "Eddy mixing is a diffusion coefficient, power(…) or points(…).";
     return refused(

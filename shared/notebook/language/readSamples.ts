@@ -28,7 +28,7 @@ export function readSamples(node: ValueNode, expected: ExpectedSamples, scope: S
     const { places, values } = points.value;
     return { ok: true, value: { kind: "points", altitudes: places, values }, notes: points.notes };
   }
-  if (node.type === "call" && !(functionNames as readonly string[]).includes(node.name)) {
+  if (node.type === "call" && node.name !== "ref" && !(functionNames as readonly string[]).includes(node.name)) {
     const nearest = nearestName(node.name, ["points"]);
     const message = `No profile *${node.name}* here. Write one value, or points(${expected.example}, …).`;
     const remedy = nearest === undefined ? undefined : changeTo(node.nameRange, nearest);

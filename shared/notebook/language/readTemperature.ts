@@ -70,7 +70,7 @@ export function readTemperature(node: ValueNode, scope: Scope): Reading<Temperat
       notes: points.notes,
     };
   }
-  if (node.type === "call" && !(functionNames as readonly string[]).includes(node.name)) {
+  if (node.type === "call" && node.name !== "ref" && !(functionNames as readonly string[]).includes(node.name)) {
     const nearest = nearestName(node.name, ["bates", "points"]);
     const forms = "A temperature is a quantity, bates(…) or points(…).";
     return refused(

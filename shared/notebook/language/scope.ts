@@ -1,4 +1,5 @@
 import type { Dimension } from "./dimensions";
+import type { SuppliedReference } from "../references";
 import type { Quantity, Uncertainty } from "./quantity";
 
 /** A name that exists but has no value to give; the reason is a whole sentence. */
@@ -12,6 +13,8 @@ export interface Scope {
   lookup(path: string): Quantity | Unavailable | string | undefined;
   /** Every name that `lookup` knows, for suggestions. */
   names(): readonly string[];
+  /** A published reference by its pin, such as "CAR4.2", where it was supplied. */
+  reference(pin: string): SuppliedReference | undefined;
   /**
    * Where present, gives an uncertain entry its value in SI instead of the centre; null where no part of it is
    * possible. `path` names it within its cell.

@@ -64,6 +64,12 @@ const sayings: Record<ActName, Say> = {
   notebook_moved_in: ({ subject }) => ["moved ", subject, " into the group"],
   notebook_moved_out: ({ subject }) => ["moved ", subject, " out of the group"],
   notebook_deleted: ({ subject }) => ["put ", subject, " in the bin"],
+  vetting_requested: ({ subject }) => ["asked for ", subject, " to be vetted"],
+  vetting_taken_back: ({ subject }) => ["took back the request to vet ", subject],
+  vetting_returned: ({ subject }) => ["returned ", subject, " with remarks"],
+  vetting_approved: (line) => ["approved ", line.subject, line.with ? ` and published it as ${line.with}` : ""],
+  reference_withdrawn: (line) => ["withdrew ", line.with || "a reference", ", published from ", line.subject],
+  reference_described: (line) => ["changed what is said of ", line.with || "a reference", ", published from ", line.subject],
   notebook_restored: ({ subject }) => ["took ", subject, " out of the bin"],
 };
 

@@ -20,6 +20,7 @@ const table: Record<ReferenceAction, [open: string, withinTheGroup: string]> = {
   use: ["yyyyy", "--yyy"],
   supersede: ["----y", "----y"],
   withdraw: ["----y", "----y"],
+  describe: ["----y", "----y"],
 };
 
 describe("who may do what with a reference", () => {

@@ -1,4 +1,5 @@
-import type { Cell, NotebookDocument } from "../../../../shared/notebook/document";
+import { answerKey } from "../../../../shared/notebook/cautionAnswers";
+import type { CautionAnswer, Cell, NotebookDocument } from "../../../../shared/notebook/document";
 import { entryBlocks, joinBlocks, type EntryBlock } from "./entryBlocks";
 import { mergeKeyed, type MergedMember } from "./mergeKeyed";
 
@@ -117,6 +118,12 @@ export function mergeDocuments(
   const cells = mergeKeyed({ base: byId(base), mine: byId(mine), theirs: byId(theirs) }, isSameCell)
     .map(mergeCell)
     .filter((cell) => cell !== undefined);
+  const answers = mergeKeyed(
+    { base: answersOf(base), mine: answersOf(mine), theirs: answersOf(theirs) },
+    isSameAnswer,
+  )
+    .map((member) => stands(member, { cellId: null, label: "answer to a caution", write: ({ sentence }) => sentence }))
+    .filter((answer) => answer !== undefined);
   const of = <Key extends keyof NotebookDocument>(key: Key) => ({
     base: base[key],
     mine: mine[key],
@@ -129,8 +136,17 @@ export function mergeDocuments(
     headline: field(null, "headline", of("headline")),
     authors: field(null, "authors", of("authors")),
     cells,
+    ...(answers.length === 0 ? {} : { answers }),
   };
   return { document, conflicts, settled };
+}
+
+function answersOf({ answers = [] }: NotebookDocument): Map<string, CautionAnswer> {
+  return new Map(answers.map((answer) => [answerKey(answer), answer]));
+}
+
+function isSameAnswer(one: CautionAnswer, other: CautionAnswer): boolean {
+  return one.sentence === other.sentence && isEqual(one.numbers, other.numbers);
 }
 
 function byId(document: NotebookDocument): Map<string, Cell> {
@@ -161,6 +177,7 @@ export function isSameDocument(one: NotebookDocument, other: NotebookDocument): 
       one.unitSystem === other.unitSystem &&
       isEqual(one.headline, other.headline) &&
       isEqual(one.authors, other.authors) &&
+      JSON.stringify(one.answers ?? []) === JSON.stringify(other.answers ?? []) &&
       one.cells.length === other.cells.length &&
       one.cells.every(
         (cell, index) => cell.id === other.cells[index]!.id && isSameCell(cell, other.cells[index]!),

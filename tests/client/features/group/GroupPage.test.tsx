@@ -25,6 +25,8 @@ function group(isLead: boolean): GroupResponse {
       revokeInvitation: isLead,
       handOver: isLead,
       seeAudit: isLead,
+      seeReferences: true,
+      seeQueue: isLead,
       setRole: isLead,
       removeMember: isLead,
       leave: !isLead,

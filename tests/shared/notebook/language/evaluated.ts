@@ -10,6 +10,7 @@ export function scopeOf(quantities: Record<string, ReturnType<Scope["lookup"]>> 
   return {
     lookup: (path) => (Object.hasOwn(quantities, path) ? quantities[path] : undefined),
     names: () => Object.keys(quantities),
+    reference: () => undefined,
   };
 }
 
