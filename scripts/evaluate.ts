@@ -9,15 +9,18 @@ import type { Evaluation } from "../shared/notebook/result";
 import { resultDocument } from "../shared/notebook/resultDocument";
 import { progressLine } from "./evaluate/progressLine";
 import { plainMessage, report } from "./evaluate/report";
+import { readReferences } from "./evaluate/readReferences";
 import { runLongTasks } from "./evaluate/runLongTasks";
 
-const help = `npm run evaluate -- FILE [--json] [--draws] [--threads N]
+const help = `npm run evaluate -- FILE [--json] [--draws] [--threads N] [--references FOLDER]
 
 Evaluates a notebook file and prints a report.
 
   --json       print the result document instead: values, tables, profiles and notes, in SI
   --draws      with --json: a table draws for each spread, with the value of each watched result in each draw
   --threads N  threads for sweeps and spreads; as many as the machine has if left out. The answer is the same
+  --references FOLDER
+               where what ref(CAR4.2, …) names is looked up: the file CAR4.2.json, which the page of the reference gives
   --help       print this
 
 Sweeps and spreads tell their progress on standard error. Ctrl-C stops them; what is done so far is then answered,
@@ -34,6 +37,7 @@ interface Wishes {
   isJson: boolean;
   hasDraws: boolean;
   threads: number;
+  references: string | null;
 }
 
 async function main(commandLine: string[]): Promise<number> {
@@ -50,7 +54,7 @@ async function main(commandLine: string[]): Promise<number> {
 
 /** What is asked for, or what is wrong with it. */
 function readCommandLine(commandLine: readonly string[]): Wishes | string {
-  const wishes = { isJson: false, hasDraws: false, threads: availableParallelism() };
+  const wishes = { isJson: false, hasDraws: false, threads: availableParallelism(), references: null as string | null };
   const files: string[] = [];
   const left = [...commandLine];
   for (let argument = left.shift(); argument !== undefined; argument = left.shift()) {
@@ -60,13 +64,16 @@ function readCommandLine(commandLine: readonly string[]): Wishes | string {
       wishes.threads = Number(left.shift());
       if (!Number.isInteger(wishes.threads) || wishes.threads < 1)
         return "--threads takes a whole number, 1 or more.";
+    } else if (argument === "--references") {
+      wishes.references = left.shift() ?? null;
+      if (wishes.references === null) return "--references takes a folder.";
     } else if (argument.startsWith("-")) return `No option ${argument}.`;
     else files.push(argument);
   }
   return files.length === 1 ? { ...wishes, file: files[0] } : "One notebook file is needed.";
 }
 
-async function evaluateFile({ file, isJson, hasDraws, threads }: Wishes): Promise<number> {
+async function evaluateFile({ file, isJson, hasDraws, threads, references: folder }: Wishes): Promise<number> {
   const text = readText(file);
   if (text === null) return 1;
   let count = 0;
@@ -77,16 +84,22 @@ async function evaluateFile({ file, isJson, hasDraws, threads }: Wishes): Promis
     return 1;
   }
   const { document } = reading;
-  const first = evaluateNotebook(document);
+  const supplied = readReferences(folder, document);
+  if (typeof supplied === "string") {
+    console.error(supplied);
+    return 1;
+  }
+  const first = evaluateNotebook(document, undefined, undefined, supplied);
   const stop = stopOnSignal();
   const progress = progressLine(process.stderr, () => performance.now());
   const answers = await runLongTasks(document, first.tasks, {
+    references: supplied,
     threads,
     onProgress: (task, state) => progress.show(task, state),
     isStopped: stop.isStopped,
   });
   progress.clear();
-  const { evaluation } = evaluateNotebook(document, first.memory, answers);
+  const { evaluation } = evaluateNotebook(document, first.memory, answers, supplied);
   const result = resultDocument(evaluation);
   if (hasDraws) {
     for (const task of first.tasks.filter(({ kind }) => kind === "spread")) {

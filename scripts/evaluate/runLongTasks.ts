@@ -6,9 +6,11 @@ import type { NotebookDocument } from "../../shared/notebook/document";
 import { finishTask } from "../../shared/notebook/finishTask";
 import { poolTask, type TaskProgress, type TaskWorker } from "../../shared/notebook/poolTask";
 import { taskRunner } from "../../shared/notebook/runTask";
+import type { SuppliedReferences } from "../../shared/notebook/references";
 import type { LongTask, TaskAnswer, TaskPart } from "../../shared/notebook/tasks";
 
 interface RunOptions {
+  references: SuppliedReferences;
   /** Threads at most. */
   threads: number;
   onProgress: (task: LongTask, progress: TaskProgress) => void;
@@ -28,7 +30,7 @@ export async function runLongTasks(
   const answers = new Map<string, TaskAnswer>();
   for (const task of tasks) {
     const parts = await runOne(document, task, options);
-    answers.set(task.key, finishTask(document, task, parts));
+    answers.set(task.key, finishTask(document, task, parts, options.references));
   }
   return answers;
 }
@@ -36,13 +38,13 @@ export async function runLongTasks(
 async function runOne(
   document: NotebookDocument,
   task: LongTask,
-  { threads, onProgress, isStopped }: RunOptions,
+  { references, threads, onProgress, isStopped }: RunOptions,
 ): Promise<TaskPart[]> {
-  const run = taskRunner(document, task);
+  const run = taskRunner(document, task, references);
   const tried = performance.now();
   run(0, Math.min(task.points, triedPoints));
   const expected = ((performance.now() - tried) * task.points) / triedPoints;
-  const pool = expected < shortTask || threads < 2 ? null : startThreads(document, task, threads);
+  const pool = expected < shortTask || threads < 2 ? null : startThreads(document, task, threads, references);
   try {
     return await poolTask({
       task,
@@ -70,10 +72,15 @@ interface ThreadWorker extends TaskWorker {
   end(): Promise<unknown>;
 }
 
-function startThreads(document: NotebookDocument, task: LongTask, threads: number): ThreadWorker[] {
+function startThreads(
+  document: NotebookDocument,
+  task: LongTask,
+  threads: number,
+  references: SuppliedReferences,
+): ThreadWorker[] {
   return Array.from({ length: Math.min(threads, task.points) }, () => {
     const worker = new Worker(new URL("./taskWorker.sources.mjs", import.meta.url), {
-      workerData: { document, task },
+      workerData: { document, task, references },
     });
     return {
       async run(from, to) {

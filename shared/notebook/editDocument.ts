@@ -1,4 +1,4 @@
-import type { Cell, NotebookDocument } from "./document";
+import type { CautionAnswer, Cell, NotebookDocument } from "./document";
 
 /** A change to a document, as a value. Ids are made by whoever asks for the change. */
 export type DocumentEdit =
@@ -11,6 +11,7 @@ export type DocumentEdit =
   | { type: "changeUnitSystem"; unitSystem: NotebookDocument["unitSystem"] }
   | { type: "changeHeadline"; headline: string[] }
   | { type: "changeAuthors"; authors: string[] }
+  | { type: "changeAnswers"; answers: CautionAnswer[] }
   | { type: "several"; edits: DocumentEdit[] };
 
 export interface EditedDocument {
@@ -53,6 +54,13 @@ export function editDocument(document: NotebookDocument, edit: DocumentEdit): Ed
         document: { ...document, headline: [...edit.headline] },
         inverse: { ...edit, headline: document.headline },
       };
+    case "changeAnswers": {
+      const { answers = [], ...rest } = document;
+      return {
+        document: edit.answers.length === 0 ? rest : { ...rest, answers: [...edit.answers] },
+        inverse: { ...edit, answers },
+      };
+    }
     case "changeAuthors":
       return {
         document: { ...document, authors: [...edit.authors] },

@@ -15,14 +15,17 @@ export function HouseLayout() {
   const groups = useQuery({ ...groupsQuery, enabled: account !== null }).data ?? [];
 
   const onlyGroup = groups.length === 1 ? groups[0] : undefined;
+  const references: PagePlace = { to: "/references", label: "References" };
   const handbook: PagePlace = { to: "/handbook", label: "Handbook" };
   const places: PagePlace[] = account
     ? [
         { to: "/notebooks", label: "Notebooks" },
+        references,
+        ...(groups.some(({ abilities }) => abilities.seeQueue) ? [{ to: "/vetting", label: "Vetting" }] : []),
         onlyGroup ? { to: `/groups/${onlyGroup.id}`, label: "Group" } : { to: "/groups", label: "Groups" },
         handbook,
       ]
-    : [handbook];
+    : [references, handbook];
 
   return (
     <PageFrame

@@ -14,10 +14,14 @@ const GroupsRoute = lazy(() => import("./GroupsRoute"));
 const HandbookRoute = lazy(() => import("./HandbookRoute"));
 const InvitationRoute = lazy(() => import("./InvitationRoute"));
 const KeptMailRoute = lazy(() => import("./KeptMailRoute"));
+const LibraryRoute = lazy(() => import("./LibraryRoute"));
 const NotebookPage = lazy(() =>
   import("../features/notebook/NotebookPage").then((file) => ({ default: file.NotebookPage })),
 );
 const NotebooksRoute = lazy(() => import("./NotebooksRoute"));
+const ReferenceRoute = lazy(() => import("./ReferenceRoute"));
+const VettingQueueRoute = lazy(() => import("./VettingQueueRoute"));
+const VettingRoute = lazy(() => import("./VettingRoute"));
 
 /**
  * Which page stands at which address. Each is loaded when it is first gone to. A page that is not open to strangers
@@ -32,6 +36,8 @@ export function Pages() {
         <Route element={<OpenGate />}>
           <Route element={<HouseLayout />}>
             <Route path="/handbook" element={<HandbookRoute />} />
+            <Route path="/references" element={<LibraryRoute />} />
+            <Route path="/references/:pin" element={<ReferenceRoute />} />
           </Route>
         </Route>
         <Route path="/invitation" element={<InvitationRoute />} />
@@ -42,6 +48,8 @@ export function Pages() {
           <Route element={<HouseLayout />}>
             <Route index element={<Navigate to="/notebooks" replace />} />
             <Route path="/notebooks" element={<NotebooksRoute />} />
+            <Route path="/vetting" element={<VettingQueueRoute />} />
+            <Route path="/vetting/:vettingId" element={<VettingRoute />} />
             <Route path="/groups" element={<GroupsRoute />} />
             <Route path="/groups/:groupId" element={<GroupRoute />} />
             <Route path="/account" element={<AccountRoute />} />

@@ -1,4 +1,4 @@
-import { cautionText } from "./cautionText";
+import { cautionText } from "../../shared/notebook/cautionText";
 
 interface CautionFooterProps {
   className?: string;

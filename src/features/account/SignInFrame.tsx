@@ -1,6 +1,6 @@
 import { Mark } from "../../ui/Mark";
 import { Wordmark } from "../../ui/Wordmark";
-import { cautionText } from "../../ui/cautionText";
+import { cautionText } from "../../../shared/notebook/cautionText";
 import { useIsWide } from "../../ui/useIsWide";
 import { LimbArt } from "./LimbArt";
 import type { Box } from "./limbDrawing";

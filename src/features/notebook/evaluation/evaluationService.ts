@@ -1,5 +1,6 @@
 import type { NotebookDocument } from "../../../../shared/notebook/document";
 import { evaluateNotebook, type EvaluationMemory } from "../../../../shared/notebook/evaluateNotebook";
+import type { SuppliedReference, SuppliedReferences } from "../../../../shared/notebook/references";
 import type { CellEvaluation } from "../../../../shared/notebook/result";
 import { summariseNotebook } from "../../../../shared/notebook/summariseNotebook";
 import type { HeadlineItem } from "../../../../shared/notebook/summary";
@@ -45,14 +46,19 @@ export function createEvaluationService() {
   }
 
   return {
-    evaluate(notebookKey: string, document: NotebookDocument): EvaluationAnswer {
+    evaluate(
+      notebookKey: string,
+      document: NotebookDocument,
+      references: readonly SuppliedReference[] = [],
+    ): EvaluationAnswer {
       const begun = performance.now();
       if (notebookKey !== rememberedKey) {
         memory = undefined;
         sent = new Map();
         rememberedKey = notebookKey;
       }
-      const answer = evaluateNotebook(document, memory, answers);
+      const supplied = byPin(references);
+      const answer = evaluateNotebook(document, memory, answers, supplied);
       memory = answer.memory;
       const { evaluation, tasks, partial } = answer;
 
@@ -79,10 +85,15 @@ export function createEvaluationService() {
     },
 
     /** The headline of a state that is only being considered. */
-    headlineOf(document: NotebookDocument): HeadlineItem[] {
-      return summariseNotebook(document, evaluateNotebook(document).evaluation).headline;
+    headlineOf(document: NotebookDocument, references: readonly SuppliedReference[] = []): HeadlineItem[] {
+      const { evaluation } = evaluateNotebook(document, undefined, undefined, byPin(references));
+      return summariseNotebook(document, evaluation).headline;
     },
   };
+}
+
+function byPin(references: readonly SuppliedReference[]): SuppliedReferences {
+  return new Map(references.map((reference) => [reference.pin, reference]));
 }
 
 export type EvaluationService = ReturnType<typeof createEvaluationService>;

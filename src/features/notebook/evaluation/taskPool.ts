@@ -2,6 +2,7 @@ import { wrap } from "comlink";
 import type { NotebookDocument } from "../../../../shared/notebook/document";
 import { poolTask, type TaskProgress } from "../../../../shared/notebook/poolTask";
 import type { LongTask, TaskAnswer, TaskPart } from "../../../../shared/notebook/tasks";
+import { knownReferences } from "./knownReferences";
 import type { TaskService } from "./taskService";
 
 /** The service as the pool sees it: every call answers later. */
@@ -44,8 +45,9 @@ export function createTaskPool(startWorker: () => RemoteTaskService, size: numbe
     { onProgress, isStopped, begun }: TaskWatch,
   ): Promise<TaskRun | null> {
     if (isStopped()) return null;
+    const references = knownReferences(document);
     services ??= Array.from({ length: size }, startWorker);
-    await Promise.all(services.map((service) => service.open(document, task)));
+    await Promise.all(services.map((service) => service.open(document, task, references)));
     const now = () => performance.now();
     const parts = await poolTask({ task, workers: services, now, onProgress, isStopped, begun });
     if (parts.length === 0) return null;

@@ -6,7 +6,9 @@ import type { LongTask, PartialTask, TaskAnswer } from "../../../../shared/noteb
 import { createLatestRunner } from "./createLatestRunner";
 import type { EvaluationAnswer } from "./evaluationService";
 import { workerEvaluator, type Evaluator } from "./evaluator";
+import { knownReferences } from "./knownReferences";
 import { staleCells } from "./staleCells";
+import { usePinnedReferences } from "./usePinnedReferences";
 
 /** From here on an answer that is still being computed hides the old one, ms. */
 const lateAfter = 100;
@@ -49,6 +51,8 @@ export function useEvaluation(
     null,
   );
 
+  const hasReferences = usePinnedReferences(document);
+
   // Both before the page is painted, so that the worker computes while it is.
   useLayoutEffect(
     function runEvaluations() {
@@ -57,7 +61,7 @@ export function useEvaluation(
       const key = `${notebookKey} ${nextMount++}`;
       let last: Evaluated | null = null;
       const runner = createLatestRunner<NotebookDocument, EvaluationAnswer>({
-        run: (input) => service.evaluate(key, input) as Promise<EvaluationAnswer>,
+        run: (input) => service.evaluate(key, input, knownReferences(input)) as Promise<EvaluationAnswer>,
         onResult: (answer, input) => {
           last = withAnswer(last, answer, input);
           setEvaluated(last);
@@ -78,9 +82,9 @@ export function useEvaluation(
 
   useLayoutEffect(
     function evaluateText() {
-      runnerRef.current?.offer(document);
+      if (hasReferences) runnerRef.current?.offer(document);
     },
-    [document, notebookKey, evaluator],
+    [document, hasReferences, notebookKey, evaluator],
   );
 
   const documentRef = useRef(document);

@@ -69,7 +69,14 @@ export function Article({
             )}
           </SheetHead>
           <aside className="margin" aria-label="Margin">
-            <NotesList notes={notes.listed} />
+            <NotesList
+              notes={notes.listed}
+              answers={{
+                document,
+                onChange:
+                  edit && ((next) => edit({ type: "changeAnswers", answers: next.answers ?? [] }, "Caution answered")),
+              }}
+            />
           </aside>
           <div className="sheet-body">
             {failure && (

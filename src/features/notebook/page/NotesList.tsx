@@ -1,5 +1,6 @@
 import { useState } from "react";
-import type { Cell } from "../../../../shared/notebook/document";
+import { answerCaution, answeredCautions } from "../../../../shared/notebook/cautionAnswers";
+import type { Cell, NotebookDocument } from "../../../../shared/notebook/document";
 import type { Note, NoteLevel } from "../../../../shared/notebook/result";
 import { formatCount } from "../../../lib/format";
 import { formatMessage } from "../../../lib/formatMessage";
@@ -9,6 +10,7 @@ import { StateMark } from "../../../ui/StateMark";
 import { TextButton } from "../../../ui/TextButton";
 import type { LetteredNote } from "../../../ui/tables/tableProps";
 import { complaintAndRest } from "../cells/complaintAndRest";
+import { AnswerLine } from "./AnswerLine";
 
 export interface ListedNote extends LetteredNote {
   cell: Pick<Cell, "id" | "name" | "kind">;
@@ -20,7 +22,7 @@ const levels: readonly NoteLevel[] = ["fault", "caution", "remark"];
 const mostRemarks = 4;
 
 /** In the margin: all that is wrong or doubtful in the notebook, faults first; each leads to its cell. */
-export function NotesList({ notes }: { notes: readonly ListedNote[] }) {
+export function NotesList({ notes, answers }: { notes: readonly ListedNote[]; answers?: CautionAnswers }) {
   const [isUnfolded, setUnfolded] = useState(false);
   const of = (level: NoteLevel) => notes.filter(({ note }) => note.level === level);
   const summary = levels
@@ -40,7 +42,7 @@ export function NotesList({ notes }: { notes: readonly ListedNote[] }) {
       </span>
       <ul>
         {[...of("fault"), ...of("caution"), ...(isFolded ? [] : remarks)].map((listed, index) => (
-          <NoteLine key={`${listed.cell.id} ${listed.note.code} ${index}`} {...listed} />
+          <NoteLine key={`${listed.cell.id} ${listed.note.code} ${index}`} {...listed} answers={answers} />
         ))}
       </ul>
       {remarks.length > mostRemarks && (
@@ -57,7 +59,15 @@ export function NotesList({ notes }: { notes: readonly ListedNote[] }) {
   );
 }
 
-function NoteLine({ note, letter, cell }: ListedNote) {
+/** The draft's answers, and writing one. */
+export interface CautionAnswers {
+  document: NotebookDocument;
+  /** null where it can only be read. */
+  onChange: ((document: NotebookDocument) => void) | null;
+}
+
+function NoteLine({ note, letter, cell, answers }: ListedNote & { answers: CautionAnswers | undefined }) {
+  const [caution] = answers ? answeredCautions(answers.document, [{ name: cell.name, notes: [note] }]) : [];
   return (
     <li>
       <StateMark state={note.level} label={note.level} />
@@ -67,6 +77,15 @@ function NoteLine({ note, letter, cell }: ListedNote) {
       <a href={`#cell-${cell.id}`}>
         <b>{cell.name || cell.kind}</b>: <Rich text={formatMessage(complaintOf(note))} />
       </a>
+      {answers && caution && (answers.onChange || caution.answer) && (
+        <AnswerLine
+          caution={caution}
+          onAnswer={
+            answers.onChange &&
+            ((sentence) => answers.onChange!(answerCaution(answers.document, caution, sentence)))
+          }
+        />
+      )}
     </li>
   );
 }

@@ -10,6 +10,8 @@ import { Page } from "../../../ui/Page";
 import { TextButton } from "../../../ui/TextButton";
 import { versionsQuery } from "../notebookQueries";
 import { PlainBar } from "../page/PlainBar";
+import { RequestVetting } from "../vetting/RequestVetting";
+import { VettingStanding } from "../vetting/VettingStanding";
 import { RestoreVersion } from "./RestoreVersion";
 
 /** The kept versions of a notebook, the newest first. */
@@ -33,6 +35,7 @@ export function VersionList({ notebook }: { notebook: NotebookResponse }) {
           </p>
           <h1 className="type-display">{title}</h1>
         </div>
+        <VettingStanding notebook={notebook} />
         {versions.isError && (
           <Message
             state="fault"
@@ -90,6 +93,9 @@ function VersionLine({ notebook, version }: { notebook: NotebookResponse; versio
         >
           Compare
         </Link>
+        {notebook.abilities.requestVetting && notebook.group && (
+          <RequestVetting notebook={notebook} number={version.number} />
+        )}
         {notebook.abilities.restoreVersion && <RestoreVersion notebook={notebook} number={version.number} />}
       </span>
     </li>

@@ -95,6 +95,8 @@ const mayAll = {
   restoreVersion: true,
   delete: true,
   restoreFromBin: false,
+  requestVetting: false,
+  answerCautions: false,
 };
 const listed = (id: string, title: string, edit: boolean) => ({
   id,

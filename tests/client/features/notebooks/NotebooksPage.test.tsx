@@ -12,6 +12,8 @@ const mayAll = {
     servedNotebookActions.map((action) => [action, true]),
   ) as NotebookListItem["abilities"]),
   restoreFromBin: false,
+  requestVetting: false,
+  answerCautions: false,
   unarchive: false,
 };
 

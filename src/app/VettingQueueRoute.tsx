@@ -1,0 +1,1 @@
+export { VettingQueue as default } from "../features/vetting/VettingQueue";

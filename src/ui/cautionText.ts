@@ -1,3 +1,0 @@
-/** What each page's foot and each export says of the results. */
-export const cautionText =
-  "Results rest on a stationary one-dimensional model without chemistry. Tenuity is for research. Its numbers are not for decisions on satellite drag, re-entry, launch or collision avoidance, where the responsible agency’s models and licensed practice apply.";
