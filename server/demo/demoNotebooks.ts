@@ -11,6 +11,21 @@ export interface DemoVersion {
   differences: [now: string, then: string][];
 }
 
+/** A version put before the lead. */
+export interface DemoVetting {
+  version: number;
+  by: DemoPerson;
+  daysAgo: number;
+  message: string;
+  summary: string;
+  authors: string[];
+  /** Number of the reference that it is a new edition of. */
+  editionOf: number | null;
+  /** How many days ago the lead approved it; null while it waits. */
+  approvedDaysAgo: number | null;
+  isPublic: boolean;
+}
+
 export interface DemoNotebook {
   /** In `notebooks/`. */
   file: string;
@@ -22,6 +37,7 @@ export interface DemoNotebook {
   shares: [DemoPerson, ShareRole][];
   /** Oldest first. */
   versions: DemoVersion[];
+  vettings?: DemoVetting[];
 }
 
 /** Founded by its lead, who is not in the list of members. */
@@ -75,6 +91,21 @@ export const demoNotebooks: readonly DemoNotebook[] = [
       },
       { message: "Both occultations; cooler by 32 K", by: "t.orevale", daysAgo: 3, differences: [] },
     ],
+    vettings: [
+      {
+        version: 3,
+        by: "t.orevale",
+        daysAgo: 2,
+        message:
+          "Both occultations agree now, and the exosphere is cooler by 32 K. I would like to quote the rate of hydrogen in the paper with Wiremu.",
+        summary:
+          "The dayside of Ilmara from 80 km upward, with the rate at which hydrogen leaves it. The column is solved together with its flux.",
+        authors: ["Tamsin Orevale", "Wiremu Castellane"],
+        editionOf: null,
+        approvedDaysAgo: null,
+        isPublic: false,
+      },
+    ],
   },
   {
     // Not kept as a version: its sweeps and its spread would have to be computed before the first start.
@@ -93,6 +124,20 @@ export const demoNotebooks: readonly DemoNotebook[] = [
     shares: [["t.orevale", "co-author"]],
     versions: [
       { message: "As shown to the group in November", by: "i.brandvold", daysAgo: 12, differences: [] },
+    ],
+    vettings: [
+      {
+        version: 1,
+        by: "i.brandvold",
+        daysAgo: 12,
+        message: "For the comparison with other cold moons.",
+        summary:
+          "Nirel’s extended air of nitrogen and methane from 550 km upward, with the exobase and what leaves it. For the group’s own use until the second mission has been reduced.",
+        authors: ["Ishani Brandvold", "Tamsin Orevale"],
+        editionOf: null,
+        approvedDaysAgo: 11,
+        isPublic: false,
+      },
     ],
   },
   {
@@ -117,6 +162,20 @@ export const demoNotebooks: readonly DemoNotebook[] = [
         differences: [["T_exo = 760 ± 60 K", "T_exo = 820 ± 90 K"]],
       },
       { message: "Quiet star, as in group note 7", by: "i.brandvold", daysAgo: 13, differences: [] },
+    ],
+    vettings: [
+      {
+        version: 2,
+        by: "i.brandvold",
+        daysAgo: 13,
+        message: "The new run of the thermosphere model is in. Others wait for the background densities.",
+        summary:
+          "A reference atmosphere for Tessal from 100 km upward, for the lower third of its star’s cycle. Other notebooks should take their background densities from here.",
+        authors: ["Ishani Brandvold", "Jorun Aldaker"],
+        editionOf: null,
+        approvedDaysAgo: 12,
+        isPublic: true,
+      },
     ],
   },
   {

@@ -3,30 +3,43 @@ import path from "node:path";
 import { inArray } from "drizzle-orm";
 import type { NotebookDocument } from "../../shared/notebook/document";
 import { readNotebookFile } from "../../shared/notebook/notebookFile";
-import type { KeptResult } from "../../shared/schemas/results";
+import { openLicences } from "../../shared/schemas/licences";
 import { demoAccounts } from "../auth/demoAccounts";
+import { answeredCautions } from "../../shared/notebook/cautionAnswers";
 import { addMember } from "../commands/addMember";
 import { createAccount } from "../commands/createAccount";
+import { acceptAnswers, approveVetting } from "../commands/decideVetting";
 import { createGroup } from "../commands/createGroup";
 import { createNotebook } from "../commands/createNotebook";
 import { keepVersion } from "../commands/keepVersion";
+import { requestVetting } from "../commands/requestVetting";
 import { saveDraft } from "../commands/saveDraft";
 import { sendInvitation } from "../commands/sendInvitation";
 import { shareWithGroup } from "../commands/shareWithGroup";
 import { shareWithPerson } from "../commands/shareWithPerson";
 import type { Db } from "../db/client";
 import { users } from "../db/tables/users";
-import type { Evaluator } from "../jobs/evaluator";
+import { findVersion } from "../db/reads/findVersion";
+import type { EvaluationOutcome, Evaluator } from "../jobs/evaluator";
 import { newInvitationToken } from "../mail/invitationToken";
 import { groupInvitation } from "../mail/templates/groupInvitation";
 import { places } from "../places";
-import { demoGroup, demoInvitation, demoNotebooks, type DemoNotebook, type DemoPerson } from "./demoNotebooks";
+import { examine } from "../vetting/examine";
+import { compareToTheBit } from "../vetting/recompute";
+import {
+  demoGroup,
+  demoInvitation,
+  demoNotebooks,
+  type DemoNotebook,
+  type DemoPerson,
+  type DemoVetting,
+} from "./demoNotebooks";
 
 const day = 86_400_000;
 
 interface PreparedState {
   document: NotebookDocument;
-  kept: { message: string; result: KeptResult } | null;
+  kept: { message: string; outcome: EvaluationOutcome } | null;
   by: DemoPerson;
   at: Date;
 }
@@ -48,7 +61,15 @@ export async function seedDemo(
   );
   await db.transaction(async (tx) => {
     const { groupId, idOf } = await seedPeople(tx, now);
-    for (const { notebook, states } of histories) await seedNotebook(tx, { notebook, states, groupId, idOf });
+    const put: PutVetting[] = [];
+    for (const { notebook, states } of histories) {
+      const notebookId = await seedNotebook(tx, { notebook, states, groupId, idOf });
+      const kept = states.flatMap((state) => state.kept ?? []);
+      for (const vetting of notebook.vettings ?? [])
+        put.push({ vetting, notebookId, notebook, outcome: kept[vetting.version - 1]!.outcome });
+    }
+    const oldestFirst = put.toSorted((one, other) => other.vetting.daysAgo - one.vetting.daysAgo);
+    for (const one of oldestFirst) await seedVetting(tx, one, { groupId, idOf, now });
     await seedInvitation(tx, { groupId, actorId: idOf(demoGroup.lead), now, linkOrigin });
   });
   return true;
@@ -63,8 +84,8 @@ async function prepare(notebook: DemoNotebook, evaluator: Evaluator, now: Date):
     const document = asItWas(final, notebook.file, differences);
     const answer = await evaluator.evaluate(document);
     if (!answer.ok) throw new Error(`${notebook.file} could not be evaluated: ${answer.reason}`);
-    const { result } = answer.outcome;
-    states.push({ document, kept: { message, result }, by, at: new Date(now.getTime() - daysAgo * day) });
+    const { outcome } = answer;
+    states.push({ document, kept: { message, outcome }, by, at: new Date(now.getTime() - daysAgo * day) });
   }
   const savedAt = new Date(now.getTime() - (notebook.hoursAgo * day) / 24);
   return [...states, { document: final, kept: null, by: notebook.owner, at: savedAt }];
@@ -110,7 +131,7 @@ async function seedNotebook(
     groupId: string;
     idOf: (person: DemoPerson) => string;
   },
-): Promise<void> {
+): Promise<string> {
   const { notebook, states, groupId, idOf } = parts;
   const [first] = states;
   const { document, at } = first!;
@@ -119,13 +140,66 @@ async function seedNotebook(
   for (const state of states) {
     const actorId = idOf(state.by);
     ({ revision } = await saveDraft(tx, { notebookId, revision, document: state.document, actorId, at: state.at }));
-    if (state.kept) await keepVersion(tx, { notebookId, revision, ...state.kept, actorId, at: state.at });
+    if (!state.kept) continue;
+    const { message, outcome } = state.kept;
+    await keepVersion(tx, { notebookId, revision, message, result: outcome.result, actorId, at: state.at });
   }
   const share = { notebookId, letter: null, actorId: idOf(notebook.owner), at };
   await shareWithGroup(tx, { ...share, role: notebook.groupRole });
   for (const [person, role] of notebook.shares) {
     await shareWithPerson(tx, { ...share, user: { id: idOf(person), name: nameOf(person) }, role });
   }
+  return notebookId;
+}
+
+interface PutVetting {
+  vetting: DemoVetting;
+  notebookId: string;
+  notebook: DemoNotebook;
+  /** Of the version. */
+  outcome: EvaluationOutcome;
+}
+
+/** A version put before the lead; where it was approved, with its answers accepted and its reference published. */
+async function seedVetting(
+  tx: Db,
+  { vetting, notebookId, notebook, outcome }: PutVetting,
+  { groupId, idOf, now }: { groupId: string; idOf: (person: DemoPerson) => string; now: Date },
+): Promise<void> {
+  const { version: versionNumber, by, message, summary, authors, editionOf, approvedDaysAgo, isPublic } = vetting;
+  const recomputed = compareToTheBit(outcome.result, { ok: true, outcome });
+  const at = new Date(now.getTime() - vetting.daysAgo * day);
+  const body = { message, summary, authors, licence: openLicences[0], editionOf };
+  const { id: vettingId } = await requestVetting(tx, {
+    ...body,
+    notebookId,
+    versionNumber,
+    recomputed,
+    letters: [],
+    actorId: idOf(by),
+    at,
+  });
+  if (approvedDaysAgo === null) return;
+  const version = (await findVersion(tx, notebookId, versionNumber))!;
+  const actorId = idOf(demoGroup.lead);
+  const decision = { vettingId, groupId, actorId, at: new Date(now.getTime() - approvedDaysAgo * day) };
+  const accepted = answeredCautions(version.document, version.result.cells).map(({ key }) => key);
+  await acceptAnswers(tx, { ...decision, accepted });
+  const checks = examine({
+    version,
+    recomputed,
+    accepted,
+    openThreads: 0,
+    isOwnersAlone: false,
+    groupLeads: 1,
+    ownerId: idOf(notebook.owner),
+    ownerName: nameOf(notebook.owner),
+    leadId: actorId,
+  });
+  const failing = checks.find(({ verdict }) => verdict !== "holds");
+  if (failing) throw new Error(`${notebook.file} is published, but: ${failing.reason}`);
+  const { bodies } = outcome;
+  await approveVetting(tx, { ...decision, checks, accepted, bodies, isPublic, doi: null, letters: () => [] });
 }
 
 const nameOf = (person: DemoPerson): string =>

@@ -9,7 +9,9 @@ import { letters } from "../../../server/db/tables/letters";
 import { places } from "../../../server/places";
 import { notebookListResponse, type NotebookListItem } from "../../../shared/schemas/notebooks";
 import { groupInvitationList } from "../../../shared/schemas/invitations";
+import { libraryResponse } from "../../../shared/schemas/references";
 import { versionListResponse } from "../../../shared/schemas/versions";
+import { vettingListResponse } from "../../../shared/schemas/vettings";
 import { buildUser } from "../../factories/buildUser";
 import { openTestDatabase } from "../testDatabase";
 import { startTestServer, type TestServer } from "../testServer";
@@ -99,6 +101,18 @@ describe("the demonstration", () => {
     expect(new Set(versions.map(({ contentHash }) => contentHash)).size).toBe(3);
     const times = [...versions.map(({ keptAt }) => keptAt).reverse(), ilmara!.savedAt, now.toISOString()];
     expect(times).toEqual(times.toSorted());
+  });
+
+  it("has two published references, one of them for strangers, and a version in vetting", async () => {
+    const lead = await demoAgent("j.aldaker@carrow.example");
+    const library = libraryResponse.parse((await lead.get("/api/references?state=any")).body);
+    expect(library.map(({ pin }) => pin).sort()).toEqual(["CAR1.1", "CAR2.1"]);
+    const open = libraryResponse.parse((await server.signedOut.get("/api/references")).body);
+    expect(open.map(({ title }) => title)).toEqual(["Tessal under a quiet star"]);
+    const [waiting] = vettingListResponse.parse((await lead.get("/api/vettings")).body);
+    const { checks } = (await lead.get(`/api/vettings/${waiting!.id}`)).body;
+    const verdicts = checks.map(({ verdict }: { verdict: string }) => verdict);
+    expect(verdicts).toEqual(["holds", "holds", "to_judge", "holds", "holds", "holds", "holds"]);
   });
 
   it("has a summary of each notebook", async () => {

@@ -12,6 +12,7 @@ import type { EntrySchema } from "../../../../shared/notebook/kinds/cellSchema";
 import { quantityKinds } from "../../../../shared/notebook/language/dimensions";
 import { constantNames, functionNames } from "../../../../shared/notebook/language/reservedWord";
 import { unitsForCompletion } from "../../../../shared/notebook/language/units";
+import { completeReference, isInReference } from "./referenceCompletion";
 import { handbookBodies, handbookGases, recombiningIons } from "../../../../shared/physics";
 
 export interface CompletionSurroundings {
@@ -24,7 +25,8 @@ export interface CompletionSurroundings {
 
 /** Keys at the beginning of a line; behind `=` what the entry takes: units, gases, names, choices. */
 export function entryCompletion(surroundings: CompletionSurroundings): Extension {
-  const source = (context: CompletionContext) => complete(context, surroundings);
+  const source = (context: CompletionContext) =>
+    isInReference(context) ? completeReference(context) : complete(context, surroundings);
   return [
     autocompletion({ icons: false, maxRenderedOptions: 40, aboveCursor: false }),
     EditorState.languageData.of(() => [{ autocomplete: source }]),

@@ -12,11 +12,3 @@ export function rememberReferences(references: readonly SuppliedReference[]): vo
 export function knownReferences(document: NotebookDocument): SuppliedReference[] {
   return pinsOf(document).flatMap((pin) => known.get(pin) ?? []);
 }
-
-/** Pins and the names that each has, for completion. */
-export function knownPins(): { pin: string; names: string[] }[] {
-  return [...known.values()].map(({ pin, values, bodies }) => ({
-    pin,
-    names: [...Object.keys(bodies), ...Object.keys(values)],
-  }));
-}
