@@ -6,6 +6,8 @@ import { notFound } from "./errors";
 import type { Evaluator } from "./jobs/evaluator";
 import type { Post } from "./jobs/post";
 import type { Summaries } from "./jobs/summaries";
+import { announceChanges } from "./live/announceChanges";
+import type { Live } from "./live/live";
 import { clientFiles } from "./middleware/clientFiles";
 import { errorHandler } from "./middleware/errorHandler";
 import { rateLimits, usualTries, type Tries } from "./middleware/rateLimits";
@@ -20,10 +22,13 @@ import { groupRoutes } from "./routes/groupRoutes";
 import { healthRoutes } from "./routes/healthRoutes";
 import { invitationRoutes } from "./routes/invitationRoutes";
 import { keepingRoutes } from "./routes/keepingRoutes";
+import { liveRoutes } from "./routes/liveRoutes";
 import { mailRoutes } from "./routes/mailRoutes";
 import { notebookRoutes } from "./routes/notebookRoutes";
+import { noticeRoutes } from "./routes/noticeRoutes";
 import { sessionRoutes } from "./routes/sessionRoutes";
 import { shareRoutes } from "./routes/shareRoutes";
+import { threadRoutes } from "./routes/threadRoutes";
 import { versionRoutes } from "./routes/versionRoutes";
 
 export interface AppParts {
@@ -32,6 +37,7 @@ export interface AppParts {
   evaluator: Evaluator;
   summaries: Summaries;
   post: Post;
+  live: Live;
   logger: Logger;
   demo: boolean;
   /** Whether letters are kept to be looked at by anyone, in place of being sent. */
@@ -44,12 +50,14 @@ export interface AppParts {
   /** Folder of the built page; left out, only the API is served. */
   clientFolder?: string | undefined;
   tries?: Tries;
+  /** Between two signs of life on a stream of events, in ms. */
+  heartbeat?: number;
 }
 
 /** The whole server but its listening: what every request passes, the routes, the page, the answer to failures. */
 export function createApp(parts: AppParts): Express {
   const { db, auth, evaluator, summaries, post, logger, demo, origin, proxies = 0, clientFolder } = parts;
-  const { showsMail, linkOrigin } = parts;
+  const { showsMail, linkOrigin, live, heartbeat = 15_000 } = parts;
   const limits = rateLimits(parts.tries ?? usualTries);
   const app = express();
   app.disable("x-powered-by");
@@ -63,6 +71,7 @@ export function createApp(parts: AppParts): Express {
     next();
   });
   api.use(sameOrigin(origin), express.json({ limit: "8mb" }), session(auth));
+  api.use(announceChanges({ live, logger }));
   api.use(sessionRoutes({ db, auth, demo, signInLimits: limits.signIn }));
   api.use(accountRoutes({ db, auth, demo, signUpLimits: limits.signUp }));
   api.use(invitationRoutes({ db }));
@@ -74,6 +83,9 @@ export function createApp(parts: AppParts): Express {
   api.use(keepingRoutes({ db, summaries }));
   api.use(shareRoutes({ db, post, linkOrigin }));
   api.use(versionRoutes({ db, evaluator, summaries }));
+  api.use(threadRoutes({ db, post, linkOrigin }));
+  api.use(noticeRoutes({ db }));
+  api.use(liveRoutes({ db, auth, live, heartbeat }));
   api.use(() => {
     throw notFound("address");
   });

@@ -12,6 +12,7 @@ import { createEvaluator } from "./jobs/evaluator";
 import { startHousekeeping } from "./jobs/housekeeping";
 import { createPost } from "./jobs/post";
 import { createSummaries } from "./jobs/summaries";
+import { createLive } from "./live/live";
 import { drawerTransport, smtpTransport } from "./mail/transport";
 import { openData } from "./openData";
 import { places } from "./places";
@@ -47,6 +48,7 @@ async function start(env: Env, logger: Logger): Promise<() => Promise<void>> {
   const summaries = createSummaries({ db, evaluator, logger });
   const transport = env.smtp ? smtpTransport(env.smtp) : drawerTransport(db);
   const post = createPost({ db, transport, logger });
+  const live = createLive();
   const auth = await createAuth(db, { hasSecureCookies: env.origin?.startsWith("https:") ?? false });
   if (env.demo) await seedDemo(db, { evaluator, now: new Date(), linkOrigin: linkOriginOf(env) });
 
@@ -61,6 +63,7 @@ async function start(env: Env, logger: Logger): Promise<() => Promise<void>> {
     evaluator,
     summaries,
     post,
+    live,
     logger,
     demo: env.demo,
     showsMail: env.demo && env.smtp === null,
@@ -84,6 +87,7 @@ async function start(env: Env, logger: Logger): Promise<() => Promise<void>> {
 
   return async () => {
     housekeeping.stop();
+    live.close();
     await drain(server);
     await summaries.close();
     await post.close();

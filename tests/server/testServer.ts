@@ -6,6 +6,7 @@ import { evaluateDocument } from "../../server/jobs/evaluateDocument";
 import type { Evaluator } from "../../server/jobs/evaluator";
 import { createPost } from "../../server/jobs/post";
 import { createSummaries } from "../../server/jobs/summaries";
+import { createLive } from "../../server/live/live";
 import { drawerTransport } from "../../server/mail/transport";
 import type { Actor } from "../../server/policies/actor";
 import { openTestDatabase } from "./testDatabase";
@@ -26,12 +27,14 @@ export async function startTestServer(parts: Partial<AppParts> = {}) {
   const auth = await createAuth(db, { hasSecureCookies: false });
   const summaries = createSummaries({ db, evaluator, logger });
   const post = parts.post ?? createPost({ db, transport: drawerTransport(db), logger });
+  const live = parts.live ?? createLive();
   const app = createApp({
     db,
     auth,
     evaluator,
     summaries,
     post,
+    live,
     logger,
     demo: false,
     showsMail: false,
@@ -48,11 +51,13 @@ export async function startTestServer(parts: Partial<AppParts> = {}) {
     auth,
     summaries,
     post,
+    live,
     cookieOf,
     signedOut: request(app),
     /** Requests in the name of this person. */
     as: async (user: Actor) => request.agent(app).set("Cookie", await cookieOf(user)),
     close: async () => {
+      live.close();
       await summaries.close();
       await post.close();
       await opened?.close();
