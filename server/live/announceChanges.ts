@@ -11,7 +11,7 @@ import type { Live } from "./live";
 export function announceChanges({ live, logger }: { live: Live; logger: Logger }): RequestHandler {
   const recheck = (notebookId?: string): void => {
     live
-      .recheck(notebookId)
+      .recheck(notebookId === undefined ? {} : { notebookId })
       .catch((error: unknown) => logger.error({ err: error }, "who may still see a notebook was not checked"));
   };
 

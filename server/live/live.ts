@@ -20,8 +20,8 @@ export interface Live {
   tell(notebookId: string, change: { part: ChangedPart; by: Person }): void;
   /** Where in the notebook somebody is. False: no such connection of theirs. */
   moveTo(place: { notebookId: string; connectionId: string; personId: string; cellId: string | null }): boolean;
-  /** Ends the streams of those who may not see their notebook any longer; of one notebook, or of all. */
-  recheck(notebookId?: string): Promise<void>;
+  /** Ends the streams of those who may not see their notebook any longer; of all, unless some are named. */
+  recheck(which?: { notebookId?: string; connectionId?: string }): Promise<void>;
   /** Ends every stream; nobody is let in afterwards. */
   close(): void;
 }
@@ -88,8 +88,12 @@ export function createLive(): Live {
       return true;
     },
 
-    recheck: async (notebookId) => {
-      const asked = notebookId === undefined ? [...joined] : inNotebook(notebookId);
+    recheck: async ({ notebookId, connectionId } = {}) => {
+      const asked = [...joined].filter(
+        (listener) =>
+          (notebookId === undefined || listener.notebookId === notebookId) &&
+          (connectionId === undefined || listener.connectionId === connectionId),
+      );
       await Promise.all(
         asked.map(async (listener) => {
           // Where it can't be found out, the stream is not kept open on a guess.

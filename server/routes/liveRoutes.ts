@@ -36,8 +36,9 @@ export function liveRoutes({ db, auth, live, heartbeat }: Parts): Router {
     };
 
     openStream(res);
+    const connectionId = crypto.randomUUID();
     const leave = live.join({
-      connectionId: crypto.randomUUID(),
+      connectionId,
       notebookId: notebook.id,
       person: { id: actor.id, name: actor.name },
       send: (event) => writeEvent(res, event),
@@ -46,7 +47,7 @@ export function liveRoutes({ db, auth, live, heartbeat }: Parts): Router {
     });
     const timer = setInterval(() => {
       res.write(": here\n\n");
-      void live.recheck(notebook.id);
+      void live.recheck({ connectionId });
     }, heartbeat);
     res.on("close", () => {
       clearInterval(timer);
