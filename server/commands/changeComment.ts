@@ -22,7 +22,12 @@ const standing = ({ threadId, commentId }: CommentChange) =>
 /** @throws AppError if the comment is gone by now */
 export async function editComment(
   db: Db,
-  { text, mentions, told, ...change }: CommentChange & {
+  {
+    text,
+    mentions,
+    told,
+    ...change
+  }: CommentChange & {
     text: string;
     mentions: Person[];
     told: readonly CommentNotice[];

@@ -12,7 +12,9 @@ export function announceChanges({ live, logger }: { live: Live; logger: Logger }
   const recheck = (notebookId?: string): void => {
     live
       .recheck(notebookId === undefined ? {} : { notebookId })
-      .catch((error: unknown) => logger.error({ err: error }, "who may still see a notebook was not checked"));
+      .catch((error: unknown) =>
+        logger.error({ err: error }, "who may still see a notebook was not checked"),
+      );
   };
 
   return (req, res, next) => {

@@ -19,7 +19,12 @@ export interface Live {
   /** Tells everyone in a notebook what to read anew. */
   tell(notebookId: string, change: { part: ChangedPart; by: Person }): void;
   /** Where in the notebook somebody is. False: no such connection of theirs. */
-  moveTo(place: { notebookId: string; connectionId: string; personId: string; cellId: string | null }): boolean;
+  moveTo(place: {
+    notebookId: string;
+    connectionId: string;
+    personId: string;
+    cellId: string | null;
+  }): boolean;
   /** Ends the streams of those who may not see their notebook any longer; of all, unless some are named. */
   recheck(which?: { notebookId?: string; connectionId?: string }): Promise<void>;
   /** Ends every stream; nobody is let in afterwards. */

@@ -60,14 +60,16 @@ export function toldOf(comment: {
   href: string;
 }): CommentNotice[] {
   const { mentioned, writers, readers, actor, title, cell, text, href } = comment;
-  const tell = (kind: "mention" | "reply") => (reader: Reader): CommentNotice => ({
-    userId: reader.id,
-    kind,
-    letter: commentLetter(
-      { address: reader.email, userId: reader.id },
-      { kind, title, cell, text, writtenBy: actor.name, href },
-    ),
-  });
+  const tell =
+    (kind: "mention" | "reply") =>
+    (reader: Reader): CommentNotice => ({
+      userId: reader.id,
+      kind,
+      letter: commentLetter(
+        { address: reader.email, userId: reader.id },
+        { kind, title, cell, text, writtenBy: actor.name, href },
+      ),
+    });
   const others = readers.filter(({ id }) => id !== actor.id);
   const isMentioned = new Set(mentioned.map(({ id }) => id));
   return [

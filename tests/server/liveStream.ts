@@ -63,7 +63,8 @@ export async function openStream(
     for (;;) {
       const index = events.findIndex(fits);
       if (index >= 0) return events.splice(0, index + 1).at(-1)!;
-      if (Date.now() > deadline) throw new Error(`No such event within two seconds: ${JSON.stringify(events)}`);
+      if (Date.now() > deadline)
+        throw new Error(`No such event within two seconds: ${JSON.stringify(events)}`);
       await new Promise<void>((resolve) => {
         wake = resolve;
         setTimeout(resolve, 50);

@@ -48,11 +48,7 @@ export async function listPeopleAround(
       groupId === null ? sql`false` : and(eq(memberOf.groupId, groupId), eq(memberOf.userId, users.id)),
     )
     .where(
-      or(
-        sql`${notebookShares.userId} is not null`,
-        inArray(users.id, owner),
-        inArray(users.id, colleagues),
-      ),
+      or(sql`${notebookShares.userId} is not null`, inArray(users.id, owner), inArray(users.id, colleagues)),
     )
     .orderBy(asc(users.name), asc(users.id));
 }

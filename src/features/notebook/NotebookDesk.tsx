@@ -5,12 +5,14 @@ import type { Person } from "../../../shared/schemas/people";
 import type { UnitSystem } from "../../lib/format";
 import { Button } from "../../ui/Button";
 import { useCellCommands } from "./cells/useCellCommands";
+import { CommentsDesk } from "./comments/CommentsDesk";
 import { ConflictPanel } from "./conflict/ConflictPanel";
 import { JoinedMessage } from "./conflict/JoinedMessage";
 import { useNotebookDraft } from "./draft/useNotebookDraft";
 import { useEvaluation } from "./evaluation/useEvaluation";
 import { useLongTasks } from "./evaluation/useLongTasks";
 import { useNotebookNotes } from "./evaluation/useNotebookNotes";
+import { HereNow } from "./live/HereNow";
 import { Article } from "./page/Article";
 import { MoreMenu } from "./page/MoreMenu";
 import { NotebookBar } from "./page/NotebookBar";
@@ -77,6 +79,7 @@ export function NotebookDesk({ notebook, person }: NotebookDeskProps) {
       <NotebookBar
         title={document.title || "Untitled"}
         about={visibleTo(notebook, person)}
+        others={<HereNow cells={document.cells} />}
         status={
           canEdit ? (
             <SaveStatus
@@ -147,33 +150,35 @@ export function NotebookDesk({ notebook, person }: NotebookDeskProps) {
         isOpen={isKeeping}
         onOpenChange={setKeeping}
       />
-      <Article
-        document={document}
-        live={live}
-        tasks={tasks}
-        notes={notes}
-        unitSystem={unitSystem}
-        kicker={kicker}
-        edit={isEditable ? edit : null}
-        newCellId={newCellId}
-        commands={commands}
-      >
-        {draft.joined && (
-          <JoinedMessage joined={draft.joined} document={document} onDismiss={settling.dismissJoined} />
-        )}
-        {merge && draft.theirs && (
-          <ConflictPanel
-            merge={merge}
-            mine={draft.document}
-            theirs={draft.theirs}
-            agreedRevision={draft.agreed.revision}
-            chosen={live.evaluated?.document === document ? live.evaluated.headline : []}
-            unitSystem={unitSystem}
-            choices={draft.choices}
-            settling={settling}
-          />
-        )}
-      </Article>
+      <CommentsDesk notebook={notebook} version={null} cells={document.cells} flush={flush}>
+        <Article
+          document={document}
+          live={live}
+          tasks={tasks}
+          notes={notes}
+          unitSystem={unitSystem}
+          kicker={kicker}
+          edit={isEditable ? edit : null}
+          newCellId={newCellId}
+          commands={commands}
+        >
+          {draft.joined && (
+            <JoinedMessage joined={draft.joined} document={document} onDismiss={settling.dismissJoined} />
+          )}
+          {merge && draft.theirs && (
+            <ConflictPanel
+              merge={merge}
+              mine={draft.document}
+              theirs={draft.theirs}
+              agreedRevision={draft.agreed.revision}
+              chosen={live.evaluated?.document === document ? live.evaluated.headline : []}
+              unitSystem={unitSystem}
+              choices={draft.choices}
+              settling={settling}
+            />
+          )}
+        </Article>
+      </CommentsDesk>
     </div>
   );
 }

@@ -1,5 +1,5 @@
 import { useQuery } from "@tanstack/react-query";
-import { lazy, Suspense, useMemo } from "react";
+import { lazy, Suspense, useMemo, useState } from "react";
 import { Route, Routes, useParams } from "react-router-dom";
 import type { NotebookResponse } from "../../../shared/schemas/notebooks";
 import { useAccount } from "../../lib/session";
@@ -8,8 +8,10 @@ import { fetchPart } from "../../lib/fetchPart";
 import { CautionFooter } from "../../ui/CautionFooter";
 import { Opening } from "../../ui/Opening";
 import { ProblemPage } from "../../ui/ProblemPage";
+import { LiveContext } from "./live/liveContext";
+import { useLive } from "./live/useLive";
 import { NotebookDesk } from "./NotebookDesk";
-import { notebookQuery } from "./notebookQueries";
+import { lookIntervals, notebookQuery } from "./notebookQueries";
 import { NotebookSkeleton } from "./page/NotebookSkeleton";
 import { PlainBar } from "./page/PlainBar";
 import { KeptVersion } from "./versions/KeptVersion";
@@ -25,31 +27,45 @@ const ComparePage = lazy(async () => {
 export function NotebookPage() {
   const { notebookId = "" } = useParams();
   const account = useAccount();
-  const notebook = useQuery(notebookQuery(notebookId));
+  const [isLive, setLive] = useState(false);
+  const notebook = useQuery({
+    ...notebookQuery(notebookId),
+    refetchInterval: isLive ? lookIntervals.live : lookIntervals.alone,
+  });
   const person = useMemo(
     () => ({ id: account?.id ?? "", name: account?.name ?? "" }),
     [account?.id, account?.name],
   );
 
+  const live = useLive({
+    notebookId: notebook.data ? notebookId : null,
+    ownId: person.id,
+    onConnected: setLive,
+  });
+
   if (notebook.isPending) return <NotebookSkeleton />;
-  if (!notebook.data) {
+  // Taken away while it was open: what is unsaved stays kept in this browser.
+  const isTaken = notebook.error instanceof ApiError && notebook.error.status === 404;
+  if (!notebook.data || isTaken) {
     return <NotebookProblem error={notebook.error} onRetry={() => void notebook.refetch()} />;
   }
   return (
-    <Routes>
-      <Route index element={<NotebookDesk key={notebookId} notebook={notebook.data} person={person} />} />
-      <Route path="versions" element={<VersionList notebook={notebook.data} />} />
-      <Route
-        path="compare"
-        element={
-          <Suspense fallback={<Opening what="the comparison" />}>
-            <ComparePage notebook={notebook.data} />
-          </Suspense>
-        }
-      />
-      <Route path="versions/:number" element={<VersionAt notebook={notebook.data} />} />
-      <Route path="*" element={<NotebookProblem error={noSuchPage} />} />
-    </Routes>
+    <LiveContext value={live}>
+      <Routes>
+        <Route index element={<NotebookDesk key={notebookId} notebook={notebook.data} person={person} />} />
+        <Route path="versions" element={<VersionList notebook={notebook.data} />} />
+        <Route
+          path="compare"
+          element={
+            <Suspense fallback={<Opening what="the comparison" />}>
+              <ComparePage notebook={notebook.data} />
+            </Suspense>
+          }
+        />
+        <Route path="versions/:number" element={<VersionAt notebook={notebook.data} />} />
+        <Route path="*" element={<NotebookProblem error={noSuchPage} />} />
+      </Routes>
+    </LiveContext>
   );
 }
 

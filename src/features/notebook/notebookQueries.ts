@@ -17,14 +17,14 @@ import { api } from "../../lib/api";
 import { ApiError } from "../../lib/ApiError";
 import type { SaveOutcome } from "./draft/saveQueue";
 
-/** How often an open notebook asks whether someone else has saved, ms. */
-const lookInterval = 5_000;
+/** How often an open notebook asks whether someone else has saved, ms: while it is told of it, and while it is not. */
+export const lookIntervals = { live: 60_000, alone: 5_000 } as const;
 
 export const notebookQuery = (id: string) =>
   queryOptions({
     queryKey: ["notebook", id],
     queryFn: ({ signal }) => api.get(`/notebooks/${id}`, notebookResponse, { signal }),
-    refetchInterval: lookInterval,
+    refetchInterval: lookIntervals.alone,
     refetchOnWindowFocus: "always",
     staleTime: 0,
     retry: (failures, error) =>

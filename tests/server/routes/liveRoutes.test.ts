@@ -53,7 +53,9 @@ describe("the events of a notebook", () => {
 
     const theirs = await server.as(coAuthor);
     await theirs.put(`${at}/draft`).send({ revision: 1, document: { ...document, title: "Warmer" } });
-    expect(await stream.next(changed("draft"))).toMatchObject({ by: { id: coAuthor.id, name: coAuthor.name } });
+    expect(await stream.next(changed("draft"))).toMatchObject({
+      by: { id: coAuthor.id, name: coAuthor.name },
+    });
     const begun = await theirs
       .post(`${at}/threads`)
       .send({ cellId: "warmth", version: null, text: "Why?\n\nevent: closed\ndata: {}" });
@@ -112,12 +114,7 @@ describe("the events of a notebook", () => {
   it("end when the session is over, at the next sign of life", async () => {
     const { owner, id } = await buildPair();
     const cookie = await server.cookieOf(owner);
-    const stream = await openStream(
-      { ...server, cookieOf: async () => cookie },
-      origin,
-      id,
-      owner,
-    );
+    const stream = await openStream({ ...server, cookieOf: async () => cookie }, origin, id, owner);
     await stream.next(opened);
     const session = await server.auth.readSession(cookie);
     await server.auth.closeSession(session!.sessionId);
@@ -142,7 +139,8 @@ describe("presence", () => {
     const move = (body: object) => agent.put(`/api/notebooks/${id}/presence`).send(body);
     expect((await move({ connectionId, cellId: "warmth" })).status).toBe(204);
     const at = (cellId: string) => (event: LiveEvent) =>
-      event.type === "presence" && event.people.some((row) => row.person.id === wiremu.id && row.cellId === cellId);
+      event.type === "presence" &&
+      event.people.some((row) => row.person.id === wiremu.id && row.cellId === cellId);
     await own.next(at("warmth"));
 
     expect((await move({ connectionId: crypto.randomUUID(), cellId: null })).status).toBe(404);
@@ -151,7 +149,9 @@ describe("presence", () => {
     const stolen = await notHis.put(`/api/notebooks/${id}/presence`).send({ connectionId, cellId: "intro" });
     expect(stolen.status).toBe(404);
     const strange = await server.as(await buildUser(server.db));
-    expect((await strange.put(`/api/notebooks/${id}/presence`).send({ connectionId, cellId: null })).status).toBe(404);
+    expect(
+      (await strange.put(`/api/notebooks/${id}/presence`).send({ connectionId, cellId: null })).status,
+    ).toBe(404);
 
     his.close();
     second.close();

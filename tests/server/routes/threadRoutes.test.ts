@@ -1,5 +1,9 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
-import { readersResponse, thread as threadSchema, threadListResponse } from "../../../shared/schemas/comments";
+import {
+  readersResponse,
+  thread as threadSchema,
+  threadListResponse,
+} from "../../../shared/schemas/comments";
 import { noticesResponse } from "../../../shared/schemas/notices";
 import { buildCell, buildDocument } from "../../factories/buildDocument";
 import { buildGroup } from "../../factories/buildGroup";
@@ -32,12 +36,24 @@ async function buildThread() {
     versions: ["First"],
   });
   const at = `/api/notebooks/${id}`;
-  const begun = await (await server.as(owner))
+  const begun = await (
+    await server.as(owner)
+  )
     .post(`${at}/threads`)
     .send({ cellId: "warmth", version: null, text: "Is 240 K *measured*? <script>alert(1)</script>" });
   expect(begun.status).toBe(201);
   const thread = threadSchema.parse(begun.body);
-  return { at, id, document, owner, commenter, coAuthor, reader, thread, threadAt: `${at}/threads/${thread.id}` };
+  return {
+    at,
+    id,
+    document,
+    owner,
+    commenter,
+    coAuthor,
+    reader,
+    thread,
+    threadAt: `${at}/threads/${thread.id}`,
+  };
 }
 
 describe("the routes of threads", () => {
@@ -68,7 +84,8 @@ describe("the routes of threads", () => {
   it("refuse what is malformed: nothing said, too much said, broken characters, no yes or no", async () => {
     const { at, threadAt, owner } = await buildThread();
     const agent = await server.as(owner);
-    const begin = (text: unknown) => agent.post(`${at}/threads`).send({ cellId: "warmth", version: null, text });
+    const begin = (text: unknown) =>
+      agent.post(`${at}/threads`).send({ cellId: "warmth", version: null, text });
     expect((await begin("   ")).status).toBe(422);
     expect((await begin(7)).status).toBe(422);
     expect((await begin("a null \u0000 in it")).status).toBe(422);
@@ -143,7 +160,9 @@ describe("a thread", () => {
       cells: [buildCell({ id: "long", kind: "prose", text: "é".repeat(9_000) })],
     });
     const { id } = await buildNotebook(server.db, { owner, document });
-    const begun = await (await server.as(owner))
+    const begun = await (
+      await server.as(owner)
+    )
       .post(`/api/notebooks/${id}/threads`)
       .send({ cellId: "long", version: null, text: "Long" });
     expect(begun.body.cell.text).toBe("é".repeat(4_000));
@@ -190,7 +209,9 @@ describe("a comment", () => {
   it("leaves its place when it is deleted, and takes the thread along when nothing else is left", async () => {
     const { at, threadAt, owner, coAuthor, thread } = await buildThread();
     const [agent, theirs] = [await server.as(owner), await server.as(coAuthor)];
-    const reply = threadSchema.parse((await theirs.post(`${threadAt}/comments`).send({ text: "Assumed." })).body);
+    const reply = threadSchema.parse(
+      (await theirs.post(`${threadAt}/comments`).send({ text: "Assumed." })).body,
+    );
     const first = `${threadAt}/comments/${thread.comments[0]!.id}`;
     expect((await agent.delete(first)).status).toBe(204);
     expect((await agent.delete(first)).status).toBe(404);
@@ -229,7 +250,10 @@ describe("a mention", () => {
     expect(comment.mentions.map(({ id }) => id).sort()).toEqual([owner.id, reader.id].sort());
     const theirs = await server.as(reader);
     const told = noticesResponse.parse((await theirs.get("/api/notices")).body);
-    expect(told).toMatchObject({ unread: 1, notices: [{ kind: "mention", by: { id: owner.id }, isRead: false }] });
+    expect(told).toMatchObject({
+      unread: 1,
+      notices: [{ kind: "mention", by: { id: owner.id }, isRead: false }],
+    });
     expect(noticesResponse.parse((await agent.get("/api/notices")).body).notices).toEqual([]);
     const [letter] = await lettersTo(server, reader.email);
     expect(letter!.subject).toBe(`${owner.name} mentions you in “Nirel, a first look”`);
@@ -262,7 +286,9 @@ describe("a mention", () => {
   it("says nothing of strangers: a name nobody here knows is plain text", async () => {
     await buildUser(server.db, { name: "Hidden Stranger" });
     const { threadAt, owner } = await buildThread();
-    const answer = await (await server.as(owner))
+    const answer = await (
+      await server.as(owner)
+    )
       .post(`${threadAt}/comments`)
       .send({ text: "Ask @Hidden Stranger or t@carrow.example" });
     expect(answer.status).toBe(201);

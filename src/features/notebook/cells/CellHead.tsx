@@ -4,6 +4,7 @@ import { formatCount } from "../../../lib/format";
 import { Menu, MenuItem, MenuRule } from "../../../ui/Menu";
 import { StateWord } from "../../../ui/StateMark";
 import { TextButton } from "../../../ui/TextButton";
+import { CellThreadMarks, CommentWord } from "../comments/CellThreadMarks";
 import { cellTitle } from "./cellTitle";
 import type { CellCommands } from "./useCellCommands";
 import type { WorstNotes } from "./worstNotes";
@@ -43,8 +44,10 @@ export function CellHead({ cell, titleId, worst, isEditable, commands, onDragSta
           cell.name
         )}
       </h2>
+      <CellThreadMarks cell={cell} />
       <span className="flex-1" />
       {worst && <StateWord state={worst.level}>{formatCount(worst.count, worst.level)}</StateWord>}
+      <CommentWord cell={cell} className="cell-comment" />
       {isEditable && (
         <Menu
           align="end"

@@ -1,4 +1,5 @@
 import Markdown, { type Components, type Options } from "react-markdown";
+import { remarkMentions } from "./remarkMentions";
 
 /** Headings of prose stand under the title of the notebook; pictures are not kept with a notebook, so their words stand. */
 const parts: Components = {
@@ -17,12 +18,15 @@ const parts: Components = {
 export interface MarkdownProseProps {
   text: string;
   plugins?: Pick<Options, "remarkPlugins" | "rehypePlugins">;
+  /** Names that are set apart where they stand after an @. */
+  mentions?: readonly string[];
 }
 
 /** Markdown as it reads. No HTML of the writer's goes through. */
-export default function MarkdownProse({ text, plugins }: MarkdownProseProps) {
+export default function MarkdownProse({ text, plugins, mentions = [] }: MarkdownProseProps) {
+  const remarkPlugins = [...(plugins?.remarkPlugins ?? []), remarkMentions(mentions)];
   return (
-    <Markdown components={parts} {...plugins}>
+    <Markdown components={parts} {...plugins} remarkPlugins={remarkPlugins}>
       {text}
     </Markdown>
   );

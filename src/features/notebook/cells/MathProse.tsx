@@ -12,6 +12,6 @@ const plugins: MarkdownProseProps["plugins"] = {
 };
 
 /** Markdown with TeX mathematics; fetched only when a cell has a dollar sign. */
-export default function MathProse({ text }: { text: string }) {
-  return <MarkdownProse text={text} plugins={plugins} />;
+export default function MathProse({ text, mentions }: Omit<MarkdownProseProps, "plugins">) {
+  return <MarkdownProse text={text} plugins={plugins} mentions={mentions} />;
 }

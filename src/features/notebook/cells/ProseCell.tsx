@@ -5,6 +5,7 @@ import { useCallback, useMemo, useState } from "react";
 import type { Cell } from "../../../../shared/notebook/document";
 import { pageNonce } from "../../../lib/pageNonce";
 import { TextButton } from "../../../ui/TextButton";
+import { CellThreadMarks, CommentWord } from "../comments/CellThreadMarks";
 import { MoveHandle } from "./CellHead";
 import { ProseText } from "./ProseText";
 import { cellElement, type CellCommands } from "./useCellCommands";
@@ -101,14 +102,18 @@ export function ProseCell({ cell, isEditable, isNew, commands, onDragStart }: Pr
           <ProseText text={cell.text} />
         )}
       </div>
-      {isEditable && (
-        <span className="prose-acts" data-print="never">
-          <TextButton data-write onClick={write}>
-            write
-          </TextButton>
-          <TextButton onClick={() => commands.remove(id)}>remove</TextButton>
-        </span>
-      )}
+      <CellThreadMarks cell={cell} />
+      <span className="prose-acts" data-print="never">
+        <CommentWord cell={cell} />
+        {isEditable && (
+          <>
+            <TextButton data-write onClick={write}>
+              write
+            </TextButton>
+            <TextButton onClick={() => commands.remove(id)}>remove</TextButton>
+          </>
+        )}
+      </span>
     </div>
   );
 }

@@ -1,4 +1,4 @@
-import { useDeferredValue } from "react";
+import { use, useDeferredValue } from "react";
 import type { NotebookDocument } from "../../../../shared/notebook/document";
 import type { DocumentEdit } from "../../../../shared/notebook/editDocument";
 import type { UnitSystem } from "../../../lib/format";
@@ -8,7 +8,12 @@ import type { CellCommands } from "../cells/useCellCommands";
 import type { LiveEvaluation } from "../evaluation/useEvaluation";
 import type { TaskStates } from "../evaluation/useLongTasks";
 import type { NotebookNotes } from "../evaluation/useNotebookNotes";
+import { GoneThreads } from "../comments/CellThreads";
+import { CommentsContext } from "../comments/commentsContext";
+import { MarginThreads } from "../comments/MarginThreads";
 import { ExplainDesk } from "../explain/ExplainDesk";
+import { HereSentences } from "../live/HereNow";
+import { LiveContext } from "../live/liveContext";
 import { EmptySheet } from "./EmptySheet";
 import { Headline } from "./Headline";
 import { NotesList } from "./NotesList";
@@ -51,6 +56,9 @@ export function Article({
   // Figures follow a key first; what stands round the sheet comes right after them.
   const evaluated = useDeferredValue(live.evaluated);
   const columnId = useColumnInView(document, evaluated?.cells);
+  const comments = use(CommentsContext);
+  const { moveTo } = use(LiveContext);
+  const hasThreads = comments !== null && (comments.threads.length > 0 || comments.writingOn !== null);
   const { strip, spread } = useDrawnStrip(columnId, evaluated?.cells);
 
   return (
@@ -68,10 +76,12 @@ export function Article({
               <Headline items={evaluated.headline} unitSystem={unitSystem} isLate={late.size > 0} />
             )}
           </SheetHead>
-          <aside className="margin" aria-label="Margin">
+          <aside className="margin" aria-label="Margin" data-threads={hasThreads || undefined}>
+            <HereSentences cells={document.cells} />
             <NotesList notes={notes.listed} />
+            <MarginThreads cells={document.cells} />
           </aside>
-          <div className="sheet-body">
+          <div className="sheet-body" onFocus={(event) => moveTo(cellIdAround(event.target))}>
             {failure && (
               <Message state="fault" live="assertive">
                 The notebook could not be computed: {failure} What is written is safe; change it, or load the
@@ -90,10 +100,16 @@ export function Article({
               newCellId={newCellId}
               commands={commands}
             />
+            <GoneThreads />
             <CautionFooter className="pt-64 pb-64" />
           </div>
         </main>
       </div>
     </ExplainDesk>
   );
+}
+
+/** The cell that holds an element. */
+function cellIdAround(element: Element): string | null {
+  return element.closest(".cell")?.id.replace(/^cell-/, "") ?? null;
 }

@@ -8,6 +8,8 @@ interface NotebookBarProps {
   title: string;
   /** Who may see it, in words; or which version this is. */
   about: React.ReactNode;
+  /** Who else has it open. */
+  others?: React.ReactNode;
   status: React.ReactNode;
   unitSystem: UnitSystem;
   onUnitSystem: (system: UnitSystem) => void;
@@ -21,7 +23,15 @@ const unitOptions: readonly { value: NotebookDocument["unitSystem"]; label: stri
 ];
 
 /** The bar of a notebook: which it is, who sees it, whether it is saved, and what can be done with it as a whole. */
-export function NotebookBar({ title, about, status, unitSystem, onUnitSystem, acts }: NotebookBarProps) {
+export function NotebookBar({
+  title,
+  about,
+  others,
+  status,
+  unitSystem,
+  onUnitSystem,
+  acts,
+}: NotebookBarProps) {
   return (
     <header className="notebook-bar" data-print="never">
       <Link to="/notebooks" className="flex-none" aria-label="All notebooks">
@@ -30,6 +40,7 @@ export function NotebookBar({ title, about, status, unitSystem, onUnitSystem, ac
       <span className="notebook-bar-title">{title}</span>
       <span className="notebook-bar-about">{about}</span>
       <span className="notebook-bar-space" />
+      {others}
       {status}
       <TwoWay
         className="notebook-bar-units"

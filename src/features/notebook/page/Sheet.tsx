@@ -8,6 +8,7 @@ import { cellTitle } from "../cells/cellTitle";
 import { CellView } from "../cells/CellView";
 import { columnCoronae } from "../cells/columnCoronae";
 import { drawnColumn } from "../cells/drawnColumn";
+import { CellThreads } from "../comments/CellThreads";
 import { InsertCell } from "../cells/InsertCell";
 import { useNotebookNames } from "../cells/notebookNames";
 import { useCellDrag } from "../cells/useCellDrag";
@@ -80,6 +81,7 @@ export function Sheet({
               commands={commands}
               onDragStart={handleDragStart}
             />
+            <CellThreads cell={cell} />
             {isEditable && (
               <InsertCell
                 index={index + 1}

@@ -6,6 +6,7 @@ import type { VersionResponse } from "../../../../shared/schemas/versions";
 import { formatTime, formatDay, type UnitSystem } from "../../../lib/format";
 import { Message } from "../../../ui/Message";
 import { ProblemPage } from "../../../ui/ProblemPage";
+import { CommentsDesk } from "../comments/CommentsDesk";
 import { readingCommands } from "../cells/readingCommands";
 import { useEvaluation } from "../evaluation/useEvaluation";
 import { useNotebookNotes } from "../evaluation/useNotebookNotes";
@@ -77,34 +78,36 @@ function VersionDesk({ notebook, version }: { notebook: NotebookResponse; versio
           </>
         }
       />
-      <Article
-        document={document}
-        live={live}
-        tasks={null}
-        notes={notes}
-        unitSystem={unitSystem}
-        kicker={[
-          `Version ${version.number}`,
-          `engine ${version.engine}`,
-          `hash ${version.contentHash.slice(0, 12)}`,
-        ]}
-        edit={null}
-        newCellId={null}
-        commands={readingCommands}
-      >
-        <div className="version-message">
-          <p>{version.message}</p>
-          <p className="version-hash" title="SHA-256 of title, cells and engine">
-            {version.contentHash}
-          </p>
-        </div>
-        {isOtherEngine && (
-          <Message state="remark" className="mt-18">
-            Numbers and tables stand as engine {version.engine} gave them; figures are drawn by engine{" "}
-            {computed.evaluated?.engine}.
-          </Message>
-        )}
-      </Article>
+      <CommentsDesk notebook={notebook} version={version.number} cells={document.cells}>
+        <Article
+          document={document}
+          live={live}
+          tasks={null}
+          notes={notes}
+          unitSystem={unitSystem}
+          kicker={[
+            `Version ${version.number}`,
+            `engine ${version.engine}`,
+            `hash ${version.contentHash.slice(0, 12)}`,
+          ]}
+          edit={null}
+          newCellId={null}
+          commands={readingCommands}
+        >
+          <div className="version-message">
+            <p>{version.message}</p>
+            <p className="version-hash" title="SHA-256 of title, cells and engine">
+              {version.contentHash}
+            </p>
+          </div>
+          {isOtherEngine && (
+            <Message state="remark" className="mt-18">
+              Numbers and tables stand as engine {version.engine} gave them; figures are drawn by engine{" "}
+              {computed.evaluated?.engine}.
+            </Message>
+          )}
+        </Article>
+      </CommentsDesk>
     </div>
   );
 }
