@@ -1,4 +1,5 @@
 import type { GroupRole, ShareRole } from "../../shared/schemas/roles";
+import { ilmaraThreads, type DemoThread } from "./demoThreads";
 
 /** The people of the demonstration, by the part of their address before the @. */
 export type DemoPerson = "j.aldaker" | "t.orevale" | "w.castellane" | "p.marrash" | "i.brandvold";
@@ -22,6 +23,8 @@ export interface DemoNotebook {
   shares: [DemoPerson, ShareRole][];
   /** Oldest first. */
   versions: DemoVersion[];
+  /** On its draft. */
+  threads?: readonly DemoThread[];
 }
 
 /** Founded by its lead, who is not in the list of members. */
@@ -75,6 +78,7 @@ export const demoNotebooks: readonly DemoNotebook[] = [
       },
       { message: "Both occultations; cooler by 32 K", by: "t.orevale", daysAgo: 3, differences: [] },
     ],
+    threads: ilmaraThreads,
   },
   {
     // Not kept as a version: its sweeps and its spread would have to be computed before the first start.

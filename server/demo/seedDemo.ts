@@ -5,11 +5,15 @@ import type { NotebookDocument } from "../../shared/notebook/document";
 import { readNotebookFile } from "../../shared/notebook/notebookFile";
 import type { KeptResult } from "../../shared/schemas/results";
 import { demoAccounts } from "../auth/demoAccounts";
+import { mentionedIn } from "../../shared/schemas/mentions";
 import { addMember } from "../commands/addMember";
+import { beginThread } from "../commands/beginThread";
 import { createAccount } from "../commands/createAccount";
 import { createGroup } from "../commands/createGroup";
 import { createNotebook } from "../commands/createNotebook";
 import { keepVersion } from "../commands/keepVersion";
+import { replyInThread } from "../commands/replyInThread";
+import { resolveThread } from "../commands/resolveThread";
 import { saveDraft } from "../commands/saveDraft";
 import { sendInvitation } from "../commands/sendInvitation";
 import { shareWithGroup } from "../commands/shareWithGroup";
@@ -20,6 +24,7 @@ import type { Evaluator } from "../jobs/evaluator";
 import { newInvitationToken } from "../mail/invitationToken";
 import { groupInvitation } from "../mail/templates/groupInvitation";
 import { places } from "../places";
+import type { DemoThread } from "./demoThreads";
 import { demoGroup, demoInvitation, demoNotebooks, type DemoNotebook, type DemoPerson } from "./demoNotebooks";
 
 const day = 86_400_000;
@@ -48,7 +53,9 @@ export async function seedDemo(
   );
   await db.transaction(async (tx) => {
     const { groupId, idOf } = await seedPeople(tx, now);
-    for (const { notebook, states } of histories) await seedNotebook(tx, { notebook, states, groupId, idOf });
+    for (const { notebook, states } of histories) {
+      await seedNotebook(tx, { notebook, states, groupId, idOf, now });
+    }
     await seedInvitation(tx, { groupId, actorId: idOf(demoGroup.lead), now, linkOrigin });
   });
   return true;
@@ -109,9 +116,10 @@ async function seedNotebook(
     states: PreparedState[];
     groupId: string;
     idOf: (person: DemoPerson) => string;
+    now: Date;
   },
 ): Promise<void> {
-  const { notebook, states, groupId, idOf } = parts;
+  const { notebook, states, groupId, idOf, now } = parts;
   const [first] = states;
   const { document, at } = first!;
   const { id: notebookId } = await createNotebook(tx, { ownerId: idOf(notebook.owner), groupId, document, at });
@@ -126,7 +134,51 @@ async function seedNotebook(
   for (const [person, role] of notebook.shares) {
     await shareWithPerson(tx, { ...share, user: { id: idOf(person), name: nameOf(person) }, role });
   }
+  for (const thread of notebook.threads ?? []) {
+    await seedThread(tx, { thread, notebookId, document: states.at(-1)!.document, idOf, now });
+  }
 }
+
+/** A thread as its writers would have written it, with notices and without letters. */
+async function seedThread(
+  tx: Db,
+  parts: {
+    thread: DemoThread;
+    notebookId: string;
+    document: NotebookDocument;
+    idOf: (person: DemoPerson) => string;
+    now: Date;
+  },
+): Promise<void> {
+  const { thread, notebookId, document, idOf, now } = parts;
+  const cell = document.cells.find(({ name }) => name === thread.cell);
+  if (!cell) throw new Error(`No cell of the demonstration is called ${thread.cell}`);
+  const people = demoPeople(idOf);
+  const threadId = crypto.randomUUID();
+  const before = new Set<string>();
+  let last = now;
+  for (const [index, { by, hoursAgo, text }] of thread.comments.entries()) {
+    const actorId = idOf(by);
+    last = new Date(now.getTime() - (hoursAgo * day) / 24);
+    const mentions = mentionedIn(text, people);
+    const told = [
+      ...mentions.map(({ id }) => ({ userId: id, kind: "mention" as const, letter: null })),
+      ...people
+        .filter(({ id }) => before.has(id) && !mentions.some((one) => one.id === id))
+        .map(({ id }) => ({ userId: id, kind: "reply" as const, letter: null })),
+    ].filter(({ userId }) => userId !== actorId);
+    const comment = { threadId, notebookId, text, mentions, told, actorId, at: last };
+    if (index === 0) await beginThread(tx, { ...comment, version: null, cell });
+    else await replyInThread(tx, comment);
+    before.add(actorId);
+  }
+  if (thread.resolvedBy === undefined) return;
+  const actorId = idOf(thread.resolvedBy);
+  await resolveThread(tx, { notebookId, threadId, isResolved: true, actorId, at: last });
+}
+
+const demoPeople = (idOf: (person: DemoPerson) => string) =>
+  demoAccounts.map(({ email, name }) => ({ id: idOf(email.split("@")[0] as DemoPerson), name }));
 
 const nameOf = (person: DemoPerson): string =>
   demoAccounts.find(({ email }) => email.startsWith(`${person}@`))!.name;

@@ -3,6 +3,7 @@ import { Suspense } from "react";
 import { Link, Outlet } from "react-router-dom";
 import { AccountMenu, AccountMenuLines } from "../features/account/AccountMenu";
 import { groupsQuery } from "../features/group/groupQueries";
+import { NoticesLine, NoticesWord } from "../features/notices/NoticesWord";
 import { useAccount } from "../lib/session";
 import { MenuLink } from "../ui/Menu";
 import { Opening } from "../ui/Opening";
@@ -29,7 +30,10 @@ export function HouseLayout() {
       places={places}
       person={
         account ? (
-          <AccountMenu account={account} groups={groups} />
+          <div className="flex min-w-0 items-baseline gap-26">
+            <NoticesWord />
+            <AccountMenu account={account} groups={groups} />
+          </div>
         ) : (
           <Link to="/notebooks" className="type-meta no-underline hover:underline">
             Sign in
@@ -37,7 +41,14 @@ export function HouseLayout() {
         )
       }
       personMenu={
-        account ? <AccountMenuLines account={account} /> : <MenuLink to="/notebooks">Sign in</MenuLink>
+        account ? (
+          <>
+            <NoticesLine />
+            <AccountMenuLines account={account} />
+          </>
+        ) : (
+          <MenuLink to="/notebooks">Sign in</MenuLink>
+        )
       }
     >
       <PageErrorBoundary framed>

@@ -17,6 +17,7 @@ const KeptMailRoute = lazy(() => import("./KeptMailRoute"));
 const NotebookPage = lazy(() =>
   import("../features/notebook/NotebookPage").then((file) => ({ default: file.NotebookPage })),
 );
+const NoticesRoute = lazy(() => import("./NoticesRoute"));
 const NotebooksRoute = lazy(() => import("./NotebooksRoute"));
 
 /**
@@ -44,6 +45,7 @@ export function Pages() {
             <Route path="/notebooks" element={<NotebooksRoute />} />
             <Route path="/groups" element={<GroupsRoute />} />
             <Route path="/groups/:groupId" element={<GroupRoute />} />
+            <Route path="/notices" element={<NoticesRoute />} />
             <Route path="/account" element={<AccountRoute />} />
             <Route path="*" element={<NotFoundPage />} />
           </Route>

@@ -1,0 +1,1 @@
+export { NoticesPage as default } from "../features/notices/NoticesPage";
