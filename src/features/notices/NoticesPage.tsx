@@ -44,7 +44,7 @@ export function NoticesPage() {
         )}
       </div>
       <p className="pt-8 text-ink2 italic" role="status">
-        {unread === 0 ? "Nothing new." : `${formatCount(unread, "notice")} to read.`}
+        {unread === 0 ? "Nothing new." : `To read: ${formatCount(unread, "notice")}.`}
       </p>
       {read.isError && (
         <Message state="fault" live="assertive" className="mt-18">

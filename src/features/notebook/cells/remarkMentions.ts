@@ -17,7 +17,9 @@ export function remarkMentions(names: readonly string[]) {
 }
 
 function markMentions(node: TreeNode, names: readonly string[]): void {
-  node.children = node.children?.flatMap((child): TreeNode[] => {
+  // A leaf must stay without the property: what sets the tree takes its mere presence for children.
+  if (node.children === undefined) return;
+  node.children = node.children.flatMap((child): TreeNode[] => {
     if (child.type === "text" && child.value !== undefined) return pieces(child.value, names);
     markMentions(child, names);
     return [child];

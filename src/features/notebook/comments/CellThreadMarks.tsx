@@ -51,7 +51,7 @@ function markWords({ thread, key }: KeyedThread, cell: Cell): string {
   const facts = [
     `Thread ${key} on ${cellTitle(cell)}`,
     formatCount(thread.comments.length, "comment"),
-    ...(unread > 0 ? [formatCount(unread, "new one", "new")] : []),
+    ...(unread > 0 ? [formatCount(unread, "new", "new")] : []),
     ...(thread.resolved ? ["resolved"] : []),
   ];
   return facts.join(", ");

@@ -123,7 +123,9 @@ function createPlace() {
     const { notebookId, connectionId } = connection;
     told = cellId;
     // What gets lost on the way is made good by the next step.
-    api.put(`/notebooks/${notebookId}/presence`, { connectionId, cellId }, z.unknown()).catch(() => undefined);
+    api
+      .put(`/notebooks/${notebookId}/presence`, { connectionId, cellId }, z.unknown())
+      .catch(() => undefined);
   };
 
   return {
