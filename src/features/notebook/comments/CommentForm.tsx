@@ -1,4 +1,4 @@
-import { useId, useRef, useState } from "react";
+import { useEffect, useId, useRef, useState } from "react";
 import { commentLimits } from "../../../../shared/schemas/comments";
 import type { Person } from "../../../../shared/schemas/people";
 import { failureSentence } from "../../../lib/ApiError";
@@ -28,6 +28,12 @@ export function CommentForm({ label, verb, initial = "", readers, onSend, onDone
   const field = useRef<HTMLTextAreaElement>(null);
   const id = useId();
   const tooLong = text.trim().length - commentLimits.length;
+
+  useEffect(function beginWriting() {
+    // In the margin the form is first put in its place; focused before, it would pull the page to where it is not.
+    const frame = requestAnimationFrame(() => field.current?.focus());
+    return () => cancelAnimationFrame(frame);
+  }, []);
 
   const lookForName = (target: HTMLTextAreaElement) => {
     const isPoint = target.selectionStart === target.selectionEnd;
@@ -96,7 +102,6 @@ export function CommentForm({ label, verb, initial = "", readers, onSend, onDone
         placeholder="Markdown, formulas between dollar signs, @ and a name"
         rows={3}
         value={text}
-        autoFocus
         onChange={(event) => {
           setText(event.target.value);
           setFault(null);

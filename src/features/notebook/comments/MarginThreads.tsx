@@ -65,7 +65,7 @@ function ThreadStack({ comments, cells }: { comments: Comments; cells: readonly 
           key={id}
           className="margin-thread"
           data-margin-item={id}
-          style={{ top: placed.tops.get(id) ?? 0, visibility: placed.tops.has(id) ? undefined : "hidden" }}
+          style={{ top: placed.tops.get(id) ?? 0 }}
         >
           {keyed ? (
             <ThreadIn keyed={keyed} comments={comments} />
