@@ -87,7 +87,7 @@ it("Two people in one notebook see each other, each other's saves and comments, 
   });
   await tamsin.page.request.delete(`${server.origin}/api/notebooks/${id}/shares/${wiremuId}`, { headers });
   await wiremu.page
-    .getByText("There is no such notebook, or you may not see it.")
+    .getByText("There is no page at this address, or it isn’t open to you.")
     .waitFor({ timeout: atOnce });
   await tamsin.page.getByText("Wiremu Castellane has this notebook open").waitFor({ state: "detached" });
   expect([...tamsin.complaints, ...wiremu.complaints]).toEqual([]);

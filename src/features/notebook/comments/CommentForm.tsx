@@ -37,7 +37,11 @@ export function CommentForm({ label, verb, initial = "", readers, onSend, onDone
 
   const lookForName = (target: HTMLTextAreaElement) => {
     const isPoint = target.selectionStart === target.selectionEnd;
-    setCompletion(isPoint ? completionAt(target.value, target.selectionStart, readers) : null);
+    const found = isPoint ? completionAt(target.value, target.selectionStart, readers) : null;
+    // The caret is also looked at where it has not moved: what was chosen by key stays chosen.
+    setCompletion((before) =>
+      before && found?.from === before.from && found.to === before.to ? before : found,
+    );
   };
 
   const take = (person: Person) => {

@@ -34,6 +34,7 @@ function ThreadStack({ comments, cells }: { comments: Comments; cells: readonly 
   const { threads, writingOn } = comments;
   const stack = useRef<HTMLDivElement>(null);
   const [activeId, setActiveId] = useState<string | null>(null);
+  const isPressed = useRef(false);
   const isFirst = new Map(cells.map(({ id }, index) => [id, index]));
   const newCell = cells.find(({ id }) => id === writingOn) ?? null;
   const entries = threads.map((keyed) => ({ id: keyed.thread.id, keyed, cellId: keyed.cell?.id ?? null }));
@@ -55,9 +56,13 @@ function ThreadStack({ comments, cells }: { comments: Comments; cells: readonly 
       ref={stack}
       className="margin-threads"
       style={{ height: placed.height }}
-      onFocus={(event) => {
-        const item = (event.target as HTMLElement).closest<HTMLElement>("[data-margin-item]");
-        setActiveId(item?.dataset.marginItem ?? null);
+      // A press ends where it began only if nothing moves meanwhile, so that one counts when it is over.
+      onPointerDown={() => (isPressed.current = true)}
+      onKeyDown={() => (isPressed.current = false)}
+      onFocus={({ target }) => !isPressed.current && setActiveId(itemAround(target))}
+      onClick={({ target }) => {
+        isPressed.current = false;
+        setActiveId(itemAround(target as Element));
       }}
     >
       {order.map(({ id, keyed }) => (
@@ -77,6 +82,9 @@ function ThreadStack({ comments, cells }: { comments: Comments; cells: readonly 
     </div>
   );
 }
+
+const itemAround = (element: Element): string | null =>
+  element.closest<HTMLElement>("[data-margin-item]")?.dataset.marginItem ?? null;
 
 /** Follows the heights of threads and the places of cells. */
 function usePlaced(

@@ -1,5 +1,5 @@
 import { fireEvent, screen, waitFor, within } from "@testing-library/react";
-import { afterEach, describe, expect, it, vi } from "vitest";
+import { afterEach, beforeAll, describe, expect, it, vi } from "vitest";
 import type { Thread } from "../../../../../shared/schemas/comments";
 import type { NotebookResponse } from "../../../../../shared/schemas/notebooks";
 import { servedNotebookActions } from "../../../../../shared/schemas/roles";
@@ -11,6 +11,10 @@ import { renderPage } from "../../../renderPage";
 import { aNotebook } from "../aNotebook";
 import { aComment, aThread, tamsin, wiremu } from "./aThread";
 
+beforeAll(() => {
+  // jsdom lays nothing out, so there is nowhere to scroll to.
+  Element.prototype.scrollIntoView = () => {};
+});
 afterEach(() => vi.unstubAllGlobals());
 
 const { cells } = aNotebook();

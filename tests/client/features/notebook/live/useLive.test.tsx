@@ -89,9 +89,7 @@ describe("a live notebook", () => {
         { person: wiremu, cellId: "air" },
       ],
     });
-    expect(margin()).toBe(
-      "Wiremu Castellane has this notebook open, at column dayside.",
-    );
+    expect(margin()).toBe("Wiremu Castellane has this notebook open, at column dayside.");
     source.tell({ type: "presence", people: [] });
     expect(margin()).toBe("");
   });
