@@ -10,7 +10,7 @@ let server: TestServer;
 let origin: string;
 let stop: () => Promise<void>;
 beforeAll(async () => {
-  server = await startTestServer({ heartbeat: 200 });
+  server = await startTestServer();
   ({ origin, close: stop } = await listen(server));
 });
 afterAll(async () => {
@@ -112,14 +112,19 @@ describe("the events of a notebook", () => {
   });
 
   it("end when the session is over, at the next sign of life", async () => {
+    // Of its own, with quick signs of life: elsewhere a stream must end by the change itself.
+    const quick = await startTestServer({ db: server.db, heartbeat: 200 });
+    const listening = await listen(quick);
     const { owner, id } = await buildPair();
-    const cookie = await server.cookieOf(owner);
-    const stream = await openStream({ ...server, cookieOf: async () => cookie }, origin, id, owner);
+    const cookie = await quick.cookieOf(owner);
+    const stream = await openStream({ ...quick, cookieOf: async () => cookie }, listening.origin, id, owner);
     await stream.next(opened);
-    const session = await server.auth.readSession(cookie);
-    await server.auth.closeSession(session!.sessionId);
+    const session = await quick.auth.readSession(cookie);
+    await quick.auth.closeSession(session!.sessionId);
     await stream.next(isClosed);
     await stream.ended;
+    await listening.close();
+    await quick.close();
   });
 });
 
